@@ -1,0 +1,2 @@
+// Stands in for `server-only` in tests: outside a bundler that package throws on import.
+export {}
