@@ -1,0 +1,26 @@
+import { sql } from 'drizzle-orm'
+import { bigserial, check, index, pgTable, text } from 'drizzle-orm/pg-core'
+import { instant } from './columns'
+import { phones } from './household'
+import { staff } from './staff'
+import { texts } from './text'
+
+/** Each yes and no a phone gave, append-only; `phones.consent` is the last of them. */
+export const consents = pgTable(
+  'consents',
+  {
+    n: bigserial('n', { mode: 'number' }).primaryKey(),
+    phoneId: text('phone_id')
+      .notNull()
+      .references(() => phones.id),
+    consent: text('consent').$type<'given' | 'withdrawn'>().notNull(),
+    how: text('how').notNull(),
+    textId: text('text_id').references(() => texts.id),
+    staffId: text('staff_id').references(() => staff.id),
+    at: instant('at').notNull(),
+  },
+  (t) => [
+    index('consents_phone').on(t.phoneId),
+    check('consents_known', sql`${t.consent} in ('given', 'withdrawn')`),
+  ],
+)
