@@ -1,0 +1,47 @@
+import Link from 'next/link'
+import { HeadWords, type Word } from './head-words'
+import { SignOut } from './sign-out'
+
+type HeadProps = {
+  /** The pages this person may open, in order. */
+  words: readonly Word[]
+  person: { name: string; languages: readonly string[] } | null
+  /** Where the wordmark leads. */
+  home?: string
+}
+
+/** The head of every staff page: wordmark with the fall line below it, words, person. */
+export function Head({ words, person, home = '/' }: HeadProps) {
+  return (
+    <header className="border-rule relative border-b print:hidden">
+      <a
+        href="#sheet"
+        className="left-lead bg-sheet text-ink absolute top-2 z-10 -translate-y-20 px-4 py-3 focus:translate-y-0"
+      >
+        Skip to the sheet
+      </a>
+      <div className="pr-edge flex flex-wrap items-baseline gap-x-8 pt-4 pl-[calc(var(--fall-x)-0.75rem)] md:flex-nowrap md:pt-5">
+        <Link
+          href={home}
+          className="font-title -my-1 py-1 text-xl font-semibold tracking-[-0.01em] no-underline"
+        >
+          Rillpost
+        </Link>
+        <HeadWords words={words} />
+        {person && (
+          <div className="text-faint ml-auto flex items-baseline gap-4 text-right text-sm md:text-base">
+            <span className="max-md:hidden">
+              {[person.name, person.languages.join(', ')].filter(Boolean).join(' · ')}
+            </span>
+            <span className="md:hidden">{person.name}</span>
+            <SignOut />
+          </div>
+        )}
+      </div>
+      <span
+        aria-hidden
+        className="left-fall bg-water absolute -bottom-px -ml-px h-[calc(100%-3.1rem)] w-0.5 md:h-4"
+      />
+    </header>
+  )
+}

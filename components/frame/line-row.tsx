@@ -1,0 +1,61 @@
+import type { ReactNode } from 'react'
+import { Bead, type BeadState } from '../ui/bead'
+import { FallDashes } from './fall-line'
+
+type LineRowProps = {
+  /** How long, or when: set in mono left of the line; on a phone above the content. */
+  time: ReactNode
+  /** A second, lighter line under the time. */
+  since?: ReactNode
+  bead: BeadState
+  tone?: 'water' | 'clay'
+  beadLabel?: string
+  /** Someone is waited for: the line is broken below the bead. */
+  waiting?: boolean
+  /** A hairline above it: for every row of a list but the first. */
+  ruled?: boolean
+  className?: string
+  children: ReactNode
+}
+
+/** One thing hung on the fall line: its time at the left, its bead on the line, the rest right. */
+export function LineRow({ time, since, waiting, ruled, className = '', ...rest }: LineRowProps) {
+  return (
+    <div className={`pl-lead relative py-3.5 ${className}`}>
+      {waiting && <FallDashes />}
+      {ruled && (
+        <span aria-hidden className="left-lead border-rule absolute top-0 right-0 border-t" />
+      )}
+      <Bead
+        state={rest.bead}
+        tone={rest.tone}
+        label={rest.beadLabel}
+        className="left-fall absolute top-[1.15rem] -ml-2"
+      />
+      <p className="font-mono text-sm font-medium md:absolute md:left-0 md:w-[calc(var(--fall-x)-1.75rem)] md:pt-0.5 md:pl-1 md:text-right">
+        {time}
+        {since && (
+          <span className="text-faint font-sans text-xs font-normal max-md:ml-2 md:block">
+            {since}
+          </span>
+        )}
+      </p>
+      {rest.children}
+    </div>
+  )
+}
+
+type BandProps = { name: string; note?: ReactNode; id?: string; children: ReactNode }
+
+/** A stretch of the line under one name, with its count. */
+export function Band({ name, note, id, children }: BandProps) {
+  return (
+    <section aria-label={name} id={id} className="mt-7 first:mt-6">
+      <h2 className="pl-lead font-title flex items-baseline gap-3 text-lg font-semibold">
+        {name}
+        {note && <span className="text-faint font-sans text-sm font-normal">{note}</span>}
+      </h2>
+      {children}
+    </section>
+  )
+}
