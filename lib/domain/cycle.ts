@@ -1,0 +1,80 @@
+import { addDays, addMonths } from './day'
+
+/** How the household's raw water looks, as the trainer or the household told. */
+export type SourceClass = 'clear' | 'cloudy' | 'very cloudy'
+
+export type WashSettings = {
+  /** Days between washes in the dry season. */
+  days: Record<SourceClass, number>
+  /** What is left of that interval in a wet month, when rivers run brown. */
+  wetShare: number
+  /** Washing oftener than this wears the fibre and the family. */
+  floorDays: number
+}
+
+/** Common practice, no source. */
+export const washDefaults: WashSettings = {
+  days: { clear: 30, cloudy: 14, 'very cloudy': 7 },
+  wetShare: 0.7,
+  floorDays: 5,
+}
+
+/**
+ * The day of the `count`-th change of a stage: its anchor plus `months * count`, the end of the
+ * month clamped. Counted from the fitting, never from the last due date, so that a stage fitted
+ * on the 31st does not drift to the 28th: `{ fittedOn: '2025-01-31', months: 1, count: 2 }` is
+ * 2025-03-31.
+ */
+export function nextDue({
+  fittedOn,
+  months,
+  count,
+}: {
+  fittedOn: string
+  months: number
+  count: number
+}): string {
+  return addMonths(fittedOn, months * count)
+}
+
+/** The day a fitting is to be changed. A new fitting starts its own cycle. */
+export function nextChangeOn({
+  fittedOn,
+  changeMonths,
+}: {
+  fittedOn: string
+  changeMonths: number
+}): string {
+  return nextDue({ fittedOn, months: changeMonths, count: 1 })
+}
+
+/**
+ * Days from one wash to the next. `trendDays` is how many days after the last wash the trend sees
+ * the flow fall under the family's need: it can bring the wash forward, never put it off.
+ */
+export function washIntervalDays({
+  sourceClass,
+  wet,
+  trendDays,
+  settings = washDefaults,
+}: {
+  sourceClass: SourceClass
+  wet: boolean
+  trendDays?: number | null
+  settings?: WashSettings
+}): number {
+  const calendarDays = Math.floor(settings.days[sourceClass] * (wet ? settings.wetShare : 1))
+  const neededDays = trendDays == null ? calendarDays : Math.floor(trendDays)
+  return Math.max(settings.floorDays, Math.min(calendarDays, neededDays))
+}
+
+/** The day the next wash is due. */
+export function nextWashOn({
+  lastWashOn,
+  intervalDays,
+}: {
+  lastWashOn: string
+  intervalDays: number
+}): string {
+  return addDays(lastWashOn, intervalDays)
+}

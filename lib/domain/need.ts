@@ -1,0 +1,51 @@
+/** Who drinks from the filter. */
+export type House = {
+  people: number
+  infant: boolean
+  pregnant: boolean
+  elderly: boolean
+  ill: boolean
+}
+
+/** Drinking and food of a grown person, litres a day (WHO, Domestic water quantity, 2nd ed. 2020). */
+export const designLitresPerPersonDay = 5.3
+
+/** Survival intake (Sphere Handbook); no setting may go below it. */
+export const floorLitresPerPersonDay = 3
+
+/**
+ * Litres a day that the filter must give this house. `seasonExtraLitres` is what the hot season
+ * adds, per person and day.
+ */
+export function dailyNeed({
+  people,
+  litresPerPersonDay = designLitresPerPersonDay,
+  seasonExtraLitres = 0,
+}: {
+  people: number
+  litresPerPersonDay?: number
+  seasonExtraLitres?: number
+}): number {
+  const perPerson = Math.max(floorLitresPerPersonDay, litresPerPersonDay)
+  return people * (perPerson + Math.max(0, seasonExtraLitres))
+}
+
+export type Enough = { kind: 'enough' | 'slow' | 'short'; hours: number }
+
+/**
+ * Whether a flow gives the house its day's water: enough within `enoughHours` of running, slow if
+ * it takes all day, short if a day is not long enough. `hours` is Infinity when nothing flows.
+ */
+export function enough({
+  litresPerHour,
+  litresPerDay,
+  enoughHours = 8,
+}: {
+  litresPerHour: number
+  litresPerDay: number
+  enoughHours?: number
+}): Enough {
+  const hours = litresPerHour > 0 ? litresPerDay / litresPerHour : Infinity
+  if (hours <= enoughHours) return { kind: 'enough', hours }
+  return { kind: hours <= 24 ? 'slow' : 'short', hours }
+}

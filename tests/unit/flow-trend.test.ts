@@ -1,0 +1,84 @@
+import { describe, expect, it } from 'vitest'
+import { trend, type Forecast, type Reading } from '@/lib/domain/flow'
+
+const day = 86_400_000
+const start = 1_750_000_000_000
+
+function falling(
+  perDay: number,
+  days: readonly number[],
+  noise: readonly number[] = [],
+): Reading[] {
+  return days.map((at, index) => ({
+    takenAt: start + at * day,
+    normalised: 16 * Math.exp(-perDay * at + (noise[index] ?? 0)),
+  }))
+}
+
+function falls(forecast: Forecast) {
+  if (forecast.kind !== 'falls') throw new Error(`expected a fall, got ${forecast.kind}`)
+  return forecast
+}
+
+describe('the trend of a filter', () => {
+  it('needs three readings at more than one moment, and flowing ones', () => {
+    expect(trend(falling(0.02, [0, 10]), 4)).toEqual({ kind: 'too few' })
+    expect(trend([], 4)).toEqual({ kind: 'too few' })
+    expect(trend(falling(0.02, [5, 5, 5]), 4)).toEqual({ kind: 'too few' })
+    const dry = { takenAt: start + 20 * day, normalised: 0 }
+    expect(trend([...falling(0.02, [0, 10]), dry], 4)).toEqual({ kind: 'too few' })
+  })
+
+  it('finds the day an exponential fall meets the need', () => {
+    const rate = Math.log(4) / 60 // 16 L/h falls to 4 in 60 days
+    const forecast = falls(trend(falling(rate, [0, 10, 20, 30, 40]), 4))
+    expect((forecast.onAt - start) / day).toBeCloseTo(60, 6)
+    expect(forecast.perDay).toBeCloseTo(1 - Math.exp(-rate), 12)
+  })
+
+  it('is not surer than its readings, even when they lie on one line', () => {
+    const forecast = falls(trend(falling(Math.log(4) / 60, [0, 10, 20, 30, 40]), 4))
+    expect(forecast.earliestAt).toBeLessThan(forecast.onAt - 5 * day)
+    expect(forecast.latestAt).toBeGreaterThan(forecast.onAt + 5 * day)
+    const exact = { timeErrorShare: 0, bottleErrorShare: 0 }
+    const naive = falls(trend(falling(Math.log(4) / 60, [0, 10, 20, 30, 40]), 4, exact))
+    expect(naive.latestAt).toBeCloseTo(naive.onAt, -3)
+  })
+
+  it('has no latest day when the fall cannot be told from noise', () => {
+    const noisy = falling(0.01, [0, 3, 6, 9], [0, 0.3, -0.3, 0.1])
+    const forecast = falls(trend(noisy, 4))
+    expect(forecast.latestAt).toBeNull()
+    expect(forecast.earliestAt).toBeLessThan(forecast.onAt)
+  })
+
+  it('holds when the flow rises, or falls so slowly that a year will not matter', () => {
+    expect(trend(falling(-0.01, [0, 10, 20]), 4)).toEqual({ kind: 'holds' })
+    expect(trend(falling(0.0001, [0, 10, 20]), 4)).toEqual({ kind: 'holds' })
+  })
+
+  it('says so when the line is under the need already', () => {
+    const forecast = falls(trend(falling(0.05, [0, 10, 20, 30, 40]), 8))
+    expect((forecast.onAt - start) / day).toBeCloseTo(Math.log(2) / 0.05, 6)
+    const low = falls(trend(falling(-0.001, [0, 10, 20]), 20))
+    expect(low).toEqual({
+      kind: 'falls',
+      onAt: start + 20 * day,
+      earliestAt: start,
+      latestAt: null,
+      perDay: 0,
+    })
+  })
+
+  it('never looks before the first reading', () => {
+    const forecast = falls(trend(falling(0.05, [0, 10, 20, 30, 40]), 30))
+    expect(forecast.onAt).toBe(start)
+    expect(forecast.earliestAt).toBe(start)
+    expect(forecast.latestAt).toBeGreaterThanOrEqual(start)
+  })
+
+  it('does not depend on the order the readings were stored in', () => {
+    const readings = falling(0.02, [0, 10, 20, 30], [0.1, -0.05, 0.02, 0])
+    expect(trend([...readings].reverse(), 4)).toEqual(trend(readings, 4))
+  })
+})

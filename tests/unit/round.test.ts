@@ -1,0 +1,164 @@
+import { describe, expect, it } from 'vitest'
+import {
+  bundle,
+  expiresAt,
+  insideWindow,
+  localDay,
+  localMinute,
+  nextInsideWindow,
+  nudgeAfter,
+  overWeeklyLimit,
+  sendAfter,
+  type Window,
+} from '@/lib/domain/round'
+
+const utc = (text: string) => Date.parse(text)
+const iso = (at: number) => new Date(at).toISOString()
+const hour = 3_600_000
+
+const kathmandu: Window = {
+  timeZone: 'Asia/Kathmandu',
+  opensMinute: 8 * 60,
+  closesMinute: 20 * 60,
+  sundaysOff: true,
+  holidays: ['2025-10-02'],
+}
+
+describe('local time', () => {
+  it('is the wall clock of the zone, not of the machine', () => {
+    const at = utc('2025-06-30T19:00:00Z')
+    expect(localDay(at, 'Asia/Kathmandu')).toBe('2025-07-01')
+    expect(localMinute(at, 'Asia/Kathmandu')).toBe(45)
+    expect(localDay(at, 'America/Lima')).toBe('2025-06-30')
+    expect(localMinute(at, 'America/Lima')).toBe(14 * 60)
+    expect(localMinute(at + 59_999, 'Etc/UTC')).toBe(19 * 60)
+  })
+
+  it('refuses a zone that does not exist', () => {
+    expect(() => localDay(0, 'Mars/Olympus')).toThrow(RangeError)
+  })
+})
+
+describe('the sending window', () => {
+  it.each([
+    ['2025-07-01T02:14:59Z', false],
+    ['2025-07-01T02:15:00Z', true],
+    ['2025-07-01T14:14:59Z', true],
+    ['2025-07-01T14:15:00Z', false],
+    ['2025-07-06T06:00:00Z', false], // a Sunday
+    ['2025-10-02T06:00:00Z', false], // a named holiday
+  ])('at %s: %s', (at, inside) => {
+    expect(insideWindow(utc(at), kathmandu)).toBe(inside)
+  })
+
+  it('opens next where it should', () => {
+    const next = (at: string, window = kathmandu) => iso(nextInsideWindow(utc(at), window))
+    expect(next('2025-07-01T05:00:00Z')).toBe('2025-07-01T05:00:00.000Z')
+    expect(next('2025-07-01T01:00:00Z')).toBe('2025-07-01T02:15:00.000Z')
+    expect(next('2025-07-01T15:00:00Z')).toBe('2025-07-02T02:15:00.000Z')
+    expect(next('2025-07-05T15:00:00Z')).toBe('2025-07-07T02:15:00.000Z')
+    expect(next('2025-10-01T15:00:00Z')).toBe('2025-10-03T02:15:00.000Z')
+    expect(next('2025-07-05T15:00:00Z', { ...kathmandu, sundaysOff: false })).toBe(
+      '2025-07-06T02:15:00.000Z',
+    )
+  })
+
+  it('opens at the change itself when its opening falls into the gap', () => {
+    const window = {
+      ...kathmandu,
+      timeZone: 'America/New_York',
+      sundaysOff: false,
+      opensMinute: 150,
+    }
+    expect(iso(nextInsideWindow(utc('2025-03-09T05:00:00Z'), window))).toBe(
+      '2025-03-09T07:00:00.000Z',
+    )
+  })
+
+  it('opens again when the clocks go back over its opening', () => {
+    const window = {
+      ...kathmandu,
+      timeZone: 'America/New_York',
+      sundaysOff: false,
+      opensMinute: 60,
+      closesMinute: 105,
+    }
+    expect(iso(nextInsideWindow(utc('2025-11-02T05:50:00Z'), window))).toBe(
+      '2025-11-02T06:00:00.000Z',
+    )
+  })
+
+  it('that never opens is a fault, not an endless search', () => {
+    const never = { ...kathmandu, opensMinute: 600, closesMinute: 600 }
+    expect(() => nextInsideWindow(0, never)).toThrow(RangeError)
+  })
+})
+
+describe('a bundle', () => {
+  it('is empty while nothing is due', () => {
+    expect(bundle([{ kind: 'wash', dueOn: '2025-07-02' }], '2025-07-01')).toEqual([])
+    expect(bundle([], '2025-07-01')).toEqual([])
+  })
+
+  it('takes what is due and what falls within four days, the oldest first', () => {
+    const due = [
+      { kind: 'change', dueOn: '2025-07-05', stagePosition: 1 },
+      { kind: 'flow check', dueOn: '2025-07-06' },
+      { kind: 'wash', dueOn: '2025-07-01' },
+      { kind: 'change', dueOn: '2025-06-20', stagePosition: 2 },
+    ] as const
+    expect(bundle(due, '2025-07-01')).toEqual([due[3], due[2], due[0]])
+  })
+})
+
+describe('the manners of prompting', () => {
+  const now = utc('2025-07-08T06:00:00Z')
+  const week = 7 * 24 * hour
+
+  it('stops at two in seven days', () => {
+    expect(overWeeklyLimit({ sentAt: [now - hour], now })).toBe(false)
+    expect(overWeeklyLimit({ sentAt: [now - hour, now - week + 1], now })).toBe(true)
+    expect(overWeeklyLimit({ sentAt: [now - hour, now - week], now })).toBe(false)
+    expect(overWeeklyLimit({ sentAt: [now, now + hour], now })).toBe(false)
+    expect(overWeeklyLimit({ sentAt: [now], now, limit: 1 })).toBe(true)
+  })
+
+  it('drops a prompt after 36 hours', () => {
+    expect(expiresAt(now) - now).toBe(36 * hour)
+  })
+
+  it('nudges after three days, then seven, then no more', () => {
+    expect(nudgeAfter(now, 0)).toBe(now + 72 * hour)
+    expect(nudgeAfter(now, 1)).toBe(now + week)
+    expect(nudgeAfter(now, 2)).toBeNull()
+  })
+})
+
+describe('the spread of a round', () => {
+  const now = utc('2025-07-01T00:00:00Z')
+  const at = (spreadIndex: number, perMinute: number) =>
+    iso(sendAfter({ now, window: kathmandu, spreadIndex, perMinute }))
+
+  it('goes one behind the other at the rate of the sender', () => {
+    expect(at(0, 30)).toBe('2025-07-01T02:15:00.000Z')
+    expect(at(1, 30)).toBe('2025-07-01T02:15:02.000Z')
+    expect(at(60, 30)).toBe('2025-07-01T02:17:00.000Z')
+  })
+
+  it('goes on in the next window when this one is full', () => {
+    expect(at(719, 1)).toBe('2025-07-01T14:14:00.000Z')
+    expect(at(720, 1)).toBe('2025-07-02T02:15:00.000Z')
+    expect(at(720 * 5, 1)).toBe('2025-07-07T02:15:00.000Z') // Sunday the 6th is skipped
+  })
+
+  it('knows a window that is open all day', () => {
+    const window = { ...kathmandu, opensMinute: 0, closesMinute: 1440 }
+    const late = sendAfter({ now, window, spreadIndex: 1440 * 6, perMinute: 1 })
+    // Six days of open window, and the Sunday between them.
+    expect(iso(late)).toBe('2025-07-08T00:00:00.000Z')
+  })
+
+  it('needs a rate', () => {
+    expect(() => at(1, 0)).toThrow(RangeError)
+  })
+})
