@@ -156,6 +156,7 @@ describe('settings that are refused with one line each', () => {
 test('the example file names every setting', () => {
   expect(namesInExample()).toEqual([
     'PORT',
+    'BIND_ADDRESS',
     'PUBLIC_BASE_URL',
     'DATA_DIR',
     'DATABASE_URL',
