@@ -4,7 +4,7 @@
  */
 
 const server =
-  '^(lib/(services|gateways|commands)/|lib/(auth|deps|env|clock|http|log)\\.ts$|db/|jobs/|app/)'
+  '^(lib/(services|gateways|commands)/|lib/(auth|deps|desk|env|clock|http|log)\\.ts$|db/|jobs/|app/)'
 
 /** One row of the table: modules of `from` may import modules of `to`, as types only when asked. */
 function row(from, to, dependencyTypes) {
@@ -74,6 +74,8 @@ const allowed = [
   packages('^lib/deps\\.ts$', ['next', 'server-only']),
   row('^lib/http\\.ts$', '^lib/(schemas|services|domain)/|^lib/(auth|deps)\\.ts$'),
   packages('^lib/http\\.ts$', ['next', 'zod', 'next-auth']),
+  row('^lib/desk\\.ts$', '^lib/domain/|^lib/auth\\.ts$'),
+  packages('^lib/desk\\.ts$', ['next', 'react']),
 
   // Jobs.
   row('^jobs/', '^jobs/|^lib/(services|schemas)/|^lib/(deps|env|clock)\\.ts$'),
@@ -81,7 +83,10 @@ const allowed = [
 
   // Screens.
   row('^components/', '^components/|^lib/(domain|schemas)/'),
-  row('^app/', '^(app|components)/|^lib/(domain|schemas|services)/|^lib/(auth|deps|http)\\.ts$'),
+  row(
+    '^app/',
+    '^(app|components)/|^lib/(domain|schemas|services)/|^lib/(auth|deps|desk|http)\\.ts$',
+  ),
   packages('^(app|components)/', [
     'react',
     'react-dom',

@@ -1,0 +1,23 @@
+import { may, type Act, type Role } from '@/lib/domain/role'
+import type { Word } from './head-words'
+
+const words: readonly (Word & { act: Act })[] = [
+  { name: 'Shift', href: '/shift', also: ['/tickets'], act: 'see the shift' },
+  { name: 'Households', href: '/households', also: ['/areas'], act: 'see households' },
+  { name: 'Wording', href: '/wording', act: 'see wording' },
+  { name: 'Rounds', href: '/rounds', act: 'see rounds' },
+  { name: 'Parts', href: '/depots', act: 'keep stock' },
+]
+
+const visits: Word = { name: 'Visits', href: '/visits' }
+
+/** The words of the head that a role may open, in order. */
+export function wordsFor(role: Role): Word[] {
+  if (role === 'visitor') return [visits]
+  return words.filter(({ act }) => may(role, act)).map(({ act: _act, ...word }) => word)
+}
+
+/** Where a role begins its day. */
+export function homeOf(role: Role): string {
+  return role === 'visitor' ? '/visits' : '/shift'
+}
