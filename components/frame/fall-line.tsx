@@ -3,7 +3,7 @@
  * left edge, so that the line meets the one under the wordmark.
  */
 export function FallLine() {
-  return <span aria-hidden className="left-fall bg-water absolute inset-y-0 -ml-px w-0.5" />
+  return <span aria-hidden className="absolute inset-y-0 left-fall -ml-px w-0.5 bg-water" />
 }
 
 /** Makes the line broken from below a bead to the foot of its parent: a person is waited for. */
@@ -11,7 +11,7 @@ export function FallDashes() {
   return (
     <span
       aria-hidden
-      className="fall-dashed left-fall absolute top-7 -bottom-3.5 -ml-px w-0.5 print:hidden"
+      className="absolute top-7 -bottom-3.5 left-fall -ml-px w-0.5 fall-dashed print:hidden"
     />
   )
 }

@@ -20,7 +20,7 @@ export function HeadWords({ words }: { words: readonly Word[] }) {
   return (
     <nav
       aria-label="Pages"
-      className="max-md:-mr-edge flex gap-x-5.5 max-md:order-last max-md:w-full max-md:[scrollbar-width:none] max-md:overflow-x-auto max-md:pl-[calc(var(--lead-x)-var(--fall-x)+0.75rem)]"
+      className="flex gap-x-5.5 max-md:order-last max-md:-mr-edge max-md:w-full max-md:[scrollbar-width:none] max-md:overflow-x-auto max-md:pl-[calc(var(--lead-x)-var(--fall-x)+0.75rem)]"
     >
       {words.map((word) => {
         const here = [word.href, ...(word.also ?? [])].some((href) => isUnder(pathname, href))
@@ -31,8 +31,8 @@ export function HeadWords({ words }: { words: readonly Word[] }) {
             aria-current={here ? 'page' : undefined}
             className={`-mb-px border-b-2 pt-2.5 pb-2.5 whitespace-nowrap no-underline -outline-offset-3 ${
               here
-                ? 'border-water text-ink font-semibold'
-                : 'text-faint hover:text-ink border-transparent'
+                ? 'border-water font-semibold text-ink'
+                : 'border-transparent text-faint hover:text-ink'
             }`}
           >
             {word.name}

@@ -13,23 +13,23 @@ type HeadProps = {
 /** The head of every staff page: wordmark with the fall line below it, words, person. */
 export function Head({ words, person, home = '/' }: HeadProps) {
   return (
-    <header className="border-rule relative border-b print:hidden">
+    <header className="relative border-b border-rule print:hidden">
       <a
         href="#sheet"
-        className="left-lead bg-sheet text-ink absolute top-2 z-10 -translate-y-20 px-4 py-3 focus:translate-y-0"
+        className="absolute top-2 left-lead z-10 -translate-y-20 bg-sheet px-4 py-3 text-ink focus:translate-y-0"
       >
         Skip to the sheet
       </a>
-      <div className="pr-edge flex flex-wrap items-baseline gap-x-8 pt-4 pl-[calc(var(--fall-x)-0.75rem)] md:flex-nowrap md:pt-5">
+      <div className="flex flex-wrap items-baseline gap-x-8 pt-4 pr-edge pl-[calc(var(--fall-x)-0.75rem)] md:flex-nowrap md:pt-5">
         <Link
           href={home}
-          className="font-title -my-1 py-1 text-xl font-semibold tracking-[-0.01em] no-underline"
+          className="-my-1 py-1 font-title text-xl font-semibold tracking-[-0.01em] no-underline"
         >
           Rillpost
         </Link>
         <HeadWords words={words} />
         {person && (
-          <div className="text-faint ml-auto flex items-baseline gap-4 text-right text-sm md:text-base">
+          <div className="ml-auto flex items-baseline gap-4 text-right text-sm text-faint md:text-base">
             <span className="max-md:hidden">
               {[person.name, person.languages.join(', ')].filter(Boolean).join(' · ')}
             </span>
@@ -40,7 +40,7 @@ export function Head({ words, person, home = '/' }: HeadProps) {
       </div>
       <span
         aria-hidden
-        className="left-fall bg-water absolute -bottom-px -ml-px h-[calc(100%-3.1rem)] w-0.5 md:h-4"
+        className="absolute -bottom-px left-fall -ml-px h-[calc(100%-3.1rem)] w-0.5 bg-water md:h-4"
       />
     </header>
   )

@@ -21,21 +21,21 @@ type LineRowProps = {
 /** One thing hung on the fall line: its time at the left, its bead on the line, the rest right. */
 export function LineRow({ time, since, waiting, ruled, className = '', ...rest }: LineRowProps) {
   return (
-    <div className={`pl-lead relative py-3.5 ${className}`}>
+    <div className={`relative py-3.5 pl-lead ${className}`}>
       {waiting && <FallDashes />}
       {ruled && (
-        <span aria-hidden className="left-lead border-rule absolute top-0 right-0 border-t" />
+        <span aria-hidden className="absolute top-0 right-0 left-lead border-t border-rule" />
       )}
       <Bead
         state={rest.bead}
         tone={rest.tone}
         label={rest.beadLabel}
-        className="left-fall absolute top-[1.15rem] -ml-2"
+        className="absolute top-[1.15rem] left-fall -ml-2"
       />
       <p className="font-mono text-sm font-medium md:absolute md:left-0 md:w-[calc(var(--fall-x)-1.75rem)] md:pt-0.5 md:pl-1 md:text-right">
         {time}
         {since && (
-          <span className="text-faint font-sans text-xs font-normal max-md:ml-2 md:block">
+          <span className="font-sans text-xs font-normal text-faint max-md:ml-2 md:block">
             {since}
           </span>
         )}
@@ -51,9 +51,9 @@ type BandProps = { name: string; note?: ReactNode; id?: string; children: ReactN
 export function Band({ name, note, id, children }: BandProps) {
   return (
     <section aria-label={name} id={id} className="mt-7 first:mt-6">
-      <h2 className="pl-lead font-title flex items-baseline gap-3 text-lg font-semibold">
+      <h2 className="flex items-baseline gap-3 pl-lead font-title text-lg font-semibold">
         {name}
-        {note && <span className="text-faint font-sans text-sm font-normal">{note}</span>}
+        {note && <span className="font-sans text-sm font-normal text-faint">{note}</span>}
       </h2>
       {children}
     </section>

@@ -14,7 +14,7 @@ function SheetTitle({ title, lead }: { title: ReactNode; lead?: ReactNode }) {
   return (
     <div className="pr-edge pl-lead">
       <h1 className="font-title text-2xl font-semibold tracking-[-0.01em] md:text-3xl">{title}</h1>
-      {lead && <p className="max-w-reading text-faint mt-1">{lead}</p>}
+      {lead && <p className="mt-1 max-w-reading text-faint">{lead}</p>}
     </div>
   )
 }
@@ -28,16 +28,16 @@ export function LineSheet({ title, lead, children, margin }: SheetProps) {
     <main
       id="sheet"
       tabIndex={-1}
-      className="lg:pr-edge relative grid max-w-[77.5rem] grid-cols-1 content-start pt-7 pb-16 outline-none lg:grid-cols-[minmax(0,1fr)_19rem]"
+      className="relative grid min-h-[calc(100dvh-4.25rem)] max-w-[77.5rem] grid-cols-1 content-start pt-7 pb-16 outline-none lg:grid-cols-[minmax(0,1fr)_19rem] lg:grid-rows-[auto_1fr] lg:pr-edge"
     >
       <FallLine />
       <SheetTitle title={title} lead={lead} />
       {margin && (
-        <aside className="pr-edge pl-lead mt-5 text-sm lg:col-start-2 lg:row-span-2 lg:row-start-1 lg:mt-0 lg:pr-0 lg:pl-9">
+        <aside className="mt-5 pr-edge pl-lead text-sm lg:col-start-2 lg:row-span-2 lg:row-start-1 lg:mt-0 lg:pr-0 lg:pl-9">
           {margin}
         </aside>
       )}
-      <div className="max-lg:pr-edge min-w-0 lg:row-start-2">{children}</div>
+      <div className="min-w-0 max-lg:pr-edge lg:row-start-2">{children}</div>
     </main>
   )
 }
@@ -46,7 +46,7 @@ export function LineSheet({ title, lead, children, margin }: SheetProps) {
 export function ReadingSheet({ title, lead, children, margin }: SheetProps) {
   return (
     <LineSheet title={title} lead={lead} margin={margin}>
-      <div className="pl-lead mt-6">{children}</div>
+      <div className="mt-6 pl-lead">{children}</div>
     </LineSheet>
   )
 }
@@ -54,10 +54,14 @@ export function ReadingSheet({ title, lead, children, margin }: SheetProps) {
 /** A sheet that takes the whole width, for a matrix or a wide table. */
 export function WideSheet({ title, lead, children }: Omit<SheetProps, 'margin'>) {
   return (
-    <main id="sheet" tabIndex={-1} className="relative max-w-[77.5rem] pt-7 pb-16 outline-none">
+    <main
+      id="sheet"
+      tabIndex={-1}
+      className="relative min-h-[calc(100dvh-4.25rem)] max-w-[77.5rem] pt-7 pb-16 outline-none"
+    >
       <FallLine />
       <SheetTitle title={title} lead={lead} />
-      <div className="pr-edge pl-lead mt-4">{children}</div>
+      <div className="mt-4 pr-edge pl-lead">{children}</div>
     </main>
   )
 }

@@ -7,7 +7,7 @@ export function SignOut() {
     <button
       type="button"
       onClick={() => void signOut({ callbackUrl: '/sign-in' })}
-      className="text-ink decoration-rule hover:decoration-water py-2.5 whitespace-nowrap underline decoration-[1.5px] underline-offset-4"
+      className="py-2.5 whitespace-nowrap text-ink underline decoration-rule decoration-[1.5px] underline-offset-4 hover:decoration-water"
     >
       Sign out
     </button>

@@ -34,7 +34,7 @@ export function Column({ size, stages, level, description, className = '' }: Col
       viewBox={`0 0 ${width} ${height}`}
       fill="none"
       strokeLinejoin="round"
-      className={`stroke-ink shrink-0 ${className}`}
+      className={`shrink-0 stroke-ink ${className}`}
     >
       <Drawing idPrefix={idPrefix} stages={stages} level={level} />
     </svg>

@@ -7,10 +7,10 @@ type ChoiceProps = ComponentProps<'input'> & { label: ReactNode; hint?: ReactNod
 export function Choice({ label, hint, type = 'checkbox', className, ...input }: ChoiceProps) {
   return (
     <label className={`flex min-h-11 items-start gap-3 py-2.5 ${className ?? ''}`}>
-      <input {...input} type={type} className="accent-ink mt-0.5 size-5 shrink-0" />
+      <input {...input} type={type} className="mt-0.5 size-5 shrink-0 accent-ink" />
       <span>
         {label}
-        {hint && <span className="text-faint block text-sm">{hint}</span>}
+        {hint && <span className="block text-sm text-faint">{hint}</span>}
       </span>
     </label>
   )
@@ -28,7 +28,7 @@ export function FieldGroup({ legend, hint, error, children }: FieldGroupProps) {
   return (
     <fieldset>
       <legend className="font-semibold">{legend}</legend>
-      {hint && <p className="text-faint text-sm">{hint}</p>}
+      {hint && <p className="text-sm text-faint">{hint}</p>}
       <div className="mt-1">{children}</div>
       {error && <FieldError>{error}</FieldError>}
     </fieldset>

@@ -33,7 +33,7 @@ function described(ids: Ids, { hint, error }: Around) {
 /** The words of what is wrong, with a mark so that colour is not all that says so. */
 export function FieldError({ id, children }: { id?: string; children: ReactNode }) {
   return (
-    <p id={id} className="border-clay text-clay mt-1.5 border-l-2 pl-2 text-sm font-semibold">
+    <p id={id} className="mt-1.5 border-l-2 border-clay pl-2 text-sm font-semibold text-clay">
       {children}
     </p>
   )
@@ -45,10 +45,10 @@ function Labelled({ ids, around, children }: { ids: Ids; around: Around; childre
     <div>
       <label htmlFor={ids.id} className="block font-semibold">
         {label}
-        {optional && <span className="text-faint font-normal"> (optional)</span>}
+        {optional && <span className="font-normal text-faint"> (optional)</span>}
       </label>
       {hint && (
-        <p id={ids.hintId} className="text-faint text-sm">
+        <p id={ids.hintId} className="text-sm text-faint">
           {hint}
         </p>
       )}
