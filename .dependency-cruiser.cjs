@@ -71,6 +71,7 @@ const allowed = [
     '^lib/deps\\.ts$',
     '^db/(?!seed/)|^lib/(domain|gateways)/|^lib/(env|clock)\\.ts$|^jobs/boss\\.ts$',
   ),
+  row('^lib/deps\\.ts$', '^lib/schemas/', typesOnly),
   packages('^lib/deps\\.ts$', ['next', 'server-only']),
   row('^lib/http\\.ts$', '^lib/(schemas|services|domain)/|^lib/(auth|deps)\\.ts$'),
   packages('^lib/http\\.ts$', ['next', 'zod', 'next-auth']),
@@ -79,6 +80,7 @@ const allowed = [
 
   // Jobs.
   row('^jobs/', '^jobs/|^lib/(services|schemas)/|^lib/(deps|env|clock)\\.ts$'),
+  row('^jobs/boss\\.ts$', '^db/client\\.ts$'),
   packages('^jobs/', ['pg-boss', 'zod', 'pg', '@electric-sql/pglite', 'drizzle-orm']),
 
   // Screens.

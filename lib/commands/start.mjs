@@ -33,8 +33,8 @@ const demoFolder = await ensureDemo({
 const logFolder = privateFolder(path.join(dataFolder, 'logs'))
 
 const programs = childGroup({ logFolder, onDeath: stopForDeath })
-process.on('SIGINT', stopForSignal)
-process.on('SIGTERM', stopForSignal)
+process.on('SIGINT', () => void stopForSignal())
+process.on('SIGTERM', () => void stopForSignal())
 
 startPrograms()
 await waitUntilReady()
@@ -114,6 +114,7 @@ Rillpost is up, with an invented programme.
 Ctrl-C stops it. Logs are in ${path.relative(root, logFolder) || logFolder}.`)
 }
 
+// Asked twice, it does not wait for anything.
 async function stopForSignal() {
   if (stopForSignal.asked) {
     programs.killAll()
