@@ -22,6 +22,8 @@ export type Carrier = {
   underWay: Set<Promise<unknown>>
   /** The phones that FAKE_PHONES_FILE puts on the shelf. */
   shelf(): ShelfPhone[]
+  /** Grows with every change, so that a page can ask cheaply whether to look again. */
+  version: number
   /** Marks the state as changed, for the file it may be kept in. */
   changed(): void
 }

@@ -1,7 +1,12 @@
 import { readSettings } from './settings'
 import { startCarrier } from './start'
 
-const running = await startCarrier(readSettings(process.env))
+const settings = readSettings(process.env)
+const running = await startCarrier(settings).catch((error: NodeJS.ErrnoException) => {
+  if (error.code !== 'EADDRINUSE') throw error
+  console.error(`carrier fake: port ${settings.port} is taken; set FAKE_PORT to another one`)
+  process.exit(1)
+})
 console.log(`carrier fake on ${running.origin}: practice phones at ${running.origin}/`)
 
 let closing = false

@@ -1,7 +1,13 @@
 import { readFileSync, statSync } from 'node:fs'
 
 /** A phone on the shelf, as FAKE_PHONES_FILE lists them. */
-export type ShelfPhone = { number: string; label: string; language: string }
+export type ShelfPhone = {
+  number: string
+  label: string
+  language: string
+  /** Zone the phone shows its times in; the machine's own when empty. */
+  timeZone: string
+}
 
 /** Reads the shelf again whenever its file changed; a missing or half-written file leaves the last one standing. */
 export function createShelf(file: string): () => ShelfPhone[] {
@@ -27,7 +33,14 @@ function readPhones(file: string): ShelfPhone[] | null {
     if (!Array.isArray(parsed)) return null
     return parsed.flatMap((one: Partial<ShelfPhone> | null) =>
       typeof one?.number === 'string'
-        ? [{ number: one.number, label: one.label ?? one.number, language: one.language ?? '' }]
+        ? [
+            {
+              number: one.number,
+              label: one.label ?? one.number,
+              language: one.language ?? '',
+              timeZone: one.timeZone ?? '',
+            },
+          ]
         : [],
     )
   } catch {

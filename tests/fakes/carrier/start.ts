@@ -41,7 +41,11 @@ export async function startCarrier(
     faults: [],
     underWay: new Set(),
     shelf: createShelf(settings.phonesFile),
-    changed: keeper.changed,
+    version: 1,
+    changed() {
+      carrier.version += 1
+      keeper.changed()
+    },
   }
   const main = createServer(serve((asked) => route(carrier, asked)))
   const stored = createServer(
