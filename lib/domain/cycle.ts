@@ -64,7 +64,7 @@ export function washIntervalDays({
   settings?: WashSettings
 }): number {
   const calendarDays = Math.floor(settings.days[sourceClass] * (wet ? settings.wetShare : 1))
-  const neededDays = trendDays == null ? calendarDays : Math.floor(trendDays)
+  const neededDays = Math.floor(trendDays ?? calendarDays)
   return Math.max(settings.floorDays, Math.min(calendarDays, neededDays))
 }
 

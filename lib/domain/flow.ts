@@ -59,7 +59,7 @@ export function recovery({
   nominal: number
   settings?: FlowSettings
 }): Recovery {
-  const hasFirst = first != null && first > 0
+  const hasFirst = typeof first === 'number' && first > 0
   const reference = hasFirst ? first : nominal
   if (!(reference > 0)) throw new RangeError('nothing to set the flow against')
   const share = flow / reference

@@ -1,5 +1,5 @@
 import { expect, it } from 'vitest'
-import { isLanguage, languageNames, languageNamesInEnglish, languages } from '@/lib/domain/language'
+import { isLanguage, languageNames, languages } from '@/lib/domain/language'
 
 it('every language is named in its own tongue, as the runtime names its tag', () => {
   for (const language of languages) {
