@@ -1,0 +1,162 @@
+import type { Language } from './language'
+import { bnPack } from './reply-words/bn'
+import type { Concept, LanguagePack } from './reply-words/concept'
+import { enPack } from './reply-words/en'
+import { esPack } from './reply-words/es'
+import { frPack } from './reply-words/fr'
+import {
+  allowedSlips,
+  foldBengali,
+  foldRoman,
+  isKeypadSlip,
+  slipsBetween,
+  squeeze,
+} from './reply-spelling'
+
+/** The words of each language, as the coordinator's page shows them. */
+export const languagePacks: Record<Language, LanguagePack> = {
+  en: enPack,
+  es: esPack,
+  fr: frPack,
+  bn: bnPack,
+}
+
+/** One way of saying a concept: a key for each word, `~` for a gap of up to two words. */
+export type Entry = { concept: Concept; language: Language; keys: readonly string[] }
+
+/** How a written word was recognised, best first. */
+export type Likeness = 'exact' | 'respelled' | 'guessed'
+
+type Lexicon = {
+  entriesByFirstKey: Map<string, Entry[]>
+  words: Set<string>
+  stems: Set<string>
+  respelled: Map<string, string[]>
+  respelledStems: [string, string][]
+  respell: (word: string) => string
+}
+
+function listed(text: string): string[] {
+  return text
+    .split(/[,\n]/)
+    .map((entry) => entry.trim())
+    .filter((entry) => entry !== '')
+}
+
+function respellerOf(pack: LanguagePack): (word: string) => string {
+  if (pack.spelling === 'latin') return squeeze
+  return (word) => (/[a-z]/.test(word) ? foldRoman(word) : foldBengali(word))
+}
+
+function numberWords(pack: LanguagePack): string[] {
+  const spoken = [pack.numbers, pack.weakNumbers, pack.spans, pack.halves]
+  return [
+    ...spoken.flatMap((words) => Object.keys(words)),
+    ...Object.values(pack.units).flatMap(listed),
+    ...[pack.about, pack.timeOfDay].flatMap(listed),
+  ].flatMap((entry) => entry.split(' '))
+}
+
+/** Adds a word both as it is written and as it is respelled. */
+function learn(lexicon: Lexicon, key: string): void {
+  if (key === '~') return
+  if (key.endsWith('*')) {
+    const stem = key.slice(0, -1)
+    if (lexicon.stems.has(stem)) return
+    lexicon.stems.add(stem)
+    lexicon.respelledStems.push([lexicon.respell(stem), key])
+    return
+  }
+  if (lexicon.words.has(key)) return
+  lexicon.words.add(key)
+  const respelled = lexicon.respell(key)
+  lexicon.respelled.set(respelled, [...(lexicon.respelled.get(respelled) ?? []), key])
+}
+
+function buildLexicon(language: Language): Lexicon {
+  const pack = languagePacks[language]
+  const lexicon: Lexicon = {
+    entriesByFirstKey: new Map(),
+    words: new Set(),
+    stems: new Set(),
+    respelled: new Map(),
+    respelledStems: [],
+    respell: respellerOf(pack),
+  }
+  for (const [concept, words] of Object.entries(pack.concepts) as [Concept, string][]) {
+    for (const entry of listed(words)) {
+      const keys = entry.split(/\s+/)
+      const first = keys[0] ?? ''
+      const entries = lexicon.entriesByFirstKey.get(first) ?? []
+      entries.push({ concept, language, keys })
+      lexicon.entriesByFirstKey.set(first, entries)
+      keys.forEach((key) => learn(lexicon, key))
+    }
+  }
+  for (const word of [...numberWords(pack), ...pack.common.split(/\s+/)]) learn(lexicon, word)
+  return lexicon
+}
+
+const lexicons = new Map<Language, Lexicon>()
+
+function lexiconOf(language: Language): Lexicon {
+  const known = lexicons.get(language)
+  if (known) return known
+  const built = buildLexicon(language)
+  lexicons.set(language, built)
+  return built
+}
+
+export function entriesStartingWith(language: Language, key: string): readonly Entry[] {
+  return lexiconOf(language).entriesByFirstKey.get(key) ?? []
+}
+
+/** Keys under which a word stands in the language as it is written. */
+export function exactKeys(word: string, language: Language): string[] {
+  const lexicon = lexiconOf(language)
+  const keys = lexicon.words.has(word) ? [word] : []
+  for (let end = 2; end <= word.length; end += 1) {
+    if (lexicon.stems.has(word.slice(0, end))) keys.push(`${word.slice(0, end)}*`)
+  }
+  return keys
+}
+
+/** Keys after taking away what writers of the language leave to chance. */
+export function respelledKeys(word: string, language: Language): string[] {
+  const lexicon = lexiconOf(language)
+  const respelled = lexicon.respell(word)
+  const keys = [...(lexicon.respelled.get(respelled) ?? [])]
+  for (const [stem, key] of lexicon.respelledStems) {
+    if (stem.length >= 3 && respelled.startsWith(stem)) keys.push(key)
+  }
+  return keys
+}
+
+/** Keys within the allowed slips; only the nearest are kept. */
+export function guessedKeys(word: string, language: Language): string[] {
+  if (allowedSlips(word.length) === 0 || !/^\p{L}[\p{L}\p{M}]+$/u.test(word)) return []
+  const lexicon = lexiconOf(language)
+  let best = Number.POSITIVE_INFINITY
+  let keys: string[] = []
+  const consider = (key: string, slips: number): void => {
+    if (slips > best) return
+    if (slips < best) keys = []
+    best = slips
+    keys.push(key)
+  }
+  const squeezed = squeeze(word)
+  for (const known of lexicon.words) {
+    if (known.length < 4 || Math.abs(known.length - word.length) > 2) continue
+    const slips = isKeypadSlip(word, known)
+      ? 1
+      : Math.min(slipsBetween(word, known), slipsBetween(squeezed, known))
+    if (slips <= allowedSlips(Math.min(known.length, word.length))) consider(known, slips)
+  }
+  for (const stem of lexicon.stems) {
+    if (stem.length < 5) continue
+    const heads = [-1, 0, 1].map((extra) => word.slice(0, stem.length + extra))
+    const slips = Math.min(...heads.map((head) => slipsBetween(head, stem)))
+    if (slips <= allowedSlips(stem.length)) consider(`${stem}*`, slips)
+  }
+  return keys
+}

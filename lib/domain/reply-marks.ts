@@ -1,0 +1,176 @@
+import type { Language } from './language'
+import { languages } from './language'
+import {
+  entriesStartingWith,
+  exactKeys,
+  guessedKeys,
+  respelledKeys,
+  type Entry,
+  type Likeness,
+} from './reply-lexicon'
+import type { Token } from './reply-tokens'
+import type { Concept } from './reply-words/concept'
+
+/** A concept found at some place of a text: tokens `from` up to, not including, `to`. */
+export type Mark = {
+  concept: Concept
+  from: number
+  to: number
+  language: Language
+  likeness: Likeness
+  denied: boolean
+}
+
+type Known = Map<Language, { keys: Set<string>; likeness: Likeness }>
+
+/** Household's own language first, then English, then the others. */
+export function languageOrder(own: Language): Language[] {
+  return [...new Set<Language>([own, 'en', ...languages])]
+}
+
+/**
+ * What each language makes of a word. A spelling is only stretched when nobody the household is
+ * likely to write in knows the word as it stands, and only guessed when no respelling fits.
+ */
+function knowWord(word: string, own: Language): Known {
+  const known: Known = new Map()
+  const add = (language: Language, keys: string[], likeness: Likeness): void => {
+    if (keys.length > 0) known.set(language, { keys: new Set(keys), likeness })
+  }
+  for (const language of languages) add(language, exactKeys(word, language), 'exact')
+  if (known.has(own) || known.has('en')) return known
+  for (const language of languages) {
+    if (!known.has(language)) add(language, respelledKeys(word, language), 'respelled')
+  }
+  if (known.size > 0) return known
+  for (const language of languages) add(language, guessedKeys(word, language), 'guessed')
+  return known
+}
+
+const weight: Record<Likeness, number> = { exact: 1, respelled: 0.8, guessed: 0.5 }
+
+/** The language that the text is most likely in: the own one, unless another knows more words. */
+function mainLanguage(known: readonly Known[], own: Language): Language {
+  let best = own
+  let bestScore = -1
+  for (const language of languageOrder(own)) {
+    let score = language === own ? 0.9 : 0
+    for (const word of known) {
+      const found = word.get(language)
+      if (found) score += weight[found.likeness]
+    }
+    if (score > bestScore) {
+      best = language
+      bestScore = score
+    }
+  }
+  return best
+}
+
+/** End of an entry that starts at `at`, or nothing. A gap may take up to two words. */
+function matchEnd(entry: Entry, at: number, known: readonly (Known | null)[]): number | null {
+  let ends = [at]
+  for (const [index, key] of entry.keys.entries()) {
+    if (key === '~') {
+      ends = [...new Set(ends.flatMap((end) => gapEnds(end, known)))]
+      continue
+    }
+    ends = ends.flatMap((end) => (hasKey(known[end], entry.language, key) ? [end + 1] : []))
+    if (ends.length === 0) return null
+    if (index === entry.keys.length - 1) return Math.min(...ends)
+  }
+  return null
+}
+
+function hasKey(word: Known | null | undefined, language: Language, key: string): boolean {
+  return word?.get(language)?.keys.has(key) ?? false
+}
+
+function gapEnds(end: number, known: readonly (Known | null)[]): number[] {
+  const ends = [end]
+  for (let extra = 1; extra <= 2 && known[end + extra - 1]; extra += 1) ends.push(end + extra)
+  return ends
+}
+
+function likenessOf(
+  from: number,
+  to: number,
+  language: Language,
+  known: readonly (Known | null)[],
+): Likeness {
+  let worst: Likeness = 'exact'
+  for (let at = from; at < to; at += 1) {
+    const likeness = known[at]?.get(language)?.likeness
+    if (likeness === 'guessed') worst = 'guessed'
+    if (likeness === 'respelled' && worst === 'exact') worst = 'respelled'
+  }
+  return worst
+}
+
+/** The one language in which a lone word is read. */
+function readerOf(word: Known, order: readonly Language[]): Language | null {
+  for (const likeness of ['exact', 'respelled', 'guessed'] as const) {
+    const reader = order.find((language) => word.get(language)?.likeness === likeness)
+    if (reader) return reader
+  }
+  return null
+}
+
+function candidates(known: readonly (Known | null)[], order: readonly Language[]): Mark[] {
+  const marks: Mark[] = []
+  known.forEach((word, from) => {
+    if (!word) return
+    const reader = readerOf(word, order)
+    for (const [language, { keys }] of word) {
+      for (const key of keys) {
+        for (const entry of entriesStartingWith(language, key)) {
+          if (entry.keys.length === 1 && language !== reader) continue
+          const to = matchEnd(entry, from, known)
+          if (to === null) continue
+          const likeness = likenessOf(from, to, language, known)
+          marks.push({ concept: entry.concept, from, to, language, likeness, denied: false })
+        }
+      }
+    }
+  })
+  return marks
+}
+
+/** Longer wordings own their words: in "no problem" neither "no" nor "problem" speaks. */
+function keepLongest(marks: readonly Mark[], order: readonly Language[]): Mark[] {
+  const rank = (mark: Mark): number => (mark.to - mark.from) * 10 - order.indexOf(mark.language)
+  const kept: Mark[] = []
+  for (const mark of [...marks].sort((a, b) => rank(b) - rank(a))) {
+    const clashes = kept.some(
+      (other) =>
+        mark.from < other.to &&
+        other.from < mark.to &&
+        !(mark.from === other.from && mark.to === other.to),
+    )
+    const twice = kept.some((other) => other.concept === mark.concept && other.from === mark.from)
+    if (!clashes && !twice) kept.push(mark)
+  }
+  return kept.sort((a, b) => a.from - b.from)
+}
+
+export type Marked = {
+  marks: Mark[]
+  main: Language
+  /** For each token, whether any language knows the word. */
+  knownWords: boolean[]
+}
+
+/** Finds every concept in a text. Denial is settled afterwards by `denyMarks`. */
+export function markTokens(tokens: readonly Token[], own: Language): Marked {
+  const known = tokens.map((token) => (token.kind === 'word' ? knowWord(token.text, own) : null))
+  const main = mainLanguage(
+    known.filter((word) => word !== null),
+    own,
+  )
+  const order = [...new Set([main, ...languageOrder(own)])]
+  return {
+    marks: keepLongest(candidates(known, order), order),
+    main,
+    knownWords: known.map((word) => word === null || word.size > 0),
+  }
+}

@@ -1,0 +1,59 @@
+import { isStopKeyword } from './consent'
+import { areBeside, denied, isNamed, isSaid, said, sureOf, type Sense } from './reply-sense'
+import { slipsBetween } from './reply-spelling'
+import type { Concept } from './reply-words/concept'
+
+/** Words that may stand beside a bare "stop" without changing what it asks. */
+const manners: ReadonlySet<Concept> = new Set<Concept>([
+  'please',
+  'thanks',
+  'greeting',
+  'stopWord',
+  'me',
+  'you',
+  'now',
+  'very',
+  'texts',
+  'again',
+  'no',
+  'yes',
+  'all',
+])
+
+/** How sure the text asks to end the texts; 0 when it does not. Read before anything else. */
+export function optOutSureness(sense: Sense): number {
+  if (isStopKeyword(sense.text)) return 1
+  const asks = said(sense, 'stopAsk')
+  if (asks.length > 0 && !isSaid(sense, 'if')) return sureOf(0.9, asks)
+  if (asks.length > 0) return 0.5
+  const refused = denied(sense, 'texts')
+  if (refused.length > 0 && !isNamed(sense, 'receive') && !isSaid(sense, 'ask')) {
+    return sureOf(0.85, refused)
+  }
+  const stops = said(sense, 'stopWord').filter((mark) => mark.likeness !== 'guessed')
+  if (stops.length > 0 && areBeside(sense, stops, said(sense, 'texts'), 3))
+    return sureOf(0.9, stops)
+  if (stops.length > 0 && isBareStop(sense)) return sureOf(0.9, stops)
+  return isMistypedStop(sense) ? 0.7 : 0
+}
+
+/** "Please stop", "basta ya": nothing is said but the stop and good manners. */
+function isBareStop(sense: Sense): boolean {
+  if (sense.text.includes('?')) return false
+  return sense.tokens.every((token, at) => {
+    if (token.kind === 'break') return true
+    return sense.marks.some((mark) => mark.from <= at && at < mark.to && manners.has(mark.concept))
+  })
+}
+
+/**
+ * One slip from STOP, alone in the text and no word of any language here: STOOP, STPO, SSTOP.
+ * SHOP, STEP and SLOW are words, so they never are.
+ */
+function isMistypedStop(sense: Sense): boolean {
+  const words = sense.tokens.filter((token) => token.kind !== 'break')
+  const [only] = words
+  if (words.length !== 1 || only?.kind !== 'word' || only.text.length < 4) return false
+  if (sense.marks.some((mark) => mark.likeness !== 'guessed')) return false
+  return sense.unknownWords + sense.marks.length > 0 && slipsBetween(only.text, 'stop') === 1
+}

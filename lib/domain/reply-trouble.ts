@@ -1,0 +1,71 @@
+import type { Mark } from './reply-marks'
+import { isFallOfFlow } from './reply-danger'
+import {
+  areBeside,
+  denied,
+  gapBetween,
+  isNamed,
+  isSaid,
+  said,
+  sureOf,
+  type Sense,
+} from './reply-sense'
+
+/** Sureness that no water comes at all. */
+export function noFlowSureness(sense: Sense): number {
+  const water = said(sense, 'water', 'flow')
+  const dry = denied(sense, 'water').concat(
+    denied(sense, 'flow').filter((mark) => !isQualified(sense, mark)),
+  )
+  const none = said(sense, 'none').filter((mark) => areBeside(sense, [mark], water, 4))
+  const lacking = said(sense, 'lack').filter((mark) =>
+    areBeside(sense, [mark], said(sense, 'water'), 3),
+  )
+  const strong = [...dry, ...none, ...lacking, ...said(sense, 'blocked')]
+  if (strong.length > 0) return sureOf(0.85, strong)
+  const isAnswer = sense.asked === 'flow' || sense.asked === 'step'
+  return said(sense, 'none').length > 0 && isAnswer && sense.words <= 3 ? 0.7 : 0
+}
+
+/** "Not flowing well" is slow: the denial is of the manner, not of the flow. */
+function isQualified(sense: Sense, flow: Mark): boolean {
+  return said(sense, 'good', 'fast', 'better', 'little', 'very', 'same', 'long', 'slow').some(
+    (mark) => mark.from >= flow.to && gapBetween(sense, flow, mark) <= 3,
+  )
+}
+
+/** Sureness that water comes too slowly. */
+export function slowSureness(sense: Sense): number {
+  if (isOver(sense)) return 0
+  const water = said(sense, 'water', 'flow', 'drip')
+  const little = said(sense, 'little').filter((mark) => areBeside(sense, [mark], water, 3))
+  const weakly = denied(sense, 'flow').filter((mark) => isQualified(sense, mark))
+  const badly = said(sense, 'bad').filter((mark) =>
+    areBeside(sense, [mark], said(sense, 'flow'), 3),
+  )
+  const falls = said(sense, 'fall').filter((mark) => isFallOfFlow(sense, mark))
+  const marks = [
+    ...said(sense, 'slow', 'drip', 'long'),
+    ...denied(sense, 'fast', 'better'),
+    ...little,
+    ...weakly,
+    ...badly,
+    ...falls,
+  ]
+  if (marks.length > 0) return sureOf(0.85, marks)
+  const isStep = sense.asked === 'step'
+  if (isSaid(sense, 'same') && (isStep || isSaid(sense, 'still'))) return 0.7
+  return isStep && isSaid(sense, 'little') && sense.words <= 3 ? 0.65 : 0
+}
+
+/** "It was slow but now it runs well". */
+function isOver(sense: Sense): boolean {
+  const slow = said(sense, 'slow', 'drip', 'long', 'little')
+  const better = said(sense, 'better', 'good', 'fast')
+  if (isNamed(sense, 'still')) return false
+  return (
+    isSaid(sense, 'past') &&
+    slow.length > 0 &&
+    better.some((mark) => mark.from > (slow[0]?.to ?? 0))
+  )
+}

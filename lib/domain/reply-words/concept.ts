@@ -1,0 +1,131 @@
+/**
+ * What a word or phrase can mean to the desk. A language pack gives the words; the rules in
+ * `reply-*.ts` combine the meanings, so that a new way of saying a thing needs one word, not a
+ * new sentence.
+ */
+export const concepts = [
+  // how words bear on each other
+  'not', // denies what follows
+  'notNext', // "no" before a noun: denies the very next word only
+  'notBack', // denies what stands before it
+  'notAround', // French "pas": the verb before it, else what follows
+  'ceased', // "stopped", "no longer": what follows is over
+  'but',
+  'or',
+  'if',
+  'future',
+  'past', // "was", "before"
+  'now',
+  'ago',
+  'still',
+  'very', // also "too"
+  'little',
+  'long', // a long time
+  'again',
+  // things and people
+  'water',
+  'filter',
+  'piece', // a part that can be broken, lost or wanted
+  'edge', // where water should not come out: the side, the joint
+  'cloth', // what may be dirty without the water being odd
+  'container',
+  'person',
+  'child',
+  'me',
+  'you',
+  'texts', // a message, to text
+  'phone', // a phone or a phone number
+  'receive', // to get, read or understand a text
+  'stool',
+  'belly',
+  'all', // everything
+  'source', // the river, the well
+  // what the water does
+  'flow',
+  'drip',
+  'slow',
+  'none', // nothing, empty
+  'blocked',
+  'fast',
+  'tooFast',
+  'good',
+  'bad',
+  'better',
+  'same', // no change
+  // danger
+  'broken',
+  'leak',
+  'fall', // fell or dropped: the filter is broken, the flow is slow
+  'frozen',
+  'mended',
+  'odd', // colour, bits
+  'oddSmell',
+  'smell',
+  'taste',
+  'clean',
+  'fuel',
+  'ill',
+  'pain',
+  'blood',
+  'vomit',
+  'sign', // an IMCI general danger sign by itself
+  'sleepy',
+  'drink',
+  'can', // can, will, want
+  // what they say
+  'done',
+  'wash',
+  'change',
+  'notYet',
+  'forgot',
+  'need',
+  'lack', // "I have no"
+  'lost',
+  'ask',
+  'thanks',
+  'yes',
+  'no',
+  'greeting',
+  'please',
+  'wrongNumber',
+  'who',
+  'moved',
+  'stopWord',
+  'stopAsk',
+  'startWord',
+  'helpWord',
+  'itStopped', // neither opt-out nor clear trouble: asks
+  'calm', // consumes a phrase that would otherwise read as something
+] as const
+
+export type Concept = (typeof concepts)[number]
+
+/** Units of the numbers people answer with. */
+export type NumberUnit = 'hour' | 'minute' | 'second' | 'other'
+
+/**
+ * The words of one language. Entries are separated by commas; an entry may hold several words;
+ * `*` at the end of a word stands for any ending; `~` stands for up to two words of any kind.
+ */
+export type LanguagePack = {
+  concepts: Partial<Record<Concept, string>>
+  /** Number words that stand for a figure wherever they are. */
+  numbers: Readonly<Record<string, number>>
+  /** Number words that are also articles or something else: only before a unit or alone. */
+  weakNumbers: Readonly<Record<string, number>>
+  units: Record<NumberUnit, string>
+  /** Whole spans of time said in words, in minutes. */
+  spans: Readonly<Record<string, number>>
+  /** "and a half" and its kind, in parts of the unit before it. */
+  halves: Readonly<Record<string, number>>
+  /** Bengali words that shift the number after them: half more, a quarter less. */
+  shifts?: Readonly<Record<string, number>>
+  /** "about", "it takes": may stand beside a bare figure. */
+  about: string
+  /** "ago", "in": a figure after or before it is a time of day or a promise, not a flow. */
+  timeOfDay: string
+  /** Everyday words without a meaning here; they keep guesses at spelling off. */
+  common: string
+  /** How a word of this language may be respelled: see `reply-spelling.ts`. */
+  spelling: 'latin' | 'bengali'
+}

@@ -1,0 +1,108 @@
+import type { LanguagePack } from './concept'
+import { esIllness } from './es-danger'
+import { esTalk } from './es-talk'
+import { esWater } from './es-water'
+
+/** Spanish as people text it; entries stand without accents, as the reader strips them. */
+export const esPack: LanguagePack = {
+  spelling: 'latin',
+  concepts: { ...esWater, ...esIllness, ...esTalk },
+  numbers: {
+    dos: 2,
+    tres: 3,
+    cuatro: 4,
+    quatro: 4,
+    cinco: 5,
+    sinco: 5,
+    seis: 6,
+    siete: 7,
+    ciete: 7,
+    ocho: 8,
+    nueve: 9,
+    nuebe: 9,
+    diez: 10,
+    dies: 10,
+    once: 11,
+    onse: 11,
+    doce: 12,
+    dose: 12,
+    trece: 13,
+    trese: 13,
+    catorce: 14,
+    catorse: 14,
+    quince: 15,
+    quinse: 15,
+    dieciseis: 16,
+    diesiseis: 16,
+    diecisiete: 17,
+    diesisiete: 17,
+    dieciocho: 18,
+    diesiocho: 18,
+    diecinueve: 19,
+    veinte: 20,
+    beinte: 20,
+    veintiuno: 21,
+    veintiun: 21,
+    veintidos: 22,
+    veintitres: 23,
+    veinticuatro: 24,
+    veinticinco: 25,
+    veintiseis: 26,
+    veintisiete: 27,
+    veintiocho: 28,
+    veintinueve: 29,
+    treinta: 30,
+    trenta: 30,
+    cuarenta: 40,
+    quarenta: 40,
+    cincuenta: 50,
+    sincuenta: 50,
+    sesenta: 60,
+    setenta: 70,
+    ochenta: 80,
+    noventa: 90,
+    cien: 100,
+  },
+  weakNumbers: { un: 1, una: 1, uno: 1, medio: 0.5, media: 0.5, 'un par de': 2 },
+  units: {
+    minute:
+      'minuto, minutos, min, mins, minutitos, minutito, minuts, mts, mns, mn, m, mint, mnts, mnutos, minuto s, mintos, munutos',
+    hour: 'hora, horas, hr, hrs, h, hs, ora, oras, horitas, horita',
+    second: 'segundo, segundos, seg, segs, s, sg, sgs, sec, segunditos',
+    other:
+      'litro*, lt, lts, l, galon*, botella*, balde, baldes, cubeta*, vaso, vasos, dia, dias, semana, semanas, mes, meses, ano, anos, año, años, vez, veces, nino, ninos, nina, ninas, hijo, hijos, hija, hijas, persona, personas, jeringa, jeringas, jeringazo*, filtro, filtros, parte, partes, pieza, piezas, tapa, tapas, pm, am, gota, gotas, noche, noches, poco, cosas, cosa, mas, cm, familias, casas, pesos, por, bebes, bebe, de, que, manguera, repuesto*, cartucho*, poquito, rato, ratito, momento, problema, pregunta',
+  },
+  spans: {
+    'media hora': 30,
+    'media hr': 30,
+    'media ora': 30,
+    'media horita': 30,
+    'hora y media': 90,
+    'una hora y media': 90,
+    'cuarto de hora': 15,
+    'un cuarto de hora': 15,
+    'tres cuartos de hora': 45,
+    'medio minuto': 0.5,
+    'minuto y medio': 1.5,
+    'un minuto y medio': 1.5,
+    'una hora': 60,
+    'una horita': 60,
+    'un minuto': 1,
+    'una ora': 60,
+    '1 2 hora': 30,
+  },
+  halves: { 'y media': 0.5, 'y medio': 0.5, 'y cuarto': 0.25, 'i media': 0.5, 'i medio': 0.5 },
+  about:
+    'como, unos, unas, mas o menos, aproximadamente, casi, son, fueron, fue, es, tarda, tardo, demora, demoro, en, solo, apenas, creo',
+  timeOfDay: 'hace, pm, am, las',
+  common: `el la los las un una uno unos unas de del al a en con por para que se su sus mi mis tu tus lo le les nos me te y o u e si no es son era eran ser esta este esto esa ese eso estas estos estan estoy estamos estaba fue fui ha he hay han hemos haber habia
+    muy mucho mucha muchos mas menos tan tanto todo toda todos todas otro otra otros cada algo alguien alguno alguna algun nada nadie ninguno bien mal mejor peor como cuando donde quien cual porque pues entonces tambien tampoco solo solamente nomas asi aqui ahi alla aca hasta desde entre sobre sin contra segun
+    yo tu usted ustedes el ella ellos ellas nosotros mio mia suyo suya casa cocina cuarto puerta mesa techo calle camino campo pueblo comunidad ciudad escuela iglesia mercado tienda trabajo milpa rio cerro
+    dia dias noche tarde manana ayer hoy semana mes ano hora minuto tiempo vez veces lunes martes miercoles jueves viernes sabado domingo enero
+    tengo tiene tienen tenemos tenia hago hace hacen hacer hizo digo dice dicen decir dijo voy va vamos van ir iba veo ve ver vi vino viene vienen venir quiero quiere quieren querer puedo puede pueden poder debo debe se saber sabe sabemos creo cree pongo pone poner puso dar doy da dan dio llevar llevo lleva traer trae traigo dejar dejo deja pasar paso pasa quedar queda quedo encontrar usar uso usa usamos comprar compro pagar pago comer come comida cocinar
+    grande chico pequeno nuevo nueva viejo vieja primero primera segundo ultimo alto bajo largo corto frio fria caliente fresco lleno llena abierto cerrado roto mano manos cabeza ojo ojos pie pies cara boca pelo
+    hombre mujer amigo amiga vecino dios senor senora don dona maria jose juan gracias hola favor perdon
+    sola solo suelo cielo cuelo pelo pela pala para pera pero perro carro barro gato pato rato dato plato vaso paso peso piso pozo pollo silla cama ropa sopa copa capa papa mapa
+    sale sales salen salsa salta salto salud salvo sal sol sala malla calla calle lleve nueve nieve breve
+    alta altar alto alma arma arroz azul rojo blanco gris foto video llamada internet señal recarga luz gas lena fuego lluvia viento tierra planta arbol`,
+}

@@ -1,0 +1,106 @@
+import { isHelpKeyword, isStartKeyword } from './consent'
+import type { Language } from './language'
+import { figureOf, findAnswer, isMostlyFigure } from './reply-answers'
+import { findDanger } from './reply-danger'
+import { optOutSureness } from './reply-opt-out'
+import { isSaid, said, senseOf, sureOf, type Asked, type Sense } from './reply-sense'
+import { noFlowSureness, slowSureness } from './reply-trouble'
+
+export type { Asked }
+
+export type ReplyKind =
+  | 'done'
+  | 'not-yet'
+  | 'slow'
+  | 'no-flow'
+  | 'flow-figure'
+  | 'broken'
+  | 'odd-water'
+  | 'unwell'
+  | 'need-part'
+  | 'ask'
+  | 'thanks'
+  | 'yes'
+  | 'no'
+  | 'choice'
+  | 'stop'
+  | 'start'
+  | 'help'
+  | 'wrong-number'
+  | 'moved'
+  | 'unclear'
+
+export type ReplyReading = {
+  kind: ReplyKind
+  /** Bottle-fill time. */
+  minutes?: number
+  /** A bare 1, 2 or 3 where a numbered choice may have been asked; `minutes` is set too. */
+  choice?: number
+  /** 0 to 1; under `sureEnough` the kind is `unclear`. */
+  sure: number
+  /** A general danger sign of illness (WHO IMCI): go to a health worker now. */
+  dangerSign?: boolean
+  /** The text also says that the water is slow. */
+  alsoSlow?: boolean
+}
+
+/** Below this a person reads the text. */
+export const sureEnough = 0.6
+
+/**
+ * What a household's text means. Order: opt-out, danger, wrong number, what was asked, the rest.
+ * The household's own language is tried first, then English, then the others.
+ *
+ * @example readReply({ text: 'sale poca agua', language: 'es', asked: 'wash' }).kind // 'slow'
+ */
+export function readReply(reply: { text: string; language: Language; asked: Asked }): ReplyReading {
+  const sense = senseOf(reply.text, reply.language, reply.asked)
+  const reading = readUrgent(sense) ?? readTrouble(sense) ?? readRest(sense)
+  const sure = Math.round(reading.sure * 100) / 100
+  return sure < sureEnough ? { ...reading, kind: 'unclear', sure } : { ...reading, sure }
+}
+
+function readUrgent(sense: Sense): ReplyReading | null {
+  const optOut = optOutSureness(sense)
+  if (optOut > 0) return { kind: 'stop', sure: optOut }
+  if (isStartKeyword(sense.text)) return { kind: 'start', sure: 1 }
+  if (isHelpKeyword(sense.text)) return { kind: 'help', sure: 1 }
+  const danger = findDanger(sense)
+  if (danger) return slowSureness(sense) >= sureEnough ? { ...danger, alsoSlow: true } : danger
+  const wrong = said(sense, 'wrongNumber')
+  if (wrong.length > 0) return { kind: 'wrong-number', sure: sureOf(0.9, wrong) }
+  return null
+}
+
+/** Figures and trouble: the figure answers when one was asked for. */
+function readTrouble(sense: Sense): ReplyReading | null {
+  const noFlow = noFlowSureness(sense)
+  const slow = slowSureness(sense)
+  const isAsked = sense.asked === 'flow' || sense.asked === 'step'
+  const figure = figureOf(sense)
+  if (figure && (figure.hasUnit || isMostlyFigure(sense))) {
+    if (slow > 0 && !isAsked) return { kind: 'slow', minutes: figure.minutes, sure: slow }
+    return readFigure(sense, figure, slow >= sureEnough)
+  }
+  if (isSaid(sense, 'itStopped')) return { kind: 'unclear', sure: 0.5 }
+  if (noFlow >= slow && noFlow > 0) return { kind: 'no-flow', sure: noFlow }
+  return slow > 0 ? { kind: 'slow', sure: slow } : null
+}
+
+function readFigure(
+  sense: Sense,
+  figure: { minutes: number; hasUnit: boolean },
+  isSlow: boolean,
+): ReplyReading {
+  const also = isSlow ? { alsoSlow: true } : {}
+  const isChoice =
+    !figure.hasUnit && [1, 2, 3].includes(figure.minutes) && !['flow', 'none'].includes(sense.asked)
+  if (isChoice) {
+    return { kind: 'choice', choice: figure.minutes, minutes: figure.minutes, sure: 0.85, ...also }
+  }
+  return { kind: 'flow-figure', minutes: figure.minutes, sure: figure.hasUnit ? 0.9 : 0.8, ...also }
+}
+
+function readRest(sense: Sense): ReplyReading {
+  return findAnswer(sense) ?? { kind: 'unclear', sure: 0.3 }
+}
