@@ -18,6 +18,8 @@ export type Deps = {
   clock: Clock
   /** Null where a real carrier can be reached. */
   practice: PracticeClock | null
+  /** Where the practice phones are; null where the clock cannot be moved. */
+  practicePhonesUrl: string | null
   /** Under which the carrier calls us, without a slash at the end. */
   publicBaseUrl: string
   log: Pick<typeof log, 'info' | 'warn' | 'error'>
@@ -55,6 +57,7 @@ async function open(): Promise<Deps> {
       : noMail((subject) => log.warn({ subject }, 'no mail is set up: a letter was not sent')),
     clock: practice ?? systemClock,
     practice,
+    practicePhonesUrl: practice ? settings.carrier.apiBaseUrl : null,
     publicBaseUrl: settings.publicBaseUrl,
     log,
     async close() {

@@ -49,6 +49,7 @@ export async function testDeps({ at }: { at: number | string }): Promise<TestDep
     letters,
     clock,
     practice: clock,
+    practicePhonesUrl: 'http://127.0.0.1:4010',
     publicBaseUrl: 'http://127.0.0.1:3000',
     log: silent,
     jobs: () => waitingJobs(store),

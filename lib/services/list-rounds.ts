@@ -1,0 +1,91 @@
+import { listAreaRows, type AreaRow } from '@/db/queries/area'
+import { listSettings } from '@/db/queries/setting'
+import type { Deps } from '@/lib/deps'
+import { addDays } from '@/lib/domain/day'
+import { allow, type Actor } from '@/lib/domain/role'
+import { carriedADay, openingsAhead } from '@/lib/domain/round-going'
+import { localDay, type Window } from '@/lib/domain/round-window'
+import { clockWords } from '@/lib/domain/stamp'
+import { roundKinds, type Going, type RoundDay, type Rounds } from '@/lib/schemas/rounds'
+import { readSettings } from '@/lib/schemas/settings'
+import { dayNames } from './day-names'
+import { expectedTexts, type Expected } from './expected-texts'
+
+const DAYS = 14
+const LISTED_A_DAY = 60
+const day = 86_400_000
+
+export function windowOf(area: AreaRow): Window {
+  const { timeZone, sundaysOff, holidays } = area
+  return {
+    timeZone,
+    opensMinute: area.windowOpensMinute,
+    closesMinute: area.windowClosesMinute,
+    sundaysOff,
+    holidays,
+  }
+}
+
+/** What goes out in the next fourteen days, by the local day of each household's area. */
+export async function listRounds(deps: Deps, actor: Actor): Promise<Rounds> {
+  allow(actor, 'see rounds')
+  const now = deps.clock.now()
+  const settings = readSettings(await listSettings(deps.store.db))
+  const rows = await listAreaRows(deps.store.db)
+  const windows = new Map(rows.map(({ area }) => [area.id, windowOf(area)]))
+  const zones = [...windows.values()].map(({ timeZone }) => timeZone)
+  const today = zones.map((zone) => localDay(now, zone)).sort()[0] ?? localDay(now, 'UTC')
+  const { expected, cut } = await expectedTexts(deps, {
+    now,
+    today,
+    days: DAYS,
+    windows,
+    perMinute: settings.textsPerMinute,
+  })
+  const open = new Set(
+    [...windows.values()].flatMap((window) =>
+      openingsAhead(window, now, now + DAYS * day).map(({ on }) => on),
+    ),
+  )
+  const days = Array.from({ length: DAYS }, (_, ahead) => {
+    const on = addDays(today, ahead)
+    const ofDay = expected.filter((text) => text.on === on || (ahead === 0 && text.on < on))
+    return dayOf(on, ofDay, windows.size > 0 && !open.has(on))
+  })
+  const carried = [...windows.values()].map((window) =>
+    carriedADay(window, settings.textsPerMinute),
+  )
+  return {
+    days,
+    texts: days.reduce((sum, { texts }) => sum + texts, 0),
+    carriesADay: Math.max(0, ...carried),
+    textsPerMinute: settings.textsPerMinute,
+    cut,
+  }
+}
+
+function dayOf(on: string, expected: readonly Expected[], off: boolean): RoundDay {
+  const inOrder = [...expected].sort((one, other) => one.at - other.at)
+  const count = (kind: (typeof roundKinds)[number]) =>
+    expected.filter(({ kinds }) => kinds.includes(kind)).length
+  return {
+    on,
+    ...dayNames(on),
+    texts: expected.length,
+    counts: {
+      wash: count('wash'),
+      change: count('change'),
+      'flow check': count('flow check'),
+      welcome: count('welcome'),
+      nudge: count('nudge'),
+      other: count('other'),
+    },
+    off,
+    going: inOrder.slice(0, LISTED_A_DAY).map(goingOf),
+    more: Math.max(0, expected.length - LISTED_A_DAY),
+  }
+}
+
+function goingOf({ at, area, householdId, house, what, state }: Expected): Going {
+  return { householdId, house, area: area.name, hour: clockWords(at, area.timeZone), what, state }
+}

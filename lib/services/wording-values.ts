@@ -1,0 +1,64 @@
+import type { Handle } from '@/db/client'
+import { findLastReading, listOpenFittings } from '@/db/queries/kit-facts'
+import { findOpenPromise } from '@/db/queries/promise'
+import { listSettings } from '@/db/queries/setting'
+import { findDueVisit, findHouseholdToTry } from '@/db/queries/wording-values'
+import type { MomentInfo } from '@/lib/domain/moments'
+import { dailyNeed } from '@/lib/domain/need'
+import type { Values } from '@/lib/domain/wording'
+import { readSettings } from '@/lib/schemas/settings'
+
+type Found = NonNullable<Awaited<ReturnType<typeof findHouseholdToTry>>>
+
+/** The stage that a text about a change or a part would be about: the one owed, else the next one due. */
+async function stageValues(db: Handle, kitId: string): Promise<Values & { changeOn?: string }> {
+  const promise = await findOpenPromise(db, kitId)
+  const fittings = await listOpenFittings(db, kitId)
+  const [next] = [...fittings].sort((one, other) =>
+    one.fitting.dueOn < other.fitting.dueOn ? -1 : 1,
+  )
+  const about = fittings.find(({ fitting }) => fitting.position === promise?.position) ?? next
+  if (!about) return {}
+  return {
+    stage: about.fitting.position,
+    part: about.part.name,
+    changeOn: about.fitting.dueOn,
+  }
+}
+
+async function kitValues(db: Handle, { kit, household }: Found): Promise<Values> {
+  const reading = await findLastReading(db, kit.id)
+  const { litresPerPersonDay } = readSettings(await listSettings(db))
+  const litres = dailyNeed({ people: household.people, litresPerPersonDay })
+  return {
+    litres: Math.ceil(litres),
+    ...(reading ? { minutes: Math.round(reading.seconds / 60) } : {}),
+  }
+}
+
+/**
+ * What a text of this moment to this household may speak of, as far as it is known today. Null for a
+ * household without a kit.
+ */
+export async function wordingValues(
+  db: Handle,
+  info: MomentInfo,
+  householdId: string,
+): Promise<Values | null> {
+  const found = await findHouseholdToTry(db, householdId)
+  if (!found) return null
+  const { programme } = readSettings(await listSettings(db))
+  const { changeOn, ...stage } = await stageValues(db, found.kit.id)
+  const visit = await findDueVisit(db, householdId)
+  const aboutStage = info.values.includes('stage')
+  return {
+    programme,
+    house: found.household.name,
+    depot: found.depot.name,
+    ...stage,
+    ...(await kitValues(db, found)),
+    ...(aboutStage && changeOn ? { dueOn: changeOn } : { dueOn: found.kit.nextWashOn }),
+    ...(visit ? { visitOn: visit.dueOn } : {}),
+    ...(visit?.visitor ? { visitor: visit.visitor } : {}),
+  }
+}
