@@ -19,7 +19,7 @@ const at = ({ moment, language }: Place) =>
  * What a text says at a moment: the edition in use in the language, or in the first language where it
  * has none. The row's own `language` says which. Null: nothing may be texted at this moment.
  */
-export async function useWording(
+export async function findWordingInUse(
   db: Handle,
   moment: string,
   language: Language,
