@@ -52,9 +52,15 @@ function transactionOf(db: Database): Store['transaction'] {
 }
 
 /** Opens (or makes) the embedded database in a folder, or in memory when none is given. */
-export async function openPglite(dataDirectory?: string, options: PGliteOptions = {}): Promise<Store> {
+export async function openPglite(
+  dataDirectory?: string,
+  options: PGliteOptions = {},
+): Promise<Store> {
   if (dataDirectory) mkdirSync(dataDirectory, { recursive: true, mode: 0o700 })
-  const pglite = await PGlite.create({ ...(dataDirectory ? { dataDir: dataDirectory } : {}), ...options })
+  const pglite = await PGlite.create({
+    ...(dataDirectory ? { dataDir: dataDirectory } : {}),
+    ...options,
+  })
   const client = guarded(pglite, ['query', 'exec', 'sql', 'transaction'])
   const db = drizzlePglite(client, { schema: tables })
   const queueSql: QueueSql = {
@@ -94,7 +100,8 @@ export function openPostgres(url: string, onIdleError: (error: Error) => void): 
     db,
     transaction: transactionOf(db),
     queueSql: {
-      executeSql: (text, values) => client.query(text, values) as unknown as Promise<{ rows: never[] }>,
+      executeSql: (text, values) =>
+        client.query(text, values) as unknown as Promise<{ rows: never[] }>,
     },
     async migrate() {
       const lock = await client.connect()

@@ -5,7 +5,9 @@ const inside = new AsyncLocalStorage<true>()
 /** Thrown where code inside a transaction reaches past its own handle. */
 export class OutsideTransactionError extends Error {
   constructor() {
-    super('Inside a transaction only its own handle may be used: on PGlite anything else waits for ever.')
+    super(
+      'Inside a transaction only its own handle may be used: on PGlite anything else waits for ever.',
+    )
     this.name = 'OutsideTransactionError'
   }
 }

@@ -15,9 +15,13 @@ import * as wording from './schema/wording'
 
 export const tables = {
   ...area,
-  ...consent, ...household,
+  ...consent,
+  ...household,
   ...kit,
-  ...part, ...promise, ...reading, ...stock,
+  ...part,
+  ...promise,
+  ...reading,
+  ...stock,
   ...staff,
   ...text,
   ...ticket,

@@ -26,8 +26,20 @@ export const queues = {
   'follow-silence': { ...sweep, repeat: '*/10 * * * *' },
   'reconcile-attempts': { ...sweep, repeat: '* * * * *' },
   'keep-house': { ...sweep, repeat: '17 * * * *' },
-  'send-text': { payload: textPayload, attempts: 3, backoffSeconds: 5, expireSeconds: 120, batch: 10 },
-  'receive-text': { payload: textPayload, attempts: 5, backoffSeconds: 2, expireSeconds: 60, batch: 10 },
+  'send-text': {
+    payload: textPayload,
+    attempts: 3,
+    backoffSeconds: 5,
+    expireSeconds: 120,
+    batch: 10,
+  },
+  'receive-text': {
+    payload: textPayload,
+    attempts: 5,
+    backoffSeconds: 2,
+    expireSeconds: 60,
+    batch: 10,
+  },
   'receive-receipt': {
     payload: z.object({ receiptN: z.number() }),
     attempts: 5,

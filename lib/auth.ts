@@ -35,7 +35,12 @@ async function authorize(given: Record<'email' | 'password', string> | undefined
   const found = await findStaffByEmail(store.db, email)
   const right = await verify(found?.passwordHash ?? NOBODY, password).catch(() => false)
   if (!found || !right || found.disabledAt !== null) return null
-  return { id: found.id, email: found.email, name: found.name, sessionVersion: found.sessionVersion }
+  return {
+    id: found.id,
+    email: found.email,
+    name: found.name,
+    sessionVersion: found.sessionVersion,
+  }
 }
 
 /** How staff sign in. Made on use: the secret is read from the settings, not at build time. */

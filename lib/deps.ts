@@ -15,6 +15,8 @@ export type Deps = {
   queue: Queue
   carrier: Carrier
   mail: Mail
+  /** Whether letters really leave. */
+  mailSet: boolean
   clock: Clock
   /** Null where a real carrier can be reached. */
   practice: PracticeClock | null
@@ -55,6 +57,7 @@ async function open(): Promise<Deps> {
     mail: settings.mail
       ? smtpMail(settings.mail)
       : noMail((subject) => log.warn({ subject }, 'no mail is set up: a letter was not sent')),
+    mailSet: settings.mail !== null,
     clock: practice ?? systemClock,
     practice,
     practicePhonesUrl: practice ? settings.carrier.apiBaseUrl : null,

@@ -71,7 +71,8 @@ async function respond<E extends Endpoint>(
     return answer(403, { reason: 'Your role may not do this.' })
   }
   const input = await readInput(definition, request)
-  if ('problems' in input) return answer(422, { reason: 'Some fields need mending.', problems: input.problems })
+  if ('problems' in input)
+    return answer(422, { reason: 'Some fields need mending.', problems: input.problems })
   const result = await run({
     deps: await getDeps(),
     actor,
@@ -79,7 +80,8 @@ async function respond<E extends Endpoint>(
     body: input.body as BodyOf<E>,
     query: input.query as QueryOf<E>,
   })
-  if (isRefusal(result)) return answer(result.reason === 'not found' ? 404 : 409, { reason: result.reason })
+  if (isRefusal(result))
+    return answer(result.reason === 'not found' ? 404 : 409, { reason: result.reason })
   return answer(200, result)
 }
 

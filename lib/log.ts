@@ -4,7 +4,16 @@ import pino from 'pino'
 export const log = pino({
   base: null,
   redact: {
-    paths: ['authorization', 'password', 'token', 'body', 'e164', '*.authorization', '*.password', '*.token'],
+    paths: [
+      'authorization',
+      'password',
+      'token',
+      'body',
+      'e164',
+      '*.authorization',
+      '*.password',
+      '*.token',
+    ],
     censor: '[cut]',
   },
 })

@@ -1,4 +1,4 @@
-import { eq, sql } from 'drizzle-orm'
+import { and, eq, isNull, sql } from 'drizzle-orm'
 import type { Handle } from '../client'
 import { audit, staff } from '../schema/staff'
 
@@ -22,4 +22,13 @@ export async function insertStaff(db: Handle, row: typeof staff.$inferInsert) {
 
 export async function insertAudit(db: Handle, row: typeof audit.$inferInsert) {
   await db.insert(audit).values(row)
+}
+
+/** Coordinators with an open account, to be told of what cannot wait. */
+export async function listCoordinators(db: Handle) {
+  return db
+    .select({ id: staff.id, email: staff.email })
+    .from(staff)
+    .where(and(eq(staff.role, 'coordinator'), isNull(staff.disabledAt)))
+    .limit(50)
 }

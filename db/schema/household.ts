@@ -80,4 +80,3 @@ export const householdPhones = pgTable(
       .where(sql`${t.first}`),
   ],
 )
-

@@ -114,4 +114,3 @@ export const fittings = pgTable(
     check('fittings_due_after_fitted', sql`${t.dueOn} > ${t.fittedOn}`),
   ],
 )
-

@@ -6,4 +6,3 @@ export const parts = pgTable('parts', {
   name: text('name').notNull().unique(),
   kind: text('kind').$type<'cloth' | 'carbon' | 'fibre' | 'cap' | 'hose'>().notNull(),
 })
-

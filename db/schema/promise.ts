@@ -12,7 +12,9 @@ export const partPromises = pgTable(
   {
     id: id(),
     ticketId: text('ticket_id').references(() => tickets.id),
-    kitId: text('kit_id').notNull().references(() => kits.id),
+    kitId: text('kit_id')
+      .notNull()
+      .references(() => kits.id),
     position: integer('position').$type<1 | 2 | 3>().notNull(),
     partId: text('part_id')
       .notNull()

@@ -35,7 +35,9 @@ export const flowReadings = pgTable(
       .notNull()
       .references(() => fittings.id),
     ticketId: text('ticket_id').references(() => tickets.id),
-    textId: text('text_id').unique('flow_readings_one_a_text').references(() => texts.id),
+    textId: text('text_id')
+      .unique('flow_readings_one_a_text')
+      .references(() => texts.id),
     litres: doublePrecision('litres').notNull(),
     seconds: doublePrecision('seconds').notNull(),
     celsius: doublePrecision('celsius').notNull(),

@@ -19,7 +19,9 @@ export const stockMoves = pgTable(
       .references(() => parts.id),
     quantity: integer('quantity').notNull(),
     why: text('why').$type<'received' | 'handed over' | 'counted' | 'lost'>().notNull(),
-    promiseId: text('promise_id').unique('stock_moves_one_a_promise').references(() => partPromises.id),
+    promiseId: text('promise_id')
+      .unique('stock_moves_one_a_promise')
+      .references(() => partPromises.id),
     staffId: text('staff_id').references(() => staff.id),
     at: instant('at').notNull(),
   },
@@ -29,4 +31,3 @@ export const stockMoves = pgTable(
     check('stock_moves_why_known', sql`${t.why} in ('received', 'handed over', 'counted', 'lost')`),
   ],
 )
-

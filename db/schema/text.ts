@@ -40,7 +40,9 @@ export const prompts = pgTable(
       .$type<'planned' | 'asked' | 'answered' | 'silent' | 'dropped'>()
       .notNull()
       .default('planned'),
-    textId: text('text_id').notNull().references(() => texts.id),
+    textId: text('text_id')
+      .notNull()
+      .references(() => texts.id),
     tries: integer('tries').notNull().default(1),
     nudges: integer('nudges').notNull().default(0),
     nudgeAfter: instant('nudge_after'),

@@ -1,0 +1,123 @@
+import { and, asc, eq, inArray, lte, sql } from 'drizzle-orm'
+import type { Handle } from '../client'
+import { prompts } from '../schema/text'
+
+export type PromptRow = typeof prompts.$inferSelect
+
+export type DueRow = {
+  kitId: string
+  kind: PromptRow['kind']
+  dueOn: string
+  position: 1 | 2 | 3 | null
+}
+
+/**
+ * What is due by `horizon` and has no living prompt, kit by kit. Kits that cannot be texted, are out of
+ * service or have an open ticket (but for silence) are left out: their trouble is in hand elsewhere. The
+ * cost follows what is due, not how many kits there are: each branch walks an index of due dates.
+ */
+export async function listDue(db: Handle, horizon: string, limit: number): Promise<DueRow[]> {
+  const found = await db.execute(sql`
+    with due as (
+      select k.id as kit_id, 'wash' as kind, k.next_wash_on as due_on, null::int as position
+      from kits k where k.next_wash_on <= ${horizon}
+      union all
+      select k.id, 'flow check', k.next_flow_check_on, null from kits k where k.next_flow_check_on <= ${horizon}
+      union all
+      select f.kit_id, 'change', f.due_on, f.position from fittings f
+      where f.removed_on is null and f.due_on <= ${horizon}
+      union all
+      select k.id, 'welcome', k.handed_over_on, null from kits k
+      where k.handed_over_on <= ${horizon}
+        and not exists (select 1 from prompts p where p.kit_id = k.id and p.kind = 'welcome')
+    )
+    select d.kit_id, d.kind, d.due_on::text as due_on, d.position
+    from due d
+    join kits k on k.id = d.kit_id and k.state = 'in use'
+    join household_phones hp on hp.household_id = k.household_id and hp.first
+    join phones ph on ph.id = hp.phone_id
+      and ph.state = 'active' and ph.consent = 'given' and not ph.carrier_blocked
+    where not exists (
+        select 1 from prompts p
+        where p.kit_id = d.kit_id and p.kind = d.kind and p.due_on = d.due_on and p.state <> 'dropped'
+          and (d.position is null or d.position = any (p.positions))
+      )
+      and not exists (
+        select 1 from tickets t where t.kit_id = d.kit_id and t.ended_at is null and t.trouble <> 'silent'
+      )
+    order by d.due_on, d.kit_id, d.kind, d.position
+    limit ${limit}`)
+  return (found.rows as Record<string, unknown>[]).map((row) => ({
+    kitId: String(row.kit_id),
+    kind: row.kind as DueRow['kind'],
+    dueOn: String(row.due_on),
+    position: row.position === null ? null : (Number(row.position) as 1 | 2 | 3),
+  }))
+}
+
+/** A prompt for its kit, kind and date: new, or one that was dropped and is tried again. */
+export async function upsertPrompt(db: Handle, row: typeof prompts.$inferInsert) {
+  const [made] = await db
+    .insert(prompts)
+    .values(row)
+    .onConflictDoUpdate({
+      target: [prompts.kitId, prompts.kind, prompts.dueOn],
+      set: {
+        state: 'planned',
+        textId: row.textId,
+        positions: row.positions ?? [],
+        tries: sql`${prompts.tries} + 1`,
+      },
+      setWhere: eq(prompts.state, 'dropped'),
+    })
+    .returning()
+  return made ?? null
+}
+
+/** How often a prompt was tried before; 0 for one that is new. */
+export async function countTries(
+  db: Handle,
+  { kitId, kind, dueOn }: { kitId: string; kind: PromptRow['kind']; dueOn: string },
+) {
+  const [row] = await db
+    .select({ tries: prompts.tries })
+    .from(prompts)
+    .where(and(eq(prompts.kitId, kitId), eq(prompts.kind, kind), eq(prompts.dueOn, dueOn)))
+  return row?.tries ?? 0
+}
+
+export async function listPromptsOfText(db: Handle, textId: string) {
+  return db.select().from(prompts).where(eq(prompts.textId, textId))
+}
+
+/** Prompts of a kit that wait for an answer, oldest first. */
+export async function listAskedPrompts(db: Handle, kitId: string) {
+  return db
+    .select()
+    .from(prompts)
+    .where(and(eq(prompts.kitId, kitId), eq(prompts.state, 'asked')))
+    .orderBy(asc(prompts.dueOn), asc(prompts.id))
+}
+
+export async function updatePrompts(
+  db: Handle,
+  promptIds: string[],
+  change: Partial<typeof prompts.$inferInsert>,
+) {
+  if (promptIds.length > 0)
+    await db.update(prompts).set(change).where(inArray(prompts.id, promptIds))
+}
+
+export async function listPromptsToNudge(db: Handle, now: number, limit: number) {
+  return db
+    .select()
+    .from(prompts)
+    .where(and(eq(prompts.state, 'asked'), lte(prompts.nudgeAfter, now)))
+    .orderBy(asc(prompts.nudgeAfter), asc(prompts.id))
+    .limit(limit)
+}
+
+export async function findPromptForUpdate(db: Handle, promptId: string) {
+  const [row] = await db.select().from(prompts).where(eq(prompts.id, promptId)).for('update')
+  return row ?? null
+}

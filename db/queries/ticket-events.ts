@@ -1,0 +1,55 @@
+import { and, asc, eq, isNull } from 'drizzle-orm'
+import type { Handle } from '../client'
+import { ticketEvents, tickets, walks } from '../schema/ticket'
+
+export type TicketRow = typeof tickets.$inferSelect
+
+export async function findOpenTicket(db: Handle, kitId: string) {
+  const [row] = await db
+    .select()
+    .from(tickets)
+    .where(and(eq(tickets.kitId, kitId), isNull(tickets.endedAt)))
+    .for('update')
+  return row ?? null
+}
+
+export async function findTicketForUpdate(db: Handle, ticketId: string) {
+  const [row] = await db.select().from(tickets).where(eq(tickets.id, ticketId)).for('update')
+  return row ?? null
+}
+
+export async function listTicketEvents(db: Handle, ticketId: string) {
+  return db
+    .select()
+    .from(ticketEvents)
+    .where(eq(ticketEvents.ticketId, ticketId))
+    .orderBy(asc(ticketEvents.n))
+}
+
+/** A new ticket; null when the kit has an open one already. */
+export async function insertTicket(db: Handle, row: typeof tickets.$inferInsert) {
+  const [made] = await db.insert(tickets).values(row).onConflictDoNothing().returning()
+  return made ?? null
+}
+
+export async function insertTicketEvent(db: Handle, row: typeof ticketEvents.$inferInsert) {
+  await db.insert(ticketEvents).values(row)
+}
+
+export async function updateTicket(
+  db: Handle,
+  ticketId: string,
+  change: Partial<typeof tickets.$inferInsert>,
+) {
+  await db.update(tickets).set(change).where(eq(tickets.id, ticketId))
+}
+
+export async function upsertWalk(db: Handle, row: typeof walks.$inferInsert) {
+  await db
+    .insert(walks)
+    .values(row)
+    .onConflictDoUpdate({
+      target: walks.ticketId,
+      set: { walk: row.walk, changedAt: row.changedAt },
+    })
+}

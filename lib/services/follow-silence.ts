@@ -1,0 +1,93 @@
+import type { Transaction } from '@/db/client'
+import { findKitFacts } from '@/db/queries/kit-facts'
+import { findFirstPhone } from '@/db/queries/phone'
+import {
+  findPromptForUpdate,
+  listPromptsToNudge,
+  updatePrompts,
+  type PromptRow,
+} from '@/db/queries/prompt'
+import { listPromptHours } from '@/db/queries/text'
+import type { Deps } from '@/lib/deps'
+import type { Moment } from '@/lib/domain/moments'
+import { expiresAt, nextInsideWindow, nudgeAfter, overWeeklyLimit } from '@/lib/domain/round'
+import { raiseTrouble } from './apply-ticket-event'
+import { closePrompts } from './care-for-kit'
+import { queueText } from './queue-text'
+
+const DAY = 24 * 60 * 60_000
+const BATCH = 500
+
+/** How long the last nudge is given before silence goes to a person, in milliseconds. */
+const AFTER_LAST_NUDGE = 3 * DAY
+
+const nudgeMoment: Record<PromptRow['kind'], Moment> = {
+  wash: 'wash-nudge',
+  change: 'change-nudge',
+  'flow check': 'flow-check',
+  welcome: 'wash-nudge',
+}
+
+async function nudge(tx: Transaction, deps: Deps, prompt: PromptRow): Promise<void> {
+  const now = deps.clock.now()
+  const facts = await findKitFacts(tx, prompt.kitId)
+  const phone = facts && (await findFirstPhone(tx, facts.household.id))
+  if (!facts || !phone) return updatePrompts(tx, [prompt.id], { state: 'silent', nudgeAfter: null })
+  const hours = await listPromptHours(tx, [facts.household.id], now - 7 * DAY)
+  if (overWeeklyLimit({ sentAt: hours.map(({ at }) => Math.min(at, now)), now })) {
+    return updatePrompts(tx, [prompt.id], { nudgeAfter: now + DAY })
+  }
+  const { area } = facts
+  const sendAt = nextInsideWindow(now, {
+    timeZone: area.timeZone,
+    opensMinute: area.windowOpensMinute,
+    closesMinute: area.windowClosesMinute,
+    sundaysOff: area.sundaysOff,
+    holidays: area.holidays,
+  })
+  const nudges = prompt.nudges + 1
+  await queueText(tx, deps, {
+    purpose: `nudge:${prompt.id}:${nudges}`,
+    moment: nudgeMoment[prompt.kind],
+    phone,
+    household: facts.household,
+    kitId: prompt.kitId,
+    values: {
+      stage: prompt.positions[0] ?? 3,
+      dueOn: prompt.dueOn,
+      litres: facts.model.bottleLitres,
+    },
+    sendAfter: sendAt,
+    notAfter: expiresAt(sendAt),
+    anyHour: false,
+  })
+  await updatePrompts(tx, [prompt.id], {
+    nudges,
+    nudgeAfter: nudgeAfter(sendAt, nudges) ?? sendAt + AFTER_LAST_NUDGE,
+  })
+}
+
+async function giveUp(tx: Transaction, deps: Deps, prompt: PromptRow): Promise<void> {
+  const facts = await findKitFacts(tx, prompt.kitId)
+  if (!facts) return
+  await closePrompts(tx, deps, { facts, state: 'silent' })
+  await raiseTrouble(tx, deps, { facts, trouble: 'silent' })
+}
+
+/** Nudges what was not answered, twice; then the silence goes into the shift. It never counts as working. */
+export async function followSilence(deps: Deps): Promise<{ nudged: number; silent: number }> {
+  const due = await listPromptsToNudge(deps.store.db, deps.clock.now(), BATCH)
+  const done = { nudged: 0, silent: 0 }
+  for (const { id } of due) {
+    await deps.store.transaction(async (tx) => {
+      const prompt = await findPromptForUpdate(tx, id)
+      if (prompt?.state !== 'asked' || prompt.nudgeAfter === null) return
+      if (prompt.nudgeAfter > deps.clock.now()) return
+      const isLast = nudgeAfter(0, prompt.nudges) === null
+      if (isLast) await giveUp(tx, deps, prompt)
+      else await nudge(tx, deps, prompt)
+      done[isLast ? 'silent' : 'nudged'] += 1
+    })
+  }
+  return done
+}

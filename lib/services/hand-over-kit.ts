@@ -1,0 +1,97 @@
+import { TZDate } from '@date-fns/tz'
+import type { Transaction } from '@/db/client'
+import type { AreaRow } from '@/db/queries/area'
+import { insertFirstFittings, insertKit } from '@/db/queries/kit'
+import { insertReading } from '@/db/queries/kit-facts'
+import { findKitModel, listModelStages } from '@/db/queries/reference'
+import { listSettings } from '@/db/queries/setting'
+import { nextChangeOn, nextWashOn, washIntervalDays, type SourceClass } from '@/lib/domain/cycle'
+import { addDays, monthOf } from '@/lib/domain/day'
+import { flowDefaults, flowErrorShare, litresPerHour, normalisedFlow } from '@/lib/domain/flow'
+import type { HouseholdInput } from '@/lib/schemas/household-entry'
+import { readSettings } from '@/lib/schemas/settings'
+
+type HandOver = {
+  household: { id: string; sourceClass: SourceClass }
+  area: AreaRow
+  model: NonNullable<Awaited<ReturnType<typeof findKitModel>>>
+  handedOverOn: string
+  reading: HouseholdInput['reading']
+  now: number
+}
+
+/** Noon of a local day: a hand-over has a day but no hour. Never later than now. */
+function noonOf(day: string, timeZone: string, now: number): number {
+  const [year = 0, month = 1, date = 1] = day.split('-').map(Number)
+  return Math.min(now, new TZDate(year, month - 1, date, 12, timeZone).getTime())
+}
+
+/** When the first wash is due: days by the source, fewer in a wet month. */
+export function firstWashOn(
+  lastWashOn: string,
+  { sourceClass, wetMonths }: { sourceClass: SourceClass; wetMonths: readonly number[] },
+): string {
+  const wet = wetMonths.includes(monthOf(lastWashOn))
+  return nextWashOn({ lastWashOn, intervalDays: washIntervalDays({ sourceClass, wet }) })
+}
+
+async function keepFirstReading(
+  tx: Transaction,
+  {
+    handOver,
+    kitId,
+    fibreFittingId,
+  }: { handOver: HandOver; kitId: string; fibreFittingId: string },
+) {
+  const { area, model, reading, handedOverOn, now } = handOver
+  if (!reading) return
+  const celsius = reading.celsius ?? area.monthCelsius[monthOf(handedOverOn) - 1] ?? 20
+  const bottle = { litres: model.bottleLitres, seconds: reading.minutes * 60 }
+  await insertReading(tx, {
+    kitId,
+    fibreFittingId,
+    ...bottle,
+    celsius,
+    celsiusFrom: reading.celsius === null ? 'area month' : 'told',
+    litresPerHour: litresPerHour(bottle),
+    normalised: normalisedFlow({ ...bottle, celsius, headRatio: 1 }),
+    errorShare: flowErrorShare(flowDefaults),
+    known: 'measured',
+    at: noonOf(handedOverOn, area.timeZone, now),
+  })
+}
+
+/** A kit in a household's hands: every stage fitted that day, its cycles begun, its first flow kept. */
+export async function handOverKit(tx: Transaction, handOver: HandOver) {
+  const { household, area, model, handedOverOn, now } = handOver
+  const { flowCheckDays } = readSettings(await listSettings(tx))
+  const kit = await insertKit(tx, {
+    householdId: household.id,
+    modelId: model.id,
+    handedOverOn,
+    lastWashOn: handedOverOn,
+    nextWashOn: firstWashOn(handedOverOn, {
+      sourceClass: household.sourceClass,
+      wetMonths: area.wetMonths,
+    }),
+    nextFlowCheckOn: addDays(handedOverOn, flowCheckDays),
+    createdAt: now,
+  })
+  const stages = await listModelStages(tx, model.id)
+  const fitted = await insertFirstFittings(
+    tx,
+    stages.map(({ position, partId, changeMonths }) => ({
+      kitId: kit.id,
+      position,
+      partId,
+      fittedOn: handedOverOn,
+      dueOn: nextChangeOn({ fittedOn: handedOverOn, changeMonths }),
+      createdAt: now,
+    })),
+  )
+  const fibre = stages.find(({ kind }) => kind === 'fibre')
+  const fibreFittingId = fitted.find(({ position }) => position === fibre?.position)?.id
+  if (!fibreFittingId) throw new Error(`The kit model ${model.name} has no fibre stage.`)
+  await keepFirstReading(tx, { handOver, kitId: kit.id, fibreFittingId })
+  return kit
+}

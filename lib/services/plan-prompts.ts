@@ -1,0 +1,142 @@
+import { findKitFacts, type KitFacts } from '@/db/queries/kit-facts'
+import { findFirstPhone } from '@/db/queries/phone'
+import { countTries, listDue, upsertPrompt, type DueRow } from '@/db/queries/prompt'
+import { listSettings } from '@/db/queries/setting'
+import { countWaitingTexts, listPromptHours } from '@/db/queries/text'
+import type { Transaction } from '@/db/client'
+import type { Deps } from '@/lib/deps'
+import { addDays } from '@/lib/domain/day'
+import type { Moment } from '@/lib/domain/moments'
+import {
+  bundle,
+  expiresAt,
+  localDay,
+  overWeeklyLimit,
+  sendAfter,
+  type Due,
+} from '@/lib/domain/round'
+import { readSettings } from '@/lib/schemas/settings'
+import { queueText } from './queue-text'
+
+const WEEK = 7 * 24 * 60 * 60_000
+const BUNDLE_DAYS = 4
+const KITS_A_RUN = 2000
+
+const momentOf: Record<DueRow['kind'], Moment> = {
+  wash: 'wash-due',
+  change: 'change-due',
+  'flow check': 'flow-check',
+  welcome: 'welcome',
+}
+
+/** What a text that bundles several things is about: one action a text, the weightiest. */
+const weight: readonly DueRow['kind'][] = ['welcome', 'change', 'wash', 'flow check']
+
+function byKit(rows: readonly DueRow[]): Map<string, DueRow[]> {
+  const kits = new Map<string, DueRow[]>()
+  for (const row of rows) kits.set(row.kitId, [...(kits.get(row.kitId) ?? []), row])
+  return kits
+}
+
+type Prompt = { kind: DueRow['kind']; dueOn: string; positions: number[] }
+
+/** Prompts to make of what is due: several stages due on one day are one prompt. */
+function promptsOf(due: readonly Due[]): Prompt[] {
+  const prompts: Prompt[] = []
+  for (const { kind, dueOn, stagePosition } of due) {
+    const same = prompts.find((prompt) => prompt.kind === kind && prompt.dueOn === dueOn)
+    const positions = stagePosition === undefined ? [] : [stagePosition]
+    if (same) same.positions.push(...positions)
+    else prompts.push({ kind, dueOn, positions })
+  }
+  return prompts
+}
+
+type Plan = { facts: KitFacts; due: Due[]; sendAt: number }
+
+async function writePlan(
+  tx: Transaction,
+  deps: Deps,
+  { facts, due, sendAt }: Plan,
+): Promise<boolean> {
+  const prompts = promptsOf(due)
+  const main = weight.flatMap((kind) => prompts.filter((prompt) => prompt.kind === kind))[0]
+  const phone = await findFirstPhone(tx, facts.household.id)
+  if (!main || !phone) return false
+  const tries = await countTries(tx, { kitId: facts.kit.id, ...main })
+  const queued = await queueText(tx, deps, {
+    purpose: `prompt:${facts.kit.id}:${main.kind}:${main.dueOn}:${tries + 1}`,
+    moment: momentOf[main.kind],
+    phone,
+    household: facts.household,
+    kitId: facts.kit.id,
+    values: { stage: main.positions[0] ?? 3, dueOn: main.dueOn, litres: facts.model.bottleLitres },
+    sendAfter: sendAt,
+    notAfter: expiresAt(sendAt),
+    anyHour: false,
+  })
+  if (!queued.ok) return false
+  for (const prompt of prompts) {
+    await upsertPrompt(tx, {
+      kitId: facts.kit.id,
+      ...prompt,
+      textId: queued.textId,
+      createdAt: deps.clock.now(),
+    })
+  }
+  return true
+}
+
+function windowOf({ area }: KitFacts) {
+  return {
+    timeZone: area.timeZone,
+    opensMinute: area.windowOpensMinute,
+    closesMinute: area.windowClosesMinute,
+    sundaysOff: area.sundaysOff,
+    holidays: area.holidays,
+  }
+}
+
+/**
+ * Plans what is due: per kit one text, in one transaction with its prompts, so that a process which dies
+ * half-way has planned a kit whole or not at all. Nobody gets more than the weekly limit, and a prompt
+ * that exists for its kit, kind and date is never made twice.
+ */
+export async function planPrompts(deps: Deps): Promise<{ planned: number }> {
+  const { db } = deps.store
+  const now = deps.clock.now()
+  const horizon = addDays(localDay(now, 'Pacific/Kiritimati'), BUNDLE_DAYS)
+  const kits = byKit(await listDue(db, horizon, KITS_A_RUN))
+  if (kits.size === 0) return { planned: 0 }
+  const { textsPerMinute } = readSettings(await listSettings(db))
+  let spreadIndex = await countWaitingTexts(db, now)
+  let planned = 0
+  for (const [kitId, rows] of kits) {
+    const facts = await findKitFacts(db, kitId)
+    if (!facts) continue
+    const today = localDay(now, facts.area.timeZone)
+    const due = bundle(
+      rows.map(({ kind, dueOn, position }) => ({
+        kind,
+        dueOn,
+        stagePosition: position ?? undefined,
+      })),
+      today,
+    )
+    if (due.length === 0) continue
+    const hours = await listPromptHours(db, [facts.household.id], now - WEEK)
+    if (overWeeklyLimit({ sentAt: hours.map(({ at }) => Math.min(at, now)), now })) continue
+    const sendAt = sendAfter({
+      now,
+      window: windowOf(facts),
+      spreadIndex,
+      perMinute: textsPerMinute,
+    })
+    const done = await deps.store.transaction((tx) => writePlan(tx, deps, { facts, due, sendAt }))
+    if (done) {
+      planned += 1
+      spreadIndex += 1
+    }
+  }
+  return { planned }
+}

@@ -1,0 +1,93 @@
+import type { Transaction } from '@/db/client'
+import { listSettings } from '@/db/queries/setting'
+import { insertText } from '@/db/queries/text'
+import { findWordingInUse } from '@/db/queries/wording'
+import type { Deps } from '@/lib/deps'
+import { languages, type Language } from '@/lib/domain/language'
+import { momentInfo, type Moment } from '@/lib/domain/moments'
+import { renderWording, segmentsOf, type Values } from '@/lib/domain/wording'
+import { readSettings } from '@/lib/schemas/settings'
+
+export type Letter = {
+  /** What for, for whom, when: unique for ever. */
+  purpose: string
+  moment: Moment
+  phone: { id: string; e164: string }
+  household: { id: string; name: string; language: Language }
+  kitId?: string
+  ticketId?: string
+  values?: Values
+  stepId?: string
+  staffId?: string
+  /** The agent's own words in place of the wording's. */
+  body?: string
+  sendAfter: number
+  /** After this it would do more harm than good: a prompt is dropped, a person decides over an answer. */
+  notAfter?: number
+  /** An answer to what the household just wrote may go at any hour; a prompt may not. */
+  anyHour: boolean
+}
+
+export type Queued = { ok: true; textId: string } | { ok: false; reason: string }
+
+async function compose(tx: Transaction, letter: Letter, language: Language) {
+  const wording = await findWordingInUse(tx, letter.moment, language)
+  if (!wording) return { ok: false as const, reason: `no wording in use for ${letter.moment}` }
+  const { programme } = readSettings(await listSettings(tx))
+  const values = { programme, house: letter.household.name, ...letter.values }
+  const rendered = renderWording(wording.body, values, wording.language)
+  if (!rendered.ok)
+    return {
+      ok: false as const,
+      reason: `${letter.moment}: ${rendered.reason}, ${rendered.detail}`,
+    }
+  return { ok: true as const, text: rendered.text, wording }
+}
+
+/**
+ * Writes an outbound text as a row before it is anything else, and enqueues its sending in the same
+ * transaction. A purpose that has its text already is left alone: asking twice sends once.
+ */
+export async function queueText(tx: Transaction, deps: Deps, letter: Letter): Promise<Queued> {
+  const composed = await compose(tx, letter, letter.household.language)
+  if (!composed.ok && letter.body === undefined) {
+    deps.log.error(
+      { purpose: letter.purpose, reason: composed.reason },
+      'a text could not be worded',
+    )
+    return composed
+  }
+  const first = languages[0] ?? 'en'
+  const forStaff =
+    letter.household.language === first || letter.body !== undefined
+      ? null
+      : await compose(tx, letter, first)
+  const body = letter.body ?? (composed.ok ? composed.text : '')
+  const row = await insertText(tx, {
+    direction: 'out',
+    purpose: letter.purpose,
+    phoneId: letter.phone.id,
+    e164: letter.phone.e164,
+    householdId: letter.household.id,
+    kitId: letter.kitId,
+    ticketId: letter.ticketId,
+    moment: letter.moment,
+    wordingId: composed.ok ? composed.wording.id : null,
+    language: composed.ok ? composed.wording.language : letter.household.language,
+    body,
+    staffBody: forStaff?.ok ? forStaff.text : null,
+    segments: segmentsOf(body).segments,
+    asked: momentInfo(letter.moment)?.asked ?? 'none',
+    stepId: letter.stepId,
+    state: 'queued',
+    sendAfter: letter.sendAfter,
+    notAfter: letter.notAfter,
+    anyHour: letter.anyHour,
+    staffId: letter.staffId,
+    createdAt: deps.clock.now(),
+  })
+  if (!row) return { ok: false, reason: 'this was texted already' }
+  if (letter.sendAfter <= deps.clock.now())
+    await deps.queue.add(tx, 'send-text', { textId: row.id })
+  return { ok: true, textId: row.id }
+}

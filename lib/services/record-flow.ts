@@ -1,0 +1,94 @@
+import type { Transaction } from '@/db/client'
+import {
+  findFirstReading,
+  insertReading,
+  listOpenFittings,
+  type KitFacts,
+} from '@/db/queries/kit-facts'
+import { listSettings } from '@/db/queries/setting'
+import type { Deps } from '@/lib/deps'
+import { monthOf } from '@/lib/domain/day'
+import {
+  flowDefaults,
+  flowErrorShare,
+  litresPerHour,
+  normalisedFlow,
+  recovery,
+  type Recovery,
+} from '@/lib/domain/flow'
+import { dailyNeed, enough, type Enough } from '@/lib/domain/need'
+import { localDay } from '@/lib/domain/round'
+import { readSettings } from '@/lib/schemas/settings'
+
+export type FlowVerdict = {
+  recovery: Recovery
+  need: Enough
+  litresPerHour: number
+  /** Litres per hour at 20 °C and full head. */
+  normalised: number
+  celsius: number
+  celsiusFrom: 'told' | 'area month'
+}
+
+/** The water's temperature in an area on a day, °C: the month's value, where nobody told one. */
+export function areaCelsius(area: KitFacts['area'], at: number): number {
+  const month = monthOf(localDay(at, area.timeZone))
+  return area.monthCelsius[month - 1] ?? 20
+}
+
+/**
+ * Keeps a bottle-fill time as a flow reading and sets it against the first reading of the fibre fitting
+ * and the family's need. `minutes` is for the model's bottle. A text gives one reading, however often read.
+ */
+export async function recordFlow(
+  tx: Transaction,
+  deps: Deps,
+  reading: {
+    facts: KitFacts
+    minutes: number
+    known: 'said' | 'measured' | 'seen'
+    textId?: string
+    ticketId?: string
+    celsius?: number
+  },
+): Promise<FlowVerdict> {
+  const now = deps.clock.now()
+  const { kit, model, household, area } = reading.facts
+  const fibre = (await listOpenFittings(tx, kit.id)).find((row) => row.stage.kind === 'fibre')
+  if (!fibre) throw new Error(`Kit ${kit.id} has no fibre fitting to hold a flow reading against.`)
+  const celsius = reading.celsius ?? areaCelsius(area, now)
+  const celsiusFrom = reading.celsius === undefined ? 'area month' : 'told'
+  const bottle = { litres: model.bottleLitres, seconds: reading.minutes * 60 }
+  const normalised = normalisedFlow({ ...bottle, celsius, headRatio: 1 })
+  const first = await findFirstReading(tx, fibre.fitting.id)
+  await insertReading(tx, {
+    kitId: kit.id,
+    fibreFittingId: fibre.fitting.id,
+    ticketId: reading.ticketId,
+    textId: reading.textId,
+    ...bottle,
+    celsius,
+    celsiusFrom,
+    litresPerHour: litresPerHour(bottle),
+    normalised,
+    errorShare: flowErrorShare(flowDefaults),
+    known: reading.known,
+    at: now,
+  })
+  const { litresPerPersonDay } = readSettings(await listSettings(tx))
+  return {
+    recovery: recovery({
+      flow: normalised,
+      first: first?.normalised ?? null,
+      nominal: model.nominalLitresPerHour,
+    }),
+    need: enough({
+      litresPerHour: litresPerHour(bottle),
+      litresPerDay: dailyNeed({ people: household.people, litresPerPersonDay }),
+    }),
+    litresPerHour: litresPerHour(bottle),
+    normalised,
+    celsius,
+    celsiusFrom,
+  }
+}

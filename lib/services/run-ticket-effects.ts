@@ -1,0 +1,149 @@
+import type { Transaction } from '@/db/client'
+import { listOpenFittings, updateKit, type KitFacts } from '@/db/queries/kit-facts'
+import { findFirstPhone } from '@/db/queries/phone'
+import { findOpenPromise, withdrawPromises } from '@/db/queries/promise'
+import { insertVisit, withdrawVisits } from '@/db/queries/visit'
+import type { Deps } from '@/lib/deps'
+import { boilMinutes } from './boil-minutes'
+import { addDays } from '@/lib/domain/day'
+import type { Moment } from '@/lib/domain/moments'
+import { localDay } from '@/lib/domain/round'
+import type { TicketEffect, TicketState } from '@/lib/domain/ticket-types'
+import { stepOf } from '@/lib/domain/walk-catalogue'
+import type { Values } from '@/lib/domain/wording'
+import { applyTicketEvent } from './apply-ticket-event'
+import { logWash } from './care-for-kit'
+import { promisePart } from './promise-part'
+import { queueText } from './queue-text'
+import { tellCoordinator } from './tell-coordinator'
+
+export type EffectsRun = {
+  facts: KitFacts
+  ticketId: string
+  /** Number of the event that had these effects: part of each text's purpose. */
+  n: number
+  state: TicketState
+  effects: readonly TicketEffect[]
+  minutes?: number
+  staffId?: string
+}
+
+const VISIT_WITHIN_DAYS = 3
+
+async function valuesFor(tx: Transaction, deps: Deps, run: EffectsRun): Promise<Values> {
+  const { facts, state } = run
+  const today = localDay(deps.clock.now(), facts.area.timeZone)
+  const stage = state.promisedStage ?? 3
+  const fitting = (await listOpenFittings(tx, facts.kit.id)).find(
+    (row) => row.stage.position === stage,
+  )
+  const promise = await findOpenPromise(tx, facts.kit.id)
+  return {
+    stage,
+    ...(fitting ? { part: fitting.part.name, dueOn: fitting.fitting.dueOn } : {}),
+    ...(promise ? { depot: promise.depotName } : {}),
+    litres: facts.model.bottleLitres,
+    minutes: run.minutes ?? boilMinutes(facts.area.altitudeMetres),
+    visitOn: addDays(today, VISIT_WITHIN_DAYS),
+    visitor: 'your visitor',
+  }
+}
+
+async function sendMoment(
+  tx: Transaction,
+  deps: Deps,
+  {
+    run,
+    moment,
+    stepId,
+    values,
+  }: { run: EffectsRun; moment: Moment; stepId?: string; values?: Values },
+): Promise<void> {
+  const { facts } = run
+  const phone = await findFirstPhone(tx, facts.household.id)
+  if (!phone) return
+  const known = await valuesFor(tx, deps, run)
+  await queueText(tx, deps, {
+    purpose: `ticket:${run.ticketId}:${run.n}:${moment}`,
+    moment,
+    phone,
+    household: facts.household,
+    kitId: facts.kit.id,
+    ticketId: run.ticketId,
+    values: { ...known, ...values },
+    stepId,
+    staffId: run.staffId,
+    sendAfter: deps.clock.now(),
+    anyHour: true,
+  })
+}
+
+async function bookVisit(tx: Transaction, deps: Deps, run: EffectsRun): Promise<void> {
+  const now = deps.clock.now()
+  const visit = await insertVisit(tx, {
+    ticketId: run.ticketId,
+    householdId: run.facts.household.id,
+    why: run.state.cause ?? run.state.trouble,
+    dueOn: addDays(localDay(now, run.facts.area.timeZone), VISIT_WITHIN_DAYS),
+    createdAt: now,
+  })
+  if (!visit) return
+  await applyTicketEvent(tx, deps, {
+    ticketId: run.ticketId,
+    event: { kind: 'visit booked', visitId: visit.id },
+  })
+}
+
+async function close(tx: Transaction, deps: Deps, run: EffectsRun): Promise<void> {
+  const now = deps.clock.now()
+  await withdrawPromises(tx, run.facts.kit.id, now)
+  await withdrawVisits(tx, run.ticketId, now)
+  if (run.state.stage === 'retired') {
+    await updateKit(tx, run.facts.kit.id, { state: 'retired', outOfServiceSince: null })
+  }
+}
+
+async function runEffect(
+  tx: Transaction,
+  deps: Deps,
+  { run, effect }: { run: EffectsRun; effect: TicketEffect },
+) {
+  const { facts, ticketId } = run
+  switch (effect.kind) {
+    case 'send step': {
+      const step = stepOf(effect.stepId)
+      return step && sendMoment(tx, deps, { run, moment: step.moment, stepId: step.id })
+    }
+    case 'send': {
+      const values =
+        effect.moment === 'drink-advice' ? { minutes: boilMinutes(facts.area.altitudeMetres) } : {}
+      return sendMoment(tx, deps, { run, moment: effect.moment, values })
+    }
+    case 'promise part':
+      return promisePart(tx, deps, { facts, ticketId, position: effect.stage })
+    case 'ask for visit':
+      return bookVisit(tx, deps, run)
+    case 'log wash':
+      return logWash(tx, deps, { facts, ticketId, known: 'measured' })
+    case 'out of service':
+      return updateKit(tx, facts.kit.id, {
+        state: 'out of service',
+        outOfServiceSince: deps.clock.now(),
+      })
+    case 'back in service':
+      return updateKit(tx, facts.kit.id, { state: 'in use', outOfServiceSince: null })
+    case 'tell coordinator':
+      return tellCoordinator(tx, deps, { subject: effect.why, ticketId })
+    case 'closed':
+      return close(tx, deps, run)
+  }
+}
+
+/** Carries out what the core decided, in the transaction that keeps the decision. */
+export async function runTicketEffects(
+  tx: Transaction,
+  deps: Deps,
+  run: EffectsRun,
+): Promise<void> {
+  for (const effect of run.effects) await runEffect(tx, deps, { run, effect })
+}
