@@ -32,6 +32,7 @@ export function childGroup({ logFolder, graceMilliseconds = 20_000, onDeath }) {
       if (!stopping)
         onDeath({ name, how: signal ?? `code ${code}`, lastLines: lastLinesOf(logFile) })
     })
+    return child
   }
 
   async function stopOne({ child, ended }) {

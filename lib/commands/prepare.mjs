@@ -42,11 +42,11 @@ export function ensureInstalled() {
   if (isInstalled()) return
   console.log('Installing packages (once; a minute or two) …')
   // CI installs what tests need too, so development packages are named even where NODE_ENV is production.
-  run(
-    'npm',
-    ['ci', '--include=dev', '--no-fund', '--no-audit'],
-    'The packages could not be installed.',
-  )
+  run({
+    command: 'npm',
+    parameters: ['ci', '--include=dev', '--no-fund', '--no-audit'],
+    problem: 'The packages could not be installed.',
+  })
 }
 
 /** npm writes what it installed into node_modules/.package-lock.json, as its last act. */
@@ -78,7 +78,12 @@ export function ensureBuilt() {
 export function build() {
   const sources = hashOfSources()
   const next = path.join('node_modules', 'next', 'dist', 'bin', 'next')
-  run(process.execPath, [next, 'build'], 'The desk could not be built.')
+  run({
+    command: process.execPath,
+    parameters: [next, 'build'],
+    problem: 'The desk could not be built.',
+    environment: { NODE_ENV: 'production' },
+  })
   writeFileSync(path.join(root, buildMark), sources)
 }
 
@@ -112,11 +117,11 @@ function filesUnder(name) {
 }
 
 /** Runs a step to its end in sight of the person at the keyboard. */
-function run(command, parameters, problem) {
+function run({ command, parameters, problem, environment }) {
   const { status, error } = spawnSync(command, parameters, {
     cwd: root,
     stdio: 'inherit',
-    env: { ...process.env, NEXT_TELEMETRY_DISABLED: '1' },
+    env: { ...process.env, NEXT_TELEMETRY_DISABLED: '1', ...environment },
   })
   if (error) fail(`${problem} ${error.message}`)
   if (status !== 0) fail(problem)
