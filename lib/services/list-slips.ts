@@ -1,4 +1,5 @@
 import type { Handle } from '@/db/client'
+import { findHousehold } from '@/db/queries/household'
 import { listReadingsOfTexts, listSlipTexts } from '@/db/queries/slip'
 import type { Deps } from '@/lib/deps'
 import { allow, type Actor } from '@/lib/domain/role'
@@ -51,4 +52,17 @@ export async function slipPage(
     ),
   )
   return { slips, before: rows.length > PAGE ? (page[0]?.n ?? null) : null }
+}
+
+/** An earlier page of the texts with a household. */
+export async function householdTexts(
+  deps: Deps,
+  actor: Actor,
+  { householdId, before }: { householdId: string; before: number | null },
+): Promise<SlipPage | { ok: false; reason: string }> {
+  allow(actor, 'see households')
+  const { db } = deps.store
+  const found = await findHousehold(db, householdId)
+  if (!found) return { ok: false, reason: 'not found' }
+  return slipPage(db, { householdId, timeZone: found.area.timeZone, before })
 }

@@ -1,0 +1,88 @@
+import type { Handle } from '@/db/client'
+import {
+  listFittings,
+  listPromptsOfKit,
+  listReadings,
+  listTicketsOfKit,
+  listWashes,
+  type listKitsOfHousehold,
+} from '@/db/queries/kit'
+import { trend } from '@/lib/domain/flow'
+import { kitPast, kitPlan } from '@/lib/domain/kit-life'
+import { localDay } from '@/lib/domain/round'
+import type { KitView } from '@/lib/schemas/household'
+import { kitLook } from './kit-look'
+
+type KitRow = Awaited<ReturnType<typeof listKitsOfHousehold>>[number]
+type Around = KitRow & { timeZone: string; today: string; litresPerDay: number }
+
+type Facts = {
+  fittings: Awaited<ReturnType<typeof listFittings>>[number]['fitting'][]
+  washes: Awaited<ReturnType<typeof listWashes>>
+  readings: Awaited<ReturnType<typeof listReadings>>
+  prompts: Awaited<ReturnType<typeof listPromptsOfKit>>
+  tickets: Awaited<ReturnType<typeof listTicketsOfKit>>
+}
+
+/** Hours of running in which the day's water is to come: common practice, no source. */
+const ENOUGH_HOURS = 8
+
+async function factsOf(db: Handle, kitId: string): Promise<Facts> {
+  return {
+    fittings: (await listFittings(db, kitId)).map(({ fitting }) => fitting),
+    washes: await listWashes(db, kitId),
+    readings: await listReadings(db, kitId),
+    prompts: await listPromptsOfKit(db, kitId),
+    tickets: await listTicketsOfKit(db, kitId),
+  }
+}
+
+function flowOf({ readings, washes, fittings }: Facts, around: Around): KitView['flow'] {
+  const needLitresPerHour = around.litresPerDay / ENOUGH_HOURS
+  const firsts = new Map(readings.toReversed().map((one) => [one.fibreFittingId, one.n]))
+  const washDays = new Set(washes.map(({ washedOn }) => washedOn))
+  const points = readings.map((reading) => {
+    const isFirst = firsts.get(reading.fibreFittingId) === reading.n
+    return {
+      at: reading.at,
+      litresPerHour: reading.normalised,
+      errorLitresPerHour: reading.normalised * reading.errorShare,
+      afterWash: washDays.has(localDay(reading.at, around.timeZone)),
+      ...(isFirst ? { note: 'first reading' } : {}),
+    }
+  })
+  // A new fibre begins a new line; what the old one did says nothing of it.
+  const standing = fittings.find(({ position, removedOn }) => position === 3 && removedOn === null)
+  const current = readings.filter(({ fibreFittingId }) => fibreFittingId === standing?.id)
+  const line = current.map(({ at, normalised }) => ({ takenAt: at, normalised }))
+  return { points, needLitresPerHour, forecast: trend(line, needLitresPerHour) }
+}
+
+function pastOf(facts: Facts, { kit, timeZone }: Around) {
+  const tickets = facts.tickets.map((ticket) => ({
+    ...ticket,
+    openedOn: localDay(ticket.openedAt, timeZone),
+    endedOn: ticket.endedAt === null ? null : localDay(ticket.endedAt, timeZone),
+  }))
+  return kitPast({ ...facts, tickets, handedOverOn: kit.handedOverOn })
+}
+
+/** One kit for its household's sheet, and its open ticket. */
+export async function kitSheet(db: Handle, around: Around) {
+  const { kit, model, today, litresPerDay } = around
+  const facts = await factsOf(db, kit.id)
+  const standing = facts.fittings.filter(({ removedOn }) => removedOn === null)
+  const litresPerHour = facts.readings.at(-1)?.litresPerHour ?? null
+  const open = facts.tickets.find(({ endedAt }) => endedAt === null)
+  const view: KitView = {
+    id: kit.id,
+    number: kit.number,
+    model: model.name,
+    state: kit.state,
+    column: kitLook({ state: kit.state, fittings: standing, litresPerHour, litresPerDay }, today),
+    past: pastOf(facts, around),
+    planned: kitPlan({ ...kit, fittings: standing }, today),
+    flow: flowOf(facts, around),
+  }
+  return { view, ticket: open ? { id: open.id, words: `${open.trouble}, ${open.stage}` } : null }
+}
