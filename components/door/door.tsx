@@ -19,7 +19,10 @@ export function Door({ children }: { children: ReactNode }) {
           className="absolute -bottom-px left-fall -ml-px h-3 w-0.5 bg-water md:h-3.5"
         />
       </header>
-      <main id="sheet" className="relative pr-edge pb-16 pl-lead md:pl-[22rem]">
+      <main
+        id="sheet"
+        className="relative min-h-[calc(100dvh-4rem)] pr-edge pb-16 pl-lead md:pl-[22rem]"
+      >
         <span
           aria-hidden
           className="absolute top-0 left-fall -ml-px h-12 w-0.5 bg-water max-md:h-full"

@@ -11,16 +11,21 @@ type Trouble = 'wrong' | 'too many' | 'no answer'
 const troubleWords: Record<Trouble, { title: string; detail: string }> = {
   wrong: {
     title: 'That e-mail and password do not go together.',
-    detail: 'Check both, and try again. A coordinator can give you a new password.',
+    detail: 'Check both, and try again. Whoever runs the desk can give you a new password.',
   },
   'too many': {
     title: 'Too many tries.',
-    detail: 'Wait fifteen minutes, then try again.',
+    detail: 'Wait a while, then try again.',
   },
   'no answer': {
     title: 'The desk did not answer.',
     detail: 'Nothing is wrong with your password. Try again in a moment.',
   },
+}
+
+function written(form: FormData, name: string): string {
+  const value = form.get(name)
+  return typeof value === 'string' ? value : ''
 }
 
 async function trySignIn(email: string, password: string): Promise<Trouble | null> {
@@ -45,7 +50,7 @@ export function SignInForm({ goTo }: { goTo: string }) {
     const form = new FormData(event.currentTarget)
     setBusy(true)
     setTrouble(null)
-    const found = await trySignIn(String(form.get('email')).trim(), String(form.get('password')))
+    const found = await trySignIn(written(form, 'email').trim(), written(form, 'password'))
     // A full load, so that nothing of an earlier person's session stays in the page.
     if (found === null) return window.location.assign(goTo)
     setTrouble(found)
@@ -59,7 +64,7 @@ export function SignInForm({ goTo }: { goTo: string }) {
           {troubleWords[trouble].detail}
         </Notice>
       )}
-      <TextField label="E-mail" name="email" type="email" autoComplete="username" autoFocus />
+      <TextField label="E-mail" name="email" type="email" autoComplete="username" />
       <TextField label="Password" name="password" type="password" autoComplete="current-password" />
       <div>
         <Button kind="main" type="submit" busy={busy}>

@@ -14,14 +14,17 @@ type LineRowProps = {
   waiting?: boolean
   /** A hairline above it: for every row of a list but the first. */
   ruled?: boolean
+  /** Closer to its neighbours: for rows of a line or two. */
+  tight?: boolean
   className?: string
   children: ReactNode
 }
 
 /** One thing hung on the fall line: its time at the left, its bead on the line, the rest right. */
 export function LineRow({ time, since, waiting, ruled, className = '', ...rest }: LineRowProps) {
+  const room = `${rest.tight ? 'py-2' : 'py-3.5'} ${since ? 'md:min-h-14' : ''}`
   return (
-    <div className={`relative py-3.5 pl-lead ${className}`}>
+    <div className={`relative pl-lead ${room} ${className}`}>
       {waiting && <FallDashes />}
       {ruled && (
         <span aria-hidden className="absolute top-0 right-0 left-lead border-t border-rule" />
@@ -30,7 +33,7 @@ export function LineRow({ time, since, waiting, ruled, className = '', ...rest }
         state={rest.bead}
         tone={rest.tone}
         label={rest.beadLabel}
-        className="absolute top-[1.15rem] left-fall -ml-2"
+        className={`absolute left-fall -ml-2 ${rest.tight ? 'top-3' : 'top-[1.125rem]'}`}
       />
       <p className="font-mono text-sm font-medium md:absolute md:left-0 md:w-[calc(var(--fall-x)-1.75rem)] md:pt-0.5 md:pl-1 md:text-right">
         {time}

@@ -122,7 +122,7 @@ export function FlowDrawing(props: FlowDrawingProps) {
         className="stroke-ink"
         strokeWidth="1.5"
       />
-      <text x={inside.right} y={y(need) - 5} textAnchor="end" className="fill-ink">
+      <text x={inside.right} y={y(need) + 15} textAnchor="end" className="fill-ink">
         need {need.toFixed(1)}
       </text>
       {days.map(

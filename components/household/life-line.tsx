@@ -27,14 +27,7 @@ type LifeLineProps = {
 function Event({ event, waiting }: { event: LifeEvent; waiting?: boolean }) {
   const { day, beside, bead, tone, title, note } = event
   return (
-    <LineRow
-      time={day}
-      since={beside}
-      bead={bead}
-      tone={tone}
-      waiting={waiting}
-      className="py-2.5!"
-    >
+    <LineRow time={day} since={beside} bead={bead} tone={tone} waiting={waiting} tight>
       <p className="font-semibold">{title}</p>
       {note && <div className="text-sm text-faint">{note}</div>}
     </LineRow>

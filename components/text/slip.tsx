@@ -1,7 +1,7 @@
 import type { ReactNode } from 'react'
 import { Bead, type BeadState } from '../ui/bead'
 
-export type SlipProps = {
+type SlipProps = {
   /** Left of the line what the household wrote, right of it what went out. */
   direction: 'in' | 'out'
   body: string
@@ -26,10 +26,10 @@ export function Slip(props: SlipProps) {
     <li className="relative my-3 grid grid-cols-[1fr_2rem_1fr] md:grid-cols-[1fr_5.5rem_1fr]">
       <SlipMark {...props} />
       <div
-        className={`border-rule bg-sheet min-w-0 border px-3 py-2 max-md:col-span-3 max-md:row-start-2 max-md:mt-1.5 max-md:w-[88%] md:row-start-1 ${
+        className={`min-w-0 border border-rule bg-sheet px-3 py-2 max-md:col-span-3 max-md:row-start-2 max-md:mt-1.5 max-md:w-[88%] md:row-start-1 ${
           isIn
-            ? 'border-r-ink border-r-[3px] md:col-start-1'
-            : 'border-l-water border-l-[3px] max-md:justify-self-end md:col-start-3'
+            ? 'border-r-[3px] border-r-ink md:col-start-1'
+            : 'border-l-[3px] border-l-water max-md:justify-self-end md:col-start-3'
         }`}
       >
         <span className="sr-only">{isIn ? 'They wrote: ' : 'We wrote: '}</span>
@@ -39,7 +39,7 @@ export function Slip(props: SlipProps) {
         >
           {body}
         </p>
-        {under && <p className="text-faint mt-1 text-sm italic">{under}</p>}
+        {under && <p className="mt-1 text-sm text-faint italic">{under}</p>}
       </div>
     </li>
   )
@@ -54,7 +54,7 @@ function SlipMark({ direction, at, time, receipt, receiptWords }: SlipProps) {
         tone={receipt === 'broken' ? 'clay' : 'water'}
         className="relative col-start-2 row-start-1 justify-self-center max-md:mt-0.5 md:mt-3"
       />
-      <p className={`text-faint row-start-1 font-mono text-xs md:pt-3 ${across}`}>
+      <p className={`row-start-1 font-mono text-xs text-faint md:pt-3 ${across}`}>
         <time dateTime={at}>{time}</time>
         <span
           className={`block font-sans ${receipt === 'broken' ? 'text-clay' : ''} ${

@@ -4,7 +4,7 @@ import type { ReactNode } from 'react'
 export function Slips({ label, children }: { label: string; children: ReactNode }) {
   return (
     <div className="relative py-1.5">
-      <span aria-hidden className="bg-water absolute -top-7 bottom-0 left-1/2 -ml-px w-0.5" />
+      <span aria-hidden className="absolute -top-7 bottom-0 left-1/2 -ml-px w-0.5 bg-water" />
       <ol aria-label={label} className="relative">
         {children}
       </ol>
@@ -15,7 +15,7 @@ export function Slips({ label, children }: { label: string; children: ReactNode 
 /** The day that the slips below it belong to, set across the line. */
 export function SlipDay({ children }: { children: ReactNode }) {
   return (
-    <li className="text-faint relative my-4 text-center text-sm">
+    <li className="relative my-4 text-center text-sm text-faint">
       <span className="bg-paper px-3">{children}</span>
     </li>
   )

@@ -1,8 +1,8 @@
 import type { ComponentProps } from 'react'
 import Link from 'next/link'
 
-export type ButtonKind = 'main' | 'line' | 'quiet' | 'danger'
-export type ButtonSize = 'normal' | 'small'
+type ButtonKind = 'main' | 'line' | 'quiet' | 'danger'
+type ButtonSize = 'normal' | 'small'
 
 const shared =
   'inline-flex items-center justify-center gap-2 rounded-paper text-center font-semibold no-underline transition-colors duration-100 disabled:cursor-not-allowed aria-disabled:cursor-not-allowed'

@@ -1,6 +1,6 @@
 import type { ReactNode } from 'react'
 
-export type NoticeTone = 'plain' | 'good' | 'due' | 'danger'
+type NoticeTone = 'plain' | 'good' | 'due' | 'danger'
 
 type NoticeProps = {
   tone?: NoticeTone

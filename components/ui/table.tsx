@@ -10,19 +10,14 @@ type TableProps = {
 /** A table that scrolls sideways by itself where the window is narrow. */
 export function Table({ caption, hideCaption, children }: TableProps) {
   return (
-    <div
-      role="region"
-      aria-label={caption}
-      tabIndex={0}
-      className="relative max-w-full overflow-x-auto"
-    >
+    <section aria-label={caption} tabIndex={0} className="relative max-w-full overflow-x-auto">
       <table className="w-full border-collapse text-left text-sm">
         <caption className={hideCaption ? 'sr-only' : 'pb-1 text-left font-semibold'}>
           {caption}
         </caption>
         {children}
       </table>
-    </div>
+    </section>
   )
 }
 
