@@ -1,6 +1,7 @@
 import { getDeps } from '@/lib/deps'
 import { checkEnvironment, env } from '@/lib/env'
 import { log } from '@/lib/log'
+import { prepareDesk } from '@/lib/services/prepare-desk'
 import { runJobs } from './run'
 
 function stopWith(lines: readonly string[]): never {
@@ -17,6 +18,7 @@ export async function startDesk(): Promise<void> {
   if (!settings.ok) stopWith(settings.problems)
   try {
     const deps = await getDeps()
+    await prepareDesk(deps)
     if (env().jobs) await runJobs(deps)
     const stop = () => {
       deps.close().then(

@@ -27,11 +27,11 @@ export const bn: readonly { moment: Moment; body: string }[] = [
   },
   {
     moment: 'change-due',
-    body: `{house}: ${stage} বদলানোর সময়। হলে লিখুন শেষ। নতুনটি না থাকলে লিখুন পার্টস।`,
+    body: `{house}: ${stage} বদলানোর সময়। হলে লিখুন শেষ। নতুনটি না থাকলে লিখুন পার্টস লাগবে।`,
   },
   {
     moment: 'change-nudge',
-    body: `{house}: ${stage} বদলানো বাকি। হলে লিখুন শেষ। নতুনটি না থাকলে লিখুন পার্টস।`,
+    body: `{house}: ${stage} বদলানো বাকি। হলে লিখুন শেষ। নতুনটি না থাকলে লিখুন পার্টস লাগবে।`,
   },
   {
     moment: 'flow-check',

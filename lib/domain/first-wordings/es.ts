@@ -28,11 +28,11 @@ export const es: readonly { moment: Moment; body: string }[] = [
   },
   {
     moment: 'change-due',
-    body: `{house}: toca cambiar ${stage}. ¿Ya? Escriba LISTO. ¿No tiene repuesto? Escriba PIEZA.`,
+    body: `{house}: toca cambiar ${stage}. ¿Ya? Escriba LISTO. ¿No tiene repuesto? Escriba NECESITO PIEZA.`,
   },
   {
     moment: 'change-nudge',
-    body: `{house}: falta cambiar ${stage}. ¿Ya? Escriba LISTO. ¿No tiene repuesto? Escriba PIEZA.`,
+    body: `{house}: falta cambiar ${stage}. ¿Ya? Escriba LISTO. ¿No tiene repuesto? Escriba NECESITO PIEZA.`,
   },
   {
     moment: 'flow-check',

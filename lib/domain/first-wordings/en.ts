@@ -24,11 +24,11 @@ export const en: readonly { moment: Moment; body: string }[] = [
   },
   {
     moment: 'change-due',
-    body: `{house}: time to change the ${stage}. Changed? Text DONE. No new one at home? Text PART.`,
+    body: `{house}: time to change the ${stage}. Changed? Text DONE. No new one at home? Text NEED PART.`,
   },
   {
     moment: 'change-nudge',
-    body: `{house}: the ${stage} still needs changing. Changed? Text DONE. No new one at home? Text PART.`,
+    body: `{house}: the ${stage} still needs changing. Changed? Text DONE. No new one at home? Text NEED PART.`,
   },
   {
     moment: 'flow-check',

@@ -28,11 +28,11 @@ export const fr: readonly { moment: Moment; body: string }[] = [
   },
   {
     moment: 'change-due',
-    body: `{house} : il faut changer ${stage}. Fini ? Envoyez FAIT. Pas de rechange ? Envoyez PIECE.`,
+    body: `{house} : il faut changer ${stage}. Fini ? Envoyez FAIT. Pas de rechange ? Envoyez BESOIN PIECE.`,
   },
   {
     moment: 'change-nudge',
-    body: `{house} : il reste à changer ${stage}. Fini ? Envoyez FAIT. Pas de rechange ? Envoyez PIECE.`,
+    body: `{house} : il reste à changer ${stage}. Fini ? Envoyez FAIT. Pas de rechange ? Envoyez BESOIN PIECE.`,
   },
   {
     moment: 'flow-check',
