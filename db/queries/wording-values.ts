@@ -3,7 +3,7 @@ import type { Language } from '@/lib/domain/language'
 import type { Handle } from '../client'
 import { areas, depots } from '../schema/area'
 import { households } from '../schema/household'
-import { kits } from '../schema/kit'
+import { kitModels, kits } from '../schema/kit'
 import { staff } from '../schema/staff'
 import { visits } from '../schema/visit'
 
@@ -26,9 +26,10 @@ export async function listHouseholdsToTry(db: Handle, language: Language) {
 /** The household, its newest kit and its depot: what a text to it may speak of. */
 export async function findHouseholdToTry(db: Handle, householdId: string) {
   const [row] = await db
-    .select({ household: households, kit: kits, depot: depots })
+    .select({ household: households, kit: kits, model: kitModels, depot: depots })
     .from(households)
     .innerJoin(kits, eq(kits.householdId, households.id))
+    .innerJoin(kitModels, eq(kitModels.id, kits.modelId))
     .innerJoin(areas, eq(areas.id, households.areaId))
     .innerJoin(depots, eq(depots.id, areas.depotId))
     .where(eq(households.id, householdId))

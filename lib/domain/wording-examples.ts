@@ -12,7 +12,7 @@ const examples: Values = {
   minutes: 12,
   visitor: 'Amparo',
   visitOn: '2026-09-24',
-  litres: 32,
+  litres: 1.5,
 }
 
 /** A value for everything a wording may speak of; what is known takes the place of the example. */

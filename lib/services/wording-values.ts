@@ -4,7 +4,6 @@ import { findOpenPromise } from '@/db/queries/promise'
 import { listSettings } from '@/db/queries/setting'
 import { findDueVisit, findHouseholdToTry } from '@/db/queries/wording-values'
 import type { MomentInfo } from '@/lib/domain/moments'
-import { dailyNeed } from '@/lib/domain/need'
 import type { Values } from '@/lib/domain/wording'
 import { readSettings } from '@/lib/schemas/settings'
 
@@ -26,12 +25,10 @@ async function stageValues(db: Handle, kitId: string): Promise<Values & { change
   }
 }
 
-async function kitValues(db: Handle, { kit, household }: Found): Promise<Values> {
+async function kitValues(db: Handle, { kit, model }: Found): Promise<Values> {
   const reading = await findLastReading(db, kit.id)
-  const { litresPerPersonDay } = readSettings(await listSettings(db))
-  const litres = dailyNeed({ people: household.people, litresPerPersonDay })
   return {
-    litres: Math.ceil(litres),
+    litres: model.bottleLitres,
     ...(reading ? { minutes: Math.round(reading.seconds / 60) } : {}),
   }
 }

@@ -1,0 +1,21 @@
+import type { Metadata } from 'next'
+import { WideSheet } from '@/components/frame/sheets'
+import { RoundsView } from '@/components/round/rounds-view'
+import { getDeps } from '@/lib/deps'
+import { deskActor } from '@/lib/desk'
+import { listRounds } from '@/lib/services/list-rounds'
+
+export const metadata: Metadata = { title: 'Rounds' }
+
+export default async function RoundsPage() {
+  const actor = await deskActor('see rounds')
+  const rounds = await listRounds(await getDeps(), actor)
+  return (
+    <WideSheet
+      title="Rounds"
+      lead="What goes out in the next fourteen days, by the day and hour of each household’s own area."
+    >
+      <RoundsView initial={rounds} />
+    </WideSheet>
+  )
+}
