@@ -66,11 +66,42 @@ export function denyMarks(marks: readonly Mark[], tokens: readonly Token[]): Mar
       denyForward(mark, settled, fences, forwardReach)
     }
   }
+  for (const mark of settled) {
+    if (mark.concept === 'notPlus') denyPlus(mark, settled, fences)
+  }
   // "Can't stop vomiting": a denied end is no end.
   for (const mark of settled) {
     if (mark.concept === 'ceased' && !mark.denied) denyForward(mark, settled, fences, forwardReach)
   }
   return settled
+}
+
+/** After "plus" these compare ("plus lent") unless "ne" stands before it. */
+const comparable: ReadonlySet<Concept> = new Set<Concept>([
+  'slow',
+  'fast',
+  'tooFast',
+  'good',
+  'bad',
+  'better',
+  'odd',
+  'clean',
+  'little',
+  'long',
+])
+
+function denyPlus(plus: Mark, marks: Mark[], fences: readonly number[]): void {
+  const isAnnounced = marks.some(
+    (mark) =>
+      mark.concept === 'ne' &&
+      mark.to <= plus.from &&
+      plus.from - mark.to <= 3 &&
+      !crosses(mark.to, plus.from, fences),
+  )
+  const compares = marks.some((mark) => mark.from === plus.to && comparable.has(mark.concept))
+  if (compares && !isAnnounced) return
+  if (denyBackward(plus, marks, fences, 1)) return
+  denyForward(plus, marks, fences, isAnnounced ? forwardReach : 2)
 }
 
 /** Places a denial does not cross: punctuation and "but". */

@@ -9,6 +9,8 @@ export const concepts = [
   'notNext', // "no" before a noun: denies the very next word only
   'notBack', // denies what stands before it
   'notAround', // French "pas": the verb before it, else what follows
+  'notPlus', // French "plus": no longer, unless it compares
+  'ne', // French "ne": announces a denial
   'ceased', // "stopped", "no longer": what follows is over
   'but',
   'or',

@@ -1,14 +1,98 @@
 import type { LanguagePack } from './concept'
+import { frIllness } from './fr-danger'
+import { frTalk } from './fr-talk'
+import { frWater } from './fr-water'
 
+/** French as people text it; elided words stand apart ("l eau", "n est"), without accents. */
 export const frPack: LanguagePack = {
   spelling: 'latin',
-  concepts: {},
-  numbers: {},
-  weakNumbers: {},
-  units: { minute: 'min', hour: 'h', second: 's', other: '' },
-  spans: {},
-  halves: {},
-  about: '',
-  timeOfDay: '',
-  common: '',
+  concepts: { ...frWater, ...frIllness, ...frTalk },
+  numbers: {
+    deux: 2,
+    trois: 3,
+    troi: 3,
+    quatre: 4,
+    katre: 4,
+    cinq: 5,
+    cink: 5,
+    sept: 7,
+    huit: 8,
+    dix: 10,
+    onze: 11,
+    douze: 12,
+    treize: 13,
+    quatorze: 14,
+    quinze: 15,
+    kinze: 15,
+    seize: 16,
+    'dix sept': 17,
+    'dix huit': 18,
+    'dix neuf': 19,
+    vingt: 20,
+    vint: 20,
+    vin: 20,
+    trente: 30,
+    quarante: 40,
+    cinquante: 50,
+    soixante: 60,
+    'soixante dix': 70,
+    'quatre vingt': 80,
+    'quatre vingts': 80,
+    'quatre vingt dix': 90,
+    cent: 100,
+    six: 6,
+    'vingt et un': 21,
+    'trente et un': 31,
+    'quarante et un': 41,
+  },
+  weakNumbers: { un: 1, une: 1, neuf: 9, demi: 0.5, demie: 0.5 },
+  units: {
+    minute:
+      'minute, minutes, min, mins, mn, mns, mnt, mnts, minut, minuts, m, minite, minites, minu, mint',
+    hour: 'heure, heures, h, hr, hrs, heur, heurs, eur, ere, hres',
+    second: 'seconde, secondes, sec, secs, s, segonde, segondes, second, sgd',
+    other: `litre*, lt, l, bouteille*, seau, seaux, verre, verres, bidon*, jour, jours, semaine*, mois, an, ans, annee*, fois, fs, enfant, enfants, fils, filles, fille, personne, personnes, seringue*, filtre*, piece, pieces, partie*, bouchon, bouchons, tuyau, goutte*, nuit, nuits, peu, chose, choses, cm, francs, familles, maisons, gosses, bebe, probleme, question, petit, petite, autre, nouveau, nouvelle, cartouche*, de, des, moment, instant, aide`,
+  },
+  spans: {
+    'demi heure': 30,
+    'demie heure': 30,
+    'une demi heure': 30,
+    'une demie heure': 30,
+    'heure et demie': 90,
+    'une heure et demie': 90,
+    'une heure et demi': 90,
+    'quart d heure': 15,
+    'un quart d heure': 15,
+    'trois quarts d heure': 45,
+    'trois quart d heure': 45,
+    'demi minute': 0.5,
+    'une demi minute': 0.5,
+    'une minute et demie': 1.5,
+    'une heure': 60,
+    'une minute': 1,
+    'une dizaine de minutes': 10,
+    'dizaine de minutes': 10,
+    'une quinzaine de minutes': 15,
+    'quinzaine de minutes': 15,
+    'une vingtaine de minutes': 20,
+    'vingtaine de minutes': 20,
+    'trentaine de minutes': 30,
+    'quarantaine de minutes': 40,
+    'demi eure': 30,
+    'une trentaine de minutes': 30,
+  },
+  halves: { 'et demie': 0.5, 'et demi': 0.5, 'et quart': 0.25, 'et un quart': 0.25, 'et dmi': 0.5 },
+  about:
+    'environ, a peu pres, presque, c est, ca prend, ca fait, en, plus ou moins, vers, dans les, fait, met',
+  timeOfDay: 'il y a, heures du matin',
+  common: `le la les l un une des de du d a au aux et ou mais donc or ni car que qu qui quoi dont ou ce cet cette ces c ca cela sa son ses mon ma mes ton ta tes notre nos votre vos leur leurs je j tu il elle on nous vous ils elles me m te t se s lui y en ne n pas plus
+    est es suis sommes etes sont etait sera soit ete etre ai as a avons avez ont avait aura avoir eu fait faire fais font faut va vais vont allez aller vient venir veut veux voulez peut peux pouvez pouvoir doit dois devez sait sais savoir voit vois voir dit dire dis met mets mettre mis prend prends prendre pris tient tenir laisse laisser
+    bien mal tres trop peu beaucoup assez moins aussi encore toujours jamais souvent parfois deja bientot hier demain aujourdhui maintenant ici la bas dans sur sous avec sans pour par vers chez entre depuis pendant avant apres contre jusqu comme comment quand combien pourquoi parce si non oui tout tous toute toutes autre autres meme rien personne quelque quelques chaque plusieurs aucun aucune
+    maison chambre cuisine porte table sol terre champ village ville ecole eglise marche travail route chemin jour jours nuit matin soir midi semaine mois an annee heure temps fois homme femme ami amie voisin gens dieu main mains tete yeux pied pieds bras coeur corps
+    grand grande petit petite nouveau nouvelle vieux vieille premier premiere dernier derniere seul seule haut bas long court chaud froid plein pleine ouvert ferme fermee bon bonne beau belle joli
+    manger mange riz pain lait the cafe sucre sel viande poisson oeuf cuisiner acheter achete payer vendre argent prix telephone reseau batterie photo image credit
+    cours court cour coup cou cout course couleur couler colle col sol sole sale salle sortie sorte port porte part parti partir poule pouce coude route boule roule moule foule
+    blanc bleu vert jaune rouge noir gris lune dune une hune lundi lit lire livre vivre ivre libre litre titre filtre fille file fil fin faim pain bain main gain
+    chose choses idee mot mots nom question reponse probleme raison histoire chance peur soleil vent pluie feu lumiere arbre fleur animal chien chat vache
+    tante tente lente lentille lent vent dent cent sent ment gens sang rang rond fond font pont mont`,
 }
