@@ -30,8 +30,7 @@ export function quantileInterval(values: readonly number[], chance: number): Spr
 /** The quantile as most programs give it: linear between the two nearest values. */
 function valueAt(sorted: readonly number[], chance: number): number {
   const place = (sorted.length - 1) * chance
-  const below = sorted[Math.floor(place)] ?? NaN
-  const above = sorted[Math.ceil(place)] ?? NaN
+  const [below = NaN, above = below] = sorted.slice(Math.floor(place), Math.floor(place) + 2)
   return below + (place - Math.floor(place)) * (above - below)
 }
 

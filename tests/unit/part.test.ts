@@ -38,6 +38,7 @@ describe('the stock to order up to', () => {
 
   it('ends even when the chance asked for is beyond rounding', () => {
     expect(orderUpTo({ mean: 5, chance: 1 - 2 ** -53 })).toBeLessThan(60)
+    expect(orderUpTo({ mean: 4000, chance: 1 - 2 ** -53 })).toBeLessThan(5000)
   })
 
   it.each([0, 1, NaN])('refuses a chance of %s', (chance) => {
