@@ -9,6 +9,9 @@ const running = new Set()
 /**
  * Runs one program to its end or its time limit. It has a process group of its own, so that a limit ends whatever the
  * program started too. Output is kept, not shown: the caller shows it when something failed.
+ *
+ * @param {{ command: string, parameters?: string[], environment?: NodeJS.ProcessEnv, limitSeconds: number }} program
+ * @returns {Promise<{ succeeded: boolean, output: string, seconds: number }>}
  */
 export function runProgram({ command, parameters = [], environment = process.env, limitSeconds }) {
   return new Promise((resolve) => {
