@@ -12,15 +12,17 @@ export type CreateRequest = {
 }
 
 export function readCreateRequest(form: URLSearchParams): CreateRequest {
+  // An empty parameter counts as one that was not given.
+  const given = (name: string) => form.get(name) || null
   return {
-    to: form.get('To'),
-    from: form.get('From'),
-    messagingServiceSid: form.get('MessagingServiceSid'),
-    body: form.get('Body'),
+    to: given('To'),
+    from: given('From'),
+    messagingServiceSid: given('MessagingServiceSid'),
+    body: given('Body'),
     mediaUrls: form.getAll('MediaUrl'),
-    statusCallback: form.get('StatusCallback'),
-    validityPeriod: form.get('ValidityPeriod'),
-    scheduleType: form.get('ScheduleType'),
-    sendAt: form.get('SendAt'),
+    statusCallback: given('StatusCallback'),
+    validityPeriod: given('ValidityPeriod'),
+    scheduleType: given('ScheduleType'),
+    sendAt: given('SendAt'),
   }
 }
