@@ -30,6 +30,11 @@ export function may(role: Role, act: Act): boolean {
   return (acts[act] as readonly Role[]).includes(role)
 }
 
+/** The roles that may do it. */
+export function rolesFor(act: Act | 'public'): readonly Role[] {
+  return act === 'public' ? [] : acts[act]
+}
+
 /** Thrown by a service when the person may not do what was asked; the border answers 403. */
 export class NotAllowedError extends Error {
   constructor(act: Act) {

@@ -9,6 +9,14 @@ const quantitySchema = z
 
 const shelfInputSchema = z.object({ partId: z.string().min(1), quantity: quantitySchema })
 
+const stockSchema = z
+  .array(shelfInputSchema)
+  .max(50)
+  .refine(
+    (stock) => new Set(stock.map(({ partId }) => partId)).size === stock.length,
+    'One number a part.',
+  )
+
 export const depotInputSchema = z.object({
   name: z
     .string({ error: 'Write a name.' })
@@ -16,7 +24,7 @@ export const depotInputSchema = z.object({
     .min(1, 'Write a name.')
     .max(60, 'At most 60 characters.'),
   place: z.string().trim().max(200, 'At most 200 characters.').default(''),
-  stock: z.array(shelfInputSchema).max(50).default([]),
+  stock: stockSchema.default([]),
 })
 
 export type DepotInput = z.output<typeof depotInputSchema>
@@ -24,7 +32,7 @@ export type DepotInput = z.output<typeof depotInputSchema>
 export const stockInputSchema = z.object({
   /** `received` adds to what is there; `counted` is what is there. */
   why: z.enum(['received', 'counted'], { error: 'Say whether parts came in or were counted.' }),
-  stock: z.array(shelfInputSchema).min(1, 'Write a number for at least one part.').max(50),
+  stock: stockSchema.refine((stock) => stock.length > 0, 'Write a number for at least one part.'),
 })
 
 export type StockInput = z.output<typeof stockInputSchema>

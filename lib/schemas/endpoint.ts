@@ -19,8 +19,12 @@ export function endpoint<const E extends Endpoint>(definition: E): E {
   return definition
 }
 
-export type BodyOf<E extends Endpoint> = E['body'] extends z.ZodType ? z.output<E['body']> : undefined
-export type QueryOf<E extends Endpoint> = E['query'] extends z.ZodType ? z.output<E['query']> : undefined
+export type BodyOf<E extends Endpoint> = E['body'] extends z.ZodType
+  ? z.output<E['body']>
+  : undefined
+export type QueryOf<E extends Endpoint> = E['query'] extends z.ZodType
+  ? z.output<E['query']>
+  : undefined
 export type ResponseOf<E extends Endpoint> = z.input<E['response']>
 
 /** A refusal the caller can act on: the state of things does not allow what was asked. */

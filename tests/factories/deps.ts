@@ -46,6 +46,7 @@ export async function testDeps({ at }: { at: number | string }): Promise<TestDep
         return Promise.resolve()
       },
     },
+    mailSet: true,
     letters,
     clock,
     practice: clock,

@@ -1,0 +1,19 @@
+import { areaEndpoints } from './area'
+import { depotEndpoints } from './depot'
+import type { Endpoint } from './endpoint'
+import { householdEndpoints } from './household'
+import { openEndpoints } from './open-endpoints'
+import { practiceEndpoints } from './practice'
+import { roundsEndpoints } from './rounds'
+import { wordingEndpoints } from './wording'
+
+/** Every route under /api: what /api/openapi.json is made of, and what the access checks go through. */
+export const endpoints: readonly Endpoint[] = [
+  ...openEndpoints,
+  ...householdEndpoints,
+  ...areaEndpoints,
+  ...depotEndpoints,
+  ...wordingEndpoints,
+  ...roundsEndpoints,
+  ...practiceEndpoints,
+]
