@@ -6,8 +6,7 @@ import { describe, expect, it } from 'vitest'
 import { normalisedFlow, waterDensity, waterViscosity } from '@/lib/domain/flow'
 
 const micropascals = (celsius: number) => waterViscosity(celsius) * 1e6
-const withinShare = (value: number, expected: number, share: number) =>
-  expect(Math.abs(value / expected - 1)).toBeLessThanOrEqual(share)
+const offBy = (value: number, expected: number) => Math.abs(value / expected - 1)
 
 describe('the viscosity of water', () => {
   // IAPWS SR6-08(2011), check values of equation 7 at 0.1 MPa [C]
@@ -30,7 +29,7 @@ describe('the viscosity of water', () => {
     [35, 719.12],
     [40, 652.73],
   ])('at %d °C is the table’s', (celsius, expected) => {
-    withinShare(micropascals(celsius), expected, 1e-4)
+    expect(offBy(micropascals(celsius), expected)).toBeLessThanOrEqual(1e-4)
   })
 
   // Perry's Chemical Engineers' Handbook, 9th ed., table 2-135, saturated liquid [C], ±0.2 %
@@ -41,7 +40,7 @@ describe('the viscosity of water', () => {
     [310, 693.54],
     [320, 577.02],
   ])('at %d K agrees with another table', (kelvin, expected) => {
-    withinShare(micropascals(kelvin - 273.15), expected, 2e-3)
+    expect(offBy(micropascals(kelvin - 273.15), expected)).toBeLessThanOrEqual(2e-3)
   })
 
   // ISO/TR 3666:1998 [M]: the viscosity that viscometers are calibrated by
@@ -53,7 +52,7 @@ describe('the viscosity of water', () => {
   it('agrees with a cubic for cold water to 1 %, and is right to leave it when warm', () => {
     const cubic = (t: number) => 1.784 - 0.0575 * t + 0.0011 * t ** 2 - 1e-5 * t ** 3
     for (let celsius = 0; celsius <= 20; celsius += 1) {
-      withinShare(cubic(celsius), waterViscosity(celsius) * 1000, 0.01)
+      expect(offBy(cubic(celsius), waterViscosity(celsius) * 1000)).toBeLessThanOrEqual(0.01)
     }
     expect(cubic(40) / (waterViscosity(40) * 1000)).toBeCloseTo(0.93, 2)
   })
