@@ -20,7 +20,7 @@ export function HeadWords({ words }: { words: readonly Word[] }) {
   return (
     <nav
       aria-label="Pages"
-      className="flex gap-x-5.5 max-md:order-last max-md:-mr-edge max-md:w-full max-md:[scrollbar-width:none] max-md:overflow-x-auto max-md:pl-[calc(var(--lead-x)-var(--fall-x)+0.75rem)]"
+      className="flex gap-x-5.5 self-end max-lg:order-last max-lg:-mr-edge max-lg:w-full max-lg:[scrollbar-width:none] max-lg:overflow-x-auto max-lg:pl-[calc(var(--lead-x)-var(--fall-x)+0.75rem)]"
     >
       {words.map((word) => {
         const here = [word.href, ...(word.also ?? [])].some((href) => isUnder(pathname, href))

@@ -20,7 +20,7 @@ export function Head({ words, person, home = '/' }: HeadProps) {
       >
         Skip to the sheet
       </a>
-      <div className="flex flex-wrap items-baseline gap-x-8 pt-4 pr-edge pl-[calc(var(--fall-x)-0.75rem)] md:flex-nowrap md:pt-5">
+      <div className="flex flex-wrap items-baseline gap-x-8 pt-4 pr-edge pl-[calc(var(--fall-x)-0.75rem)] md:pt-5 lg:flex-nowrap">
         <Link
           href={home}
           className="-my-1 py-1 font-title text-xl font-semibold tracking-[-0.01em] no-underline"
@@ -30,17 +30,17 @@ export function Head({ words, person, home = '/' }: HeadProps) {
         <HeadWords words={words} />
         {person && (
           <div className="ml-auto flex items-baseline gap-4 text-right text-sm text-faint md:text-base">
-            <span className="max-md:hidden">
+            <span className="max-lg:hidden">
               {[person.name, person.languages.join(', ')].filter(Boolean).join(' · ')}
             </span>
-            <span className="md:hidden">{person.name}</span>
+            <span className="lg:hidden">{person.name}</span>
             <SignOut />
           </div>
         )}
       </div>
       <span
         aria-hidden
-        className="absolute -bottom-px left-fall -ml-px h-[calc(100%-3.1rem)] w-0.5 bg-water md:h-4"
+        className="absolute -bottom-px left-fall -ml-px h-[calc(100%-3rem)] w-0.5 bg-water"
       />
     </header>
   )

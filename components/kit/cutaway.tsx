@@ -53,7 +53,7 @@ function Label({ label }: { label: CutawayLabel }) {
         <p>
           {word}
           {odds && (
-            <span className="opacity-0 group-hover:opacity-100 group-focus:opacity-100 pointer-coarse:opacity-100">
+            <span className="sr-only group-hover:not-sr-only group-focus:not-sr-only pointer-coarse:not-sr-only">
               {' · '}
               {odds}
             </span>

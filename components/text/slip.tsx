@@ -23,7 +23,7 @@ export function Slip(props: SlipProps) {
   const { direction, body, language, under } = props
   const isIn = direction === 'in'
   return (
-    <li className="relative my-3 grid grid-cols-[1fr_2rem_1fr] md:grid-cols-[1fr_5.5rem_1fr]">
+    <li className="relative my-3 grid grid-cols-[1fr_2rem_1fr] items-start md:grid-cols-[1fr_5.5rem_1fr]">
       <SlipMark {...props} />
       <div
         className={`min-w-0 border border-rule bg-sheet px-3 py-2 max-md:col-span-3 max-md:row-start-2 max-md:mt-1.5 max-md:w-[88%] md:row-start-1 ${

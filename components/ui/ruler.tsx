@@ -10,6 +10,7 @@ type RulerProps = {
 }
 
 const ticksPerPart = 16
+const mostNamed = 8
 
 function Ticks({ segments }: { segments: number }) {
   // Long texts get fewer ticks a part, or they would run into a grey bar.
@@ -38,6 +39,8 @@ export function Ruler({ units, perPart, segments, encoding, offending = [] }: Ru
   const room = parts * perPart
   const filled = Math.min(100, (units / room) * 100)
   const words = `${units} of ${room} · ${parts === 1 ? '1 part' : `${parts} parts`}`
+  // A text in another script is all of such letters: naming them would help nobody.
+  const isFew = offending.length > 0 && offending.length <= mostNamed
   return (
     <div className="mt-3">
       <svg aria-hidden width="100%" height="21" className="block overflow-visible">
@@ -47,12 +50,13 @@ export function Ruler({ units, perPart, segments, encoding, offending = [] }: Ru
       </svg>
       <div className="mt-1 flex flex-wrap justify-between gap-x-6 text-xs text-faint">
         <span>
-          {offending.length > 0 && (
+          {isFew && (
             <>
-              <Offending characters={offending} /> leaves {perPart} letters a part, not 160.
+              <Offending characters={offending} /> leaves {perPart} letters a part, not{' '}
+              {parts === 1 ? 160 : 153}.
             </>
           )}
-          {offending.length === 0 && encoding === 'UCS-2' && `${perPart} letters a part`}
+          {!isFew && encoding === 'UCS-2' && `${perPart} letters a part in this script`}
         </span>
         <span className="ml-auto font-mono">{words}</span>
       </div>
@@ -61,7 +65,7 @@ export function Ruler({ units, perPart, segments, encoding, offending = [] }: Ru
 }
 
 function Offending({ characters }: { characters: readonly string[] }) {
-  return characters.slice(0, 6).map((character) => (
+  return characters.map((character) => (
     <mark
       key={character}
       className="mr-1 border-b-2 border-clay bg-transparent px-1 font-mono text-sm font-semibold text-clay"
