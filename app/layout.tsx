@@ -25,7 +25,7 @@ export default async function RootLayout({ children }: { children: ReactNode }) 
   await connection()
   return (
     <html lang="en">
-      <body className="bg-paper text-ink font-sans text-base antialiased">{children}</body>
+      <body className="bg-paper font-sans text-base text-ink antialiased">{children}</body>
     </html>
   )
 }
