@@ -159,20 +159,13 @@ function endByOdds(odds: Odds, tried: readonly Tried[]): Next {
   const worst = suspectIds.reduce((best, id) => (odds[id] > odds[best] ? id : best))
   const stage = suspectStage[worst]
   const wasTried = trialsOf(tried).some(({ step }) => step.stage === stage)
-  const known = `${suspectNames[worst]} is ${oddsWords(odds[worst])}`
+  const known = `${suspectNames[worst]}: ${oddsWords(odds[worst])}`
   if (stage !== 0 && wasTried && odds[worst] >= 0.5 && worst !== 'cracked-fibre') {
-    return {
-      kind: 'end',
-      end: 'part',
-      stage,
-      why: `${known} and its cure did not help: change it.`,
-    }
+    const why = `${known}; its cure did not help, so the stage is changed.`
+    return { kind: 'end', end: 'part', stage, why }
   }
-  return {
-    kind: 'end',
-    end: 'visit',
-    why: `No step by text is worth the trouble; ${known.toLowerCase()}.`,
-  }
+  const why = `No step by text is worth its trouble. ${known}; it needs eyes and hands.`
+  return { kind: 'end', end: 'visit', why }
 }
 
 /** "likely, 5 in 10". */

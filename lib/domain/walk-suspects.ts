@@ -40,6 +40,23 @@ export const suspectStage: Record<SuspectId, 0 | 1 | 2 | 3> = {
   'spent-fibre': 3,
 }
 
+/**
+ * How a walk deals with each suspect: by a step that cures it, by the flow figure (cold is in it),
+ * by changing the stage, or by the safety question.
+ */
+export const dealtWithBy: Record<SuspectId, 'cure' | 'figure' | 'change' | 'safety'> = {
+  'full-cloth': 'cure',
+  'fouled-fibre': 'cure',
+  'packed-carbon': 'cure',
+  'air-lock': 'cure',
+  'kinked-hose': 'cure',
+  'low-container': 'cure',
+  'cold-water': 'figure',
+  'misfitted-cap': 'cure',
+  'cracked-fibre': 'safety',
+  'spent-fibre': 'change',
+}
+
 /** Probability of each suspect; they sum to 1, since a walk looks for one fault. */
 export type Odds = Record<SuspectId, number>
 

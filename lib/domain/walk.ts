@@ -1,6 +1,7 @@
 import type { Recovery } from './flow'
 import type { Trouble } from './trouble'
-import { stepOf, steps, type Step, type StepAnswer, type StepId } from './walk-catalogue'
+import { stepOf, type Step, type StepAnswer, type StepId } from './walk-catalogue'
+import { soundSteps } from './walk-check'
 import { afterAnswer, afterOutcome, normalise, withEvidence } from './walk-odds'
 import { bestByCost, figureRule, safetyRule, settledRule, washRule, type Next } from './walk-rules'
 import {
@@ -115,7 +116,7 @@ function oddsAfter(start: Odds, tried: readonly Tried[]): Odds {
  * The next best step of a walk, or its end. In order: what is settled already, safety questions,
  * a missing figure, the second wash, then the best expected cost. `from` is the catalogue.
  */
-export function nextStep(walk: Walk, from: readonly Step[] = steps): Next {
+export function nextStep(walk: Walk, from: readonly Step[] = soundSteps): Next {
   const position = { odds: walk.odds, tried: walk.tried, from }
   return (
     settledRule(position) ??
