@@ -1,6 +1,6 @@
 import { spawnSync } from 'node:child_process'
 import { createHash } from 'node:crypto'
-import { existsSync, readdirSync, readFileSync, writeFileSync } from 'node:fs'
+import { existsSync, readdirSync, readFileSync, statSync, writeFileSync } from 'node:fs'
 import path from 'node:path'
 
 /** The root of the repository: every command runs there, wherever it was called from. */
@@ -109,11 +109,9 @@ function byText(one, other) {
 function filesUnder(name) {
   const full = path.join(root, name)
   if (!existsSync(full) || notInBuild.includes(name)) return []
-  if (path.extname(name) !== '') return [name]
-  return readdirSync(full, { withFileTypes: true }).flatMap((entry) => {
-    const inside = path.join(name, entry.name)
-    return entry.isDirectory() ? filesUnder(inside) : [inside]
-  })
+  // Not told by a dot in the name: the folder of a route may be called `openapi.json`.
+  if (!statSync(full).isDirectory()) return [name]
+  return readdirSync(full).flatMap((entry) => filesUnder(path.join(name, entry)))
 }
 
 /** Runs a step to its end in sight of the person at the keyboard. */
