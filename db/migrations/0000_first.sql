@@ -299,6 +299,7 @@ CREATE TABLE "texts" (
 	"wording_id" text,
 	"language" text NOT NULL,
 	"body" text NOT NULL,
+	"values" jsonb,
 	"staff_body" text,
 	"segments" integer DEFAULT 0 NOT NULL,
 	"asked" text DEFAULT 'none' NOT NULL,

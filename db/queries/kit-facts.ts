@@ -101,3 +101,8 @@ export async function updateHousehold(
 ) {
   await db.update(households).set(change).where(eq(households.id, householdId))
 }
+
+export async function findHousehold(db: Handle, householdId: string) {
+  const [row] = await db.select().from(households).where(eq(households.id, householdId))
+  return row ?? null
+}

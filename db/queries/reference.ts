@@ -5,7 +5,7 @@ import { parts } from '../schema/part'
 
 const MODEL = {
   name: 'Three-stage gravity kit',
-  nominalLitresPerHour: 15,
+  nominalLitresPerHour: 18,
   bottleLitres: 1,
 }
 

@@ -83,6 +83,8 @@ export const texts = pgTable(
     wordingId: text('wording_id').references(() => wordings.id),
     language: text('language').$type<Language>().notNull(),
     body: text('body').notNull(),
+    /** What the wording was filled with: a text that waits is worded anew when an edition changes. */
+    values: jsonb('values').$type<Record<string, string | number>>(),
     staffBody: text('staff_body'),
     segments: integer('segments').notNull().default(0),
     asked: text('asked').$type<Asked>().notNull().default('none'),

@@ -4,6 +4,7 @@ import type { Concept, LanguagePack } from './reply-words/concept'
 import { enPack } from './reply-words/en'
 import { esPack } from './reply-words/es'
 import { frPack } from './reply-words/fr'
+import { foldText } from './reply-tokens'
 import {
   allowedSlips,
   foldBengali,
@@ -36,8 +37,9 @@ type Lexicon = {
   respell: (word: string) => string
 }
 
-function listed(text: string): string[] {
-  return text
+/** Entries of a word list, folded as a text is. */
+export function listed(text: string): string[] {
+  return foldText(text)
     .split(/[,\n]/)
     .map((entry) => entry.trim())
     .filter((entry) => entry !== '')
@@ -49,12 +51,12 @@ function respellerOf(pack: LanguagePack): (word: string) => string {
 }
 
 function numberWords(pack: LanguagePack): string[] {
-  const spoken = [pack.numbers, pack.weakNumbers, pack.spans, pack.halves]
-  return [
-    ...spoken.flatMap((words) => Object.keys(words)),
-    ...Object.values(pack.units).flatMap(listed),
-    ...[pack.about, pack.timeOfDay].flatMap(listed),
-  ].flatMap((entry) => entry.split(' '))
+  const spoken = [pack.numbers, pack.weakNumbers, pack.spans, pack.halves, pack.shifts ?? '']
+  const others = [...Object.values(pack.units), pack.about, pack.timeOfDay]
+  return [...spoken, ...others]
+    .flatMap(listed)
+    .flatMap((entry) => entry.split(' '))
+    .filter((word) => !/^-?[\d.]+$/.test(word))
 }
 
 /** Adds a word both as it is written and as it is respelled. */
@@ -93,7 +95,8 @@ function buildLexicon(language: Language): Lexicon {
       keys.forEach((key) => learn(lexicon, key))
     }
   }
-  for (const word of [...numberWords(pack), ...pack.common.split(/\s+/)]) learn(lexicon, word)
+  for (const word of [...numberWords(pack), ...foldText(pack.common).split(/\s+/)])
+    learn(lexicon, word)
   return lexicon
 }
 
@@ -105,6 +108,11 @@ function lexiconOf(language: Language): Lexicon {
   const built = buildLexicon(language)
   lexicons.set(language, built)
   return built
+}
+
+/** A word without what writers of the language leave to chance. */
+export function respelt(word: string, language: Language): string {
+  return respellerOf(languagePacks[language])(word)
 }
 
 export function entriesStartingWith(language: Language, key: string): readonly Entry[] {

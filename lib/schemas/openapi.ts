@@ -8,10 +8,9 @@ import { rolesFor } from '@/lib/domain/role'
 import { endpoints } from './api'
 import type { Endpoint } from './endpoint'
 
-type SchemaObject = NonNullable<
-  NonNullable<ReturnType<OpenApiGeneratorV31['generateDocument']>['components']>['schemas']
->[string] & { properties?: Record<string, object>; required?: string[] }
-type ParameterObject = NonNullable<RouteConfig['parameters']>[number] & { name: string }
+/** As much of a JSON Schema as is looked into here. */
+type PlainSchema = { properties?: Record<string, object>; required?: string[] }
+type Parameter = { name: string; in: 'path' | 'query'; required: boolean; schema: object }
 
 const refusalSchema = z.object({ reason: z.string() })
 const problemsSchema = refusalSchema.extend({
@@ -21,7 +20,7 @@ const problemsSchema = refusalSchema.extend({
 /** A schema as JSON Schema 2020-12, which OpenAPI 3.1 speaks: what comes in as sent, what goes out as got. */
 function schemaOf(schema: z.ZodType, io: 'input' | 'output') {
   const { $schema: _dialect, ...plain } = z.toJSONSchema(schema, { io, unrepresentable: 'any' })
-  return plain as SchemaObject
+  return plain as PlainSchema
 }
 
 function json(description: string, schema: z.ZodType) {
@@ -34,16 +33,16 @@ function content(description: string, type: string, schema: z.ZodType) {
 
 const isWebhook = ({ path }: Endpoint) => path.startsWith('/api/sms/')
 
-function parametersOf(definition: Endpoint): ParameterObject[] {
+function parametersOf(definition: Endpoint): Parameter[] {
   const names = [...definition.path.matchAll(/\{(\w+)\}/g)].map(([, name]) => name ?? '')
-  const inPath = names.map((name): ParameterObject => ({
+  const inPath = names.map((name): Parameter => ({
     name,
     in: 'path',
     required: true,
     schema: { type: 'string' },
   }))
   const query = definition.query ? schemaOf(definition.query, 'input') : {}
-  const inQuery = Object.entries(query.properties ?? {}).map(([name, schema]): ParameterObject => ({
+  const inQuery = Object.entries(query.properties ?? {}).map(([name, schema]): Parameter => ({
     name,
     in: 'query',
     required: (query.required ?? []).includes(name),

@@ -75,6 +75,7 @@ export async function queueText(tx: Transaction, deps: Deps, letter: Letter): Pr
     wordingId: composed.ok ? composed.wording.id : null,
     language: composed.ok ? composed.wording.language : letter.household.language,
     body,
+    values: letter.values,
     staffBody: forStaff?.ok ? forStaff.text : null,
     segments: segmentsOf(body).segments,
     asked: momentInfo(letter.moment)?.asked ?? 'none',

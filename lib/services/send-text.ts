@@ -6,6 +6,7 @@ import { findPhone } from '@/db/queries/phone'
 import { findTextForUpdate, listDueTexts, updateText, type TextRow } from '@/db/queries/text'
 import type { Deps } from '@/lib/deps'
 import { decideSend, type SendDecision } from '@/lib/domain/send'
+import { rewordText } from './reword-text'
 import { acceptAttempt, refuseAttempt } from './settle-attempt'
 import { dropText } from './drop-text'
 
@@ -58,8 +59,9 @@ async function claim(tx: Transaction, deps: Deps, textId: string): Promise<Claim
     postingAt: now,
   })
   if (!attempt) return null
+  const worded = await rewordText(tx, text)
   await updateText(tx, text.id, { state: 'sending' })
-  return { text, attempt }
+  return { text: worded, attempt }
 }
 
 /**

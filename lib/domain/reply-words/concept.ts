@@ -111,17 +111,17 @@ export type NumberUnit = 'hour' | 'minute' | 'second' | 'other'
  */
 export type LanguagePack = {
   concepts: Partial<Record<Concept, string>>
-  /** Number words that stand for a figure wherever they are. */
-  numbers: Readonly<Record<string, number>>
-  /** Number words that are also articles or something else: only before a unit or alone. */
-  weakNumbers: Readonly<Record<string, number>>
+  /** Number words, each followed by its value, that stand for a figure wherever they are. */
+  numbers: string
+  /** Number words that are also articles or something else: only before a unit. */
+  weakNumbers: string
   units: Record<NumberUnit, string>
-  /** Whole spans of time said in words, in minutes. */
-  spans: Readonly<Record<string, number>>
-  /** "and a half" and its kind, in parts of the unit before it. */
-  halves: Readonly<Record<string, number>>
+  /** Whole spans of time said in words, each followed by its minutes. */
+  spans: string
+  /** "and a half" and its kind, each followed by its part of the unit before it. */
+  halves: string
   /** Bengali words that shift the number after them: half more, a quarter less. */
-  shifts?: Readonly<Record<string, number>>
+  shifts?: string
   /** "about", "it takes": may stand beside a bare figure. */
   about: string
   /** "ago", "in": a figure after or before it is a time of day or a promise, not a flow. */

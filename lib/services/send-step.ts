@@ -1,0 +1,74 @@
+import { findFirstPhone } from '@/db/queries/phone'
+import type { Deps } from '@/lib/deps'
+import type { Moment } from '@/lib/domain/moments'
+import type { Actor } from '@/lib/domain/role'
+import { stepOf } from '@/lib/domain/walk-catalogue'
+import { applyTicketEvent } from './apply-ticket-event'
+import { queueText } from './queue-text'
+import { workTicket, type TicketRef, type TicketWork, type Worked } from './ticket-work'
+
+type Sending = { moment: Moment; stepId?: string; body?: string }
+
+async function sendToHousehold(
+  deps: Deps,
+  actor: Actor,
+  { held, sending }: { held: TicketWork; sending: Sending },
+) {
+  const { tx, ticket, facts, now } = held
+  const phone = await findFirstPhone(tx, facts.household.id)
+  if (!phone) return { ok: false as const, reason: 'This household has no phone.' }
+  return queueText(tx, deps, {
+    purpose: `step:${ticket.id}:${ticket.version + 1}:${sending.stepId ?? 'own words'}`,
+    moment: sending.moment,
+    phone,
+    household: facts.household,
+    kitId: facts.kit.id,
+    ticketId: ticket.id,
+    stepId: sending.stepId,
+    values: { litres: facts.model.bottleLitres, dueOn: facts.kit.nextWashOn, stage: 3 },
+    staffId: actor.staffId,
+    body: sending.body,
+    sendAfter: now,
+    anyHour: true,
+  })
+}
+
+/** Sends a step of the walk, in the wording's words or the agent's own. */
+export function sendStep(
+  deps: Deps,
+  actor: Actor,
+  { stepId, body, ...ref }: TicketRef & { stepId: string; body?: string },
+): Promise<Worked> {
+  return workTicket(deps, actor, {
+    ...ref,
+    act: 'send step',
+    detail: { stepId, ownWords: body !== undefined },
+    work: async (held) => {
+      const step = stepOf(stepId)
+      if (!step) return { ok: false, reason: 'There is no such step.' }
+      const queued = await sendToHousehold(deps, actor, {
+        held,
+        sending: { moment: step.moment, stepId, body },
+      })
+      if (!queued.ok) return queued
+      return applyTicketEvent(held.tx, deps, {
+        ticketId: held.ticket.id,
+        staffId: actor.staffId,
+        event: { kind: 'step sent', stepId, by: actor.staffId },
+      })
+    },
+  })
+}
+
+/** Sends an agent's own words; they ask for nothing that the desk would read an answer to. */
+export function writeToHousehold(
+  deps: Deps,
+  actor: Actor,
+  { body, ...ref }: TicketRef & { body: string },
+): Promise<Worked> {
+  return workTicket(deps, actor, {
+    ...ref,
+    act: 'write to household',
+    work: (held) => sendToHousehold(deps, actor, { held, sending: { moment: 'got-it', body } }),
+  })
+}
