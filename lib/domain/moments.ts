@@ -82,10 +82,8 @@ const rows = [
     needs: ['visitOn'],
   }),
   row('stop-using', 'Trouble', 'Stop using', { safety: true }),
-  row('drink-advice', 'Trouble', 'Drink advice', {
-    safety: true,
-    offers: ['litres', 'minutes'],
-  }),
+  // `minutes` here is how long to boil, from the table that the programme chose.
+  row('drink-advice', 'Trouble', 'Drink advice', { safety: true, offers: ['litres', 'minutes'] }),
   row('unwell', 'Trouble', 'Unwell', { safety: true }),
   row('unwell-now', 'Trouble', 'Unwell: go now', { safety: true }),
   row('thanks', 'Manners', 'Thanks', { offers: ['dueOn'] }),

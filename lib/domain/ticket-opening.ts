@@ -1,14 +1,13 @@
-import { isUnderWay, sendStep, takeOutOfService } from './ticket-answer'
+import { answered, isUnderWay, sendStep, takeOutOfService } from './ticket-answer'
 import type { TicketEvent, TicketOutcome, TicketState } from './ticket-types'
 import { isDanger, isWorse, type Trouble } from './trouble'
 import { nextStep, startWalk } from './walk'
-import type { Odds } from './walk-suspects'
+
+type Opened = Extract<TicketEvent, { kind: 'opened' }>
 
 /** A new ticket. Slow and stopped water are walked at once; danger gets its fixed answer. */
-export function opened(
-  { trouble, odds }: Extract<TicketEvent, { kind: 'opened' }>,
-  now: number,
-): TicketOutcome {
+export function opened(event: Opened, now: number): TicketOutcome {
+  const { trouble } = event
   const state: TicketState = {
     stage: 'new',
     trouble,
@@ -27,7 +26,7 @@ export function opened(
     visitId: null,
   }
   if (isDanger(trouble)) return fixedAnswer(state, now)
-  return isWalked(trouble) ? startWalking(state, odds) : { state, effects: [] }
+  return isWalked(trouble) ? startWalking(state, event, now) : { state, effects: [] }
 }
 
 /** More was told of an open ticket. It can only weigh more than before, never less. */
@@ -36,16 +35,29 @@ export function worsened(state: TicketState, trouble: Trouble, now: number): Tic
   const worse: TicketState = { ...state, trouble }
   if (isDanger(trouble)) return fixedAnswer({ ...worse, automatic: false }, now)
   const isAlreadyWalked = state.walk !== null || state.takenBy !== null || isUnderWay(state)
-  return isWalked(trouble) && !isAlreadyWalked ? startWalking(worse) : { state: worse, effects: [] }
+  return isWalked(trouble) && !isAlreadyWalked
+    ? startWalking(worse, {}, now)
+    : { state: worse, effects: [] }
 }
 
 function isWalked(trouble: Trouble): boolean {
   return trouble === 'slow' || trouble === 'no flow'
 }
 
-function startWalking(state: TicketState, priors?: Odds): TicketOutcome {
-  const walk = startWalk({ trouble: state.trouble, priors })
+function startWalking(
+  state: TicketState,
+  { odds, cues, celsius, figure }: Omit<Opened, 'kind' | 'trouble'>,
+  now: number,
+): TicketOutcome {
+  const walk = startWalk({ trouble: state.trouble, priors: odds, cues, celsius })
   const walking: TicketState = { ...state, walk, automatic: true, stage: 'walking' }
+  if (figure) {
+    return answered(
+      walking,
+      { kind: 'answered', stepId: 'ask-flow', answer: 'done', ...figure },
+      now,
+    )
+  }
   const next = nextStep(walk)
   // A walk with nothing tried cannot have ended; were it so, a person would see it in the shift.
   return next.kind === 'step' ? sendStep(walking, next.step.id) : { state: walking, effects: [] }

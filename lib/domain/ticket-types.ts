@@ -3,7 +3,7 @@ import type { Moment } from './moments'
 import type { Trouble } from './trouble'
 import type { Walk } from './walk'
 import type { StepAnswer, StepId } from './walk-catalogue'
-import type { Odds } from './walk-suspects'
+import type { Cue, Odds } from './walk-suspects'
 
 export type StageNumber = 1 | 2 | 3
 
@@ -36,7 +36,16 @@ export type TicketState = {
 export type Need = 'enough' | 'slow' | 'short'
 
 export type TicketEvent =
-  | { kind: 'opened'; trouble: Trouble; odds?: Odds }
+  | {
+      kind: 'opened'
+      trouble: Trouble
+      /** Counted for the area and season; without them the catalogue's own. */
+      odds?: Odds
+      cues?: readonly Cue[]
+      celsius?: number
+      /** A flow figure that came with the complaint: it need not be asked for. */
+      figure?: { recovery: Recovery; need?: Need }
+    }
   | { kind: 'taken'; staffId: string }
   | { kind: 'handed on'; staffId: string | null }
   | { kind: 'worsened'; trouble: Trouble }

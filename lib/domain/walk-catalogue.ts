@@ -74,22 +74,24 @@ function cure(
   return { kind: 'cure', asks: 'step', tries: 1, answers: afterCure, ...step }
 }
 
-/** The steps for a three-stage gravity kit. Minutes and chances: common practice, no source. */
-export const steps: readonly Step[] = [
-  {
-    id: 'ask-flow',
-    name: 'Ask how long a litre takes',
+function askFlow(step: Pick<Step, 'id' | 'name' | 'moment' | 'tries'>): Step {
+  return {
+    ...step,
     kind: 'question',
     minutes: timingMinutes,
-    moment: 'ask-flow',
     asks: 'flow',
-    tries: 8,
     answers: [
       { answer: 'done', label: 'Minutes …' },
       { answer: 'no', label: 'Nothing comes' },
       { answer: 'not done', label: 'Cannot measure' },
     ],
-  },
+  }
+}
+
+/** The steps for a three-stage gravity kit. Minutes and chances: common practice, no source. */
+export const steps: readonly Step[] = [
+  askFlow({ id: 'ask-flow', name: 'Ask how long a litre takes', moment: 'ask-flow', tries: 8 }),
+  askFlow({ id: 'ask-again', name: 'Ask for the figure again', moment: 'ask-again', tries: 3 }),
   {
     id: 'check-cracks',
     name: 'Look for cracks and leaks',

@@ -16,6 +16,8 @@ export type Catalogue = {
   priors: Readonly<Record<string, Odds>>
 }
 
+const namedByRules = ['ask-flow', 'ask-again', 'wash-fibre']
+
 /**
  * What is wrong with a catalogue of steps, one line each; none for a sound one. A sound catalogue
  * has no loop (each step may be asked a finite number of times), no step that no odds could make the
@@ -29,7 +31,9 @@ export function catalogueProblems({ steps: catalogue, priors }: Catalogue): stri
       .filter((id) => dealtWithBy[id] === 'cure' && !catalogue.some((step) => step.cures?.[id]))
       .map((id) => `${id}: no step cures it`),
     ...(catalogue.some(({ kind }) => kind === 'safety') ? [] : ['no safety question']),
-    ...(catalogue.some(({ id }) => id === 'ask-flow') ? [] : ['ask-flow: missing']),
+    ...namedByRules
+      .filter((name) => !catalogue.some(({ id }) => id === name))
+      .map((name) => `${name}: missing, and the rules of the walk name it`),
   ]
 }
 
@@ -72,12 +76,13 @@ function sumsToOne(answers: readonly Answer[]): boolean {
 }
 
 /**
- * Rules of the trade put ask-flow and safety questions; a cure must be best when its suspect is all
+ * Rules of the trade put the flow and safety questions; a cure must be best when its suspect is all
  * but sure, a question when the suspects that its answers tell apart are all that is left.
  */
 function isReachable(step: Step, catalogue: readonly Step[]): boolean {
-  if (step.id === 'ask-flow' || step.kind === 'safety') return true
+  if (step.asks === 'flow' || step.kind === 'safety') return true
   const aims = Object.keys(step.kind === 'cure' ? (step.cures ?? {}) : toldApart(step))
+  if (aims.length === 0) return false
   const positions = step.kind === 'cure' ? aims.map((id) => suspicion([id])) : [suspicion(aims)]
   return positions.some((odds) => {
     const choice = bestChoice(odds, catalogue, visitMinutes)

@@ -101,9 +101,9 @@ export const washRule: Rule = ({ tried, from }) => {
   const figures = washes.flatMap(({ recovery }) => (recovery ? [recovery] : []))
   const verdict = isSpent(figures)
   if (verdict === 'spent') return { kind: 'end', end: 'part', stage: 3, why: spentWords(figures) }
-  if (verdict === 'ask again' && last.asks === 0) {
+  if (verdict === 'ask again' && !last.wasAskedAgain) {
     const why = `The error of the figure straddles ${percent(flowDefaults.partlyShare)}: ask again.`
-    return stepNext('ask-flow', { tried, from, why })
+    return stepNext('ask-again', { tried, from, why })
   }
   const isSecondDue = washes.length === 1 || verdict === 'ask again'
   const why = 'One wash that fails proves little; a second in a row tells dirt from a spent stage.'

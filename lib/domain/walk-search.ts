@@ -103,7 +103,7 @@ export function bestChoice(odds: Odds, open: readonly Step[], giveUpMinutes: num
     const asking = minutesWithQuestion(odds, question, { cures, giveUpMinutes })
     const waiting = isCureFirst
       ? minutesCureFirst(odds, cure, { question, cures, giveUpMinutes })
-      : giveUpMinutes
+      : total(odds) * giveUpMinutes
     const savedMinutes = waiting - asking
     if (savedMinutes > (best?.savedMinutes ?? 0)) best = { step: question, savedMinutes }
   }

@@ -6,7 +6,14 @@ import type { Outcome } from './walk-odds'
 export type Tried = { stepId: StepId; answer: StepAnswer; at: number; recovery?: Recovery }
 
 /** A cure that was carried out, with the flow after it as far as it is known. */
-export type Trial = { step: Step; said: StepAnswer; recovery: Recovery | null; asks: number }
+export type Trial = {
+  step: Step
+  said: StepAnswer
+  recovery: Recovery | null
+  /** How often the flow was asked for since. */
+  asks: number
+  wasAskedAgain: boolean
+}
 
 const notCarriedOut: readonly StepAnswer[] = ['not done', 'no', 'no answer']
 
@@ -22,9 +29,10 @@ export function trialsOf(tried: readonly Tried[]): Trial[] {
     if (step?.kind === 'cure') {
       if (notCarriedOut.includes(answer) || step.answers.some((a) => a.answer === answer && a.ends))
         continue
-      trials.push({ step, said: answer, recovery: recovery ?? null, asks: 0 })
-    } else if (stepId === 'ask-flow' && last) {
+      trials.push({ step, said: answer, recovery: recovery ?? null, asks: 0, wasAskedAgain: false })
+    } else if (step?.asks === 'flow' && last) {
       last.asks += 1
+      last.wasAskedAgain ||= stepId === 'ask-again'
       last.recovery = recovery ?? last.recovery
       // Who cannot measure and does not say that it runs well is not taken as cured.
       if (answer === 'not done' && last.said === 'done') last.said = 'not cured'

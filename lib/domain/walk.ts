@@ -82,8 +82,9 @@ export function answerStep(
     at,
   }: { stepId: StepId; answer: StepAnswer; recovery?: Recovery; at: number },
 ): Walk {
-  if (!stepOf(stepId)) return walk
-  const figure = recovery ?? (stepId === 'ask-flow' && answer === 'no' ? nothingComes : undefined)
+  const step = stepOf(stepId)
+  if (!step) return walk
+  const figure = recovery ?? (step.asks === 'flow' && answer === 'no' ? nothingComes : undefined)
   const entry: Tried = figure ? { stepId, answer, at, recovery: figure } : { stepId, answer, at }
   const tried = [...walk.tried, entry]
   return {

@@ -76,14 +76,14 @@ describe('a slow filter', () => {
         ['wash-fibre', 'done', 0.33],
         ['wash-fibre', 'done', 0.38],
       ],
-      next: 'ask-flow',
+      next: 'ask-again',
     },
     {
       what: 'is spent if the figure asked again is wholly below',
       entries: [
         ['wash-fibre', 'done', 0.33],
         ['wash-fibre', 'done', 0.38],
-        ['ask-flow', 'done', 0.33],
+        ['ask-again', 'done', 0.33],
       ],
       next: { end: 'part', stage: 3 },
     },
@@ -92,7 +92,7 @@ describe('a slow filter', () => {
       entries: [
         ['wash-fibre', 'done', 0.33],
         ['wash-fibre', 'done', 0.38],
-        ['ask-flow', 'done', 0.38],
+        ['ask-again', 'done', 0.38],
       ],
       next: 'wash-fibre',
     },

@@ -104,7 +104,7 @@ export const en: readonly { moment: Moment; body: string }[] = [
   },
   {
     moment: 'drink-advice',
-    body: 'Boil your drinking water until it bubbles hard. Let it cool under a lid. Keep children away, it burns. Boiling does not remove fuel or chemicals. If it smells of those, find other water.',
+    body: 'Boil your drinking water. It must bubble hard for {minutes} min. Let it cool under a lid. Keep children away, it burns. Boiling does not remove fuel or chemicals. If it smells of those, find other water.',
   },
   {
     moment: 'unwell',

@@ -108,7 +108,7 @@ export const es: readonly { moment: Moment; body: string }[] = [
   },
   {
     moment: 'drink-advice',
-    body: 'Hierva el agua de beber hasta que burbujee fuerte. Deje enfriar con tapa. Lejos de los niños, porque quema. Hervir no quita gasolina ni veneno. Si huele a eso, busque otra agua.',
+    body: 'Hierva el agua de beber. Debe burbujear fuerte {minutes} min. Deje enfriar con tapa. Lejos de los niños, porque quema. Hervir no quita gasolina ni veneno. Si huele a eso, busque otra agua.',
   },
   {
     moment: 'unwell',

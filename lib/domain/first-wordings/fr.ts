@@ -108,7 +108,7 @@ export const fr: readonly { moment: Moment; body: string }[] = [
   },
   {
     moment: 'drink-advice',
-    body: "Faites bouillir l'eau à boire à gros bouillons. Laissez refroidir sous un couvercle. Loin des enfants, car c'est chaud. Bouillir ne retire ni essence ni produit chimique. Odeur suspecte ? Prenez une autre eau.",
+    body: "Faites bouillir l'eau à boire, {minutes} min à gros bouillons. Laissez refroidir sous un couvercle. Loin des enfants, car c'est chaud. Bouillir ne retire ni essence ni produit chimique. Odeur suspecte ? Prenez une autre eau.",
   },
   {
     moment: 'unwell',

@@ -1,0 +1,206 @@
+import { describe, expect, it } from 'vitest'
+import { en } from '@/lib/domain/first-wordings/en'
+import { recovery, type Recovery } from '@/lib/domain/flow'
+import {
+  answerStep,
+  cueEvidence,
+  defaultPriors,
+  nextStep,
+  startWalk,
+  steps,
+} from '@/lib/domain/walk'
+import type { Cue, Next, Step, Walk } from '@/lib/domain/walk'
+import { catalogueProblems, checkedCatalogue, unwordedSteps } from '@/lib/domain/walk-check'
+import { seeded } from '@/tests/factories/seeded'
+
+const priors = defaultPriors
+
+function changed(id: string, change: Partial<Step>): Step[] {
+  return steps.map((step) => (step.id === id ? { ...step, ...change } : step))
+}
+
+describe('the catalogue of steps', () => {
+  it('is sound', () => {
+    expect(catalogueProblems({ steps, priors })).toEqual([])
+  })
+
+  it('is worded in the first language', () => {
+    expect(unwordedSteps(new Set(en.map(({ moment }) => moment)))).toEqual([])
+    expect(unwordedSteps(new Set(['ask-flow', 'ask-again']))).toContain('wash-fibre')
+  })
+
+  it.each<{ what: string; steps: readonly Step[]; problem: string }>([
+    {
+      what: 'a step that costs too much ever to be next',
+      steps: changed('refit-cap', { minutes: 900 }),
+      problem: 'refit-cap: can never be the next step',
+    },
+    {
+      what: 'a question that tells nothing',
+      steps: changed('look-hose', {
+        answers: [
+          { answer: 'choice-1', label: 'a', chance: {}, otherwise: 0.5 },
+          { answer: 'choice-2', label: 'b', chance: {}, otherwise: 0.5 },
+        ],
+      }),
+      problem: 'look-hose: can never be the next step',
+    },
+    {
+      what: 'a loop',
+      steps: changed('bleed-air', { tries: Infinity }),
+      problem: 'bleed-air: could be asked without end',
+    },
+    {
+      what: 'a step without tries',
+      steps: changed('bleed-air', { tries: 0 }),
+      problem: 'bleed-air: could be asked without end',
+    },
+    {
+      what: 'a step that takes no time',
+      steps: changed('bleed-air', { minutes: 0 }),
+      problem: 'bleed-air: costs no time',
+    },
+    {
+      what: 'a suspect that nothing cures',
+      steps: steps.filter(({ id }) => id !== 'straighten-hose'),
+      problem: 'kinked-hose: no step cures it',
+    },
+    {
+      what: 'no safety question',
+      steps: steps.filter(({ kind }) => kind !== 'safety'),
+      problem: 'no safety question',
+    },
+    {
+      what: 'a step that the rules name',
+      steps: steps.filter(({ id }) => id !== 'ask-again'),
+      problem: 'ask-again: missing, and the rules of the walk name it',
+    },
+    {
+      what: 'two steps of one name',
+      steps: [...steps, ...steps.slice(0, 1)],
+      problem: 'ask-flow: name is not its own',
+    },
+    {
+      what: 'a name in another style',
+      steps: changed('bleed-air', { id: 'BleedAir' }),
+      problem: 'BleedAir: name is not kebab-case',
+    },
+    {
+      what: 'a moment that is none',
+      steps: changed('bleed-air', { moment: 'step-shake' as Step['moment'] }),
+      problem: 'bleed-air: no such moment: step-shake',
+    },
+    {
+      what: 'a step that nobody can answer',
+      steps: changed('bleed-air', { answers: [] }),
+      problem: 'bleed-air: has no answers',
+    },
+    {
+      what: 'two answers of one kind',
+      steps: changed('bleed-air', {
+        answers: [
+          { answer: 'done', label: 'a' },
+          { answer: 'done', label: 'b' },
+        ],
+      }),
+      problem: 'bleed-air: has two answers of one kind',
+    },
+    {
+      what: 'a cure that is surer than sure',
+      steps: changed('bleed-air', { cures: { 'air-lock': 1.2 } }),
+      problem: 'bleed-air: cures with a chance that is none',
+    },
+    {
+      what: 'answers whose chances do not sum to 1',
+      steps: changed('look-hose', {
+        answers: [
+          { answer: 'choice-1', label: 'a', chance: { 'kinked-hose': 0.9 }, otherwise: 0.1 },
+          { answer: 'choice-2', label: 'b', chance: { 'air-lock': 0.9 }, otherwise: 0.1 },
+        ],
+      }),
+      problem: 'look-hose: chances of its answers do not sum to 1',
+    },
+  ])('is refused with $what', ({ steps: broken, problem }) => {
+    expect(catalogueProblems({ steps: broken, priors })).toContain(problem)
+    expect(() => checkedCatalogue({ steps: broken, priors })).toThrow(problem)
+  })
+
+  it('is refused with odds that are none', () => {
+    const odds = { ...priors.slow, 'air-lock': 0 }
+    expect(catalogueProblems({ steps, priors: { slow: odds } })).toEqual([
+      'slow: a suspect has no odds',
+      'slow: odds do not sum to 1',
+    ])
+  })
+})
+
+const cues = [undefined, ...(Object.keys(cueEvidence) as Cue[])]
+const troubles = ['slow', 'no flow'] as const
+
+function randomFigure(random: () => number): Recovery {
+  return recovery({ flow: 0.5 + random() * 15, first: 15, nominal: 15 })
+}
+
+/** One walk with answers at random, to its end. */
+function wander(start: Walk, random: () => number): { asked: string[]; end: Next; walk: Walk } {
+  const asked: string[] = []
+  let walk = start
+  for (;;) {
+    const next = nextStep(walk)
+    if (next.kind === 'end' || asked.length > 40) return { asked, end: next, walk }
+    const { step } = next
+    asked.push(step.id)
+    const choices = [...step.answers.map(({ answer }) => answer), 'no answer' as const]
+    const answer = choices[Math.floor(random() * choices.length)] ?? 'no answer'
+    const isTimed = answer === 'done' && random() < 0.8
+    walk = answerStep(walk, {
+      stepId: step.id,
+      answer,
+      at: asked.length,
+      ...(isTimed ? { recovery: randomFigure(random) } : {}),
+    })
+  }
+}
+
+describe('walks with answers at random', () => {
+  const random = seeded(14)
+  const walks = troubles.flatMap((trouble) =>
+    cues.flatMap((cue) =>
+      Array.from({ length: 60 }, () =>
+        wander(startWalk({ trouble, cues: cue ? [cue] : [] }), random),
+      ),
+    ),
+  )
+
+  it('all come to an end', () => {
+    for (const { end, asked } of walks) {
+      expect(end.kind).toBe('end')
+      expect(asked.length).toBeLessThan(25)
+    }
+  })
+
+  it('reach every step and every end', () => {
+    expect(new Set(walks.flatMap(({ asked }) => asked))).toEqual(new Set(steps.map(({ id }) => id)))
+    const ends = new Set(walks.map(({ end }) => (end.kind === 'end' ? end.end : 'none')))
+    expect(ends).toEqual(new Set(['restored', 'part', 'visit', 'stop using']))
+  })
+
+  it('never ask a step more often than it may be asked', () => {
+    for (const { asked } of walks) {
+      for (const { id, tries } of steps) {
+        expect(asked.filter((one) => one === id).length).toBeLessThanOrEqual(tries)
+      }
+    }
+  })
+
+  it('end for good: an end is an end whenever it is looked at', () => {
+    for (const { end, walk } of walks) expect(nextStep(walk)).toEqual(end)
+  })
+
+  it('name the stage with every part, and explain everything in one line', () => {
+    for (const { end } of walks) {
+      if (end.kind === 'end' && end.end === 'part') expect([1, 2, 3]).toContain(end.stage)
+      expect(end.why).toMatch(/^[^\n]+\.$/)
+    }
+  })
+})
