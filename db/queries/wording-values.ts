@@ -26,7 +26,13 @@ export async function listHouseholdsToTry(db: Handle, language: Language) {
 /** The household, its newest kit and its depot: what a text to it may speak of. */
 export async function findHouseholdToTry(db: Handle, householdId: string) {
   const [row] = await db
-    .select({ household: households, kit: kits, model: kitModels, depot: depots })
+    .select({
+      household: households,
+      kit: kits,
+      model: kitModels,
+      depot: depots,
+      altitudeMetres: areas.altitudeMetres,
+    })
     .from(households)
     .innerJoin(kits, eq(kits.householdId, households.id))
     .innerJoin(kitModels, eq(kitModels.id, kits.modelId))
