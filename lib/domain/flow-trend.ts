@@ -111,3 +111,12 @@ export function trend(
     perDay: 1 - Math.exp(line.slope),
   }
 }
+
+/**
+ * Whole days after `sinceAt` (the last wash) on which the line meets the need, for the wash
+ * interval; null where no fall is foretold. Under 0 when it was under the need before.
+ */
+export function daysUntilShort(forecast: Forecast, sinceAt: number): number | null {
+  if (forecast.kind !== 'falls') return null
+  return Math.floor((forecast.onAt - sinceAt) / millisecondsPerDay)
+}

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest'
-import { trend, type Forecast, type Reading } from '@/lib/domain/flow'
+import { daysUntilShort, trend, type Forecast, type Reading } from '@/lib/domain/flow'
 
 const day = 86_400_000
 const start = 1_750_000_000_000
@@ -75,6 +75,50 @@ describe('the trend of a filter', () => {
     expect(forecast.onAt).toBe(start)
     expect(forecast.earliestAt).toBe(start)
     expect(forecast.latestAt).toBeGreaterThanOrEqual(start)
+  })
+
+  it('puts the ends of the interval where its 95 % band meets the need', () => {
+    const days = [0, 7, 15, 22, 30, 41]
+    const noise = [0.06, -0.1, 0.12, -0.05, -0.08, 0.05]
+    const readings = falling(0.03, days, noise)
+    const logs = readings.map(({ normalised }) => Math.log(normalised))
+    // The band of the mean of a straight line, from the textbook, apart from the code under test.
+    const mean = (values: readonly number[]) => values.reduce((a, b) => a + b) / values.length
+    const away = days.map((at) => at - mean(days))
+    const sxx = away.reduce((sum, at) => sum + at * at, 0)
+    const slope = away.reduce((sum, at, index) => sum + at * (logs[index] ?? NaN), 0) / sxx
+    const fit = (at: number) => mean(logs) + slope * (at - mean(days))
+    const residue = days.reduce((sum, at, index) => sum + ((logs[index] ?? NaN) - fit(at)) ** 2, 0)
+    const student = 2.776445 // t of 4 degrees of freedom at 97.5 %
+    const scatter = student * Math.sqrt(residue / 4)
+    const half = (at: number) => scatter * Math.sqrt(1 / 6 + (at - mean(days)) ** 2 / sxx)
+    expect(scatter).toBeGreaterThan(1.96 * 0.1118) // so that the scatter decides, not the error
+
+    const { onAt, earliestAt, latestAt } = falls(trend(readings, 4))
+    const dayOf = (at: number | null) => ((at ?? NaN) - start) / day
+    expect(fit(dayOf(onAt))).toBeCloseTo(Math.log(4), 6)
+    expect(fit(dayOf(earliestAt)) - half(dayOf(earliestAt))).toBeCloseTo(Math.log(4), 5)
+    expect(fit(dayOf(latestAt)) + half(dayOf(latestAt))).toBeCloseTo(Math.log(4), 5)
+  })
+
+  it('opens the interval at the near end only, where the slope may be none', () => {
+    const noisy = falling(0.01, [0, 3, 6, 9, 12], [0, 0.05, -0.05, 0.05, 0])
+    const { onAt, earliestAt, latestAt } = falls(trend(noisy, 11))
+    expect(latestAt).toBeNull()
+    expect(earliestAt).toBeGreaterThan(start)
+    expect(earliestAt).toBeLessThan(onAt)
+  })
+
+  it('holds where a rising flow has passed the need, though its mean has not', () => {
+    expect(trend(falling(-0.06, [0, 10, 20]), 30)).toEqual({ kind: 'holds' })
+  })
+
+  it('tells the wash how many days are left', () => {
+    const forecast = trend(falling(Math.log(4) / 60, [0, 10, 20, 30, 40]), 4)
+    expect(daysUntilShort(forecast, start + 40.5 * day)).toBe(19)
+    expect(daysUntilShort(forecast, start + 70 * day)).toBe(-10)
+    expect(daysUntilShort({ kind: 'holds' }, start)).toBeNull()
+    expect(daysUntilShort({ kind: 'too few' }, start)).toBeNull()
   })
 
   it('does not depend on the order the readings were stored in', () => {

@@ -18,6 +18,8 @@ describe('a flow reading', () => {
     expect(litresPerHour({ litres: 1.5, seconds: 3600 })).toBe(1.5)
     expect(litresPerHour({ litres: 1, seconds: 0 })).toBe(0)
     expect(litresPerHour({ litres: 0, seconds: 60 })).toBe(0)
+    expect(litresPerHour({ litres: 0.5, seconds: 1 })).toBe(1800)
+    expect(litresPerHour({ litres: -1, seconds: -1 })).toBe(0)
   })
 
   it('at 20 °C and full head is its own normalised flow', () => {
