@@ -12,6 +12,7 @@ export type DraftNote = {
     | 'claim of safety'
     | 'no way out'
     | 'no programme name'
+    | 'word of the carrier'
     | 'letter halves the room'
     | 'unknown value'
     | 'missing value'
@@ -27,6 +28,14 @@ type Draft = { moment: string; language: Language; body: string }
 
 const wordsASentence = 10
 const partsAText = 2
+
+/**
+ * Words that the carrier acts on by itself: an answer of END or CANCEL would opt the household out,
+ * YES would opt it in. Asked for in capitals, as texts ask for words. STOP and START are the way
+ * out and back and stand in few texts; a person reads those.
+ */
+const carrierWords =
+  /\b(?:YES|CANCEL|END|QUIT|INFO|HELP|UNSUBSCRIBE|STOPALL|REVOKE|OPTOUT|UNSTOP)\b/g
 
 /** What is to be said about a draft before anybody approves it. No notes: nothing to say. */
 export function checkDraft(draft: Draft): DraftNote[] {
@@ -87,9 +96,13 @@ function textNotes({ language }: Draft, texts: readonly string[]): DraftNote[] {
   const claims = new Set(texts.flatMap((text) => claimsOfSafety(text, language)))
   const long = new Set(texts.flatMap(longSentences))
   const actions = texts.map((text) => actionsIn(text, language)).find(({ length }) => length > 1)
+  const carriers = new Set(texts.flatMap((text) => text.match(carrierWords) ?? []))
   const letters = language === 'bn' ? [] : offendingCharacters(texts.join(''))
   return [
     ...[...claims].map((claim) => blocking('claim of safety', `"${claim}" promises too much.`)),
+    ...[...carriers].map((word) =>
+      blocking('word of the carrier', `${word} as an answer is the carrier's, not ours.`),
+    ),
     ...(segments > partsAText
       ? [blocking('too many parts', `${segments} parts; at most ${partsAText}.`)]
       : []),
