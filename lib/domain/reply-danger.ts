@@ -117,10 +117,11 @@ function findOddWater(sense: Sense): Danger | null {
   const coloured = said(sense, 'odd').filter(
     (mark) => things.length === 0 || areBeside(sense, [mark], water, 4),
   )
+  const dirty = said(sense, 'dirty').filter((mark) => areBeside(sense, [mark], water, 3))
   const bad = said(sense, 'bad').filter(
     (mark) => areBeside(sense, [mark], said(sense, 'water'), 3) && !isNamed(sense, 'flow'),
   )
   const notGood = denied(sense, 'clean').filter(() => water.length > 0 || isDenied(sense, 'clean'))
-  const marks = [...strong, ...smells, ...coloured, ...bad, ...notGood]
+  const marks = [...strong, ...smells, ...coloured, ...bad, ...dirty, ...notGood]
   return marks.length > 0 ? { kind: 'odd-water', sure: sureOf(0.88, marks) } : null
 }

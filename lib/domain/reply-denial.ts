@@ -43,13 +43,21 @@ const deniable: ReadonlySet<Concept> = new Set<Concept>([
   'stopWord',
   'little',
   'long',
-  'wrongNumber',
   'water',
   'none',
+  'piece',
+  'cloth',
+  'dirty',
 ])
 
 /** Things that a denial passes over on its way to what is said of them. */
-const passedOver: ReadonlySet<Concept> = new Set<Concept>(['water', 'texts', 'little'])
+const passedOver: ReadonlySet<Concept> = new Set<Concept>([
+  'water',
+  'texts',
+  'little',
+  'piece',
+  'cloth',
+])
 
 const forwardReach = 4
 const backwardReach = 3

@@ -40,7 +40,9 @@ function readFigureAt(tokens: readonly Token[], from: number, { order, figures }
   const unit = pieceAt(tokens, amount.to, order)
   if (unit.kind === 'unit' && unit.unit === 'other') return amount.to + unit.size
   if (unit.kind === 'unit') return readSpan(tokens, { ...amount, from }, { order, figures })
-  if (!amount.weak) figures.bare.push({ value: amount.value, from, to: amount.to })
+  // "One" alone is a figure; within a sentence it is an article.
+  const isAlone = tokens.length === 1 && amount.value >= 1
+  if (!amount.weak || isAlone) figures.bare.push({ value: amount.value, from, to: amount.to })
   return amount.to
 }
 

@@ -52,7 +52,7 @@ function respellerOf(pack: LanguagePack): (word: string) => string {
 
 function numberWords(pack: LanguagePack): string[] {
   const spoken = [pack.numbers, pack.weakNumbers, pack.spans, pack.halves, pack.shifts ?? '']
-  const others = [...Object.values(pack.units), pack.about, pack.timeOfDay]
+  const others = [...Object.values(pack.units)]
   return [...spoken, ...others]
     .flatMap(listed)
     .flatMap((entry) => entry.split(' '))

@@ -1,6 +1,7 @@
 import type { Language } from './language'
 import { denyMarks } from './reply-denial'
 import { readFigures, type Figures } from './reply-figures'
+import { partJoinedDenials } from './reply-joined-denial'
 import { markTokens, type Mark } from './reply-marks'
 import { tokenise, type Token } from './reply-tokens'
 import type { Concept } from './reply-words/concept'
@@ -16,11 +17,13 @@ export type Sense = {
   figures: Figures
   /** Words that no language of the desk knows. */
   unknownWords: number
+  /** Their places among the tokens. */
+  unknownAt: number[]
   words: number
 }
 
 export function senseOf(text: string, language: Language, asked: Asked): Sense {
-  const tokens = tokenise(text)
+  const tokens = partJoinedDenials(tokenise(text), language)
   const { marks, knownWords } = markTokens(tokens, language)
   return {
     text,
@@ -28,6 +31,7 @@ export function senseOf(text: string, language: Language, asked: Asked): Sense {
     tokens,
     marks: denyMarks(marks, tokens),
     figures: readFigures(tokens, language),
+    unknownAt: knownWords.flatMap((known, at) => (known ? [] : [at])),
     unknownWords: knownWords.filter((known) => !known).length,
     words: tokens.filter((token) => token.kind !== 'break').length,
   }

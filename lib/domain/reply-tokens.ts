@@ -52,9 +52,15 @@ function digitValue(digit: string): number {
   return value
 }
 
+/** "4 1/2" and "1/2" as decimals. */
+function spellFraction(_: string, whole: string | undefined, over: string, under: string): string {
+  return ` ${String(Number(whole ?? 0) + Number(over) / Number(under))} `
+}
+
 /** Lower case, Latin accents off, digits of any script as ASCII. Bengali vowel signs stay. */
 export function foldText(text: string): string {
-  let folded = text.replace(/(\d?)\s?([½¼¾])/gu, (_, whole: string, part: string) => {
+  let folded = text.replace(/(?<![\d/])(?:(\d+)\s+)?([13])\/([24])(?![\d/])/g, spellFraction)
+  folded = folded.replace(/(\d?)\s?([½¼¾])/gu, (_, whole: string, part: string) => {
     return ` ${whole === '' ? '0' : whole}${fractions[part] ?? ''} `
   })
   for (const [emoji, word] of emojiWords) folded = folded.replace(emoji, word)

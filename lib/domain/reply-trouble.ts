@@ -23,8 +23,10 @@ export function noFlowSureness(sense: Sense): number {
   )
   const strong = [...dry, ...none, ...lacking, ...said(sense, 'blocked')]
   if (strong.length > 0) return sureOf(0.85, strong)
+  if (!isSaid(sense, 'none') || isNamed(sense, 'done', 'wash', 'change', 'notYet', 'ask')) return 0
   const isAnswer = sense.asked === 'flow' || sense.asked === 'step'
-  return said(sense, 'none').length > 0 && isAnswer && sense.words <= 3 ? 0.7 : 0
+  if (isAnswer) return sense.words <= 4 ? 0.7 : 0
+  return sense.words >= 2 && sense.words <= 4 && sense.unknownWords === 0 ? 0.62 : 0
 }
 
 /** "Not flowing well" is slow: the denial is of the manner, not of the flow. */
@@ -59,7 +61,7 @@ export function slowSureness(sense: Sense): number {
 }
 
 /** "It was slow but now it runs well". */
-function isOver(sense: Sense): boolean {
+export function isOver(sense: Sense): boolean {
   const slow = said(sense, 'slow', 'drip', 'long', 'little')
   const better = said(sense, 'better', 'good', 'fast')
   if (isNamed(sense, 'still')) return false

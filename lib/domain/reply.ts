@@ -1,9 +1,11 @@
 import { isHelpKeyword, isStartKeyword } from './consent'
 import type { Language } from './language'
-import { figureOf, findAnswer, isMostlyFigure } from './reply-answers'
+import { findAnswer } from './reply-answers'
+import { figureOf, isMostlyFigure } from './reply-figure'
 import { findDanger } from './reply-danger'
 import { optOutSureness } from './reply-opt-out'
-import { isSaid, said, senseOf, sureOf, type Asked, type Sense } from './reply-sense'
+import { wrongNumberSureness } from './reply-wrong-number'
+import { isDenied, isSaid, senseOf, type Asked, type Sense } from './reply-sense'
 import { noFlowSureness, slowSureness } from './reply-trouble'
 
 export type { Asked }
@@ -67,9 +69,16 @@ function readUrgent(sense: Sense): ReplyReading | null {
   if (isHelpKeyword(sense.text)) return { kind: 'help', sure: 1 }
   const danger = findDanger(sense)
   if (danger) return slowSureness(sense) >= sureEnough ? { ...danger, alsoSlow: true } : danger
-  const wrong = said(sense, 'wrongNumber')
-  if (wrong.length > 0) return { kind: 'wrong-number', sure: sureOf(0.9, wrong) }
-  return null
+  const wrong = wrongNumberSureness(sense)
+  return wrong > 0 ? { kind: 'wrong-number', sure: wrong } : null
+}
+
+/** "It stopped", "water stop", "stopped dripping": it could be the texts, a leak or the water. */
+function isStopOrStopped(sense: Sense): boolean {
+  if (isSaid(sense, 'itStopped')) return true
+  return (
+    isSaid(sense, 'ceased', 'stopWord') && !isDenied(sense, 'flow', 'water', 'slow', 'good', 'fast')
+  )
 }
 
 /** Figures and trouble: the figure answers when one was asked for. */
@@ -82,7 +91,7 @@ function readTrouble(sense: Sense): ReplyReading | null {
     if (slow > 0 && !isAsked) return { kind: 'slow', minutes: figure.minutes, sure: slow }
     return readFigure(sense, figure, slow >= sureEnough)
   }
-  if (isSaid(sense, 'itStopped')) return { kind: 'unclear', sure: 0.5 }
+  if (isStopOrStopped(sense)) return { kind: 'unclear', sure: 0.5 }
   if (noFlow >= slow && noFlow > 0) return { kind: 'no-flow', sure: noFlow }
   return slow > 0 ? { kind: 'slow', sure: slow } : null
 }

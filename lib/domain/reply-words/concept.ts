@@ -19,6 +19,7 @@ export const concepts = [
   'past', // "was", "before"
   'now',
   'ago',
+  'within', // "in ten minutes"
   'still',
   'very', // also "too"
   'little',
@@ -33,6 +34,7 @@ export const concepts = [
   'container',
   'person',
   'child',
+  'name',
   'me',
   'you',
   'texts', // a message, to text
@@ -64,6 +66,7 @@ export const concepts = [
   'oddSmell',
   'smell',
   'taste',
+  'dirty', // of water: odd; of a filter: only in want of a wash
   'clean',
   'fuel',
   'ill',
@@ -122,10 +125,6 @@ export type LanguagePack = {
   halves: string
   /** Bengali words that shift the number after them: half more, a quarter less. */
   shifts?: string
-  /** "about", "it takes": may stand beside a bare figure. */
-  about: string
-  /** "ago", "in": a figure after or before it is a time of day or a promise, not a flow. */
-  timeOfDay: string
   /** Everyday words without a meaning here; they keep guesses at spelling off. */
   common: string
   /** How a word of this language may be respelled: see `reply-spelling.ts`. */

@@ -28,10 +28,7 @@ export const enPack: LanguagePack = {
     an hour 60, a minute 1, quarter to an hour 45`,
   halves: `and a half 0.5, and half 0.5, n half 0.5, n a half 0.5, and a quarter 0.25,
     and quarter 0.25`,
-  about:
-    'about, around, like, approx, approximately, roughly, nearly, almost, maybe, took, takes, take, it, is, just, only, over, under, exactly',
-  timeOfDay: 'ago, oclock, am, pm',
-  common: `the a an this that these those there here it its is are am be been being was were do does did have has had having and for from with at by to of in on off up down out over under into onto about than then so as also all any some each every both such own
+  common: `hmm lol haha jaja asdf the a an this that these those there here it its is are am be been being was were do does did have has had having and for from with at by to of in on off up down out over under into onto about than then so as also all any some each every both such own
     i im ive id ill we weve were he hes she shes they theyre them his her hers our ours their him who whom whose what when where why how which my your yours yourself myself
     shop step slop stow snow show shot stoop sleep slope soap some same sale safe save send sent seen seed seem sell side sign size sick sing site sit six
     take took taken make made making give gave given put let keep kept try tried use used using say says said tell told know knew think thought hope find found look looks looking looked like liked love home house door room table kitchen garden road town city village

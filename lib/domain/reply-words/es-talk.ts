@@ -55,4 +55,6 @@ export const esTalk: LanguagePack['concepts'] = {
   helpWord:
     'ayuda, ayudenme, ayudame, ayudeme, auxilio, socorro, ayudar, informacion, info, necesito ayuda, ayudenos, ayuden, quiero ayuda, alluda, aiuda, me ayudan, me pueden ayudar, me puede ayudar, pueden ayudarme, puede ayudarme, nos ayudan, asistencia',
   calm: `no solo, no se si, no hay duda, sin duda, de por si, nada mas, nada malo, nada nuevo, agua del rio, al mal, de nada, no importa, no se preocupe, no se preocupen, mal tiempo, que tal, como esta, como estan, como esta usted, como le va, como estan ustedes, mi amor, tapa negra, tapa roja, tapa azul, tapa verde, tapa blanca, manguera negra, manguera verde, carbon negro, lleno todo, agua fria, se me hace, por ahi, sale bueno, sal a, sal de, que bueno, bueno si, bueno ya, ya se, yo creo, creo que, sin saldo, mi saldo, un saludo, pasa por aqui, pasa por mi casa, pase por, viene a, viene por, vienen a, cuando vienen, cuando pasan, pasan por, llega el, cuando llega, cuando llegan, viene el, baja la, del dia, de la manana, en la manana temprano, ayer lave, ya casi`,
+  within: `en, dentro de, en unos`,
+  name: `maria, jose, juan, ana, carlos, rosa, luis, pedro, miguel, jorge, carmen, lucia, elena, marta, manuel, antonio, francisco, teresa, sofia, diego, andres`,
 }

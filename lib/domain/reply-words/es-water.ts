@@ -33,9 +33,17 @@ export const esWater: LanguagePack['concepts'] = {
   mended: 'arregle, reparado, reparada, repare, arreglamos, pegue, pegado, remende',
   clean:
     'limpia, limpio, clara, claro, clarita, limpiecita, transparente, cristalina, pura, limpias, clarito, limpita',
-  odd: `negra, negro, negras, negruzca, cafe, marron, amarilla, amarillo, amarillenta, amarillento, verde, verdosa, verdoso, roja, rojiza, rojizo, gris, grisacea, blanca, blanquecina, lechosa, turbia, turbio, turvia, turbias, sucia, sucias, mugre, mugrosa, lodo, lodosa, barro, barrosa, tierra, arena, color, de color, oscura, oscuro, particulas, puntitos, pedacitos, basuritas, basura, cosas flotando, flotando, gusano, gusanos, gusanitos, bichos, bicho, bichitos, animalitos, larvas, lama, limo, baba, babosa, espuma, espumosa, oxido, oxidada, polvo, sedimento, moho, pelusa, residuos, no clara, tinta, ceniza, hollin, choca, chocolatosa`,
+  odd: `negra, negro, negras, negruzca, cafe, marron, amarilla, amarillo, amarillenta,
+    amarillento, verde, verdosa, verdoso, roja, rojiza, rojizo, gris, grisacea, blanca,
+    blanquecina, lechosa, turbia, turbio, turvia, turbias, mugre, mugrosa, lodo, lodosa,
+    barro, barrosa, tierra, arena, color, de color, oscura, oscuro, particulas, puntitos,
+    pedacitos, basuritas, basura, cosas flotando, flotando, gusano, gusanos, gusanitos,
+    bichos, bicho, bichitos, animalitos, larvas, lama, limo, baba, babosa, espuma, espumosa,
+    oxido, oxidada, polvo, sedimento, moho, pelusa, residuos, no clara, tinta, ceniza, hollin,
+    choca, chocolatosa`,
   oddSmell: `apesta, apestosa, apestoso, hediondo, hedionda, hiede, hediondez, podrido, podrida, mal olor, malos olores, mal sabor, feo olor, feo sabor, olor feo, sabor feo, olor raro, sabor raro, sabe mal, sabe feo, sabe fea, sabe raro, sabe rara, sabe horrible, huele mal, huele feo, huele fea, huele raro, huele rara, huele horrible, huele a, sabe a, olor a, sabor a, uele, amarga, amargo, salada, salado, agria, acida, metalico, metalica, asco, asquerosa, asqueroso, guacala, fetido, fetida, pestilente, peste, tufo, extraño olor, raro olor, olor extrano, sabor extrano, raro sabor, jabonosa`,
   smell: 'olor, olores, huele, oler, oliendo, huelen, olia',
   taste: 'sabor, sabe, saben, gusto',
   fuel: `gasolina, petroleo, diesel, disel, kerosene, queroseno, querosen, keroseno, combustible, aceite, aceitosa, quimico, quimicos, quimica, pintura, solvente, thinner, veneno, pesticida, pesticidas, insecticida, fertilizante, herbicida, bencina, nafta, agroquimico, acpm, cloro fuerte`,
+  dirty: `sucio, sucios, sucia, sucias, mugroso, cochina, cochino, percudido`,
 }

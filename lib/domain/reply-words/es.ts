@@ -29,9 +29,6 @@ export const esPack: LanguagePack = {
     medio minuto 0.5, minuto y medio 1.5, un minuto y medio 1.5, una hora 60, una horita 60,
     un minuto 1, una ora 60, 1 2 hora 30`,
   halves: `y media 0.5, y medio 0.5, y cuarto 0.25, i media 0.5, i medio 0.5`,
-  about:
-    'como, unos, unas, mas o menos, aproximadamente, casi, son, fueron, fue, es, tarda, tardo, demora, demoro, en, solo, apenas, creo',
-  timeOfDay: 'hace, pm, am, las',
   common: `el la los las un una uno unos unas de del al a en con por para que se su sus mi mis tu tus lo le les nos me te y o u e si no es son era eran ser esta este esto esa ese eso estas estos estan estoy estamos estaba fue fui ha he hay han hemos haber habia
     muy mucho mucha muchos mas menos tan tanto todo toda todos todas otro otra otros cada algo alguien alguno alguna algun nada nadie ninguno bien mal mejor peor como cuando donde quien cual porque pues entonces tambien tampoco solo solamente nomas asi aqui ahi alla aca hasta desde entre sobre sin contra segun
     yo tu usted ustedes el ella ellos ellas nosotros mio mia suyo suya casa cocina cuarto puerta mesa techo calle camino campo pueblo comunidad ciudad escuela iglesia mercado tienda trabajo milpa rio cerro

@@ -1,0 +1,49 @@
+import type { Mark } from './reply-marks'
+import { isSaid, said, sureOf, type Sense } from './reply-sense'
+
+/** How sure the text says that the wrong phone was reached; 0 when it does not. */
+export function wrongNumberSureness(sense: Sense): number {
+  const wrong = said(sense, 'wrongNumber')
+  if (wrong.length > 0) return sureOf(0.9, wrong)
+  if (deniesName(sense)) return 0.7
+  // "Who is this?" may be a forgotten programme or a stranger: a person answers.
+  return isSaid(sense, 'who') ? 0.5 : 0
+}
+
+/** "This is not Maria", "no soy Juan", "ami Rahim na": a name stands beside a denial. */
+function deniesName(sense: Sense): boolean {
+  const denials = sense.marks.filter((mark) =>
+    ['not', 'notAround', 'notBack', 'notPlus'].includes(mark.concept),
+  )
+  return denials.some((denial) => {
+    const isBack = denial.concept === 'notBack'
+    const at = isBack ? denial.from - 1 : denial.to
+    return isName(sense, at) && hasSelf(sense, denial, isBack ? at : denial.from)
+  })
+}
+
+function isName(sense: Sense, at: number): boolean {
+  if (sense.tokens[at]?.kind !== 'word') return false
+  const marks = sense.marks.filter((mark) => mark.from <= at && at < mark.to)
+  if (marks.some((mark) => mark.concept === 'name')) return true
+  return sense.unknownAt.includes(at) && isAlmostLast(sense, at)
+}
+
+/** A strange word in the middle of a sentence is more likely a verb nobody here knows. */
+function isAlmostLast(sense: Sense, at: number): boolean {
+  const rest = sense.tokens.slice(at + 1)
+  const end = rest.findIndex((token) => token.kind === 'break')
+  return (end === -1 ? rest.length : end) <= 1
+}
+
+function hasSelf(sense: Sense, denial: Mark, before: number): boolean {
+  const head = sense.tokens.slice(Math.max(0, before - 3), before)
+  return head.some((token) => token.kind === 'word' && selfWords.has(token.text)) && denial.to > 0
+}
+
+/** "I am", "this is" in the four languages, as the tokens stand. */
+const selfWords = new Set(
+  'im i am this is its isnt soy es esta este estas ese suis c est moi je ami amar ei eta আমি আমার এটা এই'.split(
+    ' ',
+  ),
+)
