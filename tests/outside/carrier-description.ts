@@ -1,6 +1,6 @@
 import { execFileSync } from 'node:child_process'
 import { createHash } from 'node:crypto'
-import { existsSync, mkdirSync, readFileSync } from 'node:fs'
+import { existsSync, mkdirSync, mkdtempSync, readFileSync, renameSync, rmSync } from 'node:fs'
 import path from 'node:path'
 import { Ajv, type ValidateFunction } from 'ajv'
 
@@ -20,20 +20,24 @@ type Description = {
  * had: a contract that was not read must not count as kept.
  */
 export function carrierDescription(): Description {
-  const file = path.join(folder, inside)
-  if (!existsSync(file)) fetchDescription()
+  const file = path.join(folder, path.basename(inside))
+  if (!existsSync(file)) fetchDescription(file)
   const text = readFileSync(file)
   const sha256 = createHash('sha256').update(text).digest('hex')
   if (sha256 !== expectedSha256) throw new Error(`${file} is not the published file: ${sha256}`)
   return JSON.parse(text.toString('utf8')) as Description
 }
 
-function fetchDescription(): void {
-  mkdirSync(folder, { recursive: true })
-  const options = { cwd: folder, timeout: 120_000, stdio: 'pipe' } as const
+/** Into a folder of its own first: two test files may want it at the same time. */
+function fetchDescription(file: string): void {
+  mkdirSync(path.dirname(file), { recursive: true })
+  const cwd = mkdtempSync(path.join(folder, 'fetch-'))
+  const options = { cwd, timeout: 120_000, stdio: 'pipe' } as const
   const isWindows = process.platform === 'win32'
   execFileSync('npm', ['pack', packed, '--silent'], { ...options, shell: isWindows })
   execFileSync('tar', ['-xzf', 'twilio-cli-core-9.0.0.tgz', inside], options)
+  renameSync(path.join(cwd, inside), file)
+  rmSync(cwd, { recursive: true })
 }
 
 /** Formats the description names; the addresses of pages are relative, whatever it calls them. */

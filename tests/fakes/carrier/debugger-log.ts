@@ -1,7 +1,7 @@
 import type { Carrier } from './carrier'
 
 const meanings: Record<number, string> = {
-  11200: 'the webhook could not be fetched or did not answer 2xx',
+  11200: 'the desk could not be reached or did not answer 2xx',
   11243: 'the retry settings in the webhook address cannot be read',
   12100: 'the answer is not well-formed XML',
   12200: 'the answer is XML but not what was expected',

@@ -44,6 +44,7 @@ export function refusal(code: number, detail?: string): Refusal {
 const asyncTexts: Record<number, string> = {
   14107: 'Reply rate limit hit',
   21610: 'Attempt to send to unsubscribed recipient',
+  30001: 'Queue overflow',
   30003: 'Unreachable destination handset',
   30004: 'Message blocked',
   30005: 'Unknown destination handset',

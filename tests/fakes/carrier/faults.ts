@@ -82,11 +82,12 @@ const everyCall = ['create', 'list', 'fetch', 'update', 'delete', 'inbound', 're
 /** Reads a fault from JSON, or says in words what is wrong with it. */
 export function readFault(given: unknown): Fault | string {
   const value = (given ?? {}) as Record<string, unknown>
-  const kind = String(value.kind)
+  const kind = typeof value.kind === 'string' ? value.kind : ''
   if (!everyKind.includes(kind)) return `kind must be one of ${everyKind.join(', ')}`
   const rest = isRestFault({ kind: kind as FaultKind })
-  const on = String(value.on ?? (rest ? 'create' : 'any'))
-  if (!everyCall.includes(on)) return `on must be one of ${everyCall.join(', ')}`
+  const on = value.on ?? (rest ? 'create' : 'any')
+  if (typeof on !== 'string' || !everyCall.includes(on))
+    return `on must be one of ${everyCall.join(', ')}`
   const next = value.next ?? 1
   if (typeof next !== 'number' || next < 1) return 'next must be a number from 1'
   return {

@@ -73,7 +73,12 @@ async function callDesk(carrier: Carrier, call: DeskCall): Promise<void> {
     phone: message.from ?? '',
     sid: message.sid,
   })
-  if (outcome?.kind !== 'answered' || outcome.status < 200 || outcome.status >= 300) return
+  // A webhook that was dropped on its way is lost; only one that failed is taken to the fallback.
+  if (outcome === null) return
+  if (outcome.kind !== 'answered' || outcome.status < 200 || outcome.status >= 300) {
+    await callFallback(carrier, call)
+    return
+  }
   const answer = readTwiml(outcome.contentType, outcome.body)
   if (!answer.ok) {
     logProblem(carrier, { code: answer.code, sid: message.sid, detail: answer.detail })
@@ -89,6 +94,17 @@ async function callDesk(carrier: Carrier, call: DeskCall): Promise<void> {
       return
     }
   }
+}
+
+async function callFallback(carrier: Carrier, call: DeskCall): Promise<void> {
+  const fallback = carrier.settings.inboundFallbackUrl
+  if (fallback === '' || call.address === fallback) return
+  const failed: [string, string][] = [
+    ['ErrorCode', '11200'],
+    ['ErrorUrl', call.address.split('#')[0] ?? ''],
+  ]
+  const parameters = [...call.parameters, ...failed]
+  await callDesk(carrier, { ...call, address: fallback, method: 'POST', parameters })
 }
 
 function reply(

@@ -4,6 +4,7 @@ import { isTollFree, optedOut } from './keywords'
 import { logProblem } from './debugger-log'
 import { replyLoops } from './loop-guard'
 import type { Message, PlannedStep } from './message'
+import { longestQueueSeconds } from './message-book'
 import { fateOf, stepsAfterSending } from './number-fates'
 import { reportStatus } from './status-callback'
 
@@ -80,6 +81,10 @@ function planSending(carrier: Carrier, message: Message, queuedAt: number): void
     return
   }
   const startsAt = Math.max(queuedAt, carrier.state.busyUntil[sender] ?? 0)
+  if (message.messagingServiceSid && startsAt - queuedAt > longestQueueSeconds * 1000) {
+    message.plan = [{ at: queuedAt + 1, to: 'failed', errorCode: 30001 }]
+    return
+  }
   const expiresAt = message.createdAt + message.validitySeconds * 1000
   if (startsAt > Math.max(expiresAt, queuedAt)) {
     message.plan = [{ at: expiresAt, to: 'failed', errorCode: 30036 }]

@@ -24,13 +24,20 @@ ${shelfHtml(carrier, view)}
 ${troubleHtml(carrier)}</section></main></body></html>`
 }
 
-/** What went wrong between the carrier and the desk: the carrier's own debugger, newest first. */
+/** What went wrong between the carrier and the desk: the carrier's own debugger, newest first, repeats counted. */
 function troubleHtml(carrier: Carrier): string {
-  const entries = carrier.state.debuggerLog.slice(-troublesShown).reverse()
-  const rows = entries.map((entry) => {
-    const { day, hour } = phoneTime(entry.at, '')
-    const words = `${day} ${hour} · ${entry.code}, ${entry.text}. ${entry.detail}`
-    return `<li data-key="${entry.at}-${entry.code}-${entry.sid ?? ''}">${escapeHtml(words)}</li>`
+  const troubles = new Map<string, { words: string; lastAt: number; times: number }>()
+  for (const entry of carrier.state.debuggerLog) {
+    const words = `${entry.code}, ${entry.text}. ${entry.detail}`
+    const times = (troubles.get(words)?.times ?? 0) + 1
+    troubles.set(words, { words, lastAt: entry.at, times })
+  }
+  const latest = [...troubles.values()].sort((a, b) => b.lastAt - a.lastAt).slice(0, troublesShown)
+  const rows = latest.map(({ words, lastAt, times }) => {
+    const { day, hour } = phoneTime(lastAt, '')
+    const often = times === 1 ? '' : `, ${times} times`
+    const line = `${day} ${hour}${often}: ${words}`
+    return `<li data-key="${escapeHtml(words)}">${escapeHtml(line)}</li>`
   })
   const hidden = rows.length === 0 ? ' hidden' : ''
   return `<section class="trouble" id="trouble"${hidden} aria-labelledby="trouble-name"><h2 id="trouble-name">Between carrier and desk</h2><ul data-list id="troubles">${rows.join('')}</ul></section>`

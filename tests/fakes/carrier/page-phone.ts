@@ -21,7 +21,7 @@ export function phoneHtml(carrier: Carrier, number: string, open: readonly strin
 <div class="above"><h2 id="${id}-name">${phone.label === number ? spacedNumber(number) : label}</h2>${under}
 <a class="back" data-go href="${escapeHtml(pageAddress(others))}" aria-label="Put back ${label}">Put back</a></div>
 <div class="body">${earpiece}
-<ol class="screen" role="log" tabindex="0" aria-label="Texts on ${label}"${languageOf(phone)} data-list>${threadHtml(ledger, phone)}</ol>
+<div class="screen" role="log" tabindex="0" aria-label="Texts on ${label}"><ol${languageOf(phone)} data-list>${threadHtml(ledger, phone)}</ol></div>
 <form class="write" method="post" action="/write" data-write>
 <input type="hidden" name="from" value="${number}">${hiddenOpen(open)}
 <label for="${id}-text">Text from ${label}</label>

@@ -6,7 +6,7 @@ import { empty, html, json, type Answer, type Asked } from './exchange'
 import { receiveText } from './inbound'
 import { pageHtml } from './page-html'
 import { pageAddress } from './page-text'
-import { readView } from './page-view'
+import { readView, tidyAddress } from './page-view'
 
 const packages = createRequire(import.meta.url)
 
@@ -31,7 +31,7 @@ const icon =
 /** The page of the practice phones and what it needs; null for any other path. */
 export function answerPage(carrier: Carrier, asked: Asked): Answer | null {
   const { path } = asked
-  if (path === '/') return html(pageHtml(carrier, readView(asked.query)))
+  if (path === '/') return page(carrier, asked.query)
   if (path === '/style.css') return files(styles, 'text/css')
   if (path === '/script.js') return files(['page-script.js'], 'text/javascript')
   if (path === '/icon.svg') {
@@ -40,6 +40,12 @@ export function answerPage(carrier: Carrier, asked: Asked): Answer | null {
   if (path === '/version') return json(200, { version: carrier.version })
   if (path === '/write' && asked.method === 'POST') return write(carrier, asked)
   return path.startsWith('/fonts/') ? font(path.slice('/fonts/'.length)) : null
+}
+
+function page(carrier: Carrier, query: URLSearchParams): Answer {
+  const view = readView(query)
+  const elsewhere = tidyAddress(query, view)
+  return elsewhere === null ? html(pageHtml(carrier, view)) : empty(303, { Location: elsewhere })
 }
 
 /** Sending without a script: the text goes in and the same page comes back. */

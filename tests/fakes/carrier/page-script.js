@@ -36,9 +36,9 @@ function replaced(own, item) {
 function syncInside(own, fresh) {
   const lists = own.querySelectorAll('[data-list]')
   fresh.querySelectorAll('[data-list]').forEach((list, index) => {
-    const screen = lists[index]
+    const screen = lists[index].parentElement
     const low = screen.scrollHeight - screen.scrollTop - screen.clientHeight < 24
-    syncList(screen, list)
+    syncList(lists[index], list)
     if (low) screen.scrollTop = screen.scrollHeight
   })
   const back = own.querySelector('.back')
@@ -59,9 +59,9 @@ async function refresh(address) {
   }
   const open = new URLSearchParams(location.search).getAll('open')
   for (const form of document.forms) {
-    for (const number of open) {
+    for (const number of [...open].reverse()) {
       const input = Object.assign(document.createElement('input'), { type: 'hidden' })
-      form.append(Object.assign(input, { name: 'open', value: number }))
+      form.prepend(Object.assign(input, { name: 'open', value: number }))
     }
   }
   document.querySelector('main').className = page.querySelector('main').className
@@ -120,10 +120,36 @@ document.addEventListener('click', (event) => {
 document.addEventListener('submit', (event) => {
   const form = event.target
   if (form.matches('[role=search]')) event.preventDefault()
+  if (form.matches('[data-any]')) {
+    event.preventDefault()
+    openTyped(form).catch(report)
+  }
   if (!form.matches('[data-write]')) return
   event.preventDefault()
   send(form).catch(report)
 })
+
+/** The server knows what a number is: it leads to the tidy address, or says what is wrong. */
+async function openTyped(form) {
+  const answer = await fetch(`/?${new URLSearchParams(new FormData(form))}`)
+  const page = new DOMParser().parseFromString(await answer.text(), 'text/html')
+  const wrong = page.getElementById('refused')
+  document.getElementById('refused')?.remove()
+  const field = form.elements.any
+  if (wrong) {
+    field.setAttribute('aria-invalid', 'true')
+    field.setAttribute('aria-describedby', 'refused')
+    form.append(document.importNode(wrong, true))
+    field.focus()
+    return
+  }
+  field.removeAttribute('aria-invalid')
+  field.removeAttribute('aria-describedby')
+  const number = new URL(answer.url).searchParams.getAll('open').at(-1)
+  if (field.value.trim() === '' || !number) return
+  field.value = ''
+  await go(new URL(`${answer.url}#phone-${number.slice(1)}`))
+}
 
 async function send(form) {
   const field = form.elements.body
@@ -154,7 +180,9 @@ document.addEventListener('keydown', (event) => {
 })
 
 document.getElementById('find').addEventListener('input', filter)
-window.addEventListener('popstate', () => refresh(addressNow()).catch(report))
+window.addEventListener('popstate', () => {
+  refresh(addressNow()).catch(report)
+})
 
 function report(error) {
   console.warn('the practice phones could not be refreshed', error)
@@ -172,5 +200,5 @@ async function keepFresh() {
 
 bottoms()
 // The faces arrive later than the page and make texts taller.
-document.fonts.ready.then(bottoms)
-keepFresh()
+void document.fonts.ready.then(bottoms)
+void keepFresh()

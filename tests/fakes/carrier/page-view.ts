@@ -1,5 +1,6 @@
 import type { Carrier } from './carrier'
 import { isPossibleNumber } from './create-checks'
+import { pageAddress } from './page-text'
 import type { ShelfPhone } from './phones-file'
 
 /** What the address of the page asks to see. */
@@ -24,8 +25,17 @@ export function readView(query: URLSearchParams): PageView {
   return { open, find: query.get('find') ?? '', refused }
 }
 
+/** Ten digits without a country are a number of the programme's own, which are all under +1 in practice. */
 function plainNumber(text: string): string {
-  return `+${text.replace(/\D/g, '')}`
+  const digits = text.replace(/\D/g, '')
+  return digits.length === 10 && !text.startsWith('+') ? `+1${digits}` : `+${digits}`
+}
+
+/** The one address of a view, when it was asked for by another; null when it was asked for by that one. */
+export function tidyAddress(query: URLSearchParams, view: PageView): string | null {
+  const asked = query.getAll('open')
+  const tidy = view.refused !== '' || asked.join() === view.open.join()
+  return tidy ? null : pageAddress(view.open)
 }
 
 /** The phone as the shelf knows it, or a nameless one for a number that was typed. */

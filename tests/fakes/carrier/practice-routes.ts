@@ -3,6 +3,7 @@ import { isPossibleNumber } from './create-checks'
 import { empty, json, parseJson, type Answer, type Asked } from './exchange'
 import { readFault } from './faults'
 import { phoneLedger, phoneSummaries } from './handset'
+import { addHistory, readHistory } from './history'
 import { receiveText, type InboundText } from './inbound'
 import { emptyState } from './state'
 
@@ -13,6 +14,7 @@ export async function answerPractice(carrier: Carrier, asked: Asked): Promise<An
   if (path === '/practice/phones') return json(200, { phones: phoneSummaries(carrier) })
   const number = /^\/practice\/phones\/(\+\d+)$/.exec(path)?.[1]
   if (number) return json(200, phoneLedger(carrier, number))
+  if (path === '/practice/history' && method === 'POST') return history(carrier, asked)
   if (path === '/practice/faults') return answerFaults(carrier, asked)
   if (path === '/practice/debugger') return json(200, { entries: carrier.state.debuggerLog })
   if (path === '/practice/opt-outs') return json(200, { optOuts: carrier.state.optOuts })
@@ -33,6 +35,12 @@ async function inbound(carrier: Carrier, asked: Asked): Promise<Answer> {
   })
   if (given.wait) await delivered
   return json(201, { sid: message.sid, segments: message.segments })
+}
+
+function history(carrier: Carrier, asked: Asked): Answer {
+  const texts = readHistory(parseJson(asked.text))
+  if (!texts) return json(400, { message: 'texts must be a list of { phone, way, body, at }' })
+  return json(201, { added: addHistory(carrier, texts) })
 }
 
 function answerFaults(carrier: Carrier, asked: Asked): Answer {

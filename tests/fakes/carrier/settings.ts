@@ -9,6 +9,8 @@ export type Settings = {
   senders: string[]
   messagingServiceSid: string
   inboundUrl: string
+  /** Called when the inbound address fails; empty when there is none. */
+  inboundFallbackUrl: string
   clockFile: string
   storeFile: string
   phonesFile: string
@@ -53,6 +55,7 @@ export function readSettings(env: Record<string, string | undefined>): Settings 
     senders: list(value('FAKE_FROM', '+15005550006')),
     messagingServiceSid: value('FAKE_MESSAGING_SERVICE_SID', ''),
     inboundUrl: value('FAKE_INBOUND_URL', 'http://127.0.0.1:3000/api/sms/inbound#rc=5&rp=all'),
+    inboundFallbackUrl: value('FAKE_INBOUND_FALLBACK_URL', ''),
     clockFile: value('FAKE_CLOCK_FILE', ''),
     storeFile: value('FAKE_STORE_FILE', ''),
     phonesFile: value('FAKE_PHONES_FILE', ''),

@@ -14,7 +14,7 @@ export type TwimlVerb =
 export type TwimlAnswer =
   { ok: true; verbs: TwimlVerb[] } | { ok: false; code: 12100 | 12200 | 12300; detail: string }
 
-type XmlNode = { [name: string]: unknown; ':@'?: Record<string, string> }
+type XmlNode = { [name: string]: unknown; ':@'?: Record<string, string>; '#text'?: string }
 
 const parser = new XMLParser({
   preserveOrder: true,
@@ -81,9 +81,9 @@ function readVerb(node: XmlNode): TwimlVerb | null {
 
 function textOf(nodes: unknown): string {
   if (!Array.isArray(nodes)) return ''
-  return (nodes as XmlNode[]).map((node) => String(node['#text'] ?? '')).join('')
+  return (nodes as XmlNode[]).map((node) => node['#text'] ?? '').join('')
 }
 
 function isSpace(node: XmlNode): boolean {
-  return '#text' in node && String(node['#text']).trim() === ''
+  return '#text' in node && (node['#text'] ?? '').trim() === ''
 }

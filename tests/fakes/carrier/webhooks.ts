@@ -117,5 +117,5 @@ function pause(milliseconds: number): Promise<void> {
 
 /** Resolves when no webhook is under way any more. */
 export async function webhooksSettled(carrier: Carrier): Promise<void> {
-  while (carrier.underWay.size > 0) await Promise.allSettled([...carrier.underWay])
+  while (carrier.underWay.size > 0) await Promise.allSettled(carrier.underWay)
 }

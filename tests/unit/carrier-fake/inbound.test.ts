@@ -95,6 +95,33 @@ describe('texts that a phone writes', () => {
     expect(await debuggerCodes()).toEqual([11200])
   })
 
+  it('go to the fallback address when the desk fails', async () => {
+    await begin((heard) => ({ status: heard.path === '/inbound' ? 500 : 200 }))
+    rig.running.carrier.settings.inboundFallbackUrl = `${desk.origin}/fallback`
+    await write('hello')
+    expect(desk.heard.map((heard) => heard.path)).toEqual(['/inbound', '/fallback'])
+    expect(desk.heard[1]?.parameters).toMatchObject({ Body: 'hello', ErrorCode: '11200' })
+  })
+
+  it('of the past stand on the phone in their order, without any call', async () => {
+    await begin()
+    const sid = `SM${'e5'.repeat(16)}`
+    const at = rig.clock.now() - 86_400_000
+    const texts = [
+      { phone, way: 'written', body: 'done', at: at + 60_000 },
+      { phone, way: 'received', body: 'Wash today', at, sid },
+    ]
+    await write('today')
+    const added = await rig.practice('POST', '/history', { texts })
+    expect(added.body.added).toBe(2)
+    expect((await rig.practice('POST', '/history', { texts: [texts[1]] })).body.added).toBe(0)
+    expect((await onPhone()).map((text) => text.body)).toEqual(['Wash today', 'done', 'today'])
+    expect(await rig.fetchMessage(sid)).toMatchObject({ status: 'delivered' })
+    expect(desk.heard).toHaveLength(1)
+    const bad = await rig.practice('POST', '/history', { texts: [{ phone }] })
+    expect(bad.response.status).toBe(400)
+  })
+
   it.each([
     ['STOP', true],
     ['stop', true],

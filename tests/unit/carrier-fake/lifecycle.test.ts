@@ -109,6 +109,14 @@ describe('the life of a text', () => {
     expect((await rig.fetchMessage(created.sid)).status).toBe('delivered')
   })
 
+  it('a service whose queue is over ten hours long fails with 30001, a number is refused at once', async () => {
+    rig.running.carrier.state.busyUntil['+15005550006'] = rig.clock.now() + 36_001_000
+    const { sid } = await rig.send({ From: '', MessagingServiceSid: serviceSid })
+    await rig.forward(200)
+    expect(await rig.fetchMessage(sid)).toMatchObject({ status: 'failed', error_code: 30001 })
+    expect((await rig.send()).code).toBe(21611)
+  })
+
   it('keeps a scheduled text until its hour, and forgets a canceled one', async () => {
     const SendAt = new Date(rig.clock.now() + 600_000).toISOString()
     const form = { From: '', MessagingServiceSid: serviceSid, ScheduleType: 'fixed', SendAt }

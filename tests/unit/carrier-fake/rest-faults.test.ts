@@ -25,9 +25,14 @@ describe('faults of the REST interface', () => {
     const { response } = await create()
     expect(response.status).toBe(status)
     expect(await stored()).toBe(count)
-    if (status === 429) expect(response.headers.get('retry-after')).toBe('7')
-    if (status === 503) expect(response.headers.get('content-type')).toBe('text/html')
     expect((await create()).response.status).toBe(201)
+  })
+
+  it('says how long to wait with 429, and nothing that a client can read with 503', async () => {
+    await order({ kind: 'too-many', retryAfterSeconds: 7 })
+    await order({ kind: 'unavailable-503-before' })
+    expect((await create()).response.headers.get('retry-after')).toBe('7')
+    expect((await create()).response.headers.get('content-type')).toBe('text/html')
   })
 
   it.each([

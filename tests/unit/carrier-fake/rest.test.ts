@@ -1,5 +1,14 @@
 import { afterEach, beforeEach, describe, expect, it } from 'vitest'
-import { accountSid, phone, sender, serviceSid, startRig, type Json, type Rig } from './rig'
+import {
+  accountSid,
+  phone,
+  sender,
+  serviceSid,
+  startRig,
+  type Json,
+  type Named,
+  type Rig,
+} from './rig'
 
 const inAnHour = (rig: Rig) => new Date(rig.clock.now() + 3_600_000).toISOString()
 
@@ -137,7 +146,7 @@ describe('the REST interface', () => {
     const base64 = Buffer.from('a picture').toString('base64')
     const media = [{ contentType: 'image/png', base64 }]
     const { sid } = (await rig.practice('POST', '/inbound', { from: phone, body: '', media })).body
-    const list = (await rig.rest('GET', `/Messages/${sid}/Media.json`)).body.media_list as Json[]
+    const list = (await rig.rest('GET', `/Messages/${sid}/Media.json`)).body.media_list as Named[]
     const path = `/Messages/${sid}/Media/${list[0]?.sid}`
     const { response } = await rig.rest('GET', path)
     expect(response.status).toBe(307)

@@ -97,6 +97,8 @@ function forward(running: RunningCarrier, clock: ReturnType<typeof handClock>) {
 }
 
 export type Json = Record<string, unknown>
+/** An answer about a message; what it says beyond its sid is looked at by the test. */
+export type Named = Json & { sid: string }
 
 function calls(running: RunningCarrier) {
   const authorization = `Basic ${Buffer.from(`${accountSid}:${authToken}`).toString('base64')}`
@@ -108,7 +110,7 @@ function calls(running: RunningCarrier) {
       ...(form ? { body: new URLSearchParams(form) } : {}),
     })
     const text = await response.text()
-    return { response, body: (text.startsWith('{') ? JSON.parse(text) : {}) as Json }
+    return { response, body: (text.startsWith('{') ? JSON.parse(text) : {}) as Named }
   }
   const practice = async (method: string, path: string, value?: unknown) => {
     const response = await fetch(`${running.origin}/practice${path}`, {
@@ -116,12 +118,12 @@ function calls(running: RunningCarrier) {
       ...(value === undefined ? {} : { body: JSON.stringify(value) }),
     })
     const text = await response.text()
-    return { response, body: (text === '' ? {} : JSON.parse(text)) as Json }
+    return { response, body: (text === '' ? {} : JSON.parse(text)) as Named }
   }
   const send = async (form: Record<string, string> = {}) => {
     const sent = { To: phone, From: sender, Body: 'Wash the filter today.', ...form }
     return (await rest('POST', '/Messages.json', sent)).body
   }
-  const fetchMessage = async (sid: unknown) => (await rest('GET', `/Messages/${sid}.json`)).body
+  const fetchMessage = async (sid: string) => (await rest('GET', `/Messages/${sid}.json`)).body
   return { rest, practice, send, fetchMessage, close: () => running.close() }
 }
