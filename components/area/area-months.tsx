@@ -28,7 +28,8 @@ type MonthProps = { month: number; celsius: number | undefined; wet: boolean; wr
 function Month({ month, celsius, wet, wrong }: MonthProps) {
   const name = names[month - 1] ?? ''
   return (
-    <div role="group" aria-label={name} className="border-t border-rule pt-2">
+    <fieldset className="border-t border-rule pt-2">
+      <legend className="sr-only">{name}</legend>
       <label className="block text-sm font-semibold">
         {name.slice(0, 3)}
         <span className="sr-only">{name.slice(3)}, °C</span>
@@ -51,7 +52,7 @@ function Month({ month, celsius, wet, wrong }: MonthProps) {
         />
         wet
       </label>
-    </div>
+    </fieldset>
   )
 }
 

@@ -6,7 +6,7 @@ import { Notice } from '../ui/notice'
 import type { EntryState } from './use-entry'
 
 type EntryFormProps = {
-  entry: Pick<EntryState, 'formRef' | 'onSubmit' | 'reason' | 'busy'>
+  entry: Pick<EntryState, 'onSubmit' | 'reason' | 'busy'>
   /** What the button does: `Enter the area`. */
   keep: string
   /** Beside the button: a way back. */
@@ -17,7 +17,7 @@ type EntryFormProps = {
 /** A plain form to enter something: its fields, what is wrong, one button. */
 export function EntryForm({ entry, keep, beside, children }: EntryFormProps) {
   return (
-    <form ref={entry.formRef} onSubmit={entry.onSubmit} noValidate className="grid max-w-2xl gap-8">
+    <form onSubmit={entry.onSubmit} noValidate className="grid max-w-2xl gap-8">
       {children}
       {entry.reason && (
         <Notice tone="danger" title={entry.reason} live>

@@ -12,18 +12,18 @@ type Entry<T> = {
 
 /** A form that is kept through the API: what is wrong comes back by field, and the first such field gets the focus. */
 export function useEntry<T>({ send, onKept }: Entry<T>) {
-  const formRef = useRef<HTMLFormElement>(null)
+  const sent = useRef<HTMLFormElement>(null)
   const { mutate, error, isPending } = useMutation<T, ApiError, FormData>({
     mutationFn: send,
     onSuccess: onKept,
   })
   useEffect(() => {
-    if (error) formRef.current?.querySelector<HTMLElement>('[aria-invalid="true"]')?.focus()
+    if (error) sent.current?.querySelector<HTMLElement>('[aria-invalid="true"]')?.focus()
   }, [error])
   return {
-    formRef,
     onSubmit: (event: SubmitEvent<HTMLFormElement>) => {
       event.preventDefault()
+      sent.current = event.currentTarget
       mutate(new FormData(event.currentTarget))
     },
     /** What is wrong with a field. */

@@ -12,27 +12,29 @@ export function HouseholdsMargin({ total, search, mayEnter }: HouseholdsMarginPr
       <MarginFigure figure={total}>
         {search ? `found for “${search}”` : `kit${total === 1 ? '' : 's'} in households’ hands`}
       </MarginFigure>
-      <Form action="/households" role="search" className="grid gap-2">
-        <TextField
-          key={search}
-          label="Find"
-          hint="Name, area, phone or kit number"
-          name="q"
-          type="search"
-          required={false}
-          defaultValue={search}
-        />
-        <div className="flex flex-wrap gap-2">
-          <Button type="submit" size="small">
-            Find
-          </Button>
-          {search && (
-            <ButtonLink href="/households" kind="quiet" size="small">
-              Show all
-            </ButtonLink>
-          )}
-        </div>
-      </Form>
+      <search>
+        <Form action="/households" className="grid gap-2">
+          <TextField
+            key={search}
+            label="Find"
+            hint="Name, area, phone or kit number"
+            name="q"
+            type="search"
+            required={false}
+            defaultValue={search}
+          />
+          <div className="flex flex-wrap gap-2">
+            <Button type="submit" size="small">
+              Find
+            </Button>
+            {search && (
+              <ButtonLink href="/households" kind="quiet" size="small">
+                Show all
+              </ButtonLink>
+            )}
+          </div>
+        </Form>
+      </search>
       {mayEnter && (
         <MarginBlock title="A new house">
           <ButtonLink href="/households/new" size="small" className="mt-1">

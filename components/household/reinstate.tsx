@@ -22,7 +22,7 @@ function ReinstateForm({ phone, householdId }: Omit<ReinstateProps, 'mayChange'>
   })
   const wrong = entry.wrong('how')
   return (
-    <form ref={entry.formRef} onSubmit={entry.onSubmit} noValidate className="mt-3 grid gap-3">
+    <form onSubmit={entry.onSubmit} noValidate className="mt-3 grid gap-3">
       <TextField
         label="Talked to"
         hint="With whom, and how: it is kept with the consent."
