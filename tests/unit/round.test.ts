@@ -98,6 +98,7 @@ describe('a bundle', () => {
   it('is empty while nothing is due', () => {
     expect(bundle([{ kind: 'wash', dueOn: '2025-07-02' }], '2025-07-01')).toEqual([])
     expect(bundle([], '2025-07-01')).toEqual([])
+    expect(bundle([{ kind: 'wash', dueOn: '2025-07-02' }], '2025-07-02')).toHaveLength(1)
   })
 
   it('takes what is due and what falls within four days, the oldest first', () => {
