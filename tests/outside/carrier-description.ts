@@ -34,10 +34,13 @@ function fetchDescription(file: string): void {
   const cwd = mkdtempSync(path.join(folder, 'fetch-'))
   const options = { cwd, timeout: 120_000, stdio: 'pipe' } as const
   const isWindows = process.platform === 'win32'
-  execFileSync('npm', ['pack', packed, '--silent'], { ...options, shell: isWindows })
-  execFileSync('tar', ['-xzf', 'twilio-cli-core-9.0.0.tgz', inside], options)
-  renameSync(path.join(cwd, inside), file)
-  rmSync(cwd, { recursive: true })
+  try {
+    execFileSync('npm', ['pack', packed, '--silent'], { ...options, shell: isWindows })
+    execFileSync('tar', ['-xzf', 'twilio-cli-core-9.0.0.tgz', inside], options)
+    renameSync(path.join(cwd, inside), file)
+  } finally {
+    rmSync(cwd, { recursive: true })
+  }
 }
 
 /** Formats the description names; the addresses of pages are relative, whatever it calls them. */
