@@ -1,0 +1,93 @@
+import { describe, expect, it } from 'vitest'
+import type { TicketEvent } from '@/lib/domain/ticket'
+import {
+  advice,
+  after,
+  answered,
+  decided,
+  now,
+  opened,
+  refused,
+  taken,
+} from '@/tests/factories/ticket'
+
+describe('an answer', () => {
+  it('that the filter runs too fast takes it out of service', () => {
+    const { state, effects } = after(opened('slow'), answered('ask-flow', 1.5))
+    expect(effects).toEqual([{ kind: 'send', moment: 'stop-using' }, ...advice])
+    expect(state).toMatchObject({ trouble: 'unsafe', automatic: false, stage: 'walking' })
+  })
+
+  it('that a crack is seen does the same, once', () => {
+    const crack: TicketEvent = { kind: 'answered', stepId: 'check-cracks', answer: 'choice-1' }
+    const { state } = after(opened('slow'), taken, crack)
+    expect(state).toMatchObject({ trouble: 'unsafe', outOfService: true, noSafeWaterSince: now })
+    expect(decided(state, crack).effects).toEqual([])
+  })
+
+  it('that water runs well does not end illness', () => {
+    const { state, effects } = after(opened('unwell'), taken, answered('ask-flow', 0.9))
+    expect(state.stage).toBe('walking')
+    expect(effects).toEqual([])
+  })
+
+  it('that water runs well ends silence, without a wash', () => {
+    const { state, effects } = after(opened('silent'), answered('ask-flow', 0.9))
+    expect(effects).toEqual([{ kind: 'send', moment: 'flowing' }, { kind: 'closed' }])
+    expect(state.cause).toBe('no fault found')
+  })
+
+  it('in cold water names the cold', () => {
+    const { state } = after(
+      { kind: 'opened', trouble: 'slow', celsius: 8 },
+      answered('ask-flow', 0.9),
+    )
+    expect(state.cause).toBe('cold-water')
+  })
+
+  it('after another cure names what it cured, and logs no wash', () => {
+    const { state, effects } = after(
+      opened('slow'),
+      taken,
+      answered('ask-flow', 0.3),
+      answered('straighten-hose', 0.95),
+    )
+    expect(state.cause).toBe('kinked-hose')
+    expect(effects).toEqual([{ kind: 'send', moment: 'flowing' }, { kind: 'closed' }])
+  })
+
+  it('that the cloth is torn owes a cloth', () => {
+    const { state, effects } = after(opened('slow'), taken, {
+      kind: 'answered',
+      stepId: 'rinse-cloth',
+      answer: 'choice-1',
+      need: 'enough',
+    })
+    expect(effects).toEqual([{ kind: 'promise part', stage: 1 }])
+    expect(state).toMatchObject({ promisedStage: 1, cause: 'full-cloth' })
+  })
+
+  it('that ends in a visit asks for one, with advice if there is too little to drink', () => {
+    const silence: TicketEvent = { kind: 'answered', stepId: 'ask-flow', answer: 'no answer' }
+    const { effects } = after(opened('slow'), silence, { ...silence, need: 'short' })
+    expect(effects).toEqual([{ kind: 'ask for visit' }, ...advice])
+  })
+
+  it('while a part is owed ends the ticket if water is back, and changes nothing if not', () => {
+    const owed = after(opened('slow'), { kind: 'part promised', promiseId: 'p', stage: 3 })
+    expect(decided(owed.state, answered('ask-flow', 0.2))).toMatchObject({
+      state: { stage: 'part owed' },
+      effects: [],
+    })
+    expect(decided(owed.state, answered('ask-flow', 0.9)).state.stage).toBe('flowing')
+  })
+
+  it('to a step that is none is refused', () => {
+    const { state } = after(opened('slow'))
+    const event: TicketEvent = { kind: 'answered', stepId: 'shake-it', answer: 'done' }
+    expect(refused(state, event)).toBe('unknown step')
+    expect(refused(state, { kind: 'step sent', stepId: 'shake-it', by: 'ana' })).toBe(
+      'unknown step',
+    )
+  })
+})
