@@ -1,15 +1,30 @@
 import { sql } from 'drizzle-orm'
 import type { Handle } from '../client'
 
-/** The next instant at which something waits to be done: a text for its hour, a silence for its nudge. */
-export async function findNextHour(db: Handle): Promise<number | null> {
-  const { rows } = await db.execute<{ at: number | string | null }>(sql`
-    select extract(epoch from least(
-      (select min(send_after) from texts where state = 'queued'),
-      (select min(nudge_after) from prompts where state = 'asked')
-    ))::float8 * 1000 as at`)
-  const at = rows[0]?.at ?? null
-  return at === null ? null : Number(at)
+export type Waiting = {
+  /** When the next text may go, and the next silence is to be followed up; null where there is none. */
+  textAt: number | null
+  nudgeAt: number | null
+  /** A text's fate is not known yet. */
+  inDoubt: boolean
+}
+
+/** What waits to be done by the clock. */
+export async function findWaiting(db: Handle): Promise<Waiting> {
+  const { rows } = await db.execute<Record<'text_at' | 'nudge_at', number | string | null>>(sql`
+    select
+      (select extract(epoch from min(send_after))::float8 * 1000 from texts
+        where state = 'queued') as text_at,
+      (select extract(epoch from min(nudge_after))::float8 * 1000 from prompts
+        where state = 'asked') as nudge_at,
+      (select count(*)::int from attempts where state in ('posting', 'in doubt')) as in_doubt`)
+  const [row] = rows as Record<string, number | string | null>[]
+  const at = (value: number | string | null | undefined) => (value == null ? null : Number(value))
+  return {
+    textAt: at(row?.text_at),
+    nudgeAt: at(row?.nudge_at),
+    inDoubt: Number(row?.in_doubt ?? 0) > 0,
+  }
 }
 
 /** What happened after `from` and up to `to`. */

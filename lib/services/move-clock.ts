@@ -1,6 +1,9 @@
-import { countHappened, findNextHour } from '@/db/queries/practice'
+import { countHappened, findWaiting } from '@/db/queries/practice'
+import { listDue } from '@/db/queries/prompt'
+import { listTimeZones } from '@/db/queries/time-zone'
 import type { Deps } from '@/lib/deps'
 import { allow, type Actor } from '@/lib/domain/role'
+import { localDay } from '@/lib/domain/round'
 import type { Refusal } from '@/lib/schemas/endpoint'
 import type { Moved, MoveClock } from '@/lib/schemas/practice'
 import { followSilence } from './follow-silence'
@@ -13,6 +16,8 @@ const minute = 60_000
 const hour = 60 * minute
 /** Prompts leave seconds apart: one look takes those of the next minutes together. */
 const SHORTEST_STEP = 5 * minute
+/** Planning turns on the local day; in between it is only asked for what a weekly limit held back. */
+const PLANNING_STEP = 6 * hour
 /** How far "to the next thing due" looks: longer than any sending window stays shut. */
 const NEXT_LIMIT_HOURS = 21 * 24
 
@@ -32,21 +37,44 @@ export function stepTo({
   return Math.min(hour, toNext, target - now)
 }
 
-async function sweep(deps: Deps): Promise<void> {
-  await planPrompts(deps)
-  await sendDueTexts(deps)
-  await followSilence(deps)
-  await reconcileAttempts(deps)
+/** When planning last ran: at which instant, on which local days. */
+type Planned = { at: number; days: string }
+
+async function planIfDue(deps: Deps, zones: readonly string[], last: Planned): Promise<Planned> {
+  const now = deps.clock.now()
+  const days = zones.map((zone) => localDay(now, zone)).join()
+  if (days === last.days && now - last.at < PLANNING_STEP) return last
+  const latestDay = localDay(now, 'Pacific/Kiritimati')
+  if ((await listDue(deps.store.db, latestDay, 1)).length > 0) await planPrompts(deps)
+  return { at: now, days }
 }
 
-async function move(deps: Deps, target: number, until: (from: number) => Promise<boolean>) {
-  const from = deps.clock.now()
+/** Does what has fallen due, and says what falls due next. */
+async function sweep(deps: Deps): Promise<number | null> {
+  const isDue = (at: number | null) => at !== null && at <= deps.clock.now()
+  const before = await findWaiting(deps.store.db)
+  const textIsDue = isDue(before.textAt)
+  const nudgeIsDue = isDue(before.nudgeAt)
+  if (before.inDoubt) await reconcileAttempts(deps)
+  if (nudgeIsDue) await followSilence(deps)
+  if (textIsDue || nudgeIsDue) await sendDueTexts(deps)
+  const nothingDone = !before.inDoubt && !nudgeIsDue && !textIsDue
+  const { textAt, nudgeAt } = nothingDone ? before : await findWaiting(deps.store.db)
+  const ahead = [textAt, nudgeAt].filter((at) => at !== null)
+  return ahead.length > 0 ? Math.min(...ahead) : null
+}
+
+type Move = { target: number; isEnough: () => Promise<boolean> }
+
+async function move(deps: Deps, { target, isEnough }: Move): Promise<void> {
+  const zones = await listTimeZones(deps.store.db)
+  let planned: Planned = { at: 0, days: '' }
+  let next: number | null = null
   while (deps.clock.now() < target) {
-    const now = deps.clock.now()
-    const next = await findNextHour(deps.store.db)
-    deps.practice?.advance(stepTo({ now, target, next }))
-    await sweep(deps)
-    if (await until(from)) return
+    deps.practice?.advance(stepTo({ now: deps.clock.now(), target, next }))
+    planned = await planIfDue(deps, zones, planned)
+    next = await sweep(deps)
+    if (await isEnough()) return
   }
 }
 
@@ -67,10 +95,8 @@ export async function moveClock(
   const from = deps.clock.now()
   try {
     const hours = 'hours' in input ? input.hours : NEXT_LIMIT_HOURS
-    await move(deps, from + hours * hour, async (start) => {
-      if ('hours' in input) return false
-      return (await happened(deps, start)).texts > 0
-    })
+    const isEnough = async () => 'toNext' in input && (await happened(deps, from)).texts > 0
+    await move(deps, { target: from + hours * hour, isEnough })
   } finally {
     moving.delete(practice)
   }

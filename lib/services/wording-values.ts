@@ -6,6 +6,7 @@ import { findDueVisit, findHouseholdToTry } from '@/db/queries/wording-values'
 import type { MomentInfo } from '@/lib/domain/moments'
 import type { Values } from '@/lib/domain/wording'
 import { readSettings } from '@/lib/schemas/settings'
+import { boilMinutes } from './boil-minutes'
 
 type Found = NonNullable<Awaited<ReturnType<typeof findHouseholdToTry>>>
 
@@ -55,6 +56,7 @@ export async function wordingValues(
     ...stage,
     ...(await kitValues(db, found)),
     ...(aboutStage && changeOn ? { dueOn: changeOn } : { dueOn: found.kit.nextWashOn }),
+    ...(info.moment === 'drink-advice' ? { minutes: boilMinutes(found.altitudeMetres) } : {}),
     ...(visit ? { visitOn: visit.dueOn } : {}),
     ...(visit?.visitor ? { visitor: visit.visitor } : {}),
   }
