@@ -23,7 +23,7 @@ export function shelfHtml(carrier: Carrier, view: PageView): string {
 <p class="count" id="found" role="status">${countText(phones.length)}</p>
 <ul id="all" data-list>${phones.map(item).join('')}</ul>
 <form class="any" method="get" action="/" data-any>${hiddenOpen(view.open)}
-<label for="any">Any other number</label><div class="side"><input id="any" name="open" type="tel" autocomplete="off" placeholder="+1 212 555 0123"${view.refused ? ' aria-invalid="true" aria-describedby="refused"' : ''}>
+<label for="any">Any other number</label><div class="side"><input id="any" name="open" type="tel" autocomplete="off" placeholder="+12125550123"${view.refused ? ' aria-invalid="true" aria-describedby="refused"' : ''}>
 <button class="line">Open</button></div>
 ${view.refused ? `<p class="wrong" id="refused">No phone can have the number ${escapeHtml(view.refused)}. Write it with + and the country.</p>` : ''}</form>
 </section>`
