@@ -91,8 +91,7 @@ function firstContactNotes({ moment, body, language }: Draft): DraftNote[] {
 }
 
 function textNotes({ language }: Draft, texts: readonly string[]): DraftNote[] {
-  const longest = texts.reduce((a, b) => (segmentsOf(b).units > segmentsOf(a).units ? b : a))
-  const { segments } = segmentsOf(longest)
+  const segments = Math.max(...texts.map((text) => segmentsOf(text).segments))
   const claims = new Set(texts.flatMap((text) => claimsOfSafety(text, language)))
   const long = new Set(texts.flatMap(longSentences))
   const actions = texts.map((text) => actionsIn(text, language)).find(({ length }) => length > 1)

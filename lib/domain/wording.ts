@@ -52,6 +52,13 @@ function namesIn(node: Node): string[] {
   return [String(node.value), ...inner.flatMap((option) => option.value.flatMap(namesIn))]
 }
 
+function hasBrace(node: Node): boolean {
+  if (node.type === 0) return /[{}]/.test(node.value)
+  return 'options' in node
+    ? Object.values(node.options).some((option) => option.value.some(hasBrace))
+    : false
+}
+
 /** Names of the values a wording speaks of, known or not; none for a body that cannot be read. */
 export function valuesIn(body: string, language: Language): string[] {
   const parsed = parseBody(body, language)
@@ -66,16 +73,16 @@ export function valuesIn(body: string, language: Language): string[] {
 export function renderWording(body: string, values: Values, language: Language): Rendered {
   const parsed = parseBody(body, language)
   if (!parsed.ok) return { ok: false, reason: 'bad message', detail: parsed.why }
+  if (parsed.message.getAst().some(hasBrace)) {
+    return { ok: false, reason: 'bad message', detail: 'a brace is left in the text' }
+  }
   const unknown = parsed.names.find((name) => !valueNames.has(name))
   if (unknown !== undefined) return { ok: false, reason: 'unknown value', detail: unknown }
   const given: Record<string, string | number | undefined> = values
   const missing = parsed.names.find((name) => given[name] === undefined || given[name] === '')
   if (missing !== undefined) return { ok: false, reason: 'missing value', detail: missing }
   try {
-    const text = String(parsed.message.format(writtenOut(values, language)))
-    return /[{}]/.test(text)
-      ? { ok: false, reason: 'bad message', detail: 'a brace is left in the text' }
-      : { ok: true, text }
+    return { ok: true, text: String(parsed.message.format(writtenOut(values, language))) }
   } catch (error) {
     const detail = error instanceof Error ? error.message : String(error)
     return { ok: false, reason: 'bad message', detail }

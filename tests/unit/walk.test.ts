@@ -124,6 +124,33 @@ describe('a slow filter', () => {
       next: { end: 'part', stage: 1 },
     },
     {
+      what: 'needs a visit when nothing that was tried stands out',
+      entries: [
+        ['ask-flow', 'not done'],
+        ['wash-fibre', 'not done'],
+        ['rinse-cloth', 'not cured'],
+        ['bleed-air', 'not cured'],
+        ['straighten-hose', 'not cured'],
+        ['fill-container', 'not cured'],
+        ['refit-cap', 'not cured'],
+        ['check-cracks', 'choice-3'],
+        ['look-hose', 'choice-3'],
+        ['flush-carbon', 'partly'],
+      ],
+      next: { end: 'visit', stage: undefined },
+    },
+    {
+      what: 'is owed the stage that three washes only partly brought back',
+      entries: [
+        ['ask-flow', 'done', 0.5],
+        ['wash-fibre', 'done', 0.5],
+        ['wash-fibre', 'done', 0.5],
+        ['wash-fibre', 'done', 0.5],
+        ['bleed-air', 'done', 0.5],
+      ],
+      next: { end: 'part', stage: 3 },
+    },
+    {
       what: 'is stopped when a crack is seen, whatever else is known',
       entries: [
         ['ask-flow', 'done', 0.33],

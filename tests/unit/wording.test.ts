@@ -63,6 +63,19 @@ describe('rendering a wording', () => {
     expect(renderWording(body, values, 'en')).toEqual({ ok: false, reason, detail })
   })
 
+  it('refuses a form that a value cannot take', () => {
+    expect(renderWording('{dueOn, date}', { dueOn: 'soon' }, 'en')).toMatchObject({
+      ok: false,
+      reason: 'bad message',
+    })
+  })
+
+  it('minds braces in its own words only, in every branch', () => {
+    expect(renderWording('{house}', { house: '{x}' }, 'en')).toEqual({ ok: true, text: '{x}' })
+    const body = "{stage, select, 1 {a '{' b} other {c}}"
+    expect(renderWording(body, { stage: 2 }, 'en')).toMatchObject({ reason: 'bad message' })
+  })
+
   it.each(['{', '{house', '{minutes, plural, one {x}}', '{}', '{house, sorcery}'])(
     'refuses what ICU cannot read: %s',
     (body) => {
