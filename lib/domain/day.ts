@@ -94,7 +94,16 @@ export function daysBetween(from: string, to: string): number {
 
 /** Day of the week, 0 for Sunday to 6 for Saturday. */
 export function weekdayOf(day: string): number {
-  return (((dayNumber(day) + 4) % 7) + 7) % 7 // 1970-01-01 was a Thursday
+  return weekdayOfNumber(dayNumber(day))
+}
+
+function weekdayOfNumber(number: number): number {
+  return (((number + 4) % 7) + 7) % 7 // 1970-01-01 was a Thursday
+}
+
+/** Whether the day of this number is a Sunday. */
+export function isSunday(number: number): boolean {
+  return weekdayOfNumber(number) === 0
 }
 
 /** The month of a day, 1 to 12. */

@@ -34,24 +34,31 @@ export type WhatIf = {
   flowCheckDays?: number
 }
 
-type Span = { first: number; last: number }
+/** The days planned for, by their numbers; `months` has the month of each, from the first on. */
+type Span = { first: number; last: number; months: readonly number[] }
 
-function intervalAfter(kit: KitAhead, washedOn: string, settings: WashSettings): number {
-  const wet = kit.wetMonths.includes(monthOf(washedOn))
+function spanOf(from: string, days: number): Span {
+  const first = dayNumber(from)
+  const months = Array.from({ length: days }, (_, ahead) => monthOf(dayOfNumber(first + ahead)))
+  return { first, last: first + days - 1, months }
+}
+
+function intervalIn(month: number, kit: KitAhead, settings: WashSettings): number {
+  const wet = kit.wetMonths.includes(month)
   return washIntervalDays({ sourceClass: kit.sourceClass, wet, settings })
 }
 
 function washDays(kit: KitAhead, span: Span, whatIf: WashSettings | undefined): number[] {
   const settings = whatIf ?? washDefaults
   // The day that stands was found with the trend; another cycle starts anew from the last wash.
-  const nextOn = whatIf
-    ? addDays(kit.lastWashOn, intervalAfter(kit, kit.lastWashOn, whatIf))
-    : kit.nextWashOn
+  const next = whatIf
+    ? dayNumber(kit.lastWashOn) + intervalIn(monthOf(kit.lastWashOn), kit, whatIf)
+    : dayNumber(kit.nextWashOn)
   const days: number[] = []
-  let on = Math.max(dayNumber(nextOn), span.first)
+  let on = Math.max(next, span.first)
   while (on <= span.last) {
     days.push(on)
-    on += intervalAfter(kit, dayOfNumber(on), settings)
+    on += intervalIn(span.months[on - span.first] ?? 0, kit, settings)
   }
   return days
 }
@@ -59,11 +66,11 @@ function washDays(kit: KitAhead, span: Span, whatIf: WashSettings | undefined): 
 function changeDays(fittedOn: string, months: number, span: Span): number[] {
   const first = Math.max(dayNumber(nextChangeOn({ fittedOn, changeMonths: months })), span.first)
   const days: number[] = []
-  for (let count = 0; ; count += 1) {
-    const on = dayNumber(nextDue({ fittedOn: dayOfNumber(first), months, count }))
-    if (on > span.last) return days
+  for (let on = first; on <= span.last;) {
     days.push(on)
+    on = dayNumber(nextDue({ fittedOn: dayOfNumber(first), months, count: days.length }))
   }
+  return days
 }
 
 function flowCheckDaysOf(kit: KitAhead, everyDays: number, span: Span): number[] {
@@ -91,8 +98,9 @@ export function planAhead({
   days: number
   whatIf?: WhatIf
 }): DayAhead[] {
+  refuseStandingStill(kits, whatIf)
   const plan = Array.from({ length: days }, (_, ahead): DayAhead => emptyDay(addDays(from, ahead)))
-  const span = { first: dayNumber(from), last: dayNumber(from) + days - 1 }
+  const span = spanOf(from, days)
   const dayAt = (on: number) => plan[on - span.first] as DayAhead
   for (const kit of kits) {
     const told = new Set<number>()
@@ -112,6 +120,20 @@ export function planAhead({
     for (const on of told) dayAt(on).texts += 1
   }
   return plan
+}
+
+/** A cycle of no length would be due for ever on one day. */
+function refuseStandingStill(
+  kits: readonly KitAhead[],
+  { wash, changeMonths, flowCheckDays }: WhatIf,
+) {
+  const lengths = [
+    ...kits.flatMap(({ stages }) => stages.map((stage) => stage.changeMonths)),
+    ...Object.values(changeMonths ?? {}),
+    flowCheckDays ?? 1,
+    wash?.floorDays ?? 1,
+  ]
+  if (lengths.some((length) => !(length >= 1))) throw new RangeError('a cycle takes some time')
 }
 
 function emptyDay(on: string): DayAhead {

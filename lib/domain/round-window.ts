@@ -1,6 +1,6 @@
 import { tzOffset } from '@date-fns/tz'
 import { toDate } from 'date-fns'
-import { addDays, dayNumber, dayOfNumber, weekdayOf } from './day'
+import { dayOfNumber, isSunday } from './day'
 
 /** When an area may be texted, in its own local time. Minutes count from midnight. */
 export type Window = {
@@ -21,26 +21,33 @@ function offsetAt(at: number, timeZone: string): number {
   return offsetMinutes * minute
 }
 
+/** What calendar and wall clock show: the day's number and the minute of it. */
+function wallAt(at: number, timeZone: string): { dayNumber: number; minute: number } {
+  const local = at + offsetAt(at, timeZone)
+  const number = Math.floor(local / day)
+  return { dayNumber: number, minute: Math.floor((local - number * day) / minute) }
+}
+
 /** The calendar day of an instant in a zone. */
 export function localDay(at: number, timeZone: string): string {
-  return dayOfNumber(Math.floor((at + offsetAt(at, timeZone)) / day))
+  return dayOfNumber(wallAt(at, timeZone).dayNumber)
 }
 
 /** The minute of the local day, 0 to 1439, as the clock on the wall shows it. */
 export function localMinute(at: number, timeZone: string): number {
-  const local = at + offsetAt(at, timeZone)
-  return Math.floor((local - Math.floor(local / day) * day) / minute)
+  return wallAt(at, timeZone).minute
 }
 
-function isDayOff(localDayOn: string, window: Window): boolean {
-  return (window.sundaysOff && weekdayOf(localDayOn) === 0) || window.holidays.includes(localDayOn)
+function isDayOff(number: number, window: Window): boolean {
+  if (window.sundaysOff && isSunday(number)) return true
+  return window.holidays.length > 0 && window.holidays.includes(dayOfNumber(number))
 }
 
 /** Whether a text may go out: opening ≤ wall clock < closing, on a day that is not off. */
 export function insideWindow(at: number, window: Window): boolean {
-  const clock = localMinute(at, window.timeZone)
-  if (clock < window.opensMinute || clock >= window.closesMinute) return false
-  return !isDayOff(localDay(at, window.timeZone), window)
+  const wall = wallAt(at, window.timeZone)
+  if (wall.minute < window.opensMinute || wall.minute >= window.closesMinute) return false
+  return !isDayOff(wall.dayNumber, window)
 }
 
 /** The first instant in (before, after] that has the later offset. */
@@ -60,17 +67,19 @@ function changeOfOffset(before: number, after: number, timeZone: string): number
  * Every instant of a local day at which the wall clock may come to show one of `clockMinutes`.
  * When the clocks change that day there may be two of them, or none but the change itself.
  */
-function instantsOf(localDayOn: string, clockMinutes: readonly number[], timeZone: string) {
-  const midnight = dayNumber(localDayOn) * day
+function instantsOf(number: number, clockMinutes: readonly number[], timeZone: string) {
+  const midnight = number * day
   // Zones run from UTC-12 to UTC+14: these two instants enclose the local day in any of them.
   const before = midnight - 15 * 60 * minute
   const after = midnight + day + 13 * 60 * minute
-  const offsets = [offsetAt(before, timeZone), offsetAt(after, timeZone)]
-  const instants = offsets.flatMap((offset) =>
-    clockMinutes.map((clock) => midnight + clock * minute - offset),
-  )
-  if (offsets[0] !== offsets[1]) instants.push(changeOfOffset(before, after, timeZone))
-  return instants.filter((instant) => localDay(instant, timeZone) === localDayOn)
+  const offset = offsetAt(before, timeZone)
+  const instantsAt = (at: number) => clockMinutes.map((clock) => midnight + clock * minute - at)
+  const instants = instantsAt(offset)
+  const laterOffset = offsetAt(after, timeZone)
+  if (laterOffset !== offset) {
+    instants.push(...instantsAt(laterOffset), changeOfOffset(before, after, timeZone))
+  }
+  return instants.filter((instant) => wallAt(instant, timeZone).dayNumber === number)
 }
 
 const searchDays = 400
@@ -78,11 +87,10 @@ const searchDays = 400
 /** The first instant from `at` on that lies inside the window. Throws if there is none in a year. */
 export function nextInsideWindow(at: number, window: Window): number {
   if (insideWindow(at, window)) return at
-  const firstDay = localDay(at, window.timeZone)
-  for (let ahead = 0; ahead <= searchDays; ahead += 1) {
-    const localDayOn = addDays(firstDay, ahead)
-    if (isDayOff(localDayOn, window)) continue
-    const openings = instantsOf(localDayOn, [window.opensMinute], window.timeZone)
+  const today = wallAt(at, window.timeZone).dayNumber
+  for (let number = today; number <= today + searchDays; number += 1) {
+    if (isDayOff(number, window)) continue
+    const openings = instantsOf(number, [window.opensMinute], window.timeZone)
     const inside = openings.filter((opening) => opening > at && insideWindow(opening, window))
     if (inside.length > 0) return Math.min(...inside)
   }
@@ -91,9 +99,15 @@ export function nextInsideWindow(at: number, window: Window): number {
 
 /** The first instant after `at` and up to `until` that lies outside the window; null if none. */
 export function windowClosesAt(at: number, until: number, window: Window): number | null {
-  const lastDay = localDay(until, window.timeZone)
-  for (let on = localDay(at, window.timeZone); on <= lastDay; on = addDays(on, 1)) {
-    const edges = instantsOf(on, [0, window.closesMinute], window.timeZone)
+  const { timeZone, closesMinute } = window
+  const today = wallAt(at, timeZone)
+  // The common case, for a round of thousands: it is over before the window of this day closes,
+  // and the clocks do not change in between.
+  const closesToday = at + (closesMinute - today.minute - 1) * minute
+  if (until < closesToday && offsetAt(at, timeZone) === offsetAt(closesToday, timeZone)) return null
+  const lastDay = wallAt(until, timeZone).dayNumber
+  for (let number = today.dayNumber; number <= lastDay; number += 1) {
+    const edges = instantsOf(number, [0, closesMinute], timeZone)
     const outside = edges.filter((edge) => edge > at && !insideWindow(edge, window))
     const closesAt = Math.min(...outside)
     if (closesAt <= until) return closesAt

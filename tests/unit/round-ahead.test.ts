@@ -82,6 +82,19 @@ describe('the plan ahead', () => {
     expect(peakOf(many)).toEqual({ on: from, times: 3 / 0.8 })
   })
 
+  it.each([
+    { changeMonths: { 1: 0 } },
+    { flowCheckDays: 0 },
+    { wash: { ...washDefaults, floorDays: 0 } },
+  ])('refuses a cycle of no length rather than turn for ever: %o', (whatIf) => {
+    expect(() => planAhead({ kits: [kit], from, days: 5, whatIf })).toThrow(RangeError)
+  })
+
+  it('takes a kit’s own cycle to task as well', () => {
+    const stages = [{ position: 1, fittedOn: from, changeMonths: 0 }] as const
+    expect(() => planAhead({ kits: [{ ...kit, stages }], from, days: 5 })).toThrow(RangeError)
+  })
+
   it('has no peak with nothing to do, and no flow check where none is due', () => {
     expect(peakOf(planAhead({ kits: [], from, days: 3 }))).toBeNull()
     expect(peakOf([])).toBeNull()
