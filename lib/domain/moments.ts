@@ -32,67 +32,76 @@ type Traits = {
   asked?: Asked
 }
 
-function row<M extends string>(moment: M, group: MomentGroup, name: string, traits: Traits = {}) {
-  const values: readonly ValueName[] = ['programme', 'house', ...(traits.offers ?? [])]
-  return {
-    moment,
-    name,
-    group,
-    safety: traits.safety ?? false,
-    firstContact: traits.firstContact ?? false,
-    values,
-    needs: traits.needs ?? [],
-    asked: traits.asked ?? 'none',
+/** Makes the rows of one group. */
+function rowsOf(group: MomentGroup) {
+  return <M extends string>(moment: M, name: string, traits: Traits = {}) => {
+    const values: readonly ValueName[] = ['programme', 'house', ...(traits.offers ?? [])]
+    return {
+      moment,
+      name,
+      group,
+      safety: traits.safety ?? false,
+      firstContact: traits.firstContact ?? false,
+      values,
+      needs: traits.needs ?? [],
+      asked: traits.asked ?? 'none',
+    }
   }
 }
+
+const settling = rowsOf('Settling in')
+const care = rowsOf('Care')
+const step = rowsOf('Steps')
+const trouble = rowsOf('Trouble')
+const manners = rowsOf('Manners')
 
 const stageDue: Traits = { offers: ['stage', 'part', 'depot', 'dueOn'], needs: ['stage'] }
 
 const rows = [
-  row('welcome', 'Settling in', 'Welcome', { firstContact: true, asked: 'none' }),
-  row('first-flush', 'Settling in', 'First flush', { asked: 'flow' }),
-  row('wash-due', 'Care', 'Wash due', { offers: ['dueOn'], asked: 'wash' }),
-  row('wash-nudge', 'Care', 'Wash nudge', { offers: ['dueOn'], asked: 'wash' }),
-  row('change-due', 'Care', 'Change due', { ...stageDue, asked: 'change' }),
-  row('change-nudge', 'Care', 'Change nudge', { ...stageDue, asked: 'change' }),
-  row('flow-check', 'Care', 'Flow check', { asked: 'flow' }),
-  row('ask-flow', 'Care', 'Ask flow', { asked: 'flow' }),
-  row('step-wash-fibre', 'Steps', 'Wash the fibre stage', { asked: 'step' }),
-  row('step-rinse-cloth', 'Steps', 'Rinse the cloth', { asked: 'step' }),
-  row('step-flush-carbon', 'Steps', 'Flush the carbon', { asked: 'step' }),
-  row('step-bleed-air', 'Steps', 'Let the air out', { asked: 'step' }),
-  row('step-straighten-hose', 'Steps', 'Straighten the hose', { asked: 'step' }),
-  row('step-fill-container', 'Steps', 'Fill the container', { asked: 'step' }),
-  row('step-refit-cap', 'Steps', 'Refit the caps', { asked: 'step' }),
-  row('step-look-hose', 'Steps', 'Look at the hose', { asked: 'step' }),
-  row('step-check-cracks', 'Steps', 'Look for cracks', { safety: true, asked: 'step' }),
-  row('got-it', 'Trouble', 'Got it', { offers: ['minutes'] }),
-  row('flowing', 'Trouble', 'Flowing again', { offers: ['minutes', 'dueOn'] }),
-  row('ask-again', 'Trouble', 'Ask the flow again', { offers: ['minutes'], asked: 'flow' }),
-  row('part-owed', 'Trouble', 'Part owed', {
+  settling('welcome', 'Welcome', { firstContact: true, asked: 'none' }),
+  settling('first-flush', 'First flush', { asked: 'flow' }),
+  care('wash-due', 'Wash due', { offers: ['dueOn'], asked: 'wash' }),
+  care('wash-nudge', 'Wash nudge', { offers: ['dueOn'], asked: 'wash' }),
+  care('change-due', 'Change due', { ...stageDue, asked: 'change' }),
+  care('change-nudge', 'Change nudge', { ...stageDue, asked: 'change' }),
+  care('flow-check', 'Flow check', { asked: 'flow' }),
+  care('ask-flow', 'Ask flow', { asked: 'flow' }),
+  step('step-wash-fibre', 'Wash the fibre stage', { asked: 'step' }),
+  step('step-rinse-cloth', 'Rinse the cloth', { asked: 'step' }),
+  step('step-flush-carbon', 'Flush the carbon', { asked: 'step' }),
+  step('step-bleed-air', 'Let the air out', { asked: 'step' }),
+  step('step-straighten-hose', 'Straighten the hose', { asked: 'step' }),
+  step('step-fill-container', 'Fill the container', { asked: 'step' }),
+  step('step-refit-cap', 'Refit the caps', { asked: 'step' }),
+  step('step-look-hose', 'Look at the hose', { asked: 'step' }),
+  step('step-check-cracks', 'Look for cracks', { safety: true, asked: 'step' }),
+  trouble('got-it', 'Got it', { offers: ['minutes'] }),
+  trouble('flowing', 'Flowing again', { offers: ['minutes', 'dueOn'] }),
+  trouble('ask-again', 'Ask the flow again', { offers: ['minutes'], asked: 'flow' }),
+  trouble('part-owed', 'Part owed', {
     offers: ['stage', 'part', 'depot'],
     needs: ['stage'],
   }),
-  row('part-ready', 'Trouble', 'Part ready', {
+  trouble('part-ready', 'Part ready', {
     offers: ['stage', 'part', 'depot', 'dueOn'],
     needs: ['stage', 'depot'],
   }),
-  row('visit-booked', 'Trouble', 'Visit booked', {
+  trouble('visit-booked', 'Visit booked', {
     offers: ['visitor', 'visitOn'],
     needs: ['visitOn'],
   }),
-  row('stop-using', 'Trouble', 'Stop using', { safety: true }),
+  trouble('stop-using', 'Stop using', { safety: true }),
   // `minutes` here is how long to boil, from the table that the programme chose.
-  row('drink-advice', 'Trouble', 'Drink advice', { safety: true, offers: ['litres', 'minutes'] }),
-  row('unwell', 'Trouble', 'Unwell', { safety: true }),
-  row('unwell-now', 'Trouble', 'Unwell: go now', { safety: true }),
-  row('thanks', 'Manners', 'Thanks', { offers: ['dueOn'] }),
-  row('unclear', 'Manners', 'Not understood'),
-  row('stop-or-stopped', 'Manners', 'Stop, or stopped?'),
-  row('stopped', 'Manners', 'Texts stopped'),
-  row('started', 'Manners', 'Texts started', { firstContact: true }),
-  row('help', 'Manners', 'Help', { firstContact: true }),
-  row('wrong-number', 'Manners', 'Wrong number'),
+  trouble('drink-advice', 'Drink advice', { safety: true, offers: ['litres', 'minutes'] }),
+  trouble('unwell', 'Unwell', { safety: true }),
+  trouble('unwell-now', 'Unwell: go now', { safety: true }),
+  manners('thanks', 'Thanks', { offers: ['dueOn'] }),
+  manners('unclear', 'Not understood'),
+  manners('stop-or-stopped', 'Stop, or stopped?'),
+  manners('stopped', 'Texts stopped'),
+  manners('started', 'Texts started', { firstContact: true }),
+  manners('help', 'Help', { firstContact: true }),
+  manners('wrong-number', 'Wrong number'),
 ] as const
 
 /** A point in a kit's life that a wording belongs to. */

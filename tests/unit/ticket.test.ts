@@ -20,18 +20,18 @@ function after(minutes: number): Recovery {
   return recovery({ flow: flow(minutes), first: flow(3.5), nominal: 15 })
 }
 
+type Played = { state: TicketState; effects: TicketEffect[] }
+
 /** Plays events one hour apart; a refusal fails the test. */
-function play(events: readonly TicketEvent[], from: TicketState | null = null) {
-  let state = from
-  let effects: TicketEffect[] = []
-  events.forEach((event, index) => {
-    const decision = decide(state, event, opening + index * hour)
+function play(events: readonly TicketEvent[], from: TicketState | null = null): Played {
+  let last: Played | null = from && { state: from, effects: [] }
+  for (const [index, event] of events.entries()) {
+    const decision = decide(last?.state ?? null, event, opening + index * hour)
     if (!decision.ok) throw new Error(`${event.kind} refused: ${decision.reason}`)
-    state = decision.state
-    effects = decision.effects
-  })
-  if (!state) throw new Error('no events')
-  return { state, effects } as { state: TicketState; effects: TicketEffect[] }
+    last = decision
+  }
+  if (!last) throw new Error('no events')
+  return last
 }
 
 const openedSlow: TicketEvent = { kind: 'opened', trouble: 'slow' }
