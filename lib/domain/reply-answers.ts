@@ -54,7 +54,14 @@ function notYet(sense: Sense): Answer | null {
   const planned = said(sense, 'future').filter(
     () => isNamed(sense, 'wash', 'change', 'done') || sense.words <= 3,
   )
-  const marks = [...said(sense, 'notYet', 'forgot'), ...undone, ...planned, ...promised(sense)]
+  const days = isSaid(sense, 'done') ? [] : said(sense, 'day')
+  const marks = [
+    ...said(sense, 'notYet', 'forgot'),
+    ...days,
+    ...undone,
+    ...planned,
+    ...promised(sense),
+  ]
   return marks.length > 0 ? { kind: 'not-yet', sure: sureOf(0.85, marks) } : null
 }
 
@@ -111,7 +118,7 @@ const dangers: Concept[] = [
 function yesNo(sense: Sense): Answer | null {
   const yes = said(sense, 'yes')
   const no = said(sense, 'no')
-  const safe = denied(sense, ...dangers)
+  const safe = denied(sense, ...dangers, ...(sense.asked === 'step' ? (['bad'] as const) : []))
   if (safe.length > 0) return { kind: 'no', sure: sureOf(0.75, safe) }
   if (yes.length > 0 && no.length > 0) return null
   if (yes.length > 0) return { kind: 'yes', sure: sureOf(sense.unknownWords > 3 ? 0.5 : 0.85, yes) }

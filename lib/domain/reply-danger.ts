@@ -3,7 +3,6 @@ import {
   areBeside,
   denied,
   gapBetween,
-  isDenied,
   isNamed,
   isSaid,
   said,
@@ -19,8 +18,12 @@ export type Danger = {
 
 /** Illness first, then a filter that must not be used, then water that must not be drunk. */
 export function findDanger(sense: Sense): Danger | null {
-  const danger = findIllness(sense) ?? findBreach(sense) ?? findOddWater(sense)
-  if (danger === null) return null
+  const found = [findIllness(sense), findBreach(sense), findOddWater(sense)]
+  const dangers = found.filter((danger) => danger !== null)
+  // A word that had to be guessed does not outrank one that stands as it is written.
+  const best = Math.max(0, ...dangers.map((danger) => danger.sure))
+  const danger = dangers.find((each) => each.sure > best - 0.15)
+  if (danger === undefined) return null
   // "What if it cracks?" reports nothing; a person answers it.
   const isSupposed = isSaid(sense, 'if') && (sense.text.includes('?') || isSaid(sense, 'ask'))
   return isSupposed ? { ...danger, sure: 0.5 } : danger
@@ -37,7 +40,7 @@ function findIllness(sense: Sense): Danger | null {
 function dangerSigns(sense: Sense): Mark[] {
   const patients = [
     ...said(sense, 'child', 'ill', 'vomit', 'sleepy', 'belly'),
-    ...said(sense, 'person'),
+    ...said(sense, 'person', 'pronoun'),
   ]
   const ill = said(sense, 'ill', 'vomit', 'stool', 'belly')
   const refusing = denied(sense, 'drink').filter(
@@ -63,7 +66,7 @@ function painMarks(sense: Sense): Mark[] {
 /** "Mi hijo está mal": something bad is said of a person, not of the water. */
 function poorlyMarks(sense: Sense): Mark[] {
   const people = said(sense, 'child', 'person')
-  const bad = [...said(sense, 'bad'), ...denied(sense, 'good')]
+  const bad = [...said(sense, 'bad', 'frail'), ...denied(sense, 'good')]
   const things = said(sense, 'water', 'filter', 'piece', 'flow', 'smell', 'taste')
   return bad.filter((mark) =>
     people.some((person) => {
@@ -121,7 +124,13 @@ function findOddWater(sense: Sense): Danger | null {
   const bad = said(sense, 'bad').filter(
     (mark) => areBeside(sense, [mark], said(sense, 'water'), 3) && !isNamed(sense, 'flow'),
   )
-  const notGood = denied(sense, 'clean').filter(() => water.length > 0 || isDenied(sense, 'clean'))
+  // "No sale clara": the denial is of the clearness, not of the flow.
+  const unclear = said(sense, 'clean').filter((mark) =>
+    denied(sense, 'flow').some(
+      (flow) => flow.to <= mark.from && gapBetween(sense, flow, mark) <= 2,
+    ),
+  )
+  const notGood = [...denied(sense, 'clean'), ...unclear]
   const marks = [...strong, ...smells, ...coloured, ...bad, ...dirty, ...notGood]
   return marks.length > 0 ? { kind: 'odd-water', sure: sureOf(0.88, marks) } : null
 }

@@ -68,6 +68,10 @@ export function denyMarks(marks: readonly Mark[], tokens: readonly Token[]): Mar
   const fences = fencesOf(settled, tokens)
   for (const mark of settled) {
     if (mark.concept === 'not') denyForward(mark, settled, fences, forwardReach)
+    // "No hay fuga": what one has not is denied too; Bengali says it after the thing.
+    const isAlsoNot = settled.some((other) => other.concept === 'not' && other.from === mark.from)
+    if (mark.concept === 'lack' && mark.language !== 'bn' && !isAlsoNot)
+      denyForward(mark, settled, fences, 3)
     if (mark.concept === 'notNext') denyForward(mark, settled, fences, 1)
     if (mark.concept === 'notBack') denyBackward(mark, settled, fences, backwardReach)
     if (mark.concept === 'notAround' && !denyBackward(mark, settled, fences, 1)) {

@@ -93,7 +93,8 @@ function readSpan(
   if (unit.kind !== 'unit' || unit.unit === 'other') return amount.to
   let minutes = amount.value * minutesPer[unit.unit]
   let to = amount.to + unit.size
-  const skip = isAnd(tokens[to]) ? 1 : 0
+  const isHalf = pieceAt(tokens, to, order).kind === 'half'
+  const skip = !isHalf && isAnd(tokens[to]) ? 1 : 0
   const half = pieceAt(tokens, to + skip, order)
   if (half.kind === 'half') {
     minutes += half.part * minutesPer[unit.unit]

@@ -1,5 +1,5 @@
 import type { Language } from './language'
-import { exactKeys, respelledKeys } from './reply-lexicon'
+import { exactKeys, isWholeWord, respelledKeys } from './reply-lexicon'
 import type { Token } from './reply-tokens'
 
 /** Bengali writes its denial onto the verb as often as after it: আসেনা, হয়নি, asena, korini. */
@@ -12,7 +12,7 @@ export function partJoinedDenials(tokens: readonly Token[], own: Language): Toke
     if (verb === undefined || denial === undefined) return [token]
     const isLatin = /[a-z]/.test(verb)
     if (isLatin && (own !== 'bn' || verb.length < 3)) return [token]
-    const isKnownWhole = exactKeys(token.text, 'bn').some((key) => !key.endsWith('*'))
+    const isKnownWhole = isWholeWord(token.text, 'bn')
     const isKnownVerb =
       exactKeys(verb, 'bn').length > 0 ||
       respelledKeys(verb, 'bn').some((key) => !key.endsWith('*'))

@@ -8,7 +8,9 @@ import { foldText } from './reply-tokens'
 import {
   allowedSlips,
   foldBengali,
+  foldFrench,
   foldRoman,
+  foldSpanish,
   isKeypadSlip,
   slipsBetween,
   squeeze,
@@ -31,6 +33,8 @@ export type Likeness = 'exact' | 'respelled' | 'guessed'
 type Lexicon = {
   entriesByFirstKey: Map<string, Entry[]>
   words: Set<string>
+  /** Words that are an entry by themselves, not only part of a longer one. */
+  wholes: Set<string>
   stems: Set<string>
   respelled: Map<string, string[]>
   respelledStems: [string, string][]
@@ -46,8 +50,18 @@ export function listed(text: string): string[] {
 }
 
 function respellerOf(pack: LanguagePack): (word: string) => string {
+  if (pack.spelling === 'spanish') return foldSpanish
+  if (pack.spelling === 'french') return foldFrench
   if (pack.spelling === 'latin') return squeeze
   return (word) => (/[a-z]/.test(word) ? foldRoman(word) : foldBengali(word))
+}
+
+/** Bengali denials stand joined to the verb or apart; the reader parts them in the text. */
+function spellings(entry: string): string[] {
+  const parted = entry.replace(/(?<= \S{2,})(নাই|নি|না|nai|ni|na)(?= |$)/gu, ' $1')
+  return /[\u0980-\u09ff]|(?:na|ni|nai)$/.test(entry) && parted !== entry
+    ? [entry, parted]
+    : [entry]
 }
 
 function numberWords(pack: LanguagePack): string[] {
@@ -61,7 +75,7 @@ function numberWords(pack: LanguagePack): string[] {
 
 /** Adds a word both as it is written and as it is respelled. */
 function learn(lexicon: Lexicon, key: string): void {
-  if (key === '~') return
+  if (key === '~' || key === '.') return
   if (key.endsWith('*')) {
     const stem = key.slice(0, -1)
     if (lexicon.stems.has(stem)) return
@@ -80,18 +94,20 @@ function buildLexicon(language: Language): Lexicon {
   const lexicon: Lexicon = {
     entriesByFirstKey: new Map(),
     words: new Set(),
+    wholes: new Set(foldText(pack.common).split(/\s+/)),
     stems: new Set(),
     respelled: new Map(),
     respelledStems: [],
     respell: respellerOf(pack),
   }
   for (const [concept, words] of Object.entries(pack.concepts) as [Concept, string][]) {
-    for (const entry of listed(words)) {
+    for (const entry of listed(words).flatMap(spellings)) {
       const keys = entry.split(/\s+/)
       const first = keys[0] ?? ''
       const entries = lexicon.entriesByFirstKey.get(first) ?? []
       entries.push({ concept, language, keys })
       lexicon.entriesByFirstKey.set(first, entries)
+      if (keys.length === 1) lexicon.wholes.add(first)
       keys.forEach((key) => learn(lexicon, key))
     }
   }
@@ -115,6 +131,10 @@ export function respelt(word: string, language: Language): string {
   return respellerOf(languagePacks[language])(word)
 }
 
+export function isWholeWord(word: string, language: Language): boolean {
+  return lexiconOf(language).wholes.has(word)
+}
+
 export function entriesStartingWith(language: Language, key: string): readonly Entry[] {
   return lexiconOf(language).entriesByFirstKey.get(key) ?? []
 }
@@ -131,6 +151,7 @@ export function exactKeys(word: string, language: Language): string[] {
 
 /** Keys after taking away what writers of the language leave to chance. */
 export function respelledKeys(word: string, language: Language): string[] {
+  if (word.length < 4 && language !== 'bn') return []
   const lexicon = lexiconOf(language)
   const respelled = lexicon.respell(word)
   const keys = [...(lexicon.respelled.get(respelled) ?? [])]
@@ -142,7 +163,10 @@ export function respelledKeys(word: string, language: Language): string[] {
 
 /** Keys within the allowed slips; only the nearest are kept. */
 export function guessedKeys(word: string, language: Language): string[] {
-  if (allowedSlips(word.length) === 0 || !/^\p{L}[\p{L}\p{M}]+$/u.test(word)) return []
+  const isBengali = /\p{Script=Bengali}/u.test(word)
+  // A Bengali letter carries its vowel sign, so that words count longer than they are.
+  const length = isBengali ? Math.floor((word.length * 2) / 3) : word.length
+  if (allowedSlips(length) === 0 || !/^\p{L}[\p{L}\p{M}]+$/u.test(word)) return []
   const lexicon = lexiconOf(language)
   let best = Number.POSITIVE_INFINITY
   let keys: string[] = []
@@ -158,7 +182,7 @@ export function guessedKeys(word: string, language: Language): string[] {
     const slips = isKeypadSlip(word, known)
       ? 1
       : Math.min(slipsBetween(word, known), slipsBetween(squeezed, known))
-    if (slips <= allowedSlips(Math.min(known.length, word.length))) consider(known, slips)
+    if (slips <= Math.min(allowedSlips(length), allowedSlips(known.length))) consider(known, slips)
   }
   for (const stem of lexicon.stems) {
     if (stem.length < 5) continue

@@ -30,21 +30,27 @@ export function languageOrder(own: Language): Language[] {
 
 /**
  * What each language makes of a word. A spelling is only stretched when nobody the household is
- * likely to write in knows the word as it stands, and only guessed when no respelling fits.
+ * likely to write in knows the word as it stands.
  */
 function knowWord(word: string, own: Language): Known {
   const known: Known = new Map()
-  const add = (language: Language, keys: string[], likeness: Likeness): void => {
-    if (keys.length > 0) known.set(language, { keys: new Set(keys), likeness })
-  }
-  for (const language of languages) add(language, exactKeys(word, language), 'exact')
+  for (const language of languages) addKeys(known, language, exactKeys(word, language), 'exact')
   if (known.has(own) || known.has('en')) return known
   for (const language of languages) {
-    if (!known.has(language)) add(language, respelledKeys(word, language), 'respelled')
+    if (!known.has(language)) addKeys(known, language, respelledKeys(word, language), 'respelled')
   }
-  if (known.size > 0) return known
-  for (const language of languages) add(language, guessedKeys(word, language), 'guessed')
   return known
+}
+
+/** Guesses at words that no language knows, in the languages the text is likely to be in. */
+function guessWord(known: Known, word: string, likely: readonly Language[]): void {
+  if (known.size > 0) return
+  for (const language of new Set(likely))
+    addKeys(known, language, guessedKeys(word, language), 'guessed')
+}
+
+function addKeys(known: Known, language: Language, keys: string[], likeness: Likeness): void {
+  if (keys.length > 0) known.set(language, { keys: new Set(keys), likeness })
 }
 
 const weight: Record<Likeness, number> = { exact: 1, respelled: 0.8, guessed: 0.5 }
@@ -71,6 +77,12 @@ function mainLanguage(known: readonly Known[], own: Language): Language {
 function matchEnd(entry: Entry, at: number, known: readonly (Known | null)[]): number | null {
   let ends = [at]
   for (const [index, key] of entry.keys.entries()) {
+    if (key === '.') {
+      ends = ends.filter((end) => known[end] === undefined || known[end] === null)
+      if (ends.length === 0) return null
+      if (index === entry.keys.length - 1) return Math.min(...ends)
+      continue
+    }
     if (key === '~') {
       ends = [...new Set(ends.flatMap((end) => gapEnds(end, known)))]
       continue
@@ -167,6 +179,10 @@ export function markTokens(tokens: readonly Token[], own: Language): Marked {
     known.filter((word) => word !== null),
     own,
   )
+  tokens.forEach((token, at) => {
+    const word = known[at]
+    if (word && token.kind === 'word') guessWord(word, token.text, [main, own, 'en'])
+  })
   const order = [...new Set([main, ...languageOrder(own)])]
   return {
     marks: keepLongest(candidates(known, order), order),

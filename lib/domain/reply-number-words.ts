@@ -123,6 +123,8 @@ function fits(
   // Three letters are never respelled, but for Bengali, whose spelling in Latin letters is free.
   if (token.text === word) return true
   if (word.length <= 3 && language !== 'bn') return false
+  // "Dhui" (I wash) is a word of its own, not a way of writing "dui" (two).
+  if (exactKeys(token.text, language).length > 0) return false
   return respelt(token.text, language) === row.respelled[offset]
 }
 

@@ -25,12 +25,17 @@ export type Sense = {
 export function senseOf(text: string, language: Language, asked: Asked): Sense {
   const tokens = partJoinedDenials(tokenise(text), language)
   const { marks, knownWords } = markTokens(tokens, language)
+  const figures = readFigures(tokens, language)
+  // In "bish minit" (twenty minutes) "bish" is no poison.
+  const isInFigure = (mark: Mark): boolean =>
+    figures.spans.some((span) => mark.from >= span.from && mark.to <= span.to)
+  const spoken = marks.filter((mark) => !isInFigure(mark))
   return {
     text,
     asked,
     tokens,
-    marks: denyMarks(marks, tokens),
-    figures: readFigures(tokens, language),
+    marks: denyMarks(spoken, tokens),
+    figures,
     unknownAt: knownWords.flatMap((known, at) => (known ? [] : [at])),
     unknownWords: knownWords.filter((known) => !known).length,
     words: tokens.filter((token) => token.kind !== 'break').length,

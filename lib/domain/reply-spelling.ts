@@ -26,6 +26,40 @@ export function foldBengali(word: string): string {
   )
 }
 
+/** Spanish letters that sound alike: "kebrado", "aser", "bomito". */
+export function foldSpanish(word: string): string {
+  return squeeze(
+    word
+      .replace(/ch/g, '7')
+      .replace(/h/g, '')
+      .replace(/ll/g, 'y')
+      .replace(/qu(?=[ei])/g, 'k')
+      .replace(/[cz](?=[ei])/g, 's')
+      .replace(/z/g, 's')
+      .replace(/[cq]/g, 'k')
+      .replace(/v/g, 'b')
+      .replace(/ge/g, 'je')
+      .replace(/gi/g, 'ji'),
+  )
+}
+
+/** French letters that sound alike or not at all: "koule", "laver" for "lavé", "bo". */
+export function foldFrench(word: string): string {
+  return squeeze(
+    word
+      .replace(/ph/g, 'f')
+      .replace(/qu/g, 'k')
+      .replace(/c(?=[aour]|l)/g, 'k')
+      .replace(/eau|au/g, 'o')
+      .replace(/(?:er|ez|ee|ees|es|ai|ait|et)$/, 'e')
+      .replace(/ai|ei/g, 'e')
+      .replace(/y/g, 'i')
+      .replace(/z/g, 's')
+      .replace(/(?<=..)[sxtd]$/, '')
+      .replace(/(?<=...)e$/, ''),
+  )
+}
+
 /** Bengali in Latin letters has no one spelling: breath, length and sibilants go. */
 export function foldRoman(word: string): string {
   return squeeze(

@@ -21,7 +21,21 @@ const emojiWords: readonly (readonly [RegExp, string])[] = [
 ]
 
 /** French words that lose their vowel before an apostrophe; elsewhere an apostrophe just goes. */
-const elided = new Set(['l', 'd', 'n', 'c', 'j', 'm', 't', 's', 'qu', 'jusqu', 'lorsqu', 'puisqu'])
+const elided = new Set([
+  'l',
+  'd',
+  'n',
+  'c',
+  'j',
+  'm',
+  't',
+  's',
+  'qu',
+  'jusqu',
+  'lorsqu',
+  'puisqu',
+  'quelqu',
+])
 
 /** Words people write with a digit in them. */
 const digitWords: Readonly<Record<string, string>> = {

@@ -32,7 +32,10 @@ export function noFlowSureness(sense: Sense): number {
 /** "Not flowing well" is slow: the denial is of the manner, not of the flow. */
 function isQualified(sense: Sense, flow: Mark): boolean {
   return said(sense, 'good', 'fast', 'better', 'little', 'very', 'same', 'long', 'slow').some(
-    (mark) => mark.from >= flow.to && gapBetween(sense, flow, mark) <= 3,
+    // Bengali puts the manner before the verb.
+    (mark) =>
+      gapBetween(sense, flow, mark) <= 3 &&
+      (flow.language === 'bn' ? mark.to <= flow.from : mark.from >= flow.to),
   )
 }
 

@@ -1,4 +1,3 @@
-import type { Mark } from './reply-marks'
 import { isSaid, said, sureOf, type Sense } from './reply-sense'
 
 /** How sure the text says that the wrong phone was reached; 0 when it does not. */
@@ -17,8 +16,10 @@ function deniesName(sense: Sense): boolean {
   )
   return denials.some((denial) => {
     const isBack = denial.concept === 'notBack'
-    const at = isBack ? denial.from - 1 : denial.to
-    return isName(sense, at) && hasSelf(sense, denial, isBack ? at : denial.from)
+    if (isBack) return isName(sense, denial.from - 1) && hasSelf(sense, denial.from - 1)
+    const isCopula = isSelf(sense, denial.to)
+    const at = isCopula ? denial.to + 1 : denial.to
+    return isName(sense, at) && (isCopula || hasSelf(sense, denial.to))
   })
 }
 
@@ -36,9 +37,13 @@ function isAlmostLast(sense: Sense, at: number): boolean {
   return (end === -1 ? rest.length : end) <= 1
 }
 
-function hasSelf(sense: Sense, denial: Mark, before: number): boolean {
-  const head = sense.tokens.slice(Math.max(0, before - 3), before)
-  return head.some((token) => token.kind === 'word' && selfWords.has(token.text)) && denial.to > 0
+function hasSelf(sense: Sense, before: number): boolean {
+  return [1, 2, 3].some((back) => isSelf(sense, before - back))
+}
+
+function isSelf(sense: Sense, at: number): boolean {
+  const token = sense.tokens[at]
+  return token?.kind === 'word' && selfWords.has(token.text)
 }
 
 /** "I am", "this is" in the four languages, as the tokens stand. */

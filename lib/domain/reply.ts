@@ -91,9 +91,9 @@ function readTrouble(sense: Sense): ReplyReading | null {
     if (slow > 0 && !isAsked) return { kind: 'slow', minutes: figure.minutes, sure: slow }
     return readFigure(sense, figure, slow >= sureEnough)
   }
-  if (isStopOrStopped(sense)) return { kind: 'unclear', sure: 0.5 }
   if (noFlow >= slow && noFlow > 0) return { kind: 'no-flow', sure: noFlow }
-  return slow > 0 ? { kind: 'slow', sure: slow } : null
+  if (slow > 0) return { kind: 'slow', sure: slow }
+  return isStopOrStopped(sense) ? { kind: 'unclear', sure: 0.5 } : null
 }
 
 function readFigure(

@@ -21,7 +21,7 @@ export const bnPack: LanguagePack = {
     chabbish 26, satash 27, athash 28, trish 30, tirish 30, tris 30, poytrish 35, chollish 40,
     collis 40, poytallish 45, ponchash 50, poncas 50, shaat 60, shottor 70, ashi 80, nobboi 90,
     eksho 100`,
-  weakNumbers: `এক 1, একটা 1, নয় 9, আধ 0.5, আধা 0.5, ek 1, ekta 1, noy 9, at 8, no 9, adh 0.5, adha 0.5,
+  weakNumbers: `এক 1, একটা 1, নয় 9, আধ 0.5, আধা 0.5, ek 1, ekta 1, noy 9, at 8, adh 0.5, adha 0.5,
     আড়াই 2.5, দেড় 1.5, arai 2.5, aray 2.5, der 1.5, half 0.5`,
   units: {
     minute:

@@ -33,6 +33,7 @@ export const concepts = [
   'cloth', // what may be dirty without the water being odd
   'container',
   'person',
+  'pronoun', // may be a person or the filter
   'child',
   'name',
   'me',
@@ -70,6 +71,7 @@ export const concepts = [
   'clean',
   'fuel',
   'ill',
+  'frail', // weak: of a person ill, of the water slow
   'pain',
   'blood',
   'vomit',
@@ -82,6 +84,7 @@ export const concepts = [
   'wash',
   'change',
   'notYet',
+  'day', // Bengali "kal": tomorrow or yesterday, as the verb has it
   'forgot',
   'need',
   'lack', // "I have no"
@@ -110,7 +113,8 @@ export type NumberUnit = 'hour' | 'minute' | 'second' | 'other'
 
 /**
  * The words of one language. Entries are separated by commas; an entry may hold several words;
- * `*` at the end of a word stands for any ending; `~` stands for up to two words of any kind.
+ * `*` at the end of a word stands for any ending; `~` stands for up to two words of any kind, `.`
+ * for the end of a clause.
  */
 export type LanguagePack = {
   concepts: Partial<Record<Concept, string>>
@@ -128,5 +132,5 @@ export type LanguagePack = {
   /** Everyday words without a meaning here; they keep guesses at spelling off. */
   common: string
   /** How a word of this language may be respelled: see `reply-spelling.ts`. */
-  spelling: 'latin' | 'bengali'
+  spelling: 'latin' | 'spanish' | 'french' | 'bengali'
 }

@@ -91,7 +91,7 @@ export const enTalk: LanguagePack['concepts'] = {
     black cover, green cap, red cap, blue cap, white cap, black hose, black tape, yellow card,
     white cloth, green light, red light, good idea, boiled, cut my, low battery, low credit,
     slow phone, slow network, network slow, network is slow, phone is slow, come back,
-    syringe hole, hole for, hole where`,
+    syringe hole, hole for, hole where, this morning`,
   within: `in, within`,
   name: `maria, jose, juan, ana, carlos, fatima, rahim, karim, john, james, peter, paul, mary, grace, joseph, moussa, amadou, aminata, rosa, luis, pedro, marie, jean, pierre, rina, salma, abdul, ahmed, ali, hassan, mohamed, david, daniel, sarah, ruth, esther, samuel`,
 }

@@ -5,7 +5,7 @@ import { esWater } from './es-water'
 
 /** Spanish as people text it; entries stand without accents, as the reader strips them. */
 export const esPack: LanguagePack = {
-  spelling: 'latin',
+  spelling: 'spanish',
   concepts: { ...esWater, ...esIllness, ...esTalk },
   numbers: `dos 2, tres 3, cuatro 4, quatro 4, cinco 5, sinco 5, seis 6, siete 7, ciete 7, ocho 8,
     nueve 9, nuebe 9, diez 10, dies 10, once 11, onse 11, doce 12, dose 12, trece 13, trese 13,
@@ -29,7 +29,7 @@ export const esPack: LanguagePack = {
     medio minuto 0.5, minuto y medio 1.5, un minuto y medio 1.5, una hora 60, una horita 60,
     un minuto 1, una ora 60, 1 2 hora 30`,
   halves: `y media 0.5, y medio 0.5, y cuarto 0.25, i media 0.5, i medio 0.5`,
-  common: `el la los las un una uno unos unas de del al a en con por para que se su sus mi mis tu tus lo le les nos me te y o u e si no es son era eran ser esta este esto esa ese eso estas estos estan estoy estamos estaba fue fui ha he hay han hemos haber habia
+  common: `huevo huevos tortilla frijol frijoles chile limon naranja platano fruta verdura comida jugo cafe leche azucar sal pan el la los las un una uno unos unas de del al a en con por para que se su sus mi mis tu tus lo le les nos me te y o u e si no es son era eran ser esta este esto esa ese eso estas estos estan estoy estamos estaba fue fui ha he hay han hemos haber habia
     muy mucho mucha muchos mas menos tan tanto todo toda todos todas otro otra otros cada algo alguien alguno alguna algun nada nadie ninguno bien mal mejor peor como cuando donde quien cual porque pues entonces tambien tampoco solo solamente nomas asi aqui ahi alla aca hasta desde entre sobre sin contra segun
     yo tu usted ustedes el ella ellos ellas nosotros mio mia suyo suya casa cocina cuarto puerta mesa techo calle camino campo pueblo comunidad ciudad escuela iglesia mercado tienda trabajo milpa rio cerro
     dia dias noche tarde manana ayer hoy semana mes ano hora minuto tiempo vez veces lunes martes miercoles jueves viernes sabado domingo enero

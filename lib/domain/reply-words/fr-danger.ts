@@ -3,12 +3,28 @@ import type { LanguagePack } from './concept'
 /** French: illness, and who is ill. */
 export const frIllness: LanguagePack['concepts'] = {
   child: `fils, fille, filles, bebe, bebes, bb, enfant, enfants, enfan, petit fils, petite fille, petit, petite, petits, gosse, gosses, garcon, garcons, gamin, gamine, nourrisson, nouveau ne, nouveau nee, jumeaux, neveu, niece, mome, mon grand, fiston, le petit, la petite, tout petit, gamins`,
-  person: `femme, mari, mere, pere, maman, papa, frere, soeur, grand mere, grand pere, mamie, papi, mamy, papy, tante, oncle, famille, voisin, voisine, voisins, tout le monde, tous, toute la famille, gens, elle, il, nous, vieux, vieille, quelqu un, moi, belle mere, cousin, cousine, epouse, ils, elles, on`,
+  person: `femme, mari, mere, pere, maman, papa, frere, soeur, grand mere, grand pere, mamie, papi,
+    mamy, papy, tante, oncle, famille, voisin, voisine, voisins, tout le monde, tous,
+    toute la famille, gens, nous, vieux, vieille, quelqu un, moi, belle mere, cousin, cousine,
+    epouse`,
   stool:
     'selle, selles, caca, cacas, kaka, excrements, couche, couches, va aux toilettes, popo, pot',
   belly: 'ventre, estomac, bide, bidon mal, intestin, intestins, ventr, vantre, boyaux',
   all: 'tout, tout ce qu, tout ce que, tous les repas, a chaque fois, tou, chaque repas, sans arret',
-  ill: `malade, malades, malad, maladie, maladies, souffrant, souffrante, souffre, souffrent, diarrhee, diarrhees, diarrhe, diarhee, diare, diaree, diarree, diarhe, diaré, chiasse, courante, gastro, ventre qui coule, ventre coule, fievre, fievres, fiever, fiebre, temperature, cholera, kolera, typhoide, dysenterie, hepatite, jaunisse, deshydrate, deshydratee, deshydratation, nausee, nausees, envie de vomir, mal au coeur, crampe, crampes, hopital, opital, clinique, docteur, medecin, dispensaire, centre de sante, intoxication, intoxique, intoxiquee, empoisonne, empoisonnee, infection, boutons, demangeaisons, demange, vertige, vertiges, tres faible et, est tres faible, est faible, est fatigue, indigestion, ne se sent pas bien, se sent pas bien, ne va pas bien, va pas bien, va tres mal, va mal, vont mal, se sent mal, me sens mal, se sentent mal, pas en forme, pas dans son assiette, mal en point, emojiill, paludisme, parasites, colique, coliques, toilettes toute la nuit, toilettes tout le temps, toilettes sans arret, toilette tout le temps, rend malade, rendu malade, rendus malades, tombe malade, tombee malade, tombes malades, mourant, mourir`,
+  ill: `malade, malades, malad, maladie, maladies, souffrant, souffrante, souffre, souffrent,
+    diarrhee, diarrhees, diarrhe, diarhee, diare, diaree, diarree, diarhe, diaré, chiasse,
+    courante, gastro, ventre qui coule, ventre coule, fievre, fievres, fiever, fiebre,
+    temperature, cholera, kolera, typhoide, dysenterie, hepatite, jaunisse, deshydrate,
+    deshydratee, deshydratation, nausee, nausees, envie de vomir, mal au coeur, crampe,
+    crampes, hopital, opital, clinique, docteur, medecin, dispensaire, centre de sante,
+    intoxication, intoxique, intoxiquee, empoisonne, empoisonnee, infection, boutons,
+    demangeaisons, demange, vertige, vertiges, est tres faible, indigestion,
+    ne se sent pas bien, se sent pas bien, ne va pas bien, va pas bien, va tres mal, va mal,
+    vont mal, se sent mal, me sens mal, se sentent mal, pas en forme, pas dans son assiette,
+    mal en point, emojiill, paludisme, parasites, colique, coliques, toilettes toute la nuit,
+    toilettes tout le temps, toilettes sans arret, toilette tout le temps, rend malade,
+    rendu malade, rendus malades, tombe malade, tombee malade, tombes malades, mourant,
+    mourir`,
   pain: 'douleur, douleurs, mal au, mal aux, mal a l, mal a la, mal de, mal o, a mal, ai mal, ont mal, avons mal, fait mal, font mal, doulleur, maux, maux de',
   blood: 'sang, saigne, saignement, saignements, sanglante, sanglant, ensanglante',
   vomit: `vomi, vomis, vomit, vomissement, vomissements, vomir, vomissent, vomissait, vomie, vomisse, vomisement, rend tout, gerbe, gerber, degobille, rejette tout, crache tout, remet tout`,
@@ -17,4 +33,6 @@ export const frIllness: LanguagePack['concepts'] = {
   sleepy: `dort, dort tout le temps, dort beaucoup, dors tout le temps, ne fait que dormir, fait que dormir, fait rien que dormir, dort sans arret, dort toute la journee, dort trop, somnolent, somnolente, somnole, endormi, endormie, tres endormi, tres endormie, tres fatigue, tres fatiguee, trop fatigue, trop fatiguee, plus de force, plus de forces, sans force, sans forces, sans energie, plus d energie, epuise, epuisee, assoupi, assoupie, tout endormi, toute endormie, fatigue fatigue, dort encore et encore`,
   drink:
     'boire, boit, bois, boivent, boi, bu, buvait, teter, tete, avaler, avale, boire ni manger, manger ni boire, allaiter, allaite, buvons, buvez',
+  pronoun: `elle, il, ils, elles, on`,
+  frail: `faible, faibles, fatigue, fatiguee, sans force`,
 }
