@@ -56,6 +56,16 @@ export function likelihoodWord(chance: number): 'likely' | 'possible' | 'unlikel
 }
 
 /**
+ * How often each suspect was the cause of closed tickets. Causes that are no suspect, such as a kit
+ * that was withdrawn, tell nothing of what makes water slow and are left out.
+ */
+export function countCauses(causes: readonly string[]): Evidence {
+  const counts: Evidence = {}
+  for (const id of suspectIds) counts[id] = causes.filter((cause) => cause === id).length
+  return counts
+}
+
+/**
  * Prior odds from the causes of closed tickets of one area and season. The prior counts as `weight`
  * tickets (Dirichlet smoothing), so that few tickets move it little and no cause ever gets odds of 0.
  */

@@ -129,6 +129,13 @@ describe('the place in the shift and the sentence that explains it', () => {
     expect(harmOf(input(change))).toMatchObject({ harmClass, band, sentence })
   })
 
+  it.each([{ litresPerHour: null }, { hours: null }])(
+    'names no flow that is half known: %o',
+    (half) => {
+      expect(harmOf(input(half)).sentence).toContain('nobody has timed a litre yet')
+    },
+  )
+
   it('tells the time on the area’s own clock', () => {
     const at = (zone: string) => harmOf(input({ ...stopped, timeZone: zone })).sentence
     expect(at('Asia/Dhaka')).toBe('5 people; nothing safe since 05:20.')

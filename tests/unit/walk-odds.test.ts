@@ -1,6 +1,12 @@
 import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
-import { normalise, oddsFromHistory, outcomeChance, withEvidence } from '@/lib/domain/walk-odds'
+import {
+  countCauses,
+  normalise,
+  oddsFromHistory,
+  outcomeChance,
+  withEvidence,
+} from '@/lib/domain/walk-odds'
 import { defaultPriors, suspectIds, type Odds } from '@/lib/domain/walk-suspects'
 
 const prior = defaultPriors.slow
@@ -18,6 +24,12 @@ describe('odds counted from closed tickets', () => {
     expect(odds['full-cloth']).toBeCloseTo((8 + 20 * 0.1) / 30, 12)
     expect(odds['fouled-fibre']).toBeCloseTo((2 + 20 * 0.54) / 30, 12)
     expect(odds['air-lock']).toBeCloseTo((20 * 0.05) / 30, 12)
+  })
+
+  it('count causes that are suspects, and no others', () => {
+    const counts = countCauses(['full-cloth', 'kit withdrawn', 'air-lock', 'full-cloth', ''])
+    expect(counts).toMatchObject({ 'full-cloth': 2, 'air-lock': 1, 'fouled-fibre': 0 })
+    expect(Object.values(counts).reduce((sum, count) => sum + count, 0)).toBe(3)
   })
 
   it('near the counts as they grow', () => {
