@@ -1,4 +1,4 @@
-import { and, asc, desc, eq, gte, inArray, isNotNull, lte, ne, sql } from 'drizzle-orm'
+import { and, asc, desc, eq, gte, inArray, isNotNull, like, lte, ne, sql } from 'drizzle-orm'
 import type { Handle } from '../client'
 import { replyReadings, texts } from '../schema/text'
 
@@ -99,6 +99,15 @@ export async function listPromptHours(db: Handle, householdIds: string[], since:
 
 export async function insertReplyReading(db: Handle, row: typeof replyReadings.$inferInsert) {
   await db.insert(replyReadings).values(row).onConflictDoNothing()
+}
+
+/** How often somebody has read this text anew; each reading has its own number. */
+export async function countReadingsBy(db: Handle, textId: string, reader: string) {
+  const [row] = await db
+    .select({ n: sql<number>`count(*)::int` })
+    .from(replyReadings)
+    .where(and(eq(replyReadings.textId, textId), like(replyReadings.readBy, `${reader}%`)))
+  return row?.n ?? 0
 }
 
 /** Texts stored but not read yet: a crash between storing and enqueueing leaves some. */

@@ -1,5 +1,6 @@
-import { and, asc, eq, isNull } from 'drizzle-orm'
+import { and, asc, desc, eq, inArray, isNull, ne } from 'drizzle-orm'
 import type { Handle } from '../client'
+import { households } from '../schema/household'
 import { ticketEvents, tickets, walks } from '../schema/ticket'
 
 export type TicketRow = typeof tickets.$inferSelect
@@ -52,4 +53,22 @@ export async function upsertWalk(db: Handle, row: typeof walks.$inferInsert) {
       target: walks.ticketId,
       set: { walk: row.walk, changedAt: row.changedAt },
     })
+}
+
+/** When other houses of an area told of illness, newest first. */
+export async function listIllnessInArea(db: Handle, areaId: string, butHouseholdId: string) {
+  const rows = await db
+    .select({ at: tickets.openedAt })
+    .from(tickets)
+    .innerJoin(households, eq(households.id, tickets.householdId))
+    .where(
+      and(
+        eq(households.areaId, areaId),
+        ne(tickets.householdId, butHouseholdId),
+        inArray(tickets.trouble, ['unwell', 'danger sign']),
+      ),
+    )
+    .orderBy(desc(tickets.openedAt))
+    .limit(20)
+  return rows.map(({ at }) => at)
 }

@@ -18,7 +18,7 @@ import { virtualCarrier, type Carried } from './virtual-carrier'
 
 const DAY = 86_400_000
 const HOUR = 3_600_000
-const DAYS = 42
+const DAYS = 28
 const SEED = 20_260_401
 
 /** Opens an empty desk whose clock stands `DAYS` days ago and whose carrier is virtual. */

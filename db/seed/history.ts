@@ -3,6 +3,7 @@ import { findText } from '@/db/queries/text'
 import type { PracticeClock } from '@/lib/clock'
 import type { Deps } from '@/lib/deps'
 import type { Actor } from '@/lib/domain/role'
+import { localMinute } from '@/lib/domain/round'
 import { followSilence } from '@/lib/services/follow-silence'
 import { planPrompts } from '@/lib/services/plan-prompts'
 import { storeReceipt } from '@/lib/services/receive-receipt'
@@ -10,6 +11,7 @@ import { storeInbound } from '@/lib/services/receive-text'
 import { sendDueTexts } from '@/lib/services/send-text'
 import type { BuildQueue } from './build-queue'
 import { renew, replyTo, useFilter, type Family, type Reply } from './family'
+import { timeZone } from './places'
 import type { Random } from './random'
 import { workShift } from './shift-work'
 import type { Carried } from './virtual-carrier'
@@ -87,6 +89,12 @@ async function hourOf(history: History, day: number): Promise<void> {
   await queue.drain(deps)
 }
 
+/** Nothing goes out or comes in at night: those hours are passed over. */
+function isAwake(at: number): boolean {
+  const minute = localMinute(at, timeZone)
+  return minute >= 7 * 60 && minute <= 22 * 60
+}
+
 async function dayOf(history: History, day: number): Promise<void> {
   const { random, families } = history
   for (const family of families.values()) useFilter(family)
@@ -100,7 +108,7 @@ async function dayOf(history: History, day: number): Promise<void> {
   })
   await history.queue.drain(history.deps)
   for (let hour = 0; hour < 24; hour++) {
-    await hourOf(history, day)
+    if (isAwake(history.clock.now())) await hourOf(history, day)
     history.clock.advance(HOUR)
   }
 }

@@ -26,8 +26,8 @@ export type AnswerAct =
   | { kind: 'close prompts' }
   | { kind: 'log wash' }
   | { kind: 'log change' }
-  /** Keep a flow reading; slow water opens a ticket. */
-  | { kind: 'log flow'; minutes: number }
+  /** Keep a flow reading; slow water, or water they call slow, opens a ticket that has its figure. */
+  | { kind: 'log flow'; minutes: number; saysSlow: boolean }
   | { kind: 'answer step'; stepId: StepId; answer: StepAnswer; minutes?: number }
   | { kind: 'raise trouble'; trouble: Trouble }
   | { kind: 'send'; moment: Moment }
@@ -116,10 +116,9 @@ function troubleActs(
   if (waitingFor && stepOf(waitingFor)?.kind === 'cure')
     return [stepAnswer(waitingFor, 'not cured')]
   if (waitingFor === 'ask-flow' && trouble === 'no flow') return [stepAnswer(waitingFor, 'no')]
-  const raised: AnswerAct[] = [{ kind: 'close prompts' }, { kind: 'raise trouble', trouble }]
   return reading.minutes === undefined
-    ? raised
-    : [...raised, { kind: 'log flow', minutes: reading.minutes }]
+    ? [{ kind: 'close prompts' }, { kind: 'raise trouble', trouble }]
+    : [{ kind: 'close prompts' }, { kind: 'log flow', minutes: reading.minutes, saysSlow: true }]
 }
 
 function figureActs({ reading, asked, waitingFor, hasOpenTicket }: AnswerInput): AnswerAct[] {
@@ -129,7 +128,11 @@ function figureActs({ reading, asked, waitingFor, hasOpenTicket }: AnswerInput):
   if (hasOpenTicket) return [stepAnswer('ask-flow', 'done', minutes)]
   // Minutes in answer to a wash prompt are timed after the wash that was asked for.
   const washed: AnswerAct[] = asked === 'wash' ? [{ kind: 'log wash' }] : []
-  return [{ kind: 'close prompts' }, ...washed, { kind: 'log flow', minutes }]
+  return [
+    { kind: 'close prompts' },
+    ...washed,
+    { kind: 'log flow', minutes, saysSlow: reading.alsoSlow ?? false },
+  ]
 }
 
 function doneActs({ asked, waitingFor }: AnswerInput): AnswerAct[] {
@@ -151,7 +154,10 @@ function pickActs({ reading, waitingFor, asked }: AnswerInput): AnswerAct[] {
   if (!step || waitingFor === null) {
     const isMinutes = reading.minutes !== undefined && (asked === 'wash' || asked === 'flow')
     return isMinutes
-      ? [{ kind: 'close prompts' }, { kind: 'log flow', minutes: reading.minutes ?? 0 }]
+      ? [
+          { kind: 'close prompts' },
+          { kind: 'log flow', minutes: reading.minutes ?? 0, saysSlow: false },
+        ]
       : unread()
   }
   const picked: StepAnswer =

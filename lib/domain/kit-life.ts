@@ -1,4 +1,4 @@
-import { dayWords, distanceWords } from './stamp'
+import { dayWords, dueWords, shortDayWords } from './stamp'
 
 /** One bead of a kit's life; `on` is the ISO day it hangs on. */
 export type LifeBead = {
@@ -125,8 +125,14 @@ function troubles({ tickets }: KitPast): Bare[] {
   })
 }
 
+/** The year, where it is not this one. */
+function yearBeside(day: string, today: string): { beside?: string } {
+  const year = day.slice(0, 4)
+  return year === today.slice(0, 4) ? {} : { beside: year }
+}
+
 /** What happened to a kit, oldest first; things of one day keep the order: hand-over, asked, done, trouble. */
-export function kitPast(past: KitPast): LifeBead[] {
+export function kitPast(past: KitPast, today: string): LifeBead[] {
   const beads = [
     handOver(past),
     ...asked(past),
@@ -135,7 +141,7 @@ export function kitPast(past: KitPast): LifeBead[] {
     ...troubles(past),
   ]
   return beads
-    .map((bead) => ({ ...bead, day: dayWords(bead.on) }))
+    .map((bead) => ({ ...bead, day: shortDayWords(bead.on), ...yearBeside(bead.on, today) }))
     .sort((one, other) => (one.on < other.on ? -1 : one.on > other.on ? 1 : 0))
 }
 
@@ -165,8 +171,8 @@ export function kitPlan(plan: KitPlan, today: string): LifeBead[] {
       ...bead,
       ...waits,
       bead: 'ring',
-      day: dayWords(bead.on),
-      beside: distanceWords(bead.on, today),
+      day: shortDayWords(bead.on),
+      beside: dueWords(bead.on, today),
     }))
     .sort((one, other) => (one.on < other.on ? -1 : one.on > other.on ? 1 : 0))
 }

@@ -12,7 +12,11 @@ export function partJoinedDenials(tokens: readonly Token[], own: Language): Toke
     if (verb === undefined || denial === undefined) return [token]
     const isLatin = /[a-z]/.test(verb)
     if (isLatin && (own !== 'bn' || verb.length < 3)) return [token]
-    const isKnownWhole = isWholeWord(token.text, 'bn')
+    // "Dhakna" (the cap) only looks like a denial: some word of the list reaches into its end.
+    const reachesEnd = exactKeys(token.text, 'bn').some(
+      (key) => key.endsWith('*') && key.length - 1 > verb.length,
+    )
+    const isKnownWhole = reachesEnd || isWholeWord(token.text, 'bn')
     const isKnownVerb =
       exactKeys(verb, 'bn').length > 0 ||
       respelledKeys(verb, 'bn').some((key) => !key.endsWith('*'))

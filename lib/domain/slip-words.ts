@@ -47,7 +47,8 @@ export function receiptOf(
   }
 }
 
-const readAs: Record<ReplyKind, string> = {
+/** What a reply can be taken to mean, in words for staff. */
+export const replyKindWords: Record<ReplyKind, string> = {
   done: 'done',
   'not-yet': 'not yet',
   slow: 'slow water',
@@ -78,5 +79,7 @@ export function readingWords(reading: {
 }): string {
   if (reading.minutes !== null) return `read as: ${reading.minutes} minutes a bottle`
   if (reading.choice !== null) return `read as: choice ${reading.choice}`
-  return `read as: ${readAs[reading.kind]}`
+  return `read as: ${replyKindWords[reading.kind]}`
 }
+
+export const replyKinds = Object.keys(replyKindWords) as readonly ReplyKind[]

@@ -15,6 +15,17 @@ const plainDay = new Intl.DateTimeFormat('en-GB', {
   timeZone: 'UTC',
 })
 
+const plainShortDay = new Intl.DateTimeFormat('en-GB', {
+  day: 'numeric',
+  month: 'short',
+  timeZone: 'UTC',
+})
+
+/** A day as `12 Mar`: where the year is told beside it, or is this year. */
+export function shortDayWords(day: string): string {
+  return plainShortDay.format(dayNumber(day) * dayMilliseconds)
+}
+
 /** A day as `12 Mar 2026`. */
 export function dayWords(day: string): string {
   return plainDay.format(dayNumber(day) * dayMilliseconds)
@@ -41,6 +52,11 @@ export function distanceWords(day: string, today: string): string {
   if (days === 0) return 'today'
   const count = `${Math.abs(days)} ${Math.abs(days) === 1 ? 'day' : 'days'}`
   return days > 0 ? `in ${count}` : `${count} ago`
+}
+
+/** How far ahead something due lies: `today`, `in 12 days`, `3 days late`. */
+export function dueWords(day: string, today: string): string {
+  return distanceWords(day, today).replace(/ ago$/, ' late')
 }
 
 /** Minutes after midnight as `08:00`; the end of the day is `24:00`. */

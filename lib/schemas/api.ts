@@ -5,11 +5,15 @@ import { householdEndpoints } from './household'
 import { openEndpoints } from './open-endpoints'
 import { practiceEndpoints } from './practice'
 import { roundsEndpoints } from './rounds'
+import { shiftEndpoints } from './shift'
+import { ticketEndpoints } from './ticket-work'
 import { wordingEndpoints } from './wording'
 
 /** Every route under /api: what /api/openapi.json is made of, and what the access checks go through. */
 export const endpoints: readonly Endpoint[] = [
   ...openEndpoints,
+  ...shiftEndpoints,
+  ...ticketEndpoints,
   ...householdEndpoints,
   ...areaEndpoints,
   ...depotEndpoints,

@@ -7,7 +7,11 @@ const quantitySchema = z
   .min(0, 'Not under 0.')
   .max(100_000, 'At most 100 000.')
 
-const shelfInputSchema = z.object({ partId: z.string().min(1), quantity: quantitySchema })
+/** A null leaves that part as it was. */
+const shelfInputSchema = z.object({
+  partId: z.string().min(1),
+  quantity: quantitySchema.nullable(),
+})
 
 const stockSchema = z
   .array(shelfInputSchema)
@@ -32,7 +36,10 @@ export type DepotInput = z.output<typeof depotInputSchema>
 export const stockInputSchema = z.object({
   /** `received` adds to what is there; `counted` is what is there. */
   why: z.enum(['received', 'counted'], { error: 'Say whether parts came in or were counted.' }),
-  stock: stockSchema.refine((stock) => stock.length > 0, 'Write a number for at least one part.'),
+  stock: stockSchema.refine(
+    (stock) => stock.some(({ quantity }) => quantity !== null),
+    'Write a number for at least one part.',
+  ),
 })
 
 export type StockInput = z.output<typeof stockInputSchema>

@@ -4,6 +4,7 @@ import { languageSchema } from './language'
 export const slipSchema = z.object({
   /** Grows with time: pages are cut by it. */
   n: z.number(),
+  textId: z.string(),
   direction: z.enum(['in', 'out']),
   body: z.string(),
   language: languageSchema,

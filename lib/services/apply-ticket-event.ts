@@ -11,13 +11,14 @@ import {
 } from '@/db/queries/ticket-events'
 import type { Deps } from '@/lib/deps'
 import { decide, fold } from '@/lib/domain/ticket'
-import type { TicketEffect, TicketEvent, TicketState } from '@/lib/domain/ticket-types'
+import type { TicketEvent, TicketState } from '@/lib/domain/ticket-types'
 import type { Trouble } from '@/lib/domain/trouble'
+import { noticeIllness } from './notice-illness'
+import { areaCelsius } from './record-flow'
 import { runTicketEffects } from './run-ticket-effects'
 
 export type Applied =
-  | { ok: true; state: TicketState; effects: TicketEffect[]; ticketId: string }
-  | { ok: false; reason: string }
+  { ok: true; state: TicketState; ticketId: string } | { ok: false; reason: string }
 
 /** Columns of the ticket's row that are its events folded. */
 function cacheOf(state: TicketState) {
@@ -75,7 +76,7 @@ export async function applyTicketEvent(
     at: now,
   })
   const facts = await factsOf(tx, row.kitId)
-  await runTicketEffects(tx, deps, {
+  const told = await runTicketEffects(tx, deps, {
     facts,
     ticketId: row.id,
     n,
@@ -84,7 +85,24 @@ export async function applyTicketEvent(
     minutes: input.minutes,
     staffId: input.staffId,
   })
-  return { ok: true, state: decision.state, effects: decision.effects, ticketId: row.id }
+  return hear(tx, deps, {
+    told,
+    applied: { ok: true, state: decision.state, ticketId: row.id },
+  })
+}
+
+/** Applies, in turn, what the effects of an event have to tell the ticket. */
+async function hear(
+  tx: Transaction,
+  deps: Deps,
+  { told, applied }: { told: readonly TicketEvent[]; applied: Applied & { ok: true } },
+): Promise<Applied> {
+  let last = applied
+  for (const event of told) {
+    const next = await applyTicketEvent(tx, deps, { ticketId: applied.ticketId, event })
+    if (next.ok) last = next
+  }
+  return last
 }
 
 async function factsOf(tx: Transaction, kitId: string): Promise<KitFacts> {
@@ -93,22 +111,32 @@ async function factsOf(tx: Transaction, kitId: string): Promise<KitFacts> {
   return facts
 }
 
+type Figure = Extract<TicketEvent, { kind: 'opened' }>['figure']
+
 /** Opens a ticket for a kit, or worsens the one that is open. */
 export async function raiseTrouble(
   tx: Transaction,
   deps: Deps,
-  { facts, trouble, staffId }: { facts: KitFacts; trouble: Trouble; staffId?: string },
+  { facts, trouble, figure }: { facts: KitFacts; trouble: Trouble; figure?: Figure },
 ): Promise<Applied> {
   const open = await findOpenTicket(tx, facts.kit.id)
-  if (open) {
-    return applyTicketEvent(tx, deps, {
-      ticketId: open.id,
-      event: { kind: 'worsened', trouble },
-      staffId,
-    })
+  const applied = open
+    ? await applyTicketEvent(tx, deps, { ticketId: open.id, event: { kind: 'worsened', trouble } })
+    : await openTicket(tx, deps, { facts, trouble, figure })
+  if (applied.ok && (trouble === 'unwell' || trouble === 'danger sign')) {
+    await noticeIllness(tx, deps, { facts, ticketId: applied.ticketId })
   }
+  return applied
+}
+
+async function openTicket(
+  tx: Transaction,
+  deps: Deps,
+  { facts, trouble, figure }: { facts: KitFacts; trouble: Trouble; figure?: Figure },
+): Promise<Applied> {
   const now = deps.clock.now()
-  const event: TicketEvent = { kind: 'opened', trouble }
+  const celsius = areaCelsius(facts.area, now)
+  const event: TicketEvent = { kind: 'opened', trouble, celsius, ...(figure ? { figure } : {}) }
   const decision = decide(null, event, now)
   if (!decision.ok) return decision
   const row = await insertTicket(tx, {
@@ -124,16 +152,18 @@ export async function raiseTrouble(
     n: 1,
     event,
     state: decision.state,
-    staffId: staffId ?? null,
+    staffId: null,
     at: now,
   })
-  await runTicketEffects(tx, deps, {
+  const told = await runTicketEffects(tx, deps, {
     facts,
     ticketId: row.id,
     n: 1,
     state: decision.state,
     effects: decision.effects,
-    staffId,
   })
-  return { ok: true, state: decision.state, effects: decision.effects, ticketId: row.id }
+  return hear(tx, deps, {
+    told,
+    applied: { ok: true, state: decision.state, ticketId: row.id },
+  })
 }

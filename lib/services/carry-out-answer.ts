@@ -56,40 +56,25 @@ async function raise(
   tx: Transaction,
   deps: Deps,
   run: AnswerRun,
-  trouble: Parameters<typeof raiseTrouble>[2]['trouble'],
+  raised: Omit<Parameters<typeof raiseTrouble>[2], 'facts'>,
 ) {
-  const applied = await raiseTrouble(tx, deps, { facts: run.facts, trouble })
+  const applied = await raiseTrouble(tx, deps, { facts: run.facts, ...raised })
   if (applied.ok) await updateText(tx, run.text.id, { ticketId: applied.ticketId })
 }
 
-/** Keeps a figure that no ticket asked for; slow water opens one, which then has its answer already. */
-async function logFlow(tx: Transaction, deps: Deps, run: AnswerRun, minutes: number) {
-  const verdict = await recordFlow(tx, deps, {
-    facts: run.facts,
-    minutes,
-    known: 'said',
-    textId: run.text.id,
-  })
-  const open = await findOpenTicket(tx, run.facts.kit.id)
-  const isTooFast = verdict.recovery.kind === 'too-fast'
-  const isSlow = ['partly', 'not'].includes(verdict.recovery.kind) || verdict.need.kind !== 'enough'
-  if (!open && isTooFast) return raise(tx, deps, run, 'unsafe')
-  if (!open && !isSlow) return reply(tx, deps, run, 'thanks')
-  if (!open) await raise(tx, deps, run, 'slow')
-  const ticket = await findOpenTicket(tx, run.facts.kit.id)
-  if (!ticket) return
-  await applyTicketEvent(tx, deps, {
-    ticketId: ticket.id,
-    minutes,
-    event: {
-      kind: 'answered',
-      stepId: 'ask-flow',
-      answer: 'done',
-      recovery: verdict.recovery,
-      minutes,
-      need: verdict.need.kind,
-    },
-  })
+/** Keeps a figure that no step asked for; slow water opens a ticket, which then has its figure already. */
+async function logFlow(
+  tx: Transaction,
+  deps: Deps,
+  { run, act }: { run: AnswerRun; act: Extract<AnswerAct, { kind: 'log flow' }> },
+) {
+  const { facts, text } = run
+  const flow = { facts, minutes: act.minutes, known: 'said' as const, textId: text.id }
+  const { recovery, need } = await recordFlow(tx, deps, flow)
+  if (recovery.kind === 'too-fast') return raise(tx, deps, run, { trouble: 'unsafe' })
+  const isSlow = recovery.kind !== 'restored' || need.kind !== 'enough'
+  if (!isSlow && !act.saysSlow) return reply(tx, deps, run, 'thanks')
+  return raise(tx, deps, run, { trouble: 'slow', figure: { recovery, need: need.kind } })
 }
 
 async function answerStep(
@@ -151,11 +136,11 @@ async function carryOut(
     case 'log change':
       return logChange(tx, deps, run)
     case 'log flow':
-      return logFlow(tx, deps, run, act.minutes)
+      return logFlow(tx, deps, { run, act })
     case 'answer step':
       return answerStep(tx, deps, { run, act })
     case 'raise trouble':
-      return raise(tx, deps, run, act.trouble)
+      return raise(tx, deps, run, { trouble: act.trouble })
     case 'send':
       return reply(tx, deps, run, act.moment)
   }

@@ -1,4 +1,5 @@
 import type { Deps } from '@/lib/deps'
+import { isCauseOf } from '@/lib/domain/end-causes'
 import type { Actor } from '@/lib/domain/role'
 import type { EndStage } from '@/lib/domain/ticket-types'
 import { applyTicketEvent } from './apply-ticket-event'
@@ -14,12 +15,14 @@ export function endTicket(
     ...ref,
     act: 'end ticket',
     detail: { end, cause },
-    work: ({ tx, ticket }) =>
-      applyTicketEvent(tx, deps, {
+    work: async ({ tx, ticket }) => {
+      if (!isCauseOf(end, cause)) return { ok: false, reason: 'Say what fits this end.' }
+      return applyTicketEvent(tx, deps, {
         ticketId: ticket.id,
         staffId: actor.staffId,
         event: { kind: 'ended', end, cause },
-      }),
+      })
+    },
   })
 }
 

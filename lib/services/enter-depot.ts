@@ -10,6 +10,10 @@ type Kept = { ok: true; depotId: string } | { ok: false; reason: string }
 
 const NO_PART = 'There is no such part.'
 
+function written(stock: DepotInput['stock']): { partId: string; quantity: number }[] {
+  return stock.flatMap(({ partId, quantity }) => (quantity === null ? [] : [{ partId, quantity }]))
+}
+
 async function knowsParts(tx: Transaction, stock: DepotInput['stock']): Promise<boolean> {
   const known = new Set((await listParts(tx)).map(({ id }) => id))
   return stock.every(({ partId }) => known.has(partId))
@@ -24,8 +28,8 @@ export async function enterDepot(deps: Deps, actor: Actor, input: DepotInput): P
     if (!(await knowsParts(tx, input.stock))) return { ok: false, reason: NO_PART }
     const made = await insertDepot(tx, { name: input.name, place: input.place, createdAt: at })
     if (!made) return { ok: false, reason: 'Another depot has this name.' }
-    const there = input.stock.filter(({ quantity }) => quantity > 0)
-    for (const { partId, quantity } of there) {
+    for (const { partId, quantity } of written(input.stock)) {
+      if (quantity === 0) continue
       await insertStockMove(tx, {
         depotId: made.id,
         partId,
@@ -57,7 +61,7 @@ export async function countStock(
     if (!(await findDepot(tx, depotId))) return { ok: false, reason: 'not found' }
     if (!(await knowsParts(tx, stock))) return { ok: false, reason: NO_PART }
     // In one order, so that two counts at once never wait for each other.
-    const inOrder = stock.toSorted((a, b) => (a.partId < b.partId ? -1 : 1))
+    const inOrder = written(stock).toSorted((a, b) => (a.partId < b.partId ? -1 : 1))
     for (const { partId } of inOrder) await lockShelf(tx, partId)
     const ledger = await listInHand(tx)
     for (const { partId, quantity } of inOrder) {

@@ -58,13 +58,13 @@ function flowOf({ readings, washes, fittings }: Facts, around: Around): KitView[
   return { points, needLitresPerHour, forecast: trend(line, needLitresPerHour) }
 }
 
-function pastOf(facts: Facts, { kit, timeZone }: Around) {
+function pastOf(facts: Facts, { kit, timeZone, today }: Around) {
   const tickets = facts.tickets.map((ticket) => ({
     ...ticket,
     openedOn: localDay(ticket.openedAt, timeZone),
     endedOn: ticket.endedAt === null ? null : localDay(ticket.endedAt, timeZone),
   }))
-  return kitPast({ ...facts, tickets, handedOverOn: kit.handedOverOn })
+  return kitPast({ ...facts, tickets, handedOverOn: kit.handedOverOn }, today)
 }
 
 /** One kit for its household's sheet, and its open ticket. */

@@ -42,7 +42,7 @@ export async function linkPhone(tx: Transaction, link: Link): Promise<Linked> {
   const sharers = await listSharers(tx, [phone.id], householdId)
   if (sharers.length > 0) {
     const names = sharers.map(({ name }) => name).join(', ')
-    notes.push(`${spacedNumber(number)} also answers for ${names}: texts name the house.`)
+    notes.push(`${spacedNumber(number)} also answers for ${names}: the phone is shared.`)
   }
   if (isNew && looksUnused(number)) {
     notes.push(`${spacedNumber(number)} does not look like a number in use: read it once more.`)

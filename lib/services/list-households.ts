@@ -3,6 +3,7 @@ import { listHouseholdRows } from '@/db/queries/household-list'
 import { listLastReadings, listOpenFittingsOfKits } from '@/db/queries/kit'
 import { listSettings } from '@/db/queries/setting'
 import type { Deps } from '@/lib/deps'
+import { daysBetween } from '@/lib/domain/day'
 import { kitPlan } from '@/lib/domain/kit-life'
 import { dailyNeed } from '@/lib/domain/need'
 import { allow, type Actor } from '@/lib/domain/role'
@@ -27,7 +28,13 @@ type Around = {
 function nextDue({ kit }: Row, fittings: Around['fittings'], today: string) {
   const next = kitPlan({ ...kit, fittings }, today)[0]
   if (!next) return null
-  return { words: next.title, day: next.beside ?? next.day, overdue: next.on < today }
+  const late = daysBetween(next.on, today)
+  if (late <= 0) return { words: next.title, day: next.beside ?? next.day, overdue: false }
+  return {
+    words: `${next.title} late`,
+    day: `${late} ${late === 1 ? 'day' : 'days'}`,
+    overdue: true,
+  }
 }
 
 function viewOf(row: Row, around: Around): HouseholdRow {

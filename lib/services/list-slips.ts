@@ -18,6 +18,7 @@ function slipOf(text: TextRow, reading: ReadingRow | undefined, timeZone: string
   const going = text.sendAfter === null ? '' : momentWords(text.sendAfter, timeZone)
   return {
     n: text.n,
+    textId: text.id,
     direction: text.direction,
     body: text.body,
     language: text.language,
@@ -25,8 +26,13 @@ function slipOf(text: TextRow, reading: ReadingRow | undefined, timeZone: string
     day: dayWords(localDay(at, timeZone)),
     time: clockWords(at, timeZone),
     ...receiptOf(text.state, { why: text.stateWhy, going }),
-    under: reading ? readingWords(reading) : text.staffBody,
+    under: reading ? readWords(reading) : text.staffBody,
   }
+}
+
+/** `read as: slow water`; a person's reading says that it is one. */
+function readWords(reading: ReadingRow): string {
+  return `${readingWords(reading)}${reading.readBy === 'desk' ? '' : ' (a person read it)'}`
 }
 
 /** The last texts with a household, or those before `before`; hours in the area's zone. */

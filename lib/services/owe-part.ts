@@ -16,8 +16,16 @@ export function owePart(
     ...ref,
     act: 'promise part',
     detail: { position },
-    work: ({ tx, ticket, facts }) =>
-      promisePart(tx, deps, { facts, ticketId: ticket.id, position }),
+    work: async ({ tx, ticket, facts }) => {
+      const promised = await promisePart(tx, deps, { facts, ticketId: ticket.id, position })
+      // The letter that tells the coordinator of an empty shelf stays.
+      if (!promised.ok) return { ...promised, keeps: true }
+      return applyTicketEvent(tx, deps, {
+        ticketId: ticket.id,
+        staffId: actor.staffId,
+        event: promised.event,
+      })
+    },
   })
 }
 

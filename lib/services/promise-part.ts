@@ -2,18 +2,20 @@ import type { Transaction } from '@/db/client'
 import { listOpenFittings, type KitFacts } from '@/db/queries/kit-facts'
 import { insertPromise, listAvailable, lockShelf } from '@/db/queries/promise'
 import type { Deps } from '@/lib/deps'
-import { applyTicketEvent } from './apply-ticket-event'
+import type { TicketEvent } from '@/lib/domain/ticket-types'
 import { tellCoordinator } from './tell-coordinator'
 
+type Promised = { ok: true; event: TicketEvent } | { ok: false; reason: string }
+
 /**
- * Promises the part of a stage from a depot that has it: the area's own first, else any other. Where none
- * has it the ticket stays `part owed` without a promise, and the coordinator is told.
+ * Promises the part of a stage from a depot that has it: the area's own first, else any other. The event
+ * that tells the ticket is the caller's to apply. Where no depot has the part the coordinator is told.
  */
 export async function promisePart(
   tx: Transaction,
   deps: Deps,
   { facts, ticketId, position }: { facts: KitFacts; ticketId: string; position: 1 | 2 | 3 },
-): Promise<{ ok: true; promiseId: string } | { ok: false; reason: string }> {
+): Promise<Promised> {
   const fittings = await listOpenFittings(tx, facts.kit.id)
   const stage = fittings.find((row) => row.stage.position === position)?.stage
   if (!stage) return { ok: false, reason: 'the kit has no such stage' }
@@ -33,9 +35,5 @@ export async function promisePart(
     promisedAt: deps.clock.now(),
   })
   if (!promise) return { ok: false, reason: 'this stage has a promise already' }
-  const applied = await applyTicketEvent(tx, deps, {
-    ticketId,
-    event: { kind: 'part promised', promiseId: promise.id, stage: position },
-  })
-  return applied.ok ? { ok: true, promiseId: promise.id } : applied
+  return { ok: true, event: { kind: 'part promised', promiseId: promise.id, stage: position } }
 }

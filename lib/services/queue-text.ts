@@ -1,12 +1,10 @@
 import type { Transaction } from '@/db/client'
-import { listSettings } from '@/db/queries/setting'
 import { insertText } from '@/db/queries/text'
-import { findWordingInUse } from '@/db/queries/wording'
 import type { Deps } from '@/lib/deps'
-import { languages, type Language } from '@/lib/domain/language'
+import type { Language } from '@/lib/domain/language'
 import { momentInfo, type Moment } from '@/lib/domain/moments'
-import { renderWording, segmentsOf, type Values } from '@/lib/domain/wording'
-import { readSettings } from '@/lib/schemas/settings'
+import { segmentsOf, type Values } from '@/lib/domain/wording'
+import { wordForStaff, wordText } from './word-text'
 
 export type Letter = {
   /** What for, for whom, when: unique for ever. */
@@ -30,26 +28,12 @@ export type Letter = {
 
 export type Queued = { ok: true; textId: string } | { ok: false; reason: string }
 
-async function compose(tx: Transaction, letter: Letter, language: Language) {
-  const wording = await findWordingInUse(tx, letter.moment, language)
-  if (!wording) return { ok: false as const, reason: `no wording in use for ${letter.moment}` }
-  const { programme } = readSettings(await listSettings(tx))
-  const values = { programme, house: letter.household.name, ...letter.values }
-  const rendered = renderWording(wording.body, values, wording.language)
-  if (!rendered.ok)
-    return {
-      ok: false as const,
-      reason: `${letter.moment}: ${rendered.reason}, ${rendered.detail}`,
-    }
-  return { ok: true as const, text: rendered.text, wording }
-}
-
 /**
  * Writes an outbound text as a row before it is anything else, and enqueues its sending in the same
  * transaction. A purpose that has its text already is left alone: asking twice sends once.
  */
 export async function queueText(tx: Transaction, deps: Deps, letter: Letter): Promise<Queued> {
-  const composed = await compose(tx, letter, letter.household.language)
+  const composed = await wordText(tx, letter)
   if (!composed.ok && letter.body === undefined) {
     deps.log.error(
       { purpose: letter.purpose, reason: composed.reason },
@@ -57,11 +41,7 @@ export async function queueText(tx: Transaction, deps: Deps, letter: Letter): Pr
     )
     return composed
   }
-  const first = languages[0] ?? 'en'
-  const forStaff =
-    letter.household.language === first || letter.body !== undefined
-      ? null
-      : await compose(tx, letter, first)
+  const staffBody = letter.body === undefined ? await wordForStaff(tx, letter) : null
   const body = letter.body ?? (composed.ok ? composed.text : '')
   const row = await insertText(tx, {
     direction: 'out',
@@ -76,7 +56,7 @@ export async function queueText(tx: Transaction, deps: Deps, letter: Letter): Pr
     language: composed.ok ? composed.wording.language : letter.household.language,
     body,
     values: letter.values,
-    staffBody: forStaff?.ok ? forStaff.text : null,
+    staffBody,
     segments: segmentsOf(body).segments,
     asked: momentInfo(letter.moment)?.asked ?? 'none',
     stepId: letter.stepId,

@@ -8,10 +8,9 @@ import { boilMinutes } from './boil-minutes'
 import { addDays } from '@/lib/domain/day'
 import type { Moment } from '@/lib/domain/moments'
 import { localDay } from '@/lib/domain/round'
-import type { TicketEffect, TicketState } from '@/lib/domain/ticket-types'
+import type { TicketEffect, TicketEvent, TicketState } from '@/lib/domain/ticket-types'
 import { stepOf } from '@/lib/domain/walk-catalogue'
 import type { Values } from '@/lib/domain/wording'
-import { applyTicketEvent } from './apply-ticket-event'
 import { logWash } from './care-for-kit'
 import { promisePart } from './promise-part'
 import { queueText } from './queue-text'
@@ -78,7 +77,11 @@ async function sendMoment(
   })
 }
 
-async function bookVisit(tx: Transaction, deps: Deps, run: EffectsRun): Promise<void> {
+async function bookVisit(
+  tx: Transaction,
+  deps: Deps,
+  run: EffectsRun,
+): Promise<TicketEvent | null> {
   const now = deps.clock.now()
   const visit = await insertVisit(tx, {
     ticketId: run.ticketId,
@@ -87,11 +90,17 @@ async function bookVisit(tx: Transaction, deps: Deps, run: EffectsRun): Promise<
     dueOn: addDays(localDay(now, run.facts.area.timeZone), VISIT_WITHIN_DAYS),
     createdAt: now,
   })
-  if (!visit) return
-  await applyTicketEvent(tx, deps, {
-    ticketId: run.ticketId,
-    event: { kind: 'visit booked', visitId: visit.id },
-  })
+  return visit && { kind: 'visit booked', visitId: visit.id }
+}
+
+async function promise(
+  tx: Transaction,
+  deps: Deps,
+  { run, position }: { run: EffectsRun; position: 1 | 2 | 3 },
+): Promise<TicketEvent | null> {
+  const { facts, ticketId } = run
+  const promised = await promisePart(tx, deps, { facts, ticketId, position })
+  return promised.ok ? promised.event : null
 }
 
 async function close(tx: Transaction, deps: Deps, run: EffectsRun): Promise<void> {
@@ -107,29 +116,44 @@ async function runEffect(
   tx: Transaction,
   deps: Deps,
   { run, effect }: { run: EffectsRun; effect: TicketEffect },
-) {
+): Promise<TicketEvent | null> {
+  switch (effect.kind) {
+    case 'promise part':
+      return promise(tx, deps, { run, position: effect.stage })
+    case 'ask for visit':
+      return bookVisit(tx, deps, run)
+    default:
+      await runPlain(tx, deps, { run, effect })
+      return null
+  }
+}
+
+type PlainEffect = Exclude<TicketEffect, { kind: 'promise part' | 'ask for visit' }>
+
+/** Effects that the ticket need not hear of again. */
+async function runPlain(
+  tx: Transaction,
+  deps: Deps,
+  { run, effect }: { run: EffectsRun; effect: PlainEffect },
+): Promise<void> {
   const { facts, ticketId } = run
   switch (effect.kind) {
     case 'send step': {
       const step = stepOf(effect.stepId)
-      return step && sendMoment(tx, deps, { run, moment: step.moment, stepId: step.id })
+      if (step) await sendMoment(tx, deps, { run, moment: step.moment, stepId: step.id })
+      return
     }
     case 'send': {
-      const values =
-        effect.moment === 'drink-advice' ? { minutes: boilMinutes(facts.area.altitudeMetres) } : {}
+      const isAdvice = effect.moment === 'drink-advice'
+      const values = isAdvice ? { minutes: boilMinutes(facts.area.altitudeMetres) } : {}
       return sendMoment(tx, deps, { run, moment: effect.moment, values })
     }
-    case 'promise part':
-      return promisePart(tx, deps, { facts, ticketId, position: effect.stage })
-    case 'ask for visit':
-      return bookVisit(tx, deps, run)
     case 'log wash':
       return logWash(tx, deps, { facts, ticketId, known: 'measured' })
-    case 'out of service':
-      return updateKit(tx, facts.kit.id, {
-        state: 'out of service',
-        outOfServiceSince: deps.clock.now(),
-      })
+    case 'out of service': {
+      const outOfServiceSince = deps.clock.now()
+      return updateKit(tx, facts.kit.id, { state: 'out of service', outOfServiceSince })
+    }
     case 'back in service':
       return updateKit(tx, facts.kit.id, { state: 'in use', outOfServiceSince: null })
     case 'tell coordinator':
@@ -139,11 +163,19 @@ async function runEffect(
   }
 }
 
-/** Carries out what the core decided, in the transaction that keeps the decision. */
+/**
+ * Carries out what the core decided, in the transaction that keeps the decision. Answers with what the
+ * ticket has to hear of in turn: a part that was promised, a visit that was booked.
+ */
 export async function runTicketEffects(
   tx: Transaction,
   deps: Deps,
   run: EffectsRun,
-): Promise<void> {
-  for (const effect of run.effects) await runEffect(tx, deps, { run, effect })
+): Promise<TicketEvent[]> {
+  const events: TicketEvent[] = []
+  for (const effect of run.effects) {
+    const event = await runEffect(tx, deps, { run, effect })
+    if (event) events.push(event)
+  }
+  return events
 }

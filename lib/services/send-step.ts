@@ -1,3 +1,4 @@
+import { createHash } from 'node:crypto'
 import { findFirstPhone } from '@/db/queries/phone'
 import type { Deps } from '@/lib/deps'
 import type { Moment } from '@/lib/domain/moments'
@@ -5,9 +6,15 @@ import type { Actor } from '@/lib/domain/role'
 import { stepOf } from '@/lib/domain/walk-catalogue'
 import { applyTicketEvent } from './apply-ticket-event'
 import { queueText } from './queue-text'
+import { stepText } from './word-text'
 import { workTicket, type TicketRef, type TicketWork, type Worked } from './ticket-work'
 
 type Sending = { moment: Moment; stepId?: string; body?: string }
+
+/** Own words change nothing on the ticket: by their sum a second press of a button sends nothing twice. */
+function ownWords(body = ''): string {
+  return `own words:${createHash('sha256').update(body).digest('hex').slice(0, 16)}`
+}
 
 async function sendToHousehold(
   deps: Deps,
@@ -17,15 +24,16 @@ async function sendToHousehold(
   const { tx, ticket, facts, now } = held
   const phone = await findFirstPhone(tx, facts.household.id)
   if (!phone) return { ok: false as const, reason: 'This household has no phone.' }
+  const { values } = await stepText(tx, { moment: sending.moment, household: facts.household })
   return queueText(tx, deps, {
-    purpose: `step:${ticket.id}:${ticket.version + 1}:${sending.stepId ?? 'own words'}`,
+    purpose: `step:${ticket.id}:${ticket.version + 1}:${sending.stepId ?? ownWords(sending.body)}`,
     moment: sending.moment,
     phone,
     household: facts.household,
     kitId: facts.kit.id,
     ticketId: ticket.id,
     stepId: sending.stepId,
-    values: { litres: facts.model.bottleLitres, dueOn: facts.kit.nextWashOn, stage: 3 },
+    values,
     staffId: actor.staffId,
     body: sending.body,
     sendAfter: now,

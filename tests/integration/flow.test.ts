@@ -131,6 +131,28 @@ describe('answers', () => {
     expect(last).toMatchObject({ state: 'queued', anyHour: true })
   })
 
+  test('a second ill house of the area within a week is told to the coordinator, a later one is not', async () => {
+    await askToWash()
+    const other = { name: 'Quispe', number: '+12025550102', handedOverOn: '2026-03-16' }
+    await houseIn(deps, place, other)
+    await run()
+    await say(deps, PHONE, 'mi hijo tiene diarrea')
+    const told = async () =>
+      (await deps.jobs()).filter(({ name }) => name === 'tell-coordinator').length
+    const before = await told()
+    deps.clock.advance(6 * DAY)
+    await say(deps, other.number, 'mi hijo tiene diarrea')
+    expect(await told()).toBe(before + 1)
+    deps.clock.advance(8 * DAY)
+    await houseIn(deps, place, {
+      name: 'Duarte',
+      number: '+12025550103',
+      handedOverOn: '2026-03-30',
+    })
+    await say(deps, '+12025550103', 'mi hijo tiene diarrea')
+    expect(await told()).toBe(before + 1)
+  })
+
   test('STOP ends prompts to the phone; the carrier confirms it, so that there is one confirmation', async () => {
     await askToWash()
     const before = deps.carrier.sent.length
