@@ -39,7 +39,7 @@ export function Slip(props: SlipProps) {
         >
           {body}
         </p>
-        {under && <p className="mt-1 text-sm text-faint italic">{under}</p>}
+        {under && <div className="mt-1 text-sm text-faint italic">{under}</div>}
       </div>
     </li>
   )

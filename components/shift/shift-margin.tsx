@@ -1,0 +1,56 @@
+import type { Ref } from 'react'
+import type { Shift } from '@/lib/schemas/shift'
+import { Button } from '../ui/button'
+import { TextField } from '../ui/field'
+import { MarginBlock, MarginFigure } from '../ui/margin-block'
+import { Notice } from '../ui/notice'
+
+type ShiftMarginProps = {
+  shift: Shift
+  busy: boolean
+  error: Error | null
+  onTakeNext: () => void
+  findRef: Ref<HTMLInputElement>
+  onFind: (sought: string) => void
+}
+
+const count = (n: number, one: string, many = `${one}s`) => `${n} ${n === 1 ? one : many}`
+
+/** How many wait, the one main button, what came of today, and a field that finds a row. */
+export function ShiftMargin({ shift, busy, error, ...rest }: ShiftMarginProps) {
+  const { waiting, taken, longest, next, today } = shift
+  const isOne = taken === 1
+  return (
+    <>
+      <MarginFigure figure={waiting}>
+        {waiting === 1 ? 'waits' : 'wait'}, {isOne ? '1 is' : `${taken} are`} taken.
+        {longest && ` The longest since ${longest}.`}
+      </MarginFigure>
+      <p role="status" className="sr-only">
+        {waiting} {waiting === 1 ? 'waits' : 'wait'} in the shift
+      </p>
+      <Button kind="main" busy={busy} disabled={!next.ticketId} onClick={rest.onTakeNext}>
+        Take the next
+      </Button>
+      <p className="mt-1.5 text-faint">{next.words}</p>
+      {error && (
+        <Notice tone="danger" title="Not taken" live className="mt-3">
+          {error.message}
+        </Notice>
+      )}
+      <MarginBlock title="Today">
+        {today.flowing} brought back to flowing, {count(today.parts, 'part')} promised,{' '}
+        {count(today.visits, 'visit')} booked.
+      </MarginBlock>
+      <div className="mt-4.5 border-t border-rule pt-3">
+        <TextField
+          ref={rest.findRef}
+          label="Find in the shift"
+          type="search"
+          required={false}
+          onChange={({ currentTarget }) => rest.onFind(currentTarget.value)}
+        />
+      </div>
+    </>
+  )
+}
