@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest'
 import type { TicketEvent } from '@/lib/domain/ticket'
+import { defaultPriors } from '@/lib/domain/walk'
 import {
   advice,
   after,
@@ -54,6 +55,12 @@ describe('an answer', () => {
     )
     expect(state.cause).toBe('kinked-hose')
     expect(effects).toEqual([{ kind: 'send', moment: 'flowing' }, { kind: 'closed' }])
+  })
+
+  it('names what the cure is for, however unlikely that was', () => {
+    const odds = { ...defaultPriors.slow, 'fouled-fibre': 0.985, 'misfitted-cap': 0.001 }
+    const { state } = after({ kind: 'opened', trouble: 'slow', odds }, answered('refit-cap', 0.95))
+    expect(state.cause).toBe('misfitted-cap')
   })
 
   it('that the cloth is torn owes a cloth', () => {

@@ -31,6 +31,16 @@ describe('opening', () => {
     expect(state).toMatchObject({ stage, trouble, openedAt: now, takenBy: null })
   })
 
+  it('promises nothing and books nothing yet', () => {
+    const { state } = after(opened('silent'))
+    expect(state).toMatchObject({
+      promisedStage: null,
+      promiseId: null,
+      visitId: null,
+      cause: null,
+    })
+  })
+
   it('goes on from a figure that came with the complaint', () => {
     const { state, effects } = after({
       kind: 'opened',
