@@ -75,6 +75,14 @@ describe('the sending window', () => {
     )
   })
 
+  it('finds the change also where it happened on the day before by UTC', () => {
+    // Lebanon skips from midnight to 01:00 on 30 March 2025, at 22:00 UTC on the 29th.
+    const window = { ...kathmandu, timeZone: 'Asia/Beirut', sundaysOff: false, opensMinute: 30 }
+    expect(iso(nextInsideWindow(utc('2025-03-29T20:00:00Z'), window))).toBe(
+      '2025-03-29T22:00:00.000Z',
+    )
+  })
+
   it('opens again when the clocks go back over its opening', () => {
     const window = {
       ...kathmandu,
