@@ -5,8 +5,7 @@ import { MarginBlock, MarginFigure } from '../ui/margin-block'
 
 type HouseholdsMarginProps = { total: number; search: string; mayEnter: boolean }
 
-/** Beside the list: how many, find, enter. */
-export function HouseholdsMargin({ total, search, mayEnter }: HouseholdsMarginProps) {
+function Finder({ total, search }: { total: number; search: string }) {
   return (
     <>
       <MarginFigure figure={total}>
@@ -35,7 +34,17 @@ export function HouseholdsMargin({ total, search, mayEnter }: HouseholdsMarginPr
           </div>
         </Form>
       </search>
-      {mayEnter && (
+    </>
+  )
+}
+
+/** Beside the list: how many, find, enter. */
+export function HouseholdsMargin({ total, search, mayEnter }: HouseholdsMarginProps) {
+  const isEmpty = total === 0 && search === ''
+  return (
+    <>
+      {!isEmpty && <Finder total={total} search={search} />}
+      {!isEmpty && mayEnter && (
         <MarginBlock title="A new house">
           <ButtonLink href="/households/new" size="small" className="mt-1">
             Enter a household

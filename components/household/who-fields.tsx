@@ -41,6 +41,7 @@ export function NameFields({ who, wrong }: Fields) {
     <Pair>
       <TextField
         label="Name of the house"
+        hint="As texts call it."
         name="name"
         defaultValue={who.name}
         error={wrong('name')}

@@ -34,7 +34,7 @@ describe('the list of households', () => {
       area: 'Loma Clara',
       phone: '+1 505 555 0142',
       silentBecause: null,
-      nextDue: { words: 'Wash', day: '2 days ago', overdue: true },
+      nextDue: { words: 'Wash late', day: '2 days', overdue: true },
       ticket: null,
     })
     expect(row?.column.stages.map(({ state }) => state)).toEqual(['good', 'good', 'good'])
