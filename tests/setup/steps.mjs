@@ -7,7 +7,7 @@ const script = (...parts) => [path.join(...parts)]
 export const staticSteps = [
   { name: 'format', command: bin('prettier'), parameters: ['--check', '.'], limitSeconds: 180 },
   { name: 'lint', command: bin('oxlint'), parameters: ['--format', 'unix'], limitSeconds: 180 },
-  { name: 'types', command: 'npm', parameters: ['run', '--silent', 'types'], limitSeconds: 300 },
+  { name: 'types', command: 'npm', parameters: ['run', '--silent', 'types'], limitSeconds: 420 },
   {
     name: 'import rules',
     command: 'npm',
@@ -39,7 +39,7 @@ export const unitStep = {
   report: 'unit',
   parameters: [...vitestRun, '--project', 'unit', '--project', 'outside'],
   environment: { TZ: 'Asia/Kathmandu' },
-  limitSeconds: 420,
+  limitSeconds: 600,
 }
 
 export const embeddedStep = {
@@ -48,7 +48,7 @@ export const embeddedStep = {
   report: 'integration-pglite',
   parameters: [...vitestRun, '--project', 'integration'],
   environment: {},
-  limitSeconds: 480,
+  limitSeconds: 600,
 }
 
 export function postgresStep(url) {
@@ -58,7 +58,7 @@ export function postgresStep(url) {
     report: 'integration-postgres',
     parameters: [...vitestRun, '--project', 'integration'],
     environment: { TEST_DATABASE_URL: url },
-    limitSeconds: 480,
+    limitSeconds: 600,
   }
 }
 
