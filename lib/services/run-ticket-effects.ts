@@ -3,6 +3,7 @@ import { listOpenFittings, updateKit, type KitFacts } from '@/db/queries/kit-fac
 import { findFirstPhone } from '@/db/queries/phone'
 import { findOpenPromise, withdrawPromises } from '@/db/queries/promise'
 import { insertVisit, withdrawVisits } from '@/db/queries/visit'
+import { findDueVisit } from '@/db/queries/wording-values'
 import type { Deps } from '@/lib/deps'
 import { boilMinutes } from './boil-minutes'
 import { addDays } from '@/lib/domain/day'
@@ -37,14 +38,15 @@ async function valuesFor(tx: Transaction, deps: Deps, run: EffectsRun): Promise<
     (row) => row.stage.position === stage,
   )
   const promise = await findOpenPromise(tx, facts.kit.id)
+  const visit = await findDueVisit(tx, facts.household.id)
   return {
     stage,
     ...(fitting ? { part: fitting.part.name, dueOn: fitting.fitting.dueOn } : {}),
     ...(promise ? { depot: promise.depotName } : {}),
     litres: facts.model.bottleLitres,
     minutes: run.minutes ?? boilMinutes(facts.area.altitudeMetres),
-    visitOn: addDays(today, VISIT_WITHIN_DAYS),
-    visitor: 'your visitor',
+    visitOn: visit?.dueOn ?? addDays(today, VISIT_WITHIN_DAYS),
+    visitor: visit?.visitor ?? 'your visitor',
   }
 }
 

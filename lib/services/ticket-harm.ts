@@ -12,7 +12,7 @@ type Reading = {
 }
 
 /** A figure that came with the complaint is a moment older than the ticket, in milliseconds. */
-const figureMargin = 60 * 60_000
+const figureMargin = 60_000
 
 /** True for a reading that tells of the filter as it is now: of this trouble, and of the fibre that stands. */
 export function isOfNow(
