@@ -2,16 +2,13 @@
  * `npm run web`: the desk alone, with the settings of the environment and of `.env`. What is wrong with them is told
  * by the desk itself as it starts (`instrumentation.ts`).
  */
-import { existsSync } from 'node:fs'
+import './with-settings.mjs'
 import path from 'node:path'
 import { pathToFileURL } from 'node:url'
 import { takenPorts } from './ports.mjs'
 import { ensureBuilt, ensureInstalled, ensureNode, fail, root } from './prepare.mjs'
 
 ensureNode()
-process.chdir(root)
-// Values that are set already win over the file's.
-if (existsSync('.env')) process.loadEnvFile('.env')
 
 const port = process.env.PORT || '3000'
 const host = process.env.BIND_ADDRESS || '127.0.0.1'
