@@ -1,7 +1,7 @@
 import type { Asked } from './reply-sense'
 
 /**
- * What a wording may speak of. `stage` is the stage's position 1, 2 or 3, to be chosen by
+ * What a wording may speak of. `stage` is the stage's position 1, 2 or 3, or several in order (12, 123), to be chosen by
  * (`{stage, select, 1 {…} 2 {…} 3 {…} other {…}}`), so that its name is in the household's language.
  * `dueOn` and `visitOn` are days as YYYY-MM-DD and are written out in the household's language.
  */

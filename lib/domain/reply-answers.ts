@@ -74,6 +74,8 @@ function ask(sense: Sense): Answer | null {
   const isQuestion = sense.text.includes('?')
   const marks = said(sense, 'ask')
   if (marks.length > 0) return { kind: 'ask', sure: sureOf(isQuestion ? 0.85 : 0.75, marks) }
+  const where = said(sense, 'where').some((mark) => isQuestion || mark.from <= 1)
+  if (where) return { kind: 'ask', sure: 0.7 }
   return isQuestion && sense.words > 2 ? { kind: 'ask', sure: 0.65 } : null
 }
 
@@ -82,13 +84,15 @@ function done(sense: Sense): Answer | null {
   if (marks.length > 0) return { kind: 'done', sure: sureOf(0.85, marks) }
   if (isOver(sense)) return { kind: 'done', sure: 0.75 }
   const runsWell = areBeside(sense, said(sense, 'flow'), said(sense, 'good', 'fast'), 3)
-  return runsWell ? { kind: 'done', sure: 0.7 } : null
+  const isWellNow = isSaid(sense, 'good') && isSaid(sense, 'now') && sense.asked !== 'none'
+  return runsWell || isWellNow ? { kind: 'done', sure: 0.7 } : null
 }
 
 function keywords(sense: Sense): Answer | null {
   const starts = said(sense, 'startWord')
   if (starts.length > 0) return { kind: 'start', sure: sureOf(0.8, starts) }
-  const helps = said(sense, 'helpWord')
+  // "Thank you for your help" asks for none.
+  const helps = isSaid(sense, 'thanks') ? [] : said(sense, 'helpWord')
   return helps.length > 0 ? { kind: 'help', sure: sureOf(0.8, helps) } : null
 }
 
@@ -122,8 +126,14 @@ function yesNo(sense: Sense): Answer | null {
   if (safe.length > 0) return { kind: 'no', sure: sureOf(0.75, safe) }
   if (yes.length > 0 && no.length > 0) return null
   if (yes.length > 0) return { kind: 'yes', sure: sureOf(sense.unknownWords > 3 ? 0.5 : 0.85, yes) }
-  if (no.length > 0) return { kind: 'no', sure: sense.words <= 4 ? 0.85 : 0.5 }
+  if (no.length > 0) return { kind: 'no', sure: noSureness(sense) }
   if (isSaid(sense, 'not') && sense.words <= 3 && sense.unknownWords === 0)
     return { kind: 'no', sure: 0.65 }
   return isSaid(sense, 'good') && sense.unknownWords <= 2 ? { kind: 'yes', sure: 0.62 } : null
+}
+
+function noSureness(sense: Sense): number {
+  if (sense.words <= 4) return 0.85
+  const isFirst = said(sense, 'no').some((mark) => mark.from === 0)
+  return isFirst && sense.words <= 8 && sense.unknownWords <= 1 ? 0.65 : 0.5
 }

@@ -1,3 +1,4 @@
+import { isLightWord } from './reply-lexicon'
 import type { Mark } from './reply-marks'
 import type { Token } from './reply-tokens'
 import type { Concept } from './reply-words/concept'
@@ -6,6 +7,10 @@ import type { Concept } from './reply-words/concept'
 const deniable: ReadonlySet<Concept> = new Set<Concept>([
   'ceased',
   'flow',
+  'fill',
+  'wake',
+  'limp',
+  'end',
   'drip',
   'slow',
   'blocked',
@@ -59,33 +64,37 @@ const passedOver: ReadonlySet<Concept> = new Set<Concept>([
   'cloth',
 ])
 
+/** What a denial of the texts may pass over: everything, since an opt-out is never to be missed. */
+const unabsorbed: ReadonlySet<Concept> = new Set<Concept>(['texts', 'stopWord', 'end'])
+
 const forwardReach = 4
 const backwardReach = 3
+
+type Field = { marks: Mark[]; tokens: readonly Token[]; fences: readonly number[] }
 
 /** Marks with `denied` set: "not cracked", "ya no está lento", "coule pas", "fate nai". */
 export function denyMarks(marks: readonly Mark[], tokens: readonly Token[]): Mark[] {
   const settled = marks.map((mark) => ({ ...mark }))
-  const fences = fencesOf(settled, tokens)
-  for (const mark of settled) {
-    if (mark.concept === 'not') denyForward(mark, settled, fences, forwardReach)
-    // "No hay fuga": what one has not is denied too; Bengali says it after the thing.
-    const isAlsoNot = settled.some((other) => other.concept === 'not' && other.from === mark.from)
-    if (mark.concept === 'lack' && mark.language !== 'bn' && !isAlsoNot)
-      denyForward(mark, settled, fences, 3)
-    if (mark.concept === 'notNext') denyForward(mark, settled, fences, 1)
-    if (mark.concept === 'notBack') denyBackward(mark, settled, fences, backwardReach)
-    if (mark.concept === 'notAround' && !denyBackward(mark, settled, fences, 1)) {
-      denyForward(mark, settled, fences, forwardReach)
-    }
-  }
-  for (const mark of settled) {
-    if (mark.concept === 'notPlus') denyPlus(mark, settled, fences)
-  }
+  const field = { marks: settled, tokens, fences: fencesOf(settled, tokens) }
+  for (const mark of settled) denyBy(mark, field)
   // "Can't stop vomiting": a denied end is no end.
   for (const mark of settled) {
-    if (mark.concept === 'ceased' && !mark.denied) denyForward(mark, settled, fences, forwardReach)
+    if (mark.concept === 'ceased' && !mark.denied) denyForward(mark, field, forwardReach)
   }
   return settled
+}
+
+function denyBy(mark: Mark, field: Field): void {
+  if (mark.concept === 'not') denyForward(mark, field, forwardReach)
+  if (mark.concept === 'notNext') denyForward(mark, field, 1)
+  if (mark.concept === 'notBack') denyBackward(mark, field, backwardReach)
+  if (mark.concept === 'notPlus') denyPlus(mark, field)
+  if (mark.concept === 'notAround' && !denyBackward(mark, field, 1)) {
+    denyForward(mark, field, forwardReach)
+  }
+  // "No hay fuga": what one has not is denied too; Bengali says it after the thing.
+  const isAlsoNot = field.marks.some((other) => other.concept === 'not' && other.from === mark.from)
+  if (mark.concept === 'lack' && mark.language !== 'bn' && !isAlsoNot) denyForward(mark, field, 3)
 }
 
 /** After "plus" these compare ("plus lent") unless "ne" stands before it. */
@@ -102,67 +111,73 @@ const comparable: ReadonlySet<Concept> = new Set<Concept>([
   'long',
 ])
 
-function denyPlus(plus: Mark, marks: Mark[], fences: readonly number[]): void {
-  const isAnnounced = marks.some(
+function denyPlus(plus: Mark, field: Field): void {
+  const isAnnounced = field.marks.some(
     (mark) =>
       mark.concept === 'ne' &&
       mark.to <= plus.from &&
       plus.from - mark.to <= 3 &&
-      !crosses(mark.to, plus.from, fences),
+      !isFenced(mark.to, plus.from, field),
   )
-  const compares = marks.some((mark) => mark.from === plus.to && comparable.has(mark.concept))
+  const compares = field.marks.some((mark) => mark.from === plus.to && comparable.has(mark.concept))
   if (compares && !isAnnounced) return
-  if (denyBackward(plus, marks, fences, 1)) return
-  denyForward(plus, marks, fences, isAnnounced ? forwardReach : 2)
+  if (denyBackward(plus, field, 1)) return
+  denyForward(plus, field, isAnnounced ? forwardReach : 2)
 }
 
-/** Places a denial does not cross: punctuation and "but". */
+/** Places a denial does not cross: punctuation, "but" and "and". */
 function fencesOf(marks: readonly Mark[], tokens: readonly Token[]): number[] {
   const breaks = tokens.flatMap((token, at) => (token.kind === 'break' ? [at] : []))
-  return [...breaks, ...marks.filter((mark) => mark.concept === 'but').map((mark) => mark.from)]
+  const joints = marks.filter((mark) => mark.concept === 'but' || mark.concept === 'and')
+  return [...breaks, ...joints.map((mark) => mark.from)]
 }
 
-function crosses(from: number, to: number, fences: readonly number[]): boolean {
+function isFenced(from: number, to: number, { fences }: Field): boolean {
   return fences.some((fence) => fence >= from && fence < to)
 }
 
-function denyForward(
-  denial: Mark,
-  marks: Mark[],
-  fences: readonly number[],
-  reach: number,
-): boolean {
-  const ahead = marks.filter(
+/** In "won't close and water pours" it is the closing, a word without a meaning here, that is denied. */
+function isAbsorbed(denial: Mark, mark: Mark, { tokens, marks }: Field): boolean {
+  if (unabsorbed.has(mark.concept)) return false
+  for (let at = denial.to; at < mark.from; at += 1) {
+    const token = tokens[at]
+    const isMarked = marks.some(
+      (other) => other.from <= at && at < other.to && other.likeness !== 'guessed',
+    )
+    if (token?.kind === 'word' && !isMarked && !isLightWord(token.text, denial.language))
+      return true
+  }
+  return false
+}
+
+function denyForward(denial: Mark, field: Field, reach: number): boolean {
+  const ahead = field.marks.filter(
     (mark) =>
       mark.from >= denial.to &&
       mark.from - denial.to < reach &&
-      !crosses(denial.to, mark.from, fences),
+      !isFenced(denial.to, mark.from, field) &&
+      !isAbsorbed(denial, mark, field),
   )
-  return denyFirst(ahead, marks)
+  return denyFirst(ahead, field)
 }
 
-function denyBackward(
-  denial: Mark,
-  marks: Mark[],
-  fences: readonly number[],
-  reach: number,
-): boolean {
-  const behind = marks.filter(
+function denyBackward(denial: Mark, field: Field, reach: number): boolean {
+  const behind = field.marks.filter(
     (mark) =>
       mark.to <= denial.from &&
       denial.from - mark.to < reach &&
-      !crosses(mark.to, denial.from, fences),
+      !isFenced(mark.to, denial.from, field),
   )
-  return denyFirst(behind.reverse(), marks)
+  return denyFirst(behind.reverse(), field)
 }
 
 /** The nearest predicate is denied, and those joined to it by "or". */
-function denyFirst(nearest: readonly Mark[], marks: readonly Mark[]): boolean {
+function denyFirst(nearest: readonly Mark[], field: Field): boolean {
   let hit: Mark | null = null
   for (const mark of nearest) {
     if (!deniable.has(mark.concept)) continue
     const sameWord = hit !== null && mark.from === hit.from
-    if (hit === null || sameWord || isJoined(hit, mark, marks)) {
+    if (hit === null || sameWord || isJoined(hit, mark, field)) {
       mark.denied = !mark.denied
       if (!passedOver.has(mark.concept)) hit = mark
     }
@@ -170,7 +185,7 @@ function denyFirst(nearest: readonly Mark[], marks: readonly Mark[]): boolean {
   return hit !== null
 }
 
-function isJoined(first: Mark, second: Mark, marks: readonly Mark[]): boolean {
+function isJoined(first: Mark, second: Mark, { marks }: Field): boolean {
   const [left, right] = first.from < second.from ? [first, second] : [second, first]
   return marks.some(
     (mark) => mark.concept === 'or' && mark.from >= left.to && mark.to <= right.from,

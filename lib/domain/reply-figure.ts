@@ -9,15 +9,16 @@ type Figure = { minutes: number; hasUnit: boolean }
 /** The bottle-fill time a text gives, if it gives one. */
 export function figureOf(sense: Sense): Figure | null {
   if (isSaid(sense, 'future', 'notYet', 'ago') || promised(sense).length > 0) return null
-  const spans = sense.figures.spans.map((span) => span.minutes).filter((minutes) => minutes > 0)
-  const [first, second] = spans
-  if (first !== undefined) {
-    const low = sense.figures.bare.at(0)?.value
-    if (second === undefined && low !== undefined && low > 0 && low < first && low >= first / 3) {
-      return { minutes: (low + first) / 2, hasUnit: true }
-    }
-    return { minutes: spans.at(-1) ?? first, hasUnit: true }
-  }
+  const spans = sense.figures.spans.filter((span) => span.minutes > 0)
+  const last = spans.at(-1)
+  if (last === undefined) return bareFigure(sense)
+  // "5 to 6 minutes": the low end stands bare just before the high one.
+  const low = sense.figures.bare.find((bare) => bare.to <= last.from && last.from - bare.to <= 2)
+  const isRange = low && low.value > 0 && low.value < last.minutes && low.value >= last.minutes / 3
+  return { minutes: isRange ? (low.value + last.minutes) / 2 : last.minutes, hasUnit: true }
+}
+
+function bareFigure(sense: Sense): Figure | null {
   const values = sense.figures.bare.map((bare) => bare.value).filter((value) => value > 0)
   const [one, other] = values
   if (one === undefined || values.length > 2 || one > longestFillMinutes) return null
@@ -29,7 +30,9 @@ export function figureOf(sense: Sense): Figure | null {
 /** How much of the text is the number itself: "about 12 now" against a story with a number in it. */
 export function isMostlyFigure(sense: Sense): boolean {
   const others = sense.words - sense.figures.bare.length
-  return others <= 4 && sense.unknownWords <= 1
+  return sense.asked === 'flow'
+    ? others <= 6 && sense.unknownWords <= 2
+    : others <= 4 && sense.unknownWords <= 1
 }
 
 /** "In ten minutes", when no flow was asked for and none is spoken of. */

@@ -30,20 +30,44 @@ type Reader = { order: Language[]; figures: Figures }
 function readFigureAt(tokens: readonly Token[], from: number, { order, figures }: Reader): number {
   const first = pieceAt(tokens, from, order)
   if (first.kind === 'span') {
-    const half = pieceAt(tokens, from + first.size, order)
-    const to = from + first.size
-    figures.spans.push({ minutes: first.minutes, from, to })
-    return half.kind === 'half' ? to + half.size : to
+    return pushSpan(
+      tokens,
+      { minutes: first.minutes, from, to: from + first.size },
+      { order, figures },
+    )
   }
   const amount = readAmount(tokens, from, order)
   if (amount === null) return from + first.size
   const unit = pieceAt(tokens, amount.to, order)
-  if (unit.kind === 'unit' && unit.unit === 'other') return amount.to + unit.size
+  if (unit.kind === 'unit' && unit.unit === 'other')
+    return afterRate(tokens, amount.to + unit.size, order)
   if (unit.kind === 'unit') return readSpan(tokens, { ...amount, from }, { order, figures })
   // "One" alone is a figure; within a sentence it is an article.
   const isAlone = tokens.length === 1 && amount.value >= 1
   if (!amount.weak || isAlone) figures.bare.push({ value: amount.value, from, to: amount.to })
   return amount.to
+}
+
+/** "One cup an hour" is a rate, not the time of a bottle. */
+function afterRate(tokens: readonly Token[], at: number, order: Language[]): number {
+  const next = pieceAt(tokens, at, order)
+  return next.kind === 'span' && next.minutes >= 60 ? at + next.size : at
+}
+
+/** Keeps a span, joined to the one just before it: "an hour and ten minutes". */
+function pushSpan(
+  tokens: readonly Token[],
+  span: { minutes: number; from: number; to: number },
+  { figures }: Reader,
+): number {
+  const last = figures.spans.at(-1)
+  const gap = last ? tokens.slice(last.to, span.from) : []
+  const isJoined = last && span.minutes < last.minutes && gap.length <= 1 && gap.every(isAnd)
+  if (isJoined) {
+    last.minutes += span.minutes
+    last.to = span.to
+  } else figures.spans.push(span)
+  return span.to
 }
 
 type Amount = { value: number; weak: boolean; to: number }
@@ -111,6 +135,5 @@ function readSpan(
       to = rest.to
     }
   }
-  figures.spans.push({ minutes, from: amount.from, to })
-  return to
+  return pushSpan(tokens, { minutes, from: amount.from, to }, { order, figures })
 }

@@ -12,6 +12,7 @@ import {
   foldRoman,
   foldSpanish,
   isKeypadSlip,
+  shareKey,
   slipsBetween,
   squeeze,
 } from './reply-spelling'
@@ -35,6 +36,7 @@ type Lexicon = {
   words: Set<string>
   /** Words that are an entry by themselves, not only part of a longer one. */
   wholes: Set<string>
+  light: Set<string>
   stems: Set<string>
   respelled: Map<string, string[]>
   respelledStems: [string, string][]
@@ -94,6 +96,7 @@ function buildLexicon(language: Language): Lexicon {
   const lexicon: Lexicon = {
     entriesByFirstKey: new Map(),
     words: new Set(),
+    light: new Set(foldText(pack.light).split(/\s+/)),
     wholes: new Set(foldText(pack.common).split(/\s+/)),
     stems: new Set(),
     respelled: new Map(),
@@ -111,7 +114,10 @@ function buildLexicon(language: Language): Lexicon {
       keys.forEach((key) => learn(lexicon, key))
     }
   }
-  for (const word of [...numberWords(pack), ...foldText(pack.common).split(/\s+/)])
+  for (const word of [
+    ...numberWords(pack),
+    ...foldText(`${pack.common} ${pack.light}`).split(/\s+/),
+  ])
     learn(lexicon, word)
   return lexicon
 }
@@ -129,6 +135,10 @@ function lexiconOf(language: Language): Lexicon {
 /** A word without what writers of the language leave to chance. */
 export function respelt(word: string, language: Language): string {
   return respellerOf(languagePacks[language])(word)
+}
+
+export function isLightWord(word: string, language: Language): boolean {
+  return lexiconOf(language).light.has(word)
 }
 
 export function isWholeWord(word: string, language: Language): boolean {
@@ -161,6 +171,12 @@ export function respelledKeys(word: string, language: Language): string[] {
   return keys
 }
 
+/** People seldom miss the first letter, but for a neighbour on its key or a swap with the second. */
+function beginsAlike(written: string, known: string): boolean {
+  const [first = '', second = ''] = written
+  return first === known[0] || second === known[0] || shareKey(first, known[0] ?? '')
+}
+
 /** Keys within the allowed slips; only the nearest are kept. */
 export function guessedKeys(word: string, language: Language): string[] {
   const isBengali = /\p{Script=Bengali}/u.test(word)
@@ -179,13 +195,14 @@ export function guessedKeys(word: string, language: Language): string[] {
   const squeezed = squeeze(word)
   for (const known of lexicon.words) {
     if (known.length < 4 || Math.abs(known.length - word.length) > 2) continue
+    if (!beginsAlike(word, known)) continue
     const slips = isKeypadSlip(word, known)
       ? 1
       : Math.min(slipsBetween(word, known), slipsBetween(squeezed, known))
     if (slips <= Math.min(allowedSlips(length), allowedSlips(known.length))) consider(known, slips)
   }
   for (const stem of lexicon.stems) {
-    if (stem.length < 5) continue
+    if (stem.length < 5 || !beginsAlike(word, stem)) continue
     const heads = [-1, 0, 1].map((extra) => word.slice(0, stem.length + extra))
     const slips = Math.min(...heads.map((head) => slipsBetween(head, stem)))
     if (slips <= allowedSlips(stem.length)) consider(`${stem}*`, slips)

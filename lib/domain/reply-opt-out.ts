@@ -30,11 +30,20 @@ export function optOutSureness(sense: Sense): number {
   if (refused.length > 0 && !isNamed(sense, 'receive') && !isSaid(sense, 'ask')) {
     return sureOf(0.85, refused)
   }
+  const ends = said(sense, 'end').filter((mark) => mark.likeness !== 'guessed')
+  if (areBeside(sense, ends, said(sense, 'texts', 'phone'), 3) && !isSaid(sense, 'ask')) return 0.85
+  if (isUnwanted(sense)) return 0.8
   const stops = said(sense, 'stopWord').filter((mark) => mark.likeness !== 'guessed')
   if (stops.length > 0 && areBeside(sense, stops, said(sense, 'texts'), 3))
     return sureOf(0.9, stops)
   if (stops.length > 0 && isBareStop(sense)) return sureOf(0.9, stops)
   return isMistypedStop(sense) ? 0.7 : 0
+}
+
+/** "I don't want ... messages": the wish is denied, the messages stand beside it. */
+function isUnwanted(sense: Sense): boolean {
+  const wishes = denied(sense, 'need')
+  return areBeside(sense, wishes, said(sense, 'texts'), 5) && !isSaid(sense, 'ask')
 }
 
 /** "Please stop", "basta ya": nothing is said but the stop and good manners. */

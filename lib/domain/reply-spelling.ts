@@ -105,6 +105,12 @@ function isSwap(written: string, meant: string): boolean {
   )
 }
 
+/** Two letters lie on the same key. */
+export function shareKey(one: string, other: string): boolean {
+  const key = keyOf.get(one)
+  return key !== undefined && key === keyOf.get(other)
+}
+
 /** All differences lie on the same key, as when a key is pressed once too often. */
 export function isKeypadSlip(written: string, meant: string): boolean {
   if (written.length !== meant.length || written.length < 4) return false
@@ -112,7 +118,7 @@ export function isKeypadSlip(written: string, meant: string): boolean {
   for (let at = 0; at < written.length; at += 1) {
     if (written[at] === meant[at]) continue
     differing += 1
-    if (keyOf.get(written[at] ?? '') !== keyOf.get(meant[at] ?? '')) return false
+    if (!shareKey(written[at] ?? '', meant[at] ?? '')) return false
   }
   return differing <= 2
 }

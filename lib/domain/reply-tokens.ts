@@ -90,6 +90,7 @@ export function foldText(text: string): string {
     .replace(/[\u200b-\u200f\u2060\ufeff\u00ad\ufe0f]/g, '')
     .replace(/[‘’ʼ`´′]/g, "'")
     .replace(/[“”″]/g, '"')
+    .replace(/#(?!\d)/g, ' number ')
     .replace(/\bi'll\b/g, 'i will')
     .replace(/\bwe'll\b/g, 'we will')
 }

@@ -1,5 +1,5 @@
 import type { Mark } from './reply-marks'
-import { isFallOfFlow } from './reply-danger'
+import { isFallOfFlow } from './reply-breach'
 import {
   areBeside,
   denied,
@@ -13,17 +13,20 @@ import {
 
 /** Sureness that no water comes at all. */
 export function noFlowSureness(sense: Sense): number {
-  const water = said(sense, 'water', 'flow')
+  const water = said(sense, 'water', 'flow', 'fill', 'container')
   const dry = denied(sense, 'water').concat(
-    denied(sense, 'flow').filter((mark) => !isQualified(sense, mark)),
+    denied(sense, 'flow', 'fill').filter((mark) => !isQualified(sense, mark)),
   )
   const none = said(sense, 'none').filter((mark) => areBeside(sense, [mark], water, 4))
   const lacking = said(sense, 'lack').filter((mark) =>
     areBeside(sense, [mark], said(sense, 'water'), 3),
   )
-  const strong = [...dry, ...none, ...lacking, ...said(sense, 'blocked')]
+  // "The water does not move": the words that are a danger sign of a child.
+  const still = said(sense, 'limp').filter((mark) => areBeside(sense, [mark], water, 5))
+  const strong = [...dry, ...none, ...lacking, ...still, ...said(sense, 'blocked')]
   if (strong.length > 0) return sureOf(0.85, strong)
   if (!isSaid(sense, 'none') || isNamed(sense, 'done', 'wash', 'change', 'notYet', 'ask')) return 0
+  if (isSaid(sense, 'no') && !isSaid(sense, 'water', 'flow')) return 0
   const isAnswer = sense.asked === 'flow' || sense.asked === 'step'
   if (isAnswer) return sense.words <= 4 ? 0.7 : 0
   return sense.words >= 2 && sense.words <= 4 && sense.unknownWords === 0 ? 0.62 : 0
@@ -44,8 +47,8 @@ export function slowSureness(sense: Sense): number {
   if (isOver(sense)) return 0
   const water = said(sense, 'water', 'flow', 'drip')
   const little = said(sense, 'little').filter((mark) => areBeside(sense, [mark], water, 3))
-  const weakly = denied(sense, 'flow').filter((mark) => isQualified(sense, mark))
-  const badly = said(sense, 'bad').filter((mark) =>
+  const weakly = denied(sense, 'flow', 'fill').filter((mark) => isQualified(sense, mark))
+  const badly = [...said(sense, 'bad'), ...denied(sense, 'good')].filter((mark) =>
     areBeside(sense, [mark], said(sense, 'flow'), 3),
   )
   const falls = said(sense, 'fall').filter((mark) => isFallOfFlow(sense, mark))

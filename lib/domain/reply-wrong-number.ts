@@ -1,9 +1,13 @@
-import { isSaid, said, sureOf, type Sense } from './reply-sense'
+import { areBeside, isSaid, said, sureOf, type Sense } from './reply-sense'
 
 /** How sure the text says that the wrong phone was reached; 0 when it does not. */
 export function wrongNumberSureness(sense: Sense): number {
   const wrong = said(sense, 'wrongNumber')
   if (wrong.length > 0) return sureOf(0.9, wrong)
+  const mistaken = said(sense, 'mistaken')
+  if (areBeside(sense, mistaken, said(sense, 'phone', 'person', 'texts'), 2)) {
+    return sureOf(0.8, mistaken)
+  }
   if (deniesName(sense)) return 0.7
   // "Who is this?" may be a forgotten programme or a stranger: a person answers.
   return isSaid(sense, 'who') ? 0.5 : 0
@@ -19,9 +23,22 @@ function deniesName(sense: Sense): boolean {
     if (isBack) return isName(sense, denial.from - 1) && hasSelf(sense, denial.from - 1)
     const isCopula = isSelf(sense, denial.to)
     const at = isCopula ? denial.to + 1 : denial.to
-    return isName(sense, at) && (isCopula || hasSelf(sense, denial.to))
+    return isName(sense, afterTitle(sense, at)) && (isCopula || hasSelf(sense, denial.to))
   })
 }
+
+/** "La señora", "Mrs", "madame". */
+function afterTitle(sense: Sense, at: number): number {
+  const token = sense.tokens[at]
+  if (token?.kind !== 'word' || !titles.has(token.text)) return at
+  return afterTitle(sense, at + 1)
+}
+
+const titles = new Set(
+  'la el le l mr mrs ms miss madam madame monsieur mme senor senora senorita don dona doctor the'.split(
+    ' ',
+  ),
+)
 
 function isName(sense: Sense, at: number): boolean {
   if (sense.tokens[at]?.kind !== 'word') return false

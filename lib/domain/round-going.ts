@@ -1,4 +1,5 @@
 import { bundle, overWeeklyLimit, type Due } from './round'
+import { textFor } from './round-text'
 import { sendAfter } from './round-spread'
 import { localDay, nextInsideWindow, windowClosesAt, type Window } from './round-window'
 
@@ -41,7 +42,7 @@ function wantedOf(kits: readonly KitDue[], openings: readonly Opening[]): Wanted
     sentTo.set(kit.householdId, sentAt)
     let left = [...kit.due]
     return openings.flatMap(({ on, at }) => {
-      const due = bundle(left, on)
+      const due = textFor(bundle(left, on))?.due ?? []
       if (due.length === 0 || overWeeklyLimit({ sentAt, now: at })) return []
       left = left.filter((one) => !due.includes(one))
       sentAt.push(at)

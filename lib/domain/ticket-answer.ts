@@ -6,8 +6,9 @@ import type {
   TicketOutcome,
   TicketState,
 } from './ticket-types'
-import { isDanger } from './trouble'
+import { isDanger, isWorse } from './trouble'
 import { answerStep, nextStep, startWalk, type Walk } from './walk'
+import { stepOf } from './walk-catalogue'
 import type { Next } from './walk-rules'
 import { coldCelsius, suspectIds } from './walk-suspects'
 import { failedWashesInARow, trialsOf } from './walk-trials'
@@ -75,8 +76,11 @@ export function stopUsing(state: TicketState, now: number): TicketOutcome {
 export function answered(state: TicketState, event: Answered, now: number): TicketOutcome {
   const before = state.walk ?? startWalk({ trouble: state.trouble })
   const walk = answerStep(before, { ...event, at: now })
+  // Who times a litre and gets nothing has more than slow water.
+  const isDry = stepOf(event.stepId)?.asks === 'flow' && event.answer === 'no'
   const heard: TicketState = {
     ...state,
+    trouble: isDry && isWorse('no flow', state.trouble) ? 'no flow' : state.trouble,
     walk,
     failedWashes: failedWashesInARow(walk.tried),
     stage: isUnderWay(state) ? state.stage : 'walking',

@@ -20,17 +20,7 @@ import type {
 } from './ticket-types'
 import { stepOf } from './walk-catalogue'
 
-export type {
-  Decision,
-  EndStage,
-  OpenStage,
-  Refusal,
-  StageNumber,
-  TicketEffect,
-  TicketEvent,
-  TicketStage,
-  TicketState,
-} from './ticket-types'
+export type { Decision, TicketEffect, TicketEvent, TicketStage, TicketState } from './ticket-types'
 export type { Trouble } from './trouble'
 
 /** True while somebody still has something to do about the ticket. */

@@ -15,7 +15,7 @@ import {
 import { outcomeOf, recoveryBeforeCures, trialsOf, type Tried } from './walk-trials'
 
 export { stepOf, steps, type Step, type StepAnswer, type StepId } from './walk-catalogue'
-export { countCauses, likelihoodWord, oddsFromHistory } from './walk-odds'
+export { likelihoodWord } from './walk-odds'
 export type { Next } from './walk-rules'
 export {
   cueEvidence,

@@ -31,6 +31,7 @@ type Horizon = {
   perMinute: number
 }
 
+const weight: readonly RoundKind[] = ['welcome', 'change', 'wash', 'flow check']
 const LIMIT = 10_000
 const BUNDLED_DAYS = 4
 const day = 86_400_000
@@ -61,12 +62,18 @@ function groupedBy<T, K>(items: readonly T[], keyOf: (item: T) => K): Map<K, T[]
   return groups
 }
 
+/** The weightiest first: it is what the text asks for. */
+function inOrder<T extends { kind: RoundKind }>(things: readonly T[]): T[] {
+  const place = ({ kind }: T) => weight.indexOf(kind)
+  return [...things].sort((one, other) => place(one) - place(other))
+}
+
 type Queued = Awaited<ReturnType<typeof listQueuedTexts>>[number]
 
 function fromQueued({ at, area, householdId, house, prompts, moment, purpose }: Queued): Expected {
   const isNudge = purpose.startsWith('nudge:')
   const info = moment === null ? undefined : momentInfo(moment)
-  const about = prompts.map(dueWords)
+  const about = inOrder(prompts).map(dueWords)
   return {
     on: localDay(at ?? 0, area.timeZone),
     at: at ?? 0,
@@ -114,7 +121,7 @@ async function fromDue(deps: Deps, due: readonly DueRow[], horizon: Horizon): Pr
         house: place.house,
         area: place.area,
         kinds: about.map(({ kind }) => kind),
-        what: listWords(about.map(({ kind }) => dueWords({ kind, positions }))),
+        what: listWords(inOrder(about).map(({ kind }) => dueWords({ kind, positions }))),
         state: 'planned',
       },
     ]
@@ -140,7 +147,7 @@ function fromNudges(nudges: readonly Nudge[], windows: Horizon['windows']): Expe
         house,
         area,
         kinds: ['nudge'],
-        what: `nudge: ${listWords(ofText.map(dueWords))}`,
+        what: `nudge: ${listWords(inOrder(ofText).map(dueWords))}`,
         state: 'if silent',
       },
     ]

@@ -3,6 +3,7 @@ import { findKitFacts } from '@/db/queries/kit-facts'
 import { findFirstPhone } from '@/db/queries/phone'
 import {
   findPromptForUpdate,
+  listPromptsOfText,
   listPromptsToNudge,
   updatePrompts,
   type PromptRow,
@@ -11,6 +12,7 @@ import { listPromptHours } from '@/db/queries/text'
 import type { Deps } from '@/lib/deps'
 import type { Moment } from '@/lib/domain/moments'
 import { expiresAt, nextInsideWindow, nudgeAfter, overWeeklyLimit } from '@/lib/domain/round'
+import { stageKey } from '@/lib/domain/round-text'
 import { raiseTrouble } from './apply-ticket-event'
 import { closePrompts } from './care-for-kit'
 import { queueText } from './queue-text'
@@ -46,14 +48,19 @@ async function nudge(tx: Transaction, deps: Deps, prompt: PromptRow): Promise<vo
     holidays: area.holidays,
   })
   const nudges = prompt.nudges + 1
+  // One text asked for all of these: one nudge reminds of all.
+  const together = (await listPromptsOfText(tx, prompt.textId)).filter(
+    ({ state }) => state === 'asked',
+  )
+  const main = together.find(({ kind }) => kind === 'change') ?? prompt
   await queueText(tx, deps, {
     purpose: `nudge:${prompt.id}:${nudges}`,
-    moment: nudgeMoment[prompt.kind],
+    moment: nudgeMoment[main.kind],
     phone,
     household: facts.household,
     kitId: prompt.kitId,
     values: {
-      stage: prompt.positions[0] ?? 3,
+      stage: stageKey(together.flatMap(({ positions }) => positions)),
       dueOn: prompt.dueOn,
       litres: facts.model.bottleLitres,
     },
@@ -61,10 +68,14 @@ async function nudge(tx: Transaction, deps: Deps, prompt: PromptRow): Promise<vo
     notAfter: expiresAt(sendAt),
     anyHour: false,
   })
-  await updatePrompts(tx, [prompt.id], {
-    nudges,
-    nudgeAfter: nudgeAfter(sendAt, nudges) ?? sendAt + AFTER_LAST_NUDGE,
-  })
+  await updatePrompts(
+    tx,
+    together.map(({ id }) => id),
+    {
+      nudges,
+      nudgeAfter: nudgeAfter(sendAt, nudges) ?? sendAt + AFTER_LAST_NUDGE,
+    },
+  )
 }
 
 async function giveUp(tx: Transaction, deps: Deps, prompt: PromptRow): Promise<void> {

@@ -6,7 +6,6 @@ import { countWaitingTexts, listPromptHours } from '@/db/queries/text'
 import type { Transaction } from '@/db/client'
 import type { Deps } from '@/lib/deps'
 import { addDays } from '@/lib/domain/day'
-import type { Moment } from '@/lib/domain/moments'
 import {
   bundle,
   expiresAt,
@@ -15,22 +14,13 @@ import {
   sendAfter,
   type Due,
 } from '@/lib/domain/round'
+import { stageKey, textFor, type RoundText } from '@/lib/domain/round-text'
 import { readSettings } from '@/lib/schemas/settings'
 import { queueText } from './queue-text'
 
 const WEEK = 7 * 24 * 60 * 60_000
 const BUNDLE_DAYS = 4
 const KITS_A_RUN = 2000
-
-const momentOf: Record<DueRow['kind'], Moment> = {
-  wash: 'wash-due',
-  change: 'change-due',
-  'flow check': 'flow-check',
-  welcome: 'welcome',
-}
-
-/** What a text that bundles several things is about: one action a text, the weightiest. */
-const weight: readonly DueRow['kind'][] = ['welcome', 'change', 'wash', 'flow check']
 
 function byKit(rows: readonly DueRow[]): Map<string, DueRow[]> {
   const kits = new Map<string, DueRow[]>()
@@ -52,25 +42,26 @@ function promptsOf(due: readonly Due[]): Prompt[] {
   return prompts
 }
 
-type Plan = { facts: KitFacts; due: Due[]; sendAt: number }
+type Plan = { facts: KitFacts; text: RoundText; sendAt: number }
 
 async function writePlan(
   tx: Transaction,
   deps: Deps,
-  { facts, due, sendAt }: Plan,
+  { facts, text, sendAt }: Plan,
 ): Promise<boolean> {
-  const prompts = promptsOf(due)
-  const main = weight.flatMap((kind) => prompts.filter((prompt) => prompt.kind === kind))[0]
+  const prompts = promptsOf(text.due)
+  const [first] = prompts
   const phone = await findFirstPhone(tx, facts.household.id)
-  if (!main || !phone) return false
-  const tries = await countTries(tx, { kitId: facts.kit.id, ...main })
+  if (!first || !phone) return false
+  const tries = await countTries(tx, { kitId: facts.kit.id, ...first })
+  const changed = prompts.flatMap(({ positions }) => positions)
   const queued = await queueText(tx, deps, {
-    purpose: `prompt:${facts.kit.id}:${main.kind}:${main.dueOn}:${tries + 1}`,
-    moment: momentOf[main.kind],
+    purpose: `prompt:${facts.kit.id}:${first.kind}:${first.dueOn}:${tries + 1}`,
+    moment: text.moment,
     phone,
     household: facts.household,
     kitId: facts.kit.id,
-    values: { stage: main.positions[0] ?? 3, dueOn: main.dueOn, litres: facts.model.bottleLitres },
+    values: { stage: stageKey(changed), dueOn: first.dueOn, litres: facts.model.bottleLitres },
     sendAfter: sendAt,
     notAfter: expiresAt(sendAt),
     anyHour: false,
@@ -123,7 +114,8 @@ export async function planPrompts(deps: Deps): Promise<{ planned: number }> {
       })),
       today,
     )
-    if (due.length === 0) continue
+    const text = textFor(due)
+    if (!text) continue
     const hours = await listPromptHours(db, [facts.household.id], now - WEEK)
     if (overWeeklyLimit({ sentAt: hours.map(({ at }) => Math.min(at, now)), now })) continue
     const sendAt = sendAfter({
@@ -132,7 +124,7 @@ export async function planPrompts(deps: Deps): Promise<{ planned: number }> {
       spreadIndex,
       perMinute: textsPerMinute,
     })
-    const done = await deps.store.transaction((tx) => writePlan(tx, deps, { facts, due, sendAt }))
+    const done = await deps.store.transaction((tx) => writePlan(tx, deps, { facts, text, sendAt }))
     if (done) {
       planned += 1
       spreadIndex += 1

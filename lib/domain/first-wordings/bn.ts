@@ -5,7 +5,8 @@ import type { Moment } from '@/lib/domain/moments'
  * part, so these are shorter than the others. Digits are Latin, as on the keys of a phone.
  */
 
-const stage = '{stage, select, 1 {কাপড় (1 খাঁজ)} 2 {কার্বন (2 খাঁজ)} 3 {লম্বা ধাপ (3 খাঁজ)} other {ধাপ}}'
+const stage =
+  '{stage, select, 1 {কাপড় (1 খাঁজ)} 2 {কার্বন (2 খাঁজ)} 3 {লম্বা ধাপ (3 খাঁজ)} 12 {কাপড় (1 খাঁজ) ও কার্বন (2 খাঁজ)} 13 {কাপড় (1 খাঁজ) ও লম্বা ধাপ (3 খাঁজ)} 23 {কার্বন (2 খাঁজ) ও লম্বা ধাপ (3 খাঁজ)} 123 {তিনটি ধাপ} other {ধাপ}}'
 const thenTime = 'তারপর 1 লিটার ভরতে কত মিনিট লাগে লিখুন।'
 
 export const bn: readonly { moment: Moment; body: string }[] = [

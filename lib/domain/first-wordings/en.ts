@@ -1,7 +1,7 @@
 import type { Moment } from '@/lib/domain/moments'
 
 const stage =
-  '{stage, select, 1 {cloth (1 notch)} 2 {carbon (2 notches)} 3 {long stage (3 notches)} other {stage}}'
+  '{stage, select, 1 {cloth (1 notch)} 2 {carbon (2 notches)} 3 {long stage (3 notches)} 12 {cloth (1 notch) and carbon (2 notches)} 13 {cloth (1 notch) and long stage (3 notches)} 23 {carbon (2 notches) and long stage (3 notches)} 123 {all stages} other {stage}}'
 const thenTime = 'Then time 1 litre. Text us the minutes.'
 
 /** First edition in English, the programme's first language. */

@@ -6,7 +6,7 @@ import type { Moment } from '@/lib/domain/moments'
  */
 
 const stage =
-  '{stage, select, 1 {la tela (1 muesca)} 2 {la etapa negra (2 muescas)} 3 {la etapa larga (3 muescas)} other {la etapa}}'
+  '{stage, select, 1 {la tela (1 muesca)} 2 {la etapa negra (2 muescas)} 3 {la etapa larga (3 muescas)} 12 {la tela (1 muesca) y la etapa negra (2 muescas)} 13 {la tela (1 muesca) y la etapa larga (3 muescas)} 23 {la etapa negra (2 muescas) y la etapa larga (3 muescas)} 123 {las 3 etapas} other {la etapa}}'
 const thenTime = 'Luego mida el tiempo de 1 litro. Escriba los minutos.'
 
 export const es: readonly { moment: Moment; body: string }[] = [

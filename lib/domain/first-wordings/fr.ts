@@ -6,7 +6,7 @@ import type { Moment } from '@/lib/domain/moments'
  */
 
 const stage =
-  '{stage, select, 1 {le tissu (1 encoche)} 2 {le charbon (2 encoches)} 3 {la partie longue (3 encoches)} other {la partie}}'
+  '{stage, select, 1 {le tissu (1 encoche)} 2 {le charbon (2 encoches)} 3 {la partie longue (3 encoches)} 12 {le tissu (1 encoche) et le charbon (2 encoches)} 13 {le tissu (1 encoche) et la partie longue (3 encoches)} 23 {le charbon (2 encoches) et la partie longue (3 encoches)} 123 {les 3 parties} other {la partie}}'
 const thenTime = 'Puis chronométrez 1 litre. Envoyez les minutes.'
 
 export const fr: readonly { moment: Moment; body: string }[] = [

@@ -13,6 +13,7 @@ export const concepts = [
   'ne', // French "ne": announces a denial
   'ceased', // "stopped", "no longer": what follows is over
   'but',
+  'and',
   'or',
   'if',
   'future',
@@ -29,24 +30,28 @@ export const concepts = [
   'water',
   'filter',
   'piece', // a part that can be broken, lost or wanted
+  'outlet', // a part that water comes from when all is well
   'edge', // where water should not come out: the side, the joint
   'cloth', // what may be dirty without the water being odd
   'container',
   'person',
   'pronoun', // may be a person or the filter
   'child',
+  'breast', // or the feeding bottle
   'name',
   'me',
   'you',
   'texts', // a message, to text
   'phone', // a phone or a phone number
   'receive', // to get, read or understand a text
+  'see',
   'stool',
   'belly',
   'all', // everything
   'source', // the river, the well
   // what the water does
   'flow',
+  'fill',
   'drip',
   'slow',
   'none', // nothing, empty
@@ -76,6 +81,9 @@ export const concepts = [
   'blood',
   'vomit',
   'sign', // an IMCI general danger sign by itself
+  'limp', // "does not move": of a child a danger sign, of the water no flow
+  'wake', // wakes, answers, reacts
+  'problem',
   'sleepy',
   'drink',
   'can', // can, will, want
@@ -90,16 +98,19 @@ export const concepts = [
   'lack', // "I have no"
   'lost',
   'ask',
+  'where', // also "can you": asks for a thing as often as about it
   'thanks',
   'yes',
   'no',
   'greeting',
   'please',
   'wrongNumber',
+  'mistaken', // with a phone, a person or a text: a wrong number
   'who',
   'moved',
   'stopWord',
   'stopAsk',
+  'end', // to end or take away: with texts or a phone an opt-out
   'startWord',
   'helpWord',
   'itStopped', // neither opt-out nor clear trouble: asks
@@ -129,6 +140,8 @@ export type LanguagePack = {
   halves: string
   /** Bengali words that shift the number after them: half more, a quarter less. */
   shifts?: string
+  /** Small words that a denial passes over on its way to what it denies. */
+  light: string
   /** Everyday words without a meaning here; they keep guesses at spelling off. */
   common: string
   /** How a word of this language may be respelled: see `reply-spelling.ts`. */

@@ -22,13 +22,14 @@ export const esPack: LanguagePack = {
     hour: 'hora, horas, hr, hrs, h, hs, ora, oras, horitas, horita',
     second: 'segundo, segundos, seg, segs, s, sg, sgs, sec, segunditos',
     other:
-      'litro*, lt, lts, l, galon*, botella*, balde, baldes, cubeta*, vaso, vasos, dia, dias, semana, semanas, mes, meses, ano, anos, año, años, vez, veces, nino, ninos, nina, ninas, hijo, hijos, hija, hijas, persona, personas, jeringa, jeringas, jeringazo*, filtro, filtros, parte, partes, pieza, piezas, tapa, tapas, pm, am, gota, gotas, noche, noches, poco, cosas, cosa, mas, cm, familias, casas, pesos, por, bebes, bebe, de, que, manguera, repuesto*, cartucho*, poquito, rato, ratito, momento, problema, pregunta',
+      'litro*, lt, lts, l, galon*, botella*, balde, baldes, cubeta*, vaso, vasos, dia, dias, semana, semanas, mes, meses, ano, anos, año, años, vez, veces, nino, ninos, nina, ninas, hijo, hijos, hija, hijas, persona, personas, jeringa, jeringas, jeringazo*, filtro, filtros, parte, partes, pieza, piezas, tapa, tapas, pm, am, gota, gotas, noche, noches, poco, cosas, cosa, cm, familias, casas, pesos, bebes, bebe, de, manguera, repuesto*, cartucho*, poquito, rato, ratito, momento, problema, pregunta',
   },
   spans: `media hora 30, media hr 30, media ora 30, media horita 30, hora y media 90,
     una hora y media 90, cuarto de hora 15, un cuarto de hora 15, tres cuartos de hora 45,
     medio minuto 0.5, minuto y medio 1.5, un minuto y medio 1.5, una hora 60, una horita 60,
     un minuto 1, una ora 60, 1 2 hora 30`,
   halves: `y media 0.5, y medio 0.5, y cuarto 0.25, i media 0.5, i medio 0.5`,
+  light: `me te se le lo la los las nos les el un una unos unas mi mis su sus tu que de del a al en muy mas tan bien ya esta estan estoy estamos es son ha he han hemos sido ser estar tiene tienen tengo hay para por con todavia aun puedo puede pueden podemos quiere quieren quiero ni mucho nada tanto completamente`,
   common: `huevo huevos tortilla frijol frijoles chile limon naranja platano fruta verdura comida jugo cafe leche azucar sal pan el la los las un una uno unos unas de del al a en con por para que se su sus mi mis tu tus lo le les nos me te y o u e si no es son era eran ser esta este esto esa ese eso estas estos estan estoy estamos estaba fue fui ha he hay han hemos haber habia
     muy mucho mucha muchos mas menos tan tanto todo toda todos todas otro otra otros cada algo alguien alguno alguna algun nada nadie ninguno bien mal mejor peor como cuando donde quien cual porque pues entonces tambien tampoco solo solamente nomas asi aqui ahi alla aca hasta desde entre sobre sin contra segun
     yo tu usted ustedes el ella ellos ellas nosotros mio mia suyo suya casa cocina cuarto puerta mesa techo calle camino campo pueblo comunidad ciudad escuela iglesia mercado tienda trabajo milpa rio cerro

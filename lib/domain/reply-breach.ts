@@ -1,0 +1,44 @@
+import type { Danger } from './reply-danger'
+import type { Mark } from './reply-marks'
+import { areBeside, gapBetween, isSaid, said, sureOf, type Sense } from './reply-sense'
+
+/** A filter that must not be used: broken, leaking, fallen, frozen, or running too fast. */
+export function findBreach(sense: Sense): Danger | null {
+  const edges = said(sense, 'edge')
+  const outlets = said(sense, 'outlet')
+  const sealed = said(sense, 'piece').filter(
+    (mark) => !outlets.some((outlet) => outlet.from === mark.from),
+  )
+  const oozing = [
+    ...said(sense, 'flow', 'drip').filter((mark) => areBeside(sense, [mark], edges, 4)),
+    ...said(sense, 'drip').filter((mark) => areBeside(sense, [mark], sealed, 3)),
+  ]
+  const falls = said(sense, 'fall').filter((mark) => !isFallOfFlow(sense, mark))
+  const marks = [
+    ...said(sense, 'broken', 'leak', 'frozen', 'tooFast'),
+    ...oozing,
+    ...falls,
+    ...rushes(sense),
+  ]
+  if (marks.length === 0) return null
+  return { kind: 'broken', sure: isSaid(sense, 'mended') ? 0.55 : sureOf(0.9, marks) }
+}
+
+/** "The flow dropped" is slow; "the filter dropped" may have broken its fibres. */
+export function isFallOfFlow(sense: Sense, fall: Mark): boolean {
+  const subject = sense.marks
+    .filter((mark) => mark.to <= fall.from && gapBetween(sense, mark, fall) <= 3)
+    .filter((mark) =>
+      ['water', 'flow', 'filter', 'piece', 'child', 'person', 'container'].includes(mark.concept),
+    )
+    .at(-1)
+  return subject?.concept === 'water' || subject?.concept === 'flow'
+}
+
+/** "Very fast" suggests a breach, unless it is said with relief. */
+function rushes(sense: Sense): Mark[] {
+  if (isSaid(sense, 'good', 'better', 'thanks')) return []
+  return said(sense, 'fast').filter((mark) =>
+    said(sense, 'very').some((very) => very.to === mark.from || mark.to === very.from),
+  )
+}

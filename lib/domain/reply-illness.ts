@@ -1,0 +1,84 @@
+import type { Danger } from './reply-danger'
+import type { Mark } from './reply-marks'
+import {
+  areBeside,
+  denied,
+  gapBetween,
+  isNamed,
+  isSaid,
+  said,
+  sureOf,
+  type Sense,
+} from './reply-sense'
+import type { Concept } from './reply-words/concept'
+
+/** Illness in the house, and whether it shows a general danger sign. */
+export function findIllness(sense: Sense): Danger | null {
+  const signs = dangerSigns(sense)
+  if (signs.length > 0) return { kind: 'unwell', sure: sureOf(0.9, signs), dangerSign: true }
+  const ills = [
+    ...said(sense, 'ill', 'vomit', 'blood'),
+    ...beside(sense, ['pain'], ['belly', 'child'], 5),
+    ...beside(sense, ['belly'], ['problem', 'bad', 'long'], 4),
+    ...beside(sense, ['stool'], ['water', 'long'], 4),
+    ...poorlyMarks(sense),
+  ]
+  if (ills.length > 0) return { kind: 'unwell', sure: sureOf(0.9, ills) }
+  const bellies = beside(sense, ['belly'], ['child', 'person'], 4)
+  return bellies.length > 0 ? { kind: 'unwell', sure: sureOf(0.65, bellies) } : null
+}
+
+function beside(sense: Sense, ones: Concept[], others: Concept[], reach: number): Mark[] {
+  return said(sense, ...ones).filter((mark) =>
+    areBeside(sense, [mark], said(sense, ...others), reach),
+  )
+}
+
+/** WHO IMCI (2014) general danger signs, and blood in the stool. */
+function dangerSigns(sense: Sense): Mark[] {
+  const people: Concept[] = ['child', 'person', 'pronoun']
+  const isOfWater = isNamed(sense, 'oddSmell', 'smell', 'taste', 'odd')
+  const patients = said(sense, ...people, 'ill', 'vomit', 'sleepy', 'belly', 'breast')
+  const refusing = denied(sense, 'drink').filter((mark) => areBeside(sense, [mark], patients, 8))
+  const sleepy = said(sense, 'sleepy').filter((mark) =>
+    areBeside(sense, [mark], [...patients.filter((other) => other !== mark), ...refusing], 8),
+  )
+  return [
+    ...said(sense, 'sign'),
+    ...(isOfWater ? [] : refusing),
+    ...sleepy,
+    ...unfed(sense),
+    ...unroused(sense),
+    ...beside(sense, ['limp'], people, 5),
+    ...beside(sense, ['frail', 'sleepy'], ['drink'], 4),
+    ...beside(sense, ['blood'], ['ill', 'vomit', 'stool', 'belly'], 8),
+    ...beside(sense, ['vomit'], ['all'], 3),
+  ]
+}
+
+const denials: Concept[] = ['not', 'notAround', 'notPlus', 'notBack', 'ceased', 'lack']
+
+/** "Won't take the breast". */
+function unfed(sense: Sense): Mark[] {
+  return beside(sense, ['breast'], denials, 4)
+}
+
+/** "Cannot wake him": not of a phone that nobody answers. */
+function unroused(sense: Sense): Mark[] {
+  if (isSaid(sense, 'texts', 'phone', 'water', 'filter')) return []
+  return denied(sense, 'wake')
+}
+
+/** "Mi hijo está mal": something bad is said of a person, not of the water. */
+function poorlyMarks(sense: Sense): Mark[] {
+  const people = said(sense, 'child', 'person')
+  const bad = [...said(sense, 'bad', 'frail'), ...denied(sense, 'good')]
+  const things = said(sense, 'water', 'filter', 'piece', 'flow', 'smell', 'taste', 'phone')
+  return bad.filter((mark) =>
+    people.some((person) => {
+      const gap = gapBetween(sense, person, mark)
+      const thingBetween = things.some((thing) => gapBetween(sense, thing, mark) <= gap)
+      return gap <= 4 && !thingBetween
+    }),
+  )
+}

@@ -1,0 +1,28 @@
+import type { Danger } from './reply-danger'
+import { areBeside, denied, gapBetween, isNamed, said, sureOf, type Sense } from './reply-sense'
+
+/** Water that must not be drunk: colour, smell, taste, fuel, things in it. */
+export function findOddWater(sense: Sense): Danger | null {
+  const water = said(sense, 'water', 'flow', 'fill', 'drink')
+  const strong = said(sense, 'oddSmell', 'fuel')
+  const smells = said(sense, 'smell', 'taste').filter(
+    (mark) => !areBeside(sense, [mark], said(sense, 'good'), 3),
+  )
+  const things = said(sense, 'cloth', 'filter', 'piece', 'container', 'source')
+  const coloured = said(sense, 'odd').filter(
+    (mark) => things.length === 0 || areBeside(sense, [mark], water, 4),
+  )
+  const dirty = said(sense, 'dirty').filter((mark) => areBeside(sense, [mark], water, 3))
+  const bad = said(sense, 'bad').filter(
+    (mark) => areBeside(sense, [mark], said(sense, 'water'), 3) && !isNamed(sense, 'flow'),
+  )
+  // "No sale clara": the denial is of the clearness, not of the flow.
+  const unclear = said(sense, 'clean').filter((mark) =>
+    denied(sense, 'flow').some(
+      (flow) => flow.to <= mark.from && gapBetween(sense, flow, mark) <= 2,
+    ),
+  )
+  const notGood = [...denied(sense, 'clean'), ...unclear]
+  const marks = [...strong, ...smells, ...coloured, ...bad, ...dirty, ...notGood]
+  return marks.length > 0 ? { kind: 'odd-water', sure: sureOf(0.88, marks) } : null
+}
