@@ -27,7 +27,7 @@ export const buildStep = {
   name: 'build',
   command: process.execPath,
   parameters: script('lib', 'commands', 'build.mjs'),
-  limitSeconds: 300,
+  limitSeconds: 480,
 }
 
 const vitest = { command: bin('vitest'), kind: 'vitest' }
