@@ -54,11 +54,14 @@ function notYet(sense: Sense): Answer | null {
   const planned = said(sense, 'future').filter(
     () => isNamed(sense, 'wash', 'change', 'done') || sense.words <= 3,
   )
+  const isCare = sense.asked === 'wash' || sense.asked === 'change'
+  const unable = isCare ? denied(sense, 'can') : []
   const days = isSaid(sense, 'done') ? [] : said(sense, 'day')
   const marks = [
     ...said(sense, 'notYet', 'forgot'),
     ...days,
     ...undone,
+    ...unable,
     ...planned,
     ...promised(sense),
   ]

@@ -8,6 +8,7 @@ const deniable: ReadonlySet<Concept> = new Set<Concept>([
   'ceased',
   'flow',
   'fill',
+  'can',
   'wake',
   'limp',
   'end',
@@ -62,6 +63,7 @@ const passedOver: ReadonlySet<Concept> = new Set<Concept>([
   'little',
   'piece',
   'cloth',
+  'can',
 ])
 
 /** What a denial of the texts may pass over: everything, since an opt-out is never to be missed. */
@@ -178,7 +180,7 @@ function denyFirst(nearest: readonly Mark[], field: Field): boolean {
     if (!deniable.has(mark.concept)) continue
     const sameWord = hit !== null && mark.from === hit.from
     if (hit === null || sameWord || isJoined(hit, mark, field)) {
-      mark.denied = !mark.denied
+      mark.denied = true
       if (!passedOver.has(mark.concept)) hit = mark
     }
   }

@@ -13,9 +13,21 @@ export function figureOf(sense: Sense): Figure | null {
   const last = spans.at(-1)
   if (last === undefined) return bareFigure(sense)
   // "5 to 6 minutes": the low end stands bare just before the high one.
-  const low = sense.figures.bare.find((bare) => bare.to <= last.from && last.from - bare.to <= 2)
+  const low = sense.figures.bare.find((bare) => isRangeBetween(sense, bare.to, last.from))
   const isRange = low && low.value > 0 && low.value < last.minutes && low.value >= last.minutes / 3
   return { minutes: isRange ? (low.value + last.minutes) / 2 : last.minutes, hasUnit: true }
+}
+
+/** Words that stand between the ends of a range. */
+const rangeWords = new Set('to or and a o y u ou et ba theke থেকে বা'.split(' '))
+
+function isRangeBetween(sense: Sense, from: number, to: number): boolean {
+  const between = sense.tokens.slice(from, to)
+  return (
+    from <= to &&
+    between.length <= 1 &&
+    between.every((token) => token.text === '-' || rangeWords.has(token.text))
+  )
 }
 
 function bareFigure(sense: Sense): Figure | null {
@@ -37,7 +49,8 @@ export function isMostlyFigure(sense: Sense): boolean {
 
 /** "In ten minutes", when no flow was asked for and none is spoken of. */
 export function promised(sense: Sense): Mark[] {
-  if (sense.asked === 'flow' || isNamed(sense, 'water', 'flow', 'container', 'filter')) return []
+  if (sense.asked === 'flow' || isNamed(sense, 'water', 'flow', 'fill', 'container', 'filter'))
+    return []
   return said(sense, 'within').filter((mark) =>
     sense.figures.spans.some((span) => span.from === mark.to || span.to === mark.from),
   )

@@ -28,18 +28,22 @@ export function languageOrder(own: Language): Language[] {
   return [...new Set<Language>([own, 'en', ...languages])]
 }
 
-/**
- * What each language makes of a word. A spelling is only stretched when nobody the household is
- * likely to write in knows the word as it stands.
- */
-function knowWord(word: string, own: Language): Known {
+/** The languages that know a word as it stands. */
+function knowWord(word: string): Known {
   const known: Known = new Map()
   for (const language of languages) addKeys(known, language, exactKeys(word, language), 'exact')
-  if (known.has(own) || known.has('en')) return known
-  for (const language of languages) {
-    if (!known.has(language)) addKeys(known, language, respelledKeys(word, language), 'respelled')
-  }
   return known
+}
+
+/**
+ * A spelling is only stretched where nobody the household is likely to write to us in knows the
+ * word as it stands.
+ */
+function respellWord(known: Known, word: string, likely: readonly Language[]): void {
+  if (likely.some((language) => known.has(language))) return
+  for (const language of new Set(likely)) {
+    addKeys(known, language, respelledKeys(word, language), 'respelled')
+  }
 }
 
 /** Guesses at words that no language knows, in the languages the text is likely to be in. */
@@ -165,6 +169,17 @@ function keepLongest(marks: readonly Mark[], order: readonly Language[]): Mark[]
   return kept.sort((a, b) => a.from - b.from)
 }
 
+function eachWord(
+  tokens: readonly Token[],
+  known: readonly (Known | null)[],
+  act: (word: Known, text: string) => void,
+): void {
+  tokens.forEach((token, at) => {
+    const word = known[at]
+    if (word && token.kind === 'word') act(word, token.text)
+  })
+}
+
 export type Marked = {
   marks: Mark[]
   main: Language
@@ -174,15 +189,12 @@ export type Marked = {
 
 /** Finds every concept in a text. Denial is settled afterwards by `denyMarks`. */
 export function markTokens(tokens: readonly Token[], own: Language): Marked {
-  const known = tokens.map((token) => (token.kind === 'word' ? knowWord(token.text, own) : null))
-  const main = mainLanguage(
-    known.filter((word) => word !== null),
-    own,
-  )
-  tokens.forEach((token, at) => {
-    const word = known[at]
-    if (word && token.kind === 'word') guessWord(word, token.text, [main, own, 'en'])
-  })
+  const known = tokens.map((token) => (token.kind === 'word' ? knowWord(token.text) : null))
+  const wordsOf = (): Known[] => known.filter((word) => word !== null)
+  const likely = new Set<Language>([mainLanguage(wordsOf(), own), own, 'en'])
+  eachWord(tokens, known, (word, text) => respellWord(word, text, [...likely]))
+  const main = mainLanguage(wordsOf(), own)
+  eachWord(tokens, known, (word, text) => guessWord(word, text, [main, own, 'en']))
   const order = [...new Set([main, ...languageOrder(own)])]
   return {
     marks: keepLongest(candidates(known, order), order),

@@ -17,19 +17,27 @@ export function noFlowSureness(sense: Sense): number {
   const dry = denied(sense, 'water').concat(
     denied(sense, 'flow', 'fill').filter((mark) => !isQualified(sense, mark)),
   )
-  const none = said(sense, 'none').filter((mark) => areBeside(sense, [mark], water, 4))
+  const none = said(sense, 'none').filter(
+    (mark) =>
+      areBeside(sense, [mark], [...water, ...said(sense, 'outlet')], 4) ||
+      areBeside(sense, [mark], said(sense, 'fill'), 8),
+  )
   const lacking = said(sense, 'lack').filter((mark) =>
     areBeside(sense, [mark], said(sense, 'water'), 3),
   )
   // "The water does not move": the words that are a danger sign of a child.
-  const still = said(sense, 'limp').filter((mark) => areBeside(sense, [mark], water, 5))
-  const strong = [...dry, ...none, ...lacking, ...still, ...said(sense, 'blocked')]
+  const still = said(sense, 'limp').filter(
+    (mark) =>
+      areBeside(sense, [mark], water, 5) &&
+      !said(sense, 'slow').some((slow) => slow.from === mark.from),
+  )
+  const strong = [...dry, ...none, ...lacking, ...still, ...said(sense, 'blocked', 'dry')]
   if (strong.length > 0) return sureOf(0.85, strong)
   if (!isSaid(sense, 'none') || isNamed(sense, 'done', 'wash', 'change', 'notYet', 'ask')) return 0
   if (isSaid(sense, 'no') && !isSaid(sense, 'water', 'flow')) return 0
   const isAnswer = sense.asked === 'flow' || sense.asked === 'step'
   if (isAnswer) return sense.words <= 4 ? 0.7 : 0
-  return sense.words >= 2 && sense.words <= 4 && sense.unknownWords === 0 ? 0.62 : 0
+  return sense.words >= 2 && sense.words <= 4 && sense.unknownWords <= 1 ? 0.62 : 0
 }
 
 /** "Not flowing well" is slow: the denial is of the manner, not of the flow. */

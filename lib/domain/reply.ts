@@ -76,6 +76,7 @@ function readUrgent(sense: Sense): ReplyReading | null {
 /** "It stopped", "water stop", "stopped dripping": it could be the texts, a leak or the water. */
 function isStopOrStopped(sense: Sense): boolean {
   if (isSaid(sense, 'itStopped')) return true
+  if (isSaid(sense, 'notYet')) return false
   return (
     isSaid(sense, 'ceased', 'stopWord') && !isDenied(sense, 'flow', 'water', 'slow', 'good', 'fast')
   )

@@ -61,7 +61,7 @@ export const bnDanger: LanguagePack['concepts'] = {
     lobon, tok, bishad, baje shad, baje sad, kharap shad, shad kharap, sad kharap, shad baje,
     sad baje, sad onno rokom, shad onno rokom, kemon gondho, kemon gondo, kemon jani,
     onno rokom gondho, osudher gondho, ashte gondho, lohar gondho, lohar shad, gondhota`,
-  smell: 'গন্ধ, গন্ধটা, গন্দ, ঘ্রাণ, gondho, gondo, gondh, ghran, gondhota',
+  smell: `গন্ধ, গন্ধটা, গন্দ, ঘ্রাণ, gondho, gondo, gondh, ghran, gondhota, গন্ধ*, gondho*, gondo*`,
   taste: 'স্বাদ, সাদ পাই, টেস্ট, shad, sad, swad, taste, test',
   fuel: `কেরোসিন*, কেরাসিন*, কেরসিন*, পেট্রোল*, পেট্রল*, ডিজেল*, তেল, তেলের, তেলের গন্ধ, জ্বালানি, কেমিক্যাল*, কেমিকেল*, রাসায়নিক*, কীটনাশক*, কিটনাশক*, বিষ, বিষের, রং এর গন্ধ, গ্যাস*, এসিড*, সার এর, অকটেন, মবিল*,
     kerosin*, kerosine, kerasin*, kerosen*, petrol, petroler, diesel, dijel, dijeler, tel, teler, teler gondho, jalani, chemical*, kemical*, kemikel*, rasayonik, kitnashok, bish, bisher, ronger gondho, gas, gaser, acid, octane, mobil`,
@@ -98,7 +98,8 @@ export const bnDanger: LanguagePack['concepts'] = {
     obosta kharap, obostha valo na, haspatal, hashpatal, hospital, hospitale, daktar,
     daktarer, doctor, clinic, medical, medicale, infection, chulkani, sick, fever, emojiill,
     loose motion, পুড়ে যাচ্ছে, গা পুড়ে, পানির মতো পায়খানা, পানির মত পায়খানা, pure jay,
-    ga pure, panir moto paykhana, panir moto paikhana, কাঁপুনি জ্বর, ধরছে ডায়রিয়া`,
+    ga pure, panir moto paykhana, panir moto paikhana, কাঁপুনি জ্বর, ধরছে ডায়রিয়া,
+    pete betha, pete batha, pete byatha, pete betha kore`,
   pain: `ব্যথা, ব্যাথা, বেথা, ব্যথা করে, ব্যথা করছে, ব্যথা করতেছে, বেদনা, পেটব্যথা, পেটব্যাথা, যন্ত্রণা, betha, byatha, bethata, batha, betha kore, betha kortese, bedona, petbetha, jontrona`,
   blood:
     'রক্ত, রক্তের, রক্ত যায়, রক্ত যাচ্ছে, রক্তাক্ত, rokto, rokt, roktor, rokto jay, rokto jacche, blood, rakto',

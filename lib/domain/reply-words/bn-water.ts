@@ -43,9 +43,9 @@ export const bnWater: LanguagePack['concepts'] = {
   little: `কম, কমই, অল্প, একটু, সামান্য, খুব কম, খুবই কম, বেশি না, বেশী না, তেমন না, কম কম, একটুখানি, ইট্টু, এট্টু, kom, kom kom, komi, olpo, ektu, shamanno, samanno, khub kom, khubi kom, beshi na, besi na, temon na, ektukhani, ettu, kam`,
   long: `অনেক সময়, অনেক টাইম, অনেকক্ষণ, অনেক ক্ষণ, অনেকখন, বহু সময়, দীর্ঘ সময়, সারাদিন, সারা দিন, সারারাত, সারা রাত, দেরি, দেরী, দেরি হয়, দেরি লাগে, অনেক দেরি, ঘন্টার পর ঘন্টা, ঘণ্টার পর ঘণ্টা, কয়েক ঘন্টা, বেশি সময়, বেশী সময়, সময় বেশি, সময় লাগে, টাইম লাগে, সময় নেয়, সময় লাগছে, সময় লাগতেছে,
     onek somoy, onek shomoy, onek time, onekkhon, onekhon, onek khon, onek somoi, bohu somoy, saradin, sara din, shara din, sararat, sara rat, deri, deri hoy, deri lage, onek deri, derite, ghontar por ghonta, koyek ghonta, beshi somoy, besi time, beshi time, somoy lage, shomoy lage, time lage, somoy lagtese, time lagtese, time lagche, onek somoy lage, somoy ney`,
-  none: `কিছুই, কিছু না, কিছুই না, একফোঁটাও, এক ফোঁটাও, এক ফোটাও, একটুও, শূন্য, খালি, শুকনা, শুকনো,
-    শুকিয়ে, kisui, kichui, kisui na, kichui na, kichu na, kisu na, ek fotao, ekfotao,
-    ek fota o, ektuo, ektu o, shukna, sukna, shukno, shunno, khali`,
+  none: `কিছুই, কিছু না, কিছুই না, একটুও, শূন্য, খালি, শুকনা, শুকনো, শুকিয়ে, kisui, kichui,
+    kisui na, kichui na, kichu na, kisu na, ektuo, ektu o, shukna, sukna, shukno, shunno,
+    khali`,
   blocked: `আটকে, আটকে গেছে, আটকে গেসে, আটকায়, আটকায়ে, আটকাইয়া, আইটকা, জ্যাম*, জাম হয়ে, বন্ধ হয়ে, বন্ধ হয়ে গেছে, বন্ধ হয়ে গেসে, বন্ধ হইয়া গেছে, বন্ধ হয়েছে, বন্ধ হইছে, বন্ধ হয়ে আছে, পানি বন্ধ, পানি পড়া বন্ধ, পানি আসা বন্ধ, জল বন্ধ, জল আসা বন্ধ, জল পড়া বন্ধ, একদম বন্ধ, পুরা বন্ধ, পুরোপুরি বন্ধ, ব্লক*, বুজে গেছে, বুজে, ময়লা জমে, ময়লা জমছে,
     atke, atke gese, atke geche, atkay, atkaya, aitka, atka, jam, jaam, jam hoye, jem, bondho hoye, bondho hoye gese, bondho hoye geche, bondo hoye gese, bondho hoise, bondho hoyeche, bondho hoiya gese, bondo hoise, bondho hoye ache, pani bondho, pani bondo, pani pora bondho, pani asha bondho, pani asa bondho, jol bondho, jol asa bondho, ekdom bondho, pura bondho, puro bondho, block, blok, bloc, buje gese, moyla jome`,
   fast: `জোরে, জোড়ে, দ্রুত, তাড়াতাড়ি, তারাতারি, স্পিড, স্পীড, ফাস্ট, jore, jure, druto, drut, taratari, tara tari, speed, fast, speede, torit`,
@@ -79,4 +79,5 @@ export const bnWater: LanguagePack['concepts'] = {
     'পরিষ্কার পানি, পানি পরিষ্কার, স্বচ্ছ, টলটলে, বিশুদ্ধ, ফ্রেশ, porishkar pani, pani porishkar, porisker pani, pani porisker, pani clear, clear, shoccho, toltole, fresh',
   fill: `ভরে, ভরতে, ভরছে, ভরতেছে, ভরাতে, ভর্তি হতে, ভর্তি হইতে, ভরত, bhore, vore, vorte, bhorte, vorche, vortese, bhorti hote, vorti hote, vorto`,
   outlet: `কল, কলটা, ট্যাপ*, পাইপ*, kol, kolta, tap, pipe`,
+  dry: `একফোঁটাও, এক ফোঁটাও, এক ফোটাও, ek fotao, ekfotao, ek fota o, ek fota pani, এক ফোঁটা পানি, এক ফোটা পানি, এক ফোঁটা জল, ek fota panio`,
 }

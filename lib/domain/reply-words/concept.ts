@@ -54,6 +54,7 @@ export const concepts = [
   'fill',
   'drip',
   'slow',
+  'dry', // "not a drop": of water only
   'none', // nothing, empty
   'blocked',
   'fast',

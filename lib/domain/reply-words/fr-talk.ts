@@ -56,7 +56,7 @@ export const frTalk: LanguagePack['concepts'] = {
     personne ici ne s appelle, pas de ce nom, ne m appartient pas, appartient a quelqu,
     je ne vois pas de quoi, vois pas de quoi, sais pas de quoi vous parlez, sais pas qui vous,
     n est pas a moi, est pas a moi, erreur sur la personne, a quelqu un d autre,
-    quelqu un d autre maintenant`,
+    quelqu un d autre maintenant, personne ne s appelle, personne s appelle`,
   who: 'qui est ce, c est qui, qui etes vous, qui es tu, qui est la, qui ecrit, vous etes qui, t es qui, tes qui, ki c, cki, c ki, de la part de qui, qui m ecrit',
   moved: `demenage, demenagé, demenager, demenageons, demenagement, demenages, demenagés,
     change d adresse, changé d adresse, nouvelle adresse, nouvelle maison, autre maison,

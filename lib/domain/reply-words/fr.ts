@@ -28,7 +28,7 @@ export const frPack: LanguagePack = {
     une vingtaine de minutes 20, vingtaine de minutes 20, trentaine de minutes 30,
     quarantaine de minutes 40, demi eure 30, une trentaine de minutes 30`,
   halves: `et demie 0.5, et demi 0.5, et quart 0.25, et un quart 0.25, et dmi 0.5`,
-  light: `est sont suis a ai as ont avons avez ete etre bien tres trop tro assez du de des la le les l d un une en y ce c ca que qu pu encore vraiment tellement peux peut veut veux peuvent si tout plus beaucoup completement`,
+  light: `donner donne donnait laisse laisser est sont suis a ai as ont avons avez ete etre bien tres trop tro assez du de des la le les l d un une en y ce c ca que qu pu encore vraiment tellement peux peut veut veux peuvent si tout plus beaucoup completement`,
   common: `le la les l un une des de du d a au aux et ou mais donc or ni car que qu qui quoi dont ou ce cet cette ces c ca cela sa son ses mon ma mes ton ta tes notre nos votre vos leur leurs je j tu il elle on nous vous ils elles me m te t se s lui y en ne n pas plus
     est es suis sommes etes sont etait sera soit ete etre ai as a avons avez ont avait aura avoir eu fait faire fais font faut va vais vont allez aller vient venir veut veux voulez peut peux pouvez pouvoir doit dois devez sait sais savoir voit vois voir dit dire dis met mets mettre mis prend prends prendre pris tient tenir laisse laisser
     bien mal tres trop peu beaucoup assez moins aussi encore toujours jamais souvent parfois deja bientot hier demain aujourdhui maintenant ici la bas dans sur sous avec sans pour par vers chez entre depuis pendant avant apres contre jusqu comme comment quand combien pourquoi parce si non oui tout tous toute toutes autre autres meme rien personne quelque quelques chaque plusieurs aucun aucune
