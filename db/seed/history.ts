@@ -63,7 +63,7 @@ export async function hear(history: History, { number, body }: Omit<Reply, 'at'>
 /** Something happens to a family that nobody asked about. */
 async function mishap(
   history: History,
-  kind: 'unwell' | 'broken' | 'unsure' | 'noFlow',
+  kind: 'unwell' | 'broken' | 'unsure' | 'noFlow' | 'slow',
 ): Promise<void> {
   const family = history.random.pick([...history.families.values()])
   await hear(history, {
@@ -120,7 +120,16 @@ export async function liveHistory(history: History, days: number): Promise<void>
 
 /** What stands in the shift when a newcomer opens it: one of each trouble, fresh. */
 export async function lastMorning(history: History): Promise<void> {
-  for (const kind of ['unsure', 'noFlow', 'broken', 'unwell', 'unsure'] as const)
+  for (const kind of [
+    'unsure',
+    'slow',
+    'noFlow',
+    'slow',
+    'broken',
+    'slow',
+    'unwell',
+    'unsure',
+  ] as const)
     await mishap(history, kind)
   await hourOf(history, Infinity)
 }

@@ -2,6 +2,7 @@ import { listModelStages, listKitModels } from '@/db/queries/reference'
 import { upsertSetting } from '@/db/queries/setting'
 import type { Deps } from '@/lib/deps'
 import { addDays } from '@/lib/domain/day'
+import type { SourceClass } from '@/lib/domain/cycle'
 import type { Actor } from '@/lib/domain/role'
 import { localDay } from '@/lib/domain/round'
 import { areaInputSchema } from '@/lib/schemas/area'
@@ -78,7 +79,14 @@ export async function modelIdOf(deps: Deps): Promise<string> {
 /** A family of a place gets its kit on a day; its phone joins the shelf of practice phones. */
 export async function settleFamily(
   { deps, coordinator, random, modelId }: Setting,
-  given: { place: Place; areaId: string; index: number; daysAgo: number; days: number },
+  given: {
+    place: Place
+    areaId: string
+    index: number
+    daysAgo: number
+    days: number
+    sourceClass?: SourceClass
+  },
 ) {
   const { place, areaId, index, daysAgo } = given
   const number = `+1${place.areaCode}5550${100 + index}`
@@ -97,7 +105,7 @@ export async function settleFamily(
       pregnant: random.chance(0.08),
       elderly: random.chance(0.2),
       ill: random.chance(0.05),
-      sourceClass: random.pick(place.source),
+      sourceClass: given.sourceClass ?? random.pick(place.source),
       phones: [
         { number, answeredBy: random.pick(['mother', 'father', 'grandmother', 'eldest child']) },
       ],

@@ -1,6 +1,7 @@
 import { isNull } from 'drizzle-orm'
 import { tickets } from '@/db/schema/ticket'
 import type { Deps } from '@/lib/deps'
+import type { EndCause } from '@/lib/domain/end-causes'
 import type { Actor } from '@/lib/domain/role'
 import { endTicket } from '@/lib/services/end-ticket'
 import { handOverPart } from '@/lib/services/owe-part'
@@ -29,12 +30,12 @@ function patience(ticket: Ticket): number {
   }
 }
 
-const endings: Record<Ticket['trouble'], { end: 'flowing' | 'withdrawn'; cause: string }> = {
-  unread: { end: 'withdrawn', cause: 'A question, answered by phone' },
-  unwell: { end: 'withdrawn', cause: 'The family saw the health worker' },
-  'danger sign': { end: 'withdrawn', cause: 'The family saw the health worker' },
+const endings: Record<Ticket['trouble'], { end: 'flowing' | 'withdrawn'; cause: EndCause }> = {
+  unread: { end: 'withdrawn', cause: 'answered in words' },
+  unwell: { end: 'withdrawn', cause: 'saw a health worker' },
+  'danger sign': { end: 'withdrawn', cause: 'saw a health worker' },
   unsafe: { end: 'flowing', cause: 'misfitted-cap' },
-  silent: { end: 'withdrawn', cause: 'Reached by phone: all in order' },
+  silent: { end: 'withdrawn', cause: 'no trouble' },
   slow: { end: 'flowing', cause: 'fouled-fibre' },
   'no flow': { end: 'flowing', cause: 'air-lock' },
 }
@@ -57,7 +58,9 @@ export async function workShift(
       const taken = ticket.takenBy
         ? { ok: true as const, ...ref }
         : await takeTicket(deps, agent, ref)
-      if (taken.ok) await endTicket(deps, agent, { ...taken, ...endings[ticket.trouble] })
+      if (!taken.ok) throw new Error(taken.reason)
+      const ended = await endTicket(deps, agent, { ...taken, ...endings[ticket.trouble] })
+      if (!ended.ok) throw new Error(ended.reason)
     }
   }
 }

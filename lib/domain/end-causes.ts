@@ -10,6 +10,7 @@ const others = {
   'lost or stolen': 'Lost or stolen',
   'no trouble': 'There was no trouble',
   'answered in words': 'A question, answered in words',
+  'saw a health worker': 'The family saw a health worker',
   'wrong household': 'It was about another household',
 } as const
 
@@ -21,7 +22,7 @@ export type EndCause = Other | (typeof suspectIds)[number]
 const causesOf: Record<EndStage, readonly EndCause[]> = {
   flowing: [...suspectIds, 'no fault found', 'not known'],
   retired: ['gave it back', 'beyond repair', 'moved away', 'lost or stolen'],
-  withdrawn: ['no trouble', 'answered in words', 'wrong household'],
+  withdrawn: ['no trouble', 'answered in words', 'saw a health worker', 'wrong household'],
 }
 
 export const endCauses = Object.values(causesOf).flat()
