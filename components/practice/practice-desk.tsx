@@ -49,12 +49,12 @@ export function PracticeDesk({ initial }: { initial: Practice }) {
             </Button>
           ))}
         </div>
-        <div className="mt-5 min-h-24">
+        <div className="mt-5">
           <MoveNews pending={move.isPending} moved={move.data} error={move.error} />
         </div>
       </section>
       {practice.phonesUrl && (
-        <p>
+        <p className="mt-8">
           <a href={practice.phonesUrl} className="plain-link">
             The practice phones
           </a>

@@ -1,14 +1,21 @@
 'use client'
 
-import { useRef } from 'react'
+import { useEffect, useRef } from 'react'
 import { ApiError } from '../api'
 import { AreaField, TextField } from '../ui/field'
 import type { DraftDesk } from './use-draft'
 
-/** Where the draft is written: its words, the values it may speak of, a note for who reads it next. */
+/** Where the draft is written: its words, and the values it may speak of. */
 export function DraftEditor({ desk }: { desk: DraftDesk }) {
-  const { cell, draft, setBody, setNote, error } = desk
+  const { cell, draft, setBody, error } = desk
   const area = useRef<HTMLTextAreaElement>(null)
+  useEffect(() => {
+    // What was typed while the page was still waking stands in the field, but nowhere else.
+    const typed = area.current?.value
+    if (typed !== undefined) setBody(typed)
+    // Once, when the page has woken.
+    // oxlint-disable-next-line react-hooks/exhaustive-deps
+  }, [])
   const insert = (name: string) => {
     const at = area.current
     if (!at) return
@@ -42,17 +49,24 @@ export function DraftEditor({ desk }: { desk: DraftDesk }) {
           </button>
         ))}
       </div>
-      <div className="mt-5">
-        <TextField
-          label="Note"
-          hint="For whoever reads the draft next. It is not sent."
-          optional
-          value={draft.note}
-          onChange={(event) => setNote(event.target.value)}
-          error={fieldError(error, 'note')}
-        />
-      </div>
     </>
+  )
+}
+
+/** A word for whoever reads the draft next. */
+export function DraftNoteField({ desk }: { desk: DraftDesk }) {
+  const { draft, setNote, error } = desk
+  return (
+    <div className="mt-6">
+      <TextField
+        label="Note"
+        hint="For whoever reads the draft next. It is not sent."
+        optional
+        value={draft.note}
+        onChange={(event) => setNote(event.target.value)}
+        error={fieldError(error, 'note')}
+      />
+    </div>
   )
 }
 

@@ -14,10 +14,13 @@ export function MatrixCell({ cell, row, languageName }: MatrixCellProps) {
   return (
     <Link
       href={`/wording/${row.moment}/${language}`}
-      className="block min-w-0 grow px-3 py-2.5 no-underline -outline-offset-3 hover:bg-ink/6 pointer-coarse:min-h-11"
+      className="block min-w-0 grow px-3 py-2.5 no-underline -outline-offset-3 hover:bg-ink/6 max-md:-mx-1 max-md:px-1 max-md:py-1.5 pointer-coarse:min-h-11"
     >
       <span className="sr-only">
         {row.name}, {languageName}:{' '}
+      </span>
+      <span aria-hidden lang={language} className="block text-xs text-faint md:hidden">
+        {languageName}
       </span>
       <PartBoxes parts={parts} />
       {edition !== null && (
@@ -46,5 +49,5 @@ export function MatrixCell({ cell, row, languageName }: MatrixCellProps) {
 function shortName(name: string): string {
   const [first = '', ...rest] = name.trim().split(/\s+/)
   const last = rest.at(-1)
-  return last ? `${[...first][0] ?? ''}. ${last}` : first
+  return last ? `${String.fromCodePoint(first.codePointAt(0) ?? 0)}. ${last}` : first
 }

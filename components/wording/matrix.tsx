@@ -57,8 +57,11 @@ const columnName = 'border-ink border-b-[1.5px] px-3 py-2 align-bottom font-semi
 
 function MomentRow({ row, languages }: { row: Row; languages: Languages }) {
   return (
-    <tr className="border-b border-rule max-md:block max-md:py-3">
-      <th scope="row" className="px-3 py-2.5 align-top font-semibold max-md:block max-md:p-0">
+    <tr className="border-b border-rule max-md:grid max-md:grid-cols-2 max-md:py-2.5">
+      <th
+        scope="row"
+        className="px-3 py-2.5 align-top font-semibold max-md:col-span-2 max-md:block max-md:p-0"
+      >
         {row.name}
         {row.safety && (
           <span className="block text-xs font-semibold text-faint">two people approve</span>
@@ -67,10 +70,7 @@ function MomentRow({ row, languages }: { row: Row; languages: Languages }) {
       {languages.map(({ language, name }) => {
         const cell = row.cells.find((one) => one.language === language)
         return (
-          <td key={language} className="p-0 align-top max-md:flex max-md:items-baseline">
-            <span aria-hidden lang={language} className="w-24 shrink-0 pt-2.5 text-faint md:hidden">
-              {name}
-            </span>
+          <td key={language} className="p-0 align-top">
             {cell && <MatrixCell cell={cell} row={row} languageName={name} />}
           </td>
         )

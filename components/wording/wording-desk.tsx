@@ -8,7 +8,7 @@ import { Keys } from '../ui/kbd'
 import { BesideDraft } from './beside-draft'
 import { DraftActions, saveDraft } from './draft-actions'
 import { DraftChecks } from './draft-checks'
-import { DraftEditor } from './draft-editor'
+import { DraftEditor, DraftNoteField } from './draft-editor'
 import { DraftPreview } from './draft-preview'
 import { Editions } from './editions'
 import { useDebounced } from './use-debounced'
@@ -35,6 +35,7 @@ export function WordingDesk({ initial }: { initial: WordingCell }) {
           <div className="mt-6">
             <DraftChecks notes={notes} />
           </div>
+          <DraftNoteField desk={desk} />
           <DraftActions desk={desk} blocked={notes.some(({ blocks }) => blocks)} />
         </section>
         <aside aria-label="Beside the draft" className="text-sm">

@@ -11,7 +11,9 @@ export function dueWords({
   positions: readonly number[]
 }): string {
   if (kind !== 'change' || positions.length === 0) return kind
-  const names = [...positions].sort().map((position) => stageNames[position] ?? `stage ${position}`)
+  const names = [...positions]
+    .sort((one, other) => one - other)
+    .map((position) => stageNames[position] ?? `stage ${position}`)
   return `change of ${inWords(names)}`
 }
 

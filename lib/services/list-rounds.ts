@@ -6,7 +6,7 @@ import { allow, type Actor } from '@/lib/domain/role'
 import { carriedADay, openingsAhead } from '@/lib/domain/round-going'
 import { localDay, type Window } from '@/lib/domain/round-window'
 import { clockWords } from '@/lib/domain/stamp'
-import { roundKinds, type Going, type RoundDay, type Rounds } from '@/lib/schemas/rounds'
+import type { Going, RoundDay, RoundKind, Rounds } from '@/lib/schemas/rounds'
 import { readSettings } from '@/lib/schemas/settings'
 import { dayNames } from './day-names'
 import { expectedTexts, type Expected } from './expected-texts'
@@ -66,8 +66,7 @@ export async function listRounds(deps: Deps, actor: Actor): Promise<Rounds> {
 
 function dayOf(on: string, expected: readonly Expected[], off: boolean): RoundDay {
   const inOrder = [...expected].sort((one, other) => one.at - other.at)
-  const count = (kind: (typeof roundKinds)[number]) =>
-    expected.filter(({ kinds }) => kinds.includes(kind)).length
+  const count = (kind: RoundKind) => expected.filter(({ kinds }) => kinds.includes(kind)).length
   return {
     on,
     ...dayNames(on),

@@ -47,24 +47,21 @@ describe('the list of endpoints', () => {
   })
 })
 
+type Operation = { summary?: string; parameters?: { name: string; in: string }[] }
+
 describe('the OpenAPI document', () => {
-  const document = openApiDocument()
+  const paths = openApiDocument().paths as Record<string, Record<string, Operation>>
 
   it('has every endpoint, with its summary', () => {
     for (const { method, path: at, summary } of endpoints) {
-      const operation = (document.paths?.[at] as Record<string, { summary?: string }>)[method]
-      expect(operation?.summary).toBe(summary)
+      expect(paths[at]?.[method]?.summary).toBe(summary)
     }
   })
 
   it('names every part of an address as a parameter', () => {
     for (const { method, path: at } of endpoints) {
-      const operation = (
-        document.paths?.[at] as Record<string, { parameters?: { name: string; in: string }[] }>
-      )[method]
-      const names = (operation?.parameters ?? [])
-        .filter((parameter) => parameter.in === 'path')
-        .map(({ name }) => name)
+      const parameters = paths[at]?.[method]?.parameters ?? []
+      const names = parameters.filter((one) => one.in === 'path').map(({ name }) => name)
       expect(names).toEqual([...at.matchAll(/\{(\w+)\}/g)].map(([, name]) => name))
     }
   })
