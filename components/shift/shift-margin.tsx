@@ -14,16 +14,29 @@ type ShiftMarginProps = {
   onFind: (sought: string) => void
 }
 
-const count = (n: number, one: string, many = `${one}s`) => `${n} ${n === 1 ? one : many}`
+const count = (n: number, one: string) => `${n} ${n === 1 ? one : `${one}s`}`
+
+function takenWords(taken: number): string {
+  if (taken === 0) return 'none is'
+  return taken === 1 ? '1 is' : `${taken} are`
+}
+
+function todayWords({ flowing, parts, visits }: Shift['today']): string {
+  const done = [
+    flowing > 0 && `${flowing} brought back to flowing`,
+    parts > 0 && `${count(parts, 'part')} promised`,
+    visits > 0 && `${count(visits, 'visit')} booked`,
+  ].filter(Boolean)
+  return done.length > 0 ? `${done.join(', ')}.` : 'Nothing has come back to flowing yet.'
+}
 
 /** How many wait, the one main button, what came of today, and a field that finds a row. */
 export function ShiftMargin({ shift, busy, error, ...rest }: ShiftMarginProps) {
   const { waiting, taken, longest, next, today } = shift
-  const isOne = taken === 1
   return (
     <>
       <MarginFigure figure={waiting}>
-        {waiting === 1 ? 'waits' : 'wait'}, {isOne ? '1 is' : `${taken} are`} taken.
+        {waiting === 1 ? 'waits' : 'wait'}, {takenWords(taken)} taken.
         {longest && ` The longest since ${longest}.`}
       </MarginFigure>
       <p role="status" className="sr-only">
@@ -38,10 +51,9 @@ export function ShiftMargin({ shift, busy, error, ...rest }: ShiftMarginProps) {
           {error.message}
         </Notice>
       )}
-      <MarginBlock title="Today">
-        {today.flowing} brought back to flowing, {count(today.parts, 'part')} promised,{' '}
-        {count(today.visits, 'visit')} booked.
-      </MarginBlock>
+      <div className="mt-4.5 border-t border-rule pt-3 max-md:hidden">
+        <MarginBlock title="Today">{todayWords(today)}</MarginBlock>
+      </div>
       <div className="mt-4.5 border-t border-rule pt-3">
         <TextField
           ref={rest.findRef}

@@ -86,11 +86,17 @@ function Words({ words }: { words: string | null }) {
 }
 
 function Danger({ desk }: Props) {
+  const { fixed, trouble } = desk.ticket
+  const hasGone = fixed.some(({ receipt }) => receipt !== 'broken')
   return (
     <>
       <Said
-        lead={`Danger · ${desk.ticket.trouble}`}
-        title="The fixed answer went; a person does the rest"
+        lead={`Danger · ${trouble}`}
+        title={
+          hasGone
+            ? 'The fixed answer went; a person does the rest'
+            : 'The fixed answer did not reach them: find another way'
+        }
       >
         No walk goes by itself here. See that they were reached, and that somebody who can help
         knows.

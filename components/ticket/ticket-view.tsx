@@ -19,7 +19,10 @@ export function TicketView({ initial }: { initial: TicketSheetView }) {
     <TicketSheet
       title={title}
       place={
-        <Link href={`/households/${household.id}`} className="plain-link">
+        <Link
+          href={`/households/${household.id}`}
+          className="underline decoration-rule decoration-2 underline-offset-4 hover:decoration-water"
+        >
           {household.house}, {household.area}
         </Link>
       }
@@ -38,10 +41,16 @@ export function TicketView({ initial }: { initial: TicketSheetView }) {
 }
 
 function TicketColumnView({ column }: { column: TicketSheetView['column'] }) {
-  const { stages, suspects, labels, ...rest } = column
+  const { stages, suspects, labels, verdict, also, ...rest } = column
   return (
     <Cutaway
       {...rest}
+      also={
+        <div className="space-y-2">
+          {verdict && <p className="text-ink">{verdict}</p>}
+          {also && <p>{also}</p>}
+        </div>
+      }
       stages={stages.map((stage) => {
         const suspect = suspects.find(({ position }) => position === stage.position)?.word
         return suspect ? { ...stage, suspect } : stage

@@ -1,5 +1,4 @@
 import { causeWords } from './end-causes'
-import { isDanger } from './trouble'
 import type { TicketEvent, TicketState } from './ticket-types'
 import type { Trouble } from './trouble'
 import { stepOf } from './walk-catalogue'
@@ -49,7 +48,7 @@ export type Names = (staffId: string) => string
 export function eventWords(event: TicketEvent, nameOf: Names): string {
   switch (event.kind) {
     case 'opened':
-      return `Opened: ${troubleWords[event.trouble]}${isDanger(event.trouble) ? '; the fixed answer went' : ''}`
+      return `Opened: ${troubleWords[event.trouble]}`
     case 'taken':
       return 'Taken'
     case 'handed on':

@@ -63,10 +63,10 @@ export function verdictWords(verdict: Verdict): string[] {
   const month = monthNames[verdict.month - 1] ?? ''
   return [
     `${normalised.toFixed(1)} L/h at 20 °C ± ${(normalised * errorShare).toFixed(1)}; ${against} ${reference.toFixed(1)}`,
-    `${percent(recovery.share)} % of it (${percent(recovery.lowShare)} to ${percent(recovery.highShare)} %): ${recoveryWords[recovery.kind]}`,
+    `${percent(recovery.share)} % of the ${against} (${percent(recovery.lowShare)} to ${percent(recovery.highShare)} %): ${recoveryWords[recovery.kind]}.`,
     verdict.celsiusFrom === 'told'
-      ? `Water at ${celsius} °C, as told`
-      : `Water taken at ${celsius} °C, usual here in ${month}`,
+      ? `Water at ${celsius} °C, as told.`
+      : `Water taken at ${celsius} °C, usual here in ${month}.`,
     needWords(verdict.need),
   ]
 }

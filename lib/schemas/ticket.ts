@@ -18,6 +18,8 @@ const ticketColumnSchema = columnSchema.extend({
       notes: z.array(z.string()),
     }),
   ),
+  /** How the last reading is judged, against what, and at which temperature. */
+  verdict: z.string().nullable(),
   /** Suspects that have no place in the drawing, what is ruled out. */
   also: z.string().nullable(),
 })

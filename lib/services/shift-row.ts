@@ -6,6 +6,7 @@ import { localDay } from '@/lib/domain/round'
 import { waitedInWords } from '@/lib/domain/shift-words'
 import { clockWords, dayWords } from '@/lib/domain/stamp'
 import { houseName } from '@/lib/domain/ticket-words'
+import { isUnderWay } from '@/lib/domain/ticket-answer'
 import { stepOf } from '@/lib/domain/walk-catalogue'
 import type { ShiftRow } from '@/lib/schemas/shift'
 import { kitLook } from './kit-look'
@@ -43,9 +44,10 @@ function aboutWords({ ticket, area, facts }: Judged): string | null {
   const step = ticket.waitingFor === null ? undefined : stepOf(ticket.waitingFor)
   const at = step && `step ${(walk?.tried ?? 0) + 1} of the walk: ${step.name.toLowerCase()}`
   const washes = walk?.washes ?? 0
+  const isWalking = ticket.automatic && !isUnderWay(ticket)
   const washed =
     washes > 0 && `washed ${washes === 1 ? 'once' : washes === 2 ? 'twice' : `${washes} times`}`
-  const all = [...fixed, washed, ticket.automatic && 'walking by itself', at].filter(Boolean)
+  const all = [...fixed, washed, isWalking && 'walking by itself', at].filter(Boolean)
   return all.length > 0 ? all.join(', ') : null
 }
 
@@ -85,13 +87,22 @@ function beadOf({ ticket, household, harm, facts }: Judged) {
     : { bead: 'ring' as const, beadWords: 'to be found out', tone }
 }
 
-function columnOf({ kit, household, area, facts, now }: Judged): ShiftRow['column'] {
+/** The flow that the vessel shows: what was timed since this began, and none where nothing comes. */
+function flowNow({ ticket, kit, facts, ...open }: Judged): number | null {
+  if (ticket.trouble === 'no flow') return 0
+  const last = facts.readings.get(kit.id)?.litresPerHour ?? null
+  const now = readingOf({ ticket, kit, ...open }, facts)?.litresPerHour ?? null
+  return ticket.trouble === 'slow' ? now : last
+}
+
+function columnOf(judged: Judged): ShiftRow['column'] {
+  const { kit, household, area, facts, now } = judged
   const { litresPerPersonDay } = facts
   return kitLook(
     {
       state: kit.state,
       fittings: facts.fittings.get(kit.id) ?? [],
-      litresPerHour: facts.readings.get(kit.id)?.litresPerHour ?? null,
+      litresPerHour: flowNow(judged),
       litresPerDay: dailyNeed({ people: household.people, litresPerPersonDay }),
     },
     localDay(now, area.timeZone),
@@ -112,7 +123,7 @@ export function rowOf(judged: Judged, staffId: string): ShiftRow {
     waited: waitedInWords(harm.sinceAt, now),
     since: `since ${sinceInWords(harm.sinceAt, { now, timeZone: area.timeZone })}`,
     ...beadOf(judged),
-    waits: ticket.takenBy === null && !ticket.automatic,
+    waits: ticket.takenBy === null && (!ticket.automatic || isUnderWay(ticket)),
     marks: marksOf(judged, staffId),
     column: columnOf(judged),
   }

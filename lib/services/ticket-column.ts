@@ -4,7 +4,7 @@ import { columnWords, stageLooks, vesselLevel } from '@/lib/domain/kit-column'
 import { dailyNeed, enough } from '@/lib/domain/need'
 import { oddsInWords } from '@/lib/domain/odds-words'
 import { localDay } from '@/lib/domain/round'
-import { dayWords, distanceWords } from '@/lib/domain/stamp'
+import { distanceWords } from '@/lib/domain/stamp'
 import { stageWords } from '@/lib/domain/ticket-words'
 import { bottleWords, verdictWords } from '@/lib/domain/verdict-words'
 import {
@@ -40,34 +40,32 @@ const inStage = (position: 0 | 1 | 2 | 3) =>
 function stageLabels(facts: TicketFacts, odds: Odds): Label[] {
   return facts.fittings.map(({ fitting, stage }) => {
     const { position } = fitting
-    const due = `due ${dayWords(fitting.dueOn)}, ${distanceWords(fitting.dueOn, facts.today)}`
-    const washed = stage.washed
-      ? [`washed ${distanceWords(facts.kit.lastWashOn, facts.today)}`]
-      : []
+    const due = `change due ${distanceWords(fitting.dueOn, facts.today)}`
+    const isFibre = stage.kind === 'fibre'
+    const washed = isFibre ? [`washed ${distanceWords(facts.kit.lastWashOn, facts.today)}`] : []
     const name = stageWords[position]
     const title = `${name[0]?.toUpperCase() ?? ''}${name.slice(1)} stage`
     return { at: position, title, ...suspected(odds, inStage(position)), notes: [due, ...washed] }
   })
 }
 
-function vesselLabel(facts: TicketFacts, litresPerDay: number): Label {
+/** The last litre in words: what it comes to beside the vessel, how it is judged below the drawing. */
+function flowWords(facts: TicketFacts, litresPerDay: number): { label: Label; verdict: string } {
   const { reading, model, area } = facts
-  if (!reading)
-    return { at: 'vessel', title: 'Nobody has timed a litre', notes: ['since this began'] }
-  const reference = reading.first ?? model.nominalLitresPerHour
-  const month = monthOf(localDay(reading.at, area.timeZone))
-  const notes = verdictWords({
+  if (!reading) {
+    const label = { at: 'vessel' as const, title: 'Nobody has timed a litre', notes: [] }
+    return { label, verdict: '' }
+  }
+  const nominal = model.nominalLitresPerHour
+  const [flow, ...verdict] = verdictWords({
     ...reading,
-    month,
-    reference,
-    recovery: recovery({
-      flow: reading.normalised,
-      first: reading.first,
-      nominal: model.nominalLitresPerHour,
-    }),
+    month: monthOf(localDay(reading.at, area.timeZone)),
+    reference: reading.first ?? nominal,
+    recovery: recovery({ flow: reading.normalised, first: reading.first, nominal }),
     need: enough({ litresPerHour: reading.litresPerHour, litresPerDay }),
   })
-  return { at: 'vessel', title: bottleWords(reading), notes }
+  const label = { at: 'vessel' as const, title: bottleWords(reading), notes: flow ? [flow] : [] }
+  return { label, verdict: verdict.join(' ') }
 }
 
 /** Suspects that sit in no stage, and what the water's temperature says. */
@@ -99,6 +97,7 @@ export function ticketColumn(facts: TicketFacts): TicketColumn {
     { today: facts.today, outPosition: isOut ? (state.promisedStage ?? 3) : null },
   )
   const level = vesselLevel(reading?.litresPerHour ?? null, litresPerDay)
+  const flow = flowWords(facts, litresPerDay)
   const container = suspected(odds, ['low-container']) ?? { title: 'Container' }
   return {
     stages,
@@ -108,11 +107,8 @@ export function ticketColumn(facts: TicketFacts): TicketColumn {
       const found = suspected(odds, inStage(position))
       return found ? [{ position, word: found.word }] : []
     }),
-    labels: [
-      { at: 'container', ...container, notes: [] },
-      ...stageLabels(facts, odds),
-      vesselLabel(facts, litresPerDay),
-    ],
+    labels: [{ at: 'container', ...container, notes: [] }, ...stageLabels(facts, odds), flow.label],
+    verdict: flow.verdict || null,
     also: alsoWords(walk, reading?.celsius ?? walk?.celsius ?? null),
   }
 }

@@ -104,7 +104,9 @@ export function ifThisFails(facts: TicketFacts, now: TicketNow): string | null {
     at: facts.now,
   })
   const next = nextStep(after)
-  if (next.kind === 'step') return `${next.step.name}.`
+  if (next.kind === 'step') {
+    return next.step.id === step.id ? `${step.name} once more.` : `${next.step.name}.`
+  }
   if (next.end === 'part') return `The ${stageWords[next.stage ?? 3]} stage is changed: ${next.why}`
   return next.end === 'visit' ? `A visit. ${next.why}` : next.why
 }

@@ -12,6 +12,7 @@ import { receiptOf } from '@/lib/domain/slip-words'
 import { momentWords } from '@/lib/domain/stamp'
 import { eventWords, houseName, stageWords, troubleWords } from '@/lib/domain/ticket-words'
 import { isOpen } from '@/lib/domain/ticket'
+import { isUnderWay } from '@/lib/domain/ticket-answer'
 import { isDanger, isWorse, type Trouble } from '@/lib/domain/trouble'
 import type { Refusal } from '@/lib/schemas/endpoint'
 import type { TicketSheetView } from '@/lib/schemas/ticket'
@@ -34,7 +35,8 @@ function holderOf(
 ): TicketSheetView['holder'] {
   const me = actor.staffId
   if (ticket.takenBy === null) {
-    return { kind: 'nobody', words: ticket.automatic ? 'Walking by itself' : 'Nobody has it', me }
+    const isWalking = ticket.automatic && !isUnderWay(ticket)
+    return { kind: 'nobody', words: isWalking ? 'Walking by itself' : 'Nobody has it', me }
   }
   if (ticket.takenBy === actor.staffId) return { kind: 'you', words: 'You have it', me }
   const last = events.findLast(({ kind }) => kind === 'taken' || kind === 'handed on')
@@ -66,12 +68,16 @@ function headOf(facts: TicketFacts, actor: Actor) {
   }
 }
 
+const capital = (words: string) => `${words[0]?.toUpperCase() ?? ''}${words.slice(1)}`
+
 function fixedView({ fixed, area }: TicketFacts): TicketSheetView['fixed'] {
   return fixed.flatMap(({ moment, state, stateWhy, at }) => {
     if (!isFixedMoment(moment)) return []
     const when = momentWords(at, area.timeZone)
     const { receipt, receiptWords } = receiptOf(state, { why: stateWhy, going: when })
-    return [{ name: fixedTextNames[moment], receipt, receiptWords: `${receiptWords}, ${when}` }]
+    return [
+      { name: capital(fixedTextNames[moment]), receipt, receiptWords: `${receiptWords}, ${when}` },
+    ]
   })
 }
 

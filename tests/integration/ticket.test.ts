@@ -115,8 +115,18 @@ describe('an agent walks slow water', () => {
     const { column } = await sheetOf(deps, agent)
     const vessel = column.labels.find(({ at }) => at === 'vessel')
     expect(vessel?.title).toBe('12 min a litre')
-    expect(vessel?.notes).toContain('Water at 9 °C, as told')
+    expect(column.verdict).toContain('Water at 9 °C, as told.')
+    expect(column.verdict).toContain('of the first reading')
     expect(column.labels.find(({ at }) => at === 3)).toMatchObject({ word: 'likely' })
+  })
+})
+
+describe('no water at all', () => {
+  test('said when a litre was to be timed weighs more than slow water', async () => {
+    await say(deps, PHONE, 'sale poca agua')
+    await answer(deps, PHONE, 'no sale nada')
+    expect(await lastTicket(deps)).toMatchObject({ trouble: 'no flow' })
+    expect((await sheetOf(deps, agent)).title).toContain('no water at all since')
   })
 })
 
