@@ -5,17 +5,8 @@ import { enPack } from './reply-words/en'
 import { esPack } from './reply-words/es'
 import { frPack } from './reply-words/fr'
 import { foldText } from './reply-tokens'
-import {
-  allowedSlips,
-  foldBengali,
-  foldFrench,
-  foldRoman,
-  foldSpanish,
-  isKeypadSlip,
-  shareKey,
-  slipsBetween,
-  squeeze,
-} from './reply-spelling'
+import { allowedSlips, isKeypadSlip, isLikelySlip, shareKey, slipsBetween } from './reply-slips'
+import { foldBengali, foldFrench, foldRoman, foldSpanish, squeeze } from './reply-spelling'
 
 /** The words of each language, as the coordinator's page shows them. */
 export const languagePacks: Record<Language, LanguagePack> = {
@@ -196,6 +187,7 @@ export function guessedKeys(word: string, language: Language): string[] {
   for (const known of lexicon.words) {
     if (known.length < 4 || Math.abs(known.length - word.length) > 2) continue
     if (!beginsAlike(word, known)) continue
+    if (length < 7 && !isBengali && !isLikelySlip(word, known)) continue
     const slips = isKeypadSlip(word, known)
       ? 1
       : Math.min(slipsBetween(word, known), slipsBetween(squeezed, known))
@@ -203,7 +195,9 @@ export function guessedKeys(word: string, language: Language): string[] {
   }
   for (const stem of lexicon.stems) {
     if (stem.length < 5 || !beginsAlike(word, stem)) continue
-    const heads = [-1, 0, 1].map((extra) => word.slice(0, stem.length + extra))
+    const heads = [-1, 0, 1]
+      .map((extra) => word.slice(0, stem.length + extra))
+      .filter((head) => length >= 8 || isLikelySlip(head, stem))
     const slips = Math.min(...heads.map((head) => slipsBetween(head, stem)))
     if (slips <= allowedSlips(stem.length)) consider(`${stem}*`, slips)
   }

@@ -1,6 +1,6 @@
 import { isStopKeyword } from './consent'
 import { areBeside, denied, isNamed, isSaid, said, sureOf, type Sense } from './reply-sense'
-import { slipsBetween } from './reply-spelling'
+import { slipsBetween } from './reply-slips'
 import type { Concept } from './reply-words/concept'
 
 /** Words that may stand beside a bare "stop" without changing what it asks. */
