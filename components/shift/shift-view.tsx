@@ -7,9 +7,11 @@ import type { Shift } from '@/lib/schemas/shift'
 import type { WorkedView } from '@/lib/schemas/ticket-work'
 import { getJson, sendJson } from '../api'
 import { LineSheet } from '../frame/sheets'
+import { Button } from '../ui/button'
 import { Keys } from '../ui/kbd'
 import { ShiftList } from './shift-list'
 import { ShiftMargin } from './shift-margin'
+import { useKeysChoice } from './use-keys-choice'
 import { useShiftKeys } from './use-shift-keys'
 
 const refreshMilliseconds = 4_000
@@ -40,7 +42,8 @@ export function ShiftView({ initial }: { initial: Shift }) {
   const rows = useRef<HTMLDivElement>(null)
   const find = useRef<HTMLInputElement>(null)
   const { takeNext, busy, error } = useTakeNext()
-  useShiftKeys({ rows, find, takeNext })
+  const { keysOn, toggle } = useKeysChoice()
+  useShiftKeys({ rows, find, takeNext, enabled: keysOn })
   return (
     <LineSheet
       title={shift.title}
@@ -58,14 +61,29 @@ export function ShiftView({ initial }: { initial: Shift }) {
       <div ref={rows}>
         <ShiftList shift={shift} sought={sought} />
       </div>
-      <Keys
-        keys={[
-          { press: ['j', 'k'], does: 'down, up' },
-          { press: ['enter'], does: 'open' },
-          { press: ['t'], does: 'take the next' },
-          { press: ['/'], does: 'find' },
-        ]}
-      />
+      <ShiftFoot keysOn={keysOn} onToggle={toggle} />
     </LineSheet>
+  )
+}
+
+function ShiftFoot({ keysOn, onToggle }: { keysOn: boolean; onToggle: () => void }) {
+  return (
+    <div className="pointer-coarse:hidden">
+      {keysOn && (
+        <Keys
+          keys={[
+            { press: ['j', 'k'], does: 'down, up' },
+            { press: ['enter'], does: 'open' },
+            { press: ['t'], does: 'take the next' },
+            { press: ['/'], does: 'find' },
+          ]}
+        />
+      )}
+      <p className="mt-1 pl-lead text-sm">
+        <Button kind="quiet" size="small" onClick={onToggle}>
+          {keysOn ? 'Turn the keys off' : 'Turn the keys on'}
+        </Button>
+      </p>
+    </div>
   )
 }

@@ -20,12 +20,16 @@ export function useShiftKeys({
   rows,
   find,
   takeNext,
+  enabled,
 }: {
   rows: RefObject<HTMLElement | null>
   find: RefObject<HTMLInputElement | null>
   takeNext: () => void
+  /** Single letters are in the way of who speaks to the computer: they can be turned off. */
+  enabled: boolean
 }): void {
   useEffect(() => {
+    if (!enabled) return
     const onKey = (event: KeyboardEvent) => {
       if (event.ctrlKey || event.metaKey || event.altKey || isWriting(event.target)) return
       if (event.key === 'j') move(rows.current, 1)
@@ -37,5 +41,5 @@ export function useShiftKeys({
     }
     window.addEventListener('keydown', onKey)
     return () => window.removeEventListener('keydown', onKey)
-  }, [rows, find, takeNext])
+  }, [rows, find, takeNext, enabled])
 }

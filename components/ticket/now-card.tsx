@@ -57,8 +57,8 @@ function Doing({ desk }: Props) {
   return (
     <>
       {now.kind === 'words' && <NameTrouble desk={desk} />}
-      <div className="mt-4 space-y-3">
-        <OwnWords desk={desk} />
+      <div className="mt-4 flex flex-wrap items-center gap-2.5">
+        <OwnWords desk={desk} kind="line" />
         <OtherSteps desk={desk} />
       </div>
     </>

@@ -5,12 +5,14 @@ import { Button } from '../ui/button'
 import { Composer } from './composer'
 import type { TicketDesk } from './use-ticket'
 
+type OwnWordsProps = { desk: TicketDesk; kind?: 'quiet' | 'line' }
+
 /** Writing to the household without a step. */
-export function OwnWords({ desk }: { desk: TicketDesk }) {
+export function OwnWords({ desk, kind = 'quiet' }: OwnWordsProps) {
   const [words, setWords] = useState<string | null>(null)
   if (words === null) {
     return (
-      <Button kind="quiet" onClick={() => setWords('')}>
+      <Button kind={kind} onClick={() => setWords('')}>
         Write to them
       </Button>
     )

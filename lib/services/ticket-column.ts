@@ -17,6 +17,7 @@ import {
 } from '@/lib/domain/walk'
 import type { TicketColumn } from '@/lib/schemas/ticket'
 import type { TicketFacts } from './ticket-facts'
+import { walkOf } from './ticket-step'
 
 type Label = TicketColumn['labels'][number]
 type Odds = Walk['odds'] | null
@@ -86,8 +87,9 @@ function alsoWords(walk: Walk | null, celsius: number | null): string | null {
 
 /** The kit drawn large: its suspects lit, with their odds, and what the last litre comes to. */
 export function ticketColumn(facts: TicketFacts): TicketColumn {
-  const { state, kit, household, settings, reading } = facts
-  const walk = state.walk
+  const { ticket, state, kit, household, settings, reading } = facts
+  const isWalked = ticket.trouble === 'slow' || ticket.trouble === 'no flow'
+  const walk = state.walk ?? (isWalked ? walkOf(facts) : null)
   const odds = walk?.odds ?? null
   const { litresPerPersonDay } = settings
   const litresPerDay = dailyNeed({ people: household.people, litresPerPersonDay })
