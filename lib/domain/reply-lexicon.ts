@@ -30,7 +30,8 @@ type Lexicon = {
   light: Set<string>
   stems: Set<string>
   respelled: Map<string, string[]>
-  respelledStems: [string, string][]
+  /** By first letter, since every stem is tried on every strange word. */
+  respelledStems: Map<string, [string, string][]>
   respell: (word: string) => string
 }
 
@@ -73,7 +74,10 @@ function learn(lexicon: Lexicon, key: string): void {
     const stem = key.slice(0, -1)
     if (lexicon.stems.has(stem)) return
     lexicon.stems.add(stem)
-    lexicon.respelledStems.push([lexicon.respell(stem), key])
+    const respelled = lexicon.respell(stem)
+    const first = respelled[0] ?? ''
+    const alike = lexicon.respelledStems.get(first) ?? []
+    lexicon.respelledStems.set(first, [...alike, [respelled, key]])
     return
   }
   if (lexicon.words.has(key)) return
@@ -91,7 +95,7 @@ function buildLexicon(language: Language): Lexicon {
     wholes: new Set(foldText(pack.common).split(/\s+/)),
     stems: new Set(),
     respelled: new Map(),
-    respelledStems: [],
+    respelledStems: new Map(),
     respell: respellerOf(pack),
   }
   for (const [concept, words] of Object.entries(pack.concepts) as [Concept, string][]) {
@@ -156,7 +160,7 @@ export function respelledKeys(word: string, language: Language): string[] {
   const lexicon = lexiconOf(language)
   const respelled = lexicon.respell(word)
   const keys = [...(lexicon.respelled.get(respelled) ?? [])]
-  for (const [stem, key] of lexicon.respelledStems) {
+  for (const [stem, key] of lexicon.respelledStems.get(respelled[0] ?? '') ?? []) {
     if (stem.length >= 3 && respelled.startsWith(stem)) keys.push(key)
   }
   return keys
