@@ -31,7 +31,8 @@ function todayWords({ flowing, parts, visits }: Shift['today']): string {
 }
 
 /** How many wait, the one main button, what came of today, and a field that finds a row. */
-export function ShiftMargin({ shift, busy, error, ...rest }: ShiftMarginProps) {
+export function ShiftMargin(props: ShiftMarginProps) {
+  const { shift, busy, error, onTakeNext, findRef, onFind } = props
   const { waiting, taken, longest, next, today } = shift
   return (
     <>
@@ -42,7 +43,7 @@ export function ShiftMargin({ shift, busy, error, ...rest }: ShiftMarginProps) {
       <p role="status" className="sr-only">
         {waiting} {waiting === 1 ? 'waits' : 'wait'} in the shift
       </p>
-      <Button kind="main" busy={busy} disabled={!next.ticketId} onClick={rest.onTakeNext}>
+      <Button kind="main" busy={busy} disabled={!next.ticketId} onClick={onTakeNext}>
         Take the next
       </Button>
       <p className="mt-1.5 text-faint">{next.words}</p>
@@ -56,11 +57,11 @@ export function ShiftMargin({ shift, busy, error, ...rest }: ShiftMarginProps) {
       </div>
       <div className="mt-4.5 border-t border-rule pt-3">
         <TextField
-          ref={rest.findRef}
+          ref={findRef}
           label="Find in the shift"
           type="search"
           required={false}
-          onChange={({ currentTarget }) => rest.onFind(currentTarget.value)}
+          onChange={({ currentTarget }) => onFind(currentTarget.value)}
         />
       </div>
     </>

@@ -1,18 +1,23 @@
 'use client'
 
-import { useEffect, useState } from 'react'
+import { useSyncExternalStore } from 'react'
 
 const place = 'rillpost-shift-keys'
+const changed = 'rillpost-shift-keys-changed'
+
+function subscribe(onChange: () => void): () => void {
+  window.addEventListener(changed, onChange)
+  return () => window.removeEventListener(changed, onChange)
+}
+
+const isOn = () => localStorage.getItem(place) !== 'off'
 
 /** Whether the shift listens to single letters, kept in this browser. */
 export function useKeysChoice(): { keysOn: boolean; toggle: () => void } {
-  const [keysOn, setKeysOn] = useState(true)
-  useEffect(() => {
-    if (localStorage.getItem(place) === 'off') setKeysOn(false)
-  }, [])
+  const keysOn = useSyncExternalStore(subscribe, isOn, () => true)
   const toggle = () => {
     localStorage.setItem(place, keysOn ? 'off' : 'on')
-    setKeysOn(!keysOn)
+    window.dispatchEvent(new Event(changed))
   }
   return { keysOn, toggle }
 }
