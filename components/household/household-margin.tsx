@@ -1,7 +1,7 @@
 import Form from 'next/form'
 import { Button, ButtonLink } from '../ui/button'
 import { TextField } from '../ui/field'
-import { MarginBlock, MarginFigure } from '../ui/margin-block'
+import { MarginFigure } from '../ui/margin-block'
 
 type HouseholdsMarginProps = { total: number; search: string; mayEnter: boolean }
 
@@ -44,18 +44,16 @@ export function HouseholdsMargin({ total, search, mayEnter }: HouseholdsMarginPr
   return (
     <>
       {!isEmpty && <Finder total={total} search={search} />}
-      {!isEmpty && mayEnter && (
-        <MarginBlock title="A new house">
-          <ButtonLink href="/households/new" size="small" className="mt-1">
+      <div className="mt-4.5 flex flex-wrap items-center gap-x-4 gap-y-1 border-t border-rule pt-3 first:mt-0 first:border-0 first:pt-0">
+        {!isEmpty && mayEnter && (
+          <ButtonLink href="/households/new" size="small">
             Enter a household
           </ButtonLink>
-        </MarginBlock>
-      )}
-      <MarginBlock title="Areas">
-        <ButtonLink href="/areas" kind="quiet" size="small" className="-ml-1">
-          Hours, languages, depots
+        )}
+        <ButtonLink href="/areas" kind="quiet" size="small">
+          Areas
         </ButtonLink>
-      </MarginBlock>
+      </div>
     </>
   )
 }

@@ -51,8 +51,8 @@ export function Suspended({ phone, householdId, mayChange }: ReinstateProps) {
       className="my-4"
     >
       <p>
-        Nothing is sent to <span className="font-mono">{phone.number}</span>. Talk to the family:
-        was it a slip, or has the phone another owner?
+        Nothing is sent to <span className="font-mono whitespace-nowrap">{phone.number}</span>. Talk
+        to the family: was it a slip, or has the phone another owner?
       </p>
       {mayChange && <ReinstateForm phone={phone} householdId={householdId} />}
     </Notice>

@@ -16,6 +16,26 @@ export async function listSlipTexts(
     .limit(limit)
 }
 
+/** Prompts and nudges to a household by one phone that have not left yet, held until the transaction ends. */
+export async function listWaitingPromptTexts(
+  db: Handle,
+  { householdId, phoneId }: { householdId: string; phoneId: string },
+) {
+  return db
+    .select()
+    .from(texts)
+    .where(
+      and(
+        eq(texts.householdId, householdId),
+        eq(texts.phoneId, phoneId),
+        eq(texts.state, 'queued'),
+        eq(texts.anyHour, false),
+      ),
+    )
+    .orderBy(texts.n)
+    .for('update')
+}
+
 /** Every reading of these replies, oldest first: the last of a text is what counts. */
 export async function listReadingsOfTexts(db: Handle, textIds: string[]) {
   if (textIds.length === 0) return []

@@ -9,10 +9,12 @@ import {
 import { listKitsOfHousehold } from '@/db/queries/kit'
 import { updateKit } from '@/db/queries/kit-facts'
 import { findPhone, insertConsent, updatePhone } from '@/db/queries/phone'
+import { listWaitingPromptTexts } from '@/db/queries/slip'
 import { insertAudit } from '@/db/queries/staff'
 import type { Deps } from '@/lib/deps'
 import { allow, type Actor } from '@/lib/domain/role'
 import type { ChangedHousehold, HouseholdChange } from '@/lib/schemas/household-entry'
+import { dropText } from './drop-text'
 import { firstWashOn } from './hand-over-kit'
 import { linkPhone } from './link-phone'
 
@@ -29,14 +31,29 @@ async function replanWashes(tx: Transaction, { found, input }: Change) {
   }
 }
 
-/** Texts go to this phone from now on; the one they went to before no longer answers for this household. */
-async function setFirstPhone(tx: Transaction, { actor, found, input, at }: Change) {
+/**
+ * A phone that no longer answers for this household. Prompts that wait for it are dropped and so planned anew, for the
+ * phone that follows; advice already on its way is not taken back.
+ */
+async function unlinkPhone(
+  tx: Transaction,
+  deps: Deps,
+  link: { householdId: string; phoneId: string },
+) {
+  for (const text of await listWaitingPromptTexts(tx, link)) {
+    await dropText(tx, deps, text, 'the household has another phone')
+  }
+  await deleteHouseholdPhone(tx, link.householdId, link.phoneId)
+}
+
+/** Texts go to this phone from now on. */
+async function setFirstPhone(tx: Transaction, deps: Deps, { actor, found, input, at }: Change) {
   const householdId = found.household.id
   const linked = await listPhonesOfHouseholds(tx, [householdId])
   const first = linked.find(({ link }) => link.first)
   const { number, answeredBy } = input.phone
   const isSame = first?.phone.e164 === number
-  if (first && !isSame) await deleteHouseholdPhone(tx, householdId, first.phone.id)
+  if (first && !isSame) await unlinkPhone(tx, deps, { householdId, phoneId: first.phone.id })
   return linkPhone(tx, {
     householdId,
     number,
@@ -49,13 +66,13 @@ async function setFirstPhone(tx: Transaction, { actor, found, input, at }: Chang
   })
 }
 
-async function keep(tx: Transaction, change: Change): Promise<ChangedHousehold> {
+async function keep(tx: Transaction, deps: Deps, change: Change): Promise<ChangedHousehold> {
   const { actor, found, input, at } = change
   const { phone: _phone, consent: _consent, ...who } = input
   const householdId = found.household.id
   await updateHousehold(tx, householdId, who)
   await replanWashes(tx, change)
-  const { phoneId, notes } = await setFirstPhone(tx, change)
+  const { phoneId, notes } = await setFirstPhone(tx, deps, change)
   const changed = Object.entries(who)
     .filter(([key, value]) => found.household[key as keyof typeof who] !== value)
     .map(([key]) => key)
@@ -81,7 +98,7 @@ export async function changeHousehold(
   return deps.store.transaction(async (tx) => {
     const found = await findHousehold(tx, householdId)
     if (!found) return { ok: false, reason: 'not found' }
-    return keep(tx, { actor, found, input, at })
+    return keep(tx, deps, { actor, found, input, at })
   })
 }
 

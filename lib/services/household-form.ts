@@ -20,5 +20,3 @@ export async function householdForm(deps: Deps, actor: Actor) {
     models: models.map(({ id, name, bottleLitres }) => ({ id, name, bottleLitres })),
   }
 }
-
-export type HouseholdForm = Awaited<ReturnType<typeof householdForm>>

@@ -2,6 +2,7 @@ import { eq } from 'drizzle-orm'
 import { beforeEach, describe, expect, it } from 'vitest'
 import { insertReading, insertWash, listOpenFittings } from '@/db/queries/kit-facts'
 import { updatePhone } from '@/db/queries/phone'
+import { upsertPrompt } from '@/db/queries/prompt'
 import { insertText } from '@/db/queries/text'
 import { phones } from '@/db/schema/household'
 import { kits } from '@/db/schema/kit'
@@ -169,6 +170,39 @@ describe('a change of a household', () => {
     const { phones: reached } = await sheet()
     expect(reached.map(({ e164, first }) => [e164, first])).toEqual([['+15055550199', true]])
     expect(reached[0]?.consent).toBe('given')
+  })
+
+  it('to another phone takes back the prompts that wait for the old one, not the advice', async () => {
+    const text = (purpose: string, anyHour: boolean) =>
+      insertText(deps.store.db, {
+        direction: 'out',
+        purpose,
+        phoneId: home.phoneId,
+        householdId: home.householdId,
+        e164: '+15055550142',
+        language: 'es',
+        body: purpose,
+        state: 'queued',
+        anyHour,
+        sendAfter: deps.clock.now(),
+        createdAt: deps.clock.now(),
+      })
+    const prompt = await text('prompt:wash', false)
+    await upsertPrompt(deps.store.db, {
+      kitId: home.kitId,
+      kind: 'wash',
+      dueOn: '2026-03-02',
+      textId: prompt!.id,
+      createdAt: deps.clock.now(),
+    })
+    await text('advice', true)
+    await change({ phone: { number: '+15055550199', answeredBy: '' } })
+    const { slips, kits: shown } = await sheet()
+    expect(slips.slips.map(({ body, receiptWords }) => [body, receiptWords])).toEqual([
+      ['prompt:wash', 'not sent: the household has another phone'],
+      ['advice', 'goes: 2 Mar 2026, 11:00'],
+    ])
+    expect(shown[0]?.past.at(-1)).toMatchObject({ title: 'Asked to wash', bead: 'broken' })
   })
 
   it('to another phone without a new yes sends nothing there', async () => {
