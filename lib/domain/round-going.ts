@@ -1,7 +1,13 @@
 import { bundle, overWeeklyLimit, type Due } from './round'
 import { textFor } from './round-text'
 import { sendAfter } from './round-spread'
-import { localDay, nextInsideWindow, windowClosesAt, type Window } from './round-window'
+import {
+  insideWindow,
+  localDay,
+  nextInsideWindow,
+  windowClosesAt,
+  type Window,
+} from './round-window'
 
 /** A kit with what falls due on it. `sentAt`: when its household was or will be prompted otherwise. */
 export type KitDue = {
@@ -34,19 +40,32 @@ export function openingsAhead(window: Window, now: number, until: number): Openi
 
 type Wanted = Opening & { kit: KitDue; due: Due[] }
 
+/** The first hour of an opening at which a household has room for a prompt; null when it has none. */
+function hourFor({ on, at }: Opening, sentAt: readonly number[], window: Window): number | null {
+  // One prompt a day.
+  if (sentAt.some((sent) => localDay(sent, window.timeZone) >= on)) return null
+  const roomAgainAt = sentAt
+    .map((sent) => sent + 7 * day)
+    .filter((room) => room > at && localDay(room, window.timeZone) === on)
+    .filter((room) => insideWindow(room, window))
+  const hours = [at, ...roomAgainAt.sort((one, other) => one - other)]
+  return hours.find((now) => !overWeeklyLimit({ sentAt, now })) ?? null
+}
+
 /** Bundles kit by kit and day by day, as the planning of each of those days will. */
-function wantedOf(kits: readonly KitDue[], openings: readonly Opening[]): Wanted[] {
+function wantedOf(kits: readonly KitDue[], openings: readonly Opening[], window: Window): Wanted[] {
   const sentTo = new Map<string, number[]>()
   return kits.flatMap((kit) => {
     const sentAt = sentTo.get(kit.householdId) ?? [...kit.sentAt]
     sentTo.set(kit.householdId, sentAt)
     let left = [...kit.due]
-    return openings.flatMap(({ on, at }) => {
-      const due = textFor(bundle(left, on))?.due ?? []
-      if (due.length === 0 || overWeeklyLimit({ sentAt, now: at })) return []
+    return openings.flatMap((opening) => {
+      const due = textFor(bundle(left, opening.on))?.due ?? []
+      const at = due.length === 0 ? null : hourFor(opening, sentAt, window)
+      if (at === null) return []
       left = left.filter((one) => !due.includes(one))
       sentAt.push(at)
-      return [{ kit, on, at, due }]
+      return [{ kit, on: opening.on, at, due }]
     })
   })
 }
@@ -72,7 +91,7 @@ export function goingOut({
   return [...windows].flatMap(([areaId, window]) => {
     const openings = openingsAhead(window, now, now + days * day)
     const ofArea = kits.filter((kit) => kit.areaId === areaId)
-    const inOrder = wantedOf(ofArea, openings).sort((one, other) => one.at - other.at)
+    const inOrder = wantedOf(ofArea, openings, window).sort((one, other) => one.at - other.at)
     const places = new Map<string, number>()
     return inOrder.map(({ kit, on, at, due }) => {
       const spreadIndex = places.get(on) ?? 0

@@ -96,13 +96,16 @@ function windowOf({ area }: KitFacts) {
 export async function planPrompts(deps: Deps): Promise<{ planned: number }> {
   const { db } = deps.store
   const now = deps.clock.now()
-  const horizon = addDays(localDay(now, 'Pacific/Kiritimati'), BUNDLE_DAYS)
+  const latestDay = localDay(now, 'Pacific/Kiritimati')
+  const horizon = addDays(latestDay, BUNDLE_DAYS)
   const kits = byKit(await listDue(db, horizon, KITS_A_RUN))
   if (kits.size === 0) return { planned: 0 }
   const { textsPerMinute } = readSettings(await listSettings(db))
   let spreadIndex = await countWaitingTexts(db, now)
   let planned = 0
   for (const [kitId, rows] of kits) {
+    // Nothing is due in any zone yet: most kits of the horizon need no further look.
+    if (!rows.some(({ dueOn }) => dueOn <= latestDay)) continue
     const facts = await findKitFacts(db, kitId)
     if (!facts) continue
     const today = localDay(now, facts.area.timeZone)
@@ -118,6 +121,8 @@ export async function planPrompts(deps: Deps): Promise<{ planned: number }> {
     if (!text) continue
     const hours = await listPromptHours(db, [facts.household.id], now - WEEK)
     if (overWeeklyLimit({ sentAt: hours.map(({ at }) => Math.min(at, now)), now })) continue
+    // What one text cannot ask waits for another day: nobody is prompted twice in one morning.
+    if (hours.some(({ at }) => localDay(at, facts.area.timeZone) >= today)) continue
     const sendAt = sendAfter({
       now,
       window: windowOf(facts),

@@ -70,13 +70,25 @@ describe('the rounds', () => {
     await houseIn(deps, place, { handedOverOn: '2026-02-14' })
     await planPrompts(deps)
     const before = await listRounds(deps, place.coordinator)
-    expect(before.days[0]).toMatchObject({ texts: 1, counts: { welcome: 1, wash: 1 } })
+    expect(before.days[0]).toMatchObject({ texts: 1, counts: { welcome: 1, wash: 0 } })
     expect(before.days[0]?.going[0]).toMatchObject({ state: 'queued', hour: '10:00' })
-    await sendDueTexts(deps)
+    expect(before.days[1]).toMatchObject({ texts: 1, counts: { welcome: 0, wash: 1 } })
+    expect(before.days[1]?.going[0]).toMatchObject({ state: 'planned', hour: '08:00' })
+    await moveClock(deps, place.coordinator, { hours: 24 })
     const after = await listRounds(deps, place.coordinator)
-    expect(after.days[0]?.texts).toBe(0)
-    expect(after.days[3]).toMatchObject({ on: '2026-03-05', counts: { nudge: 1 } })
+    expect(after.days[0]).toMatchObject({ on: '2026-03-03', texts: 0 })
+    expect(after.days[3]).toMatchObject({ on: '2026-03-06', counts: { nudge: 1 } })
     expect(after.days[3]?.going[0]).toMatchObject({ state: 'if silent', house: 'Orellana' })
+  })
+
+  test('are never two for one household on a day', async () => {
+    await houseIn(deps, place, { handedOverOn: '2026-01-14' })
+    for (let sweep = 0; sweep < 6; sweep += 1) {
+      await planPrompts(deps)
+      await sendDueTexts(deps)
+      deps.clock.advance(600_000)
+    }
+    expect(deps.carrier.sent).toHaveLength(1)
   })
 
   test('leave out whoever may not be texted', async () => {
