@@ -89,7 +89,7 @@ function beadOf({ ticket, household, harm, facts }: Judged) {
 
 /** The flow that the vessel shows: what was timed since this began, and none where nothing comes. */
 function flowNow({ ticket, kit, facts, ...open }: Judged): number | null {
-  if (ticket.trouble === 'no flow') return 0
+  if (ticket.trouble === 'no flow' || kit.state === 'out of service') return 0
   const last = facts.readings.get(kit.id)?.litresPerHour ?? null
   const now = readingOf({ ticket, kit, ...open }, facts)?.litresPerHour ?? null
   return ticket.trouble === 'slow' ? now : last
