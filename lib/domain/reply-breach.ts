@@ -21,7 +21,9 @@ export function findBreach(sense: Sense): Danger | null {
     ...rushes(sense),
   ]
   if (marks.length === 0) return null
-  return { kind: 'broken', sure: isSaid(sense, 'mended') ? 0.55 : sureOf(0.9, marks) }
+  // "Very fast, thank you" may be joy over a washed filter; a mended leak may be none. A person asks.
+  const isRushOnly = marks.every((mark) => mark.concept === 'fast') && isSaid(sense, 'thanks')
+  return { kind: 'broken', sure: isRushOnly || isSaid(sense, 'mended') ? 0.55 : sureOf(0.9, marks) }
 }
 
 /** "The flow dropped" is slow; "the filter dropped" may have broken its fibres. */
@@ -37,7 +39,7 @@ export function isFallOfFlow(sense: Sense, fall: Mark): boolean {
 
 /** "Very fast" suggests a breach, unless it is said with relief. */
 function rushes(sense: Sense): Mark[] {
-  if (isSaid(sense, 'good', 'better', 'thanks')) return []
+  if (isSaid(sense, 'good', 'better')) return []
   return said(sense, 'fast').filter((mark) =>
     said(sense, 'very').some((very) => very.to === mark.from || mark.to === very.from),
   )

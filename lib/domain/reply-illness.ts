@@ -1,15 +1,6 @@
 import type { Danger } from './reply-danger'
 import type { Mark } from './reply-marks'
-import {
-  areBeside,
-  denied,
-  gapBetween,
-  isNamed,
-  isSaid,
-  said,
-  sureOf,
-  type Sense,
-} from './reply-sense'
+import { areBeside, denied, gapBetween, isNamed, said, sureOf, type Sense } from './reply-sense'
 import type { Concept } from './reply-words/concept'
 
 /** Illness in the house, and whether it shows a general danger sign. */
@@ -65,8 +56,8 @@ function unfed(sense: Sense): Mark[] {
 
 /** "Cannot wake him": not of a phone that nobody answers. */
 function unroused(sense: Sense): Mark[] {
-  if (isSaid(sense, 'texts', 'phone', 'water', 'filter')) return []
-  return denied(sense, 'wake')
+  const things = said(sense, 'texts', 'phone', 'water', 'filter')
+  return denied(sense, 'wake').filter((mark) => !areBeside(sense, [mark], things, 8))
 }
 
 /** "Mi hijo está mal": something bad is said of a person, not of the water. */

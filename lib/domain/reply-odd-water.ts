@@ -10,7 +10,7 @@ export function findOddWater(sense: Sense): Danger | null {
   )
   const things = said(sense, 'cloth', 'filter', 'piece', 'container', 'source')
   const coloured = said(sense, 'odd').filter(
-    (mark) => things.length === 0 || areBeside(sense, [mark], water, 4),
+    (mark) => !areBeside(sense, [mark], things, 8) || areBeside(sense, [mark], water, 4),
   )
   const dirty = said(sense, 'dirty').filter((mark) => areBeside(sense, [mark], water, 3))
   const bad = said(sense, 'bad').filter(

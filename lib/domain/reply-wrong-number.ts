@@ -49,9 +49,12 @@ function isName(sense: Sense, at: number): boolean {
 
 /** A strange word in the middle of a sentence is more likely a verb nobody here knows. */
 function isAlmostLast(sense: Sense, at: number): boolean {
-  const rest = sense.tokens.slice(at + 1)
-  const end = rest.findIndex((token) => token.kind === 'break')
-  return (end === -1 ? rest.length : end) <= 1
+  const manners = said(sense, 'thanks', 'please', 'greeting', 'helpWord')
+  const isManners = (place: number): boolean =>
+    manners.some((mark) => mark.from <= place && place < mark.to)
+  const end = sense.tokens.findIndex((token, place) => place > at && token.kind === 'break')
+  const places = sense.tokens.map((_, place) => place).slice(at + 1, end === -1 ? undefined : end)
+  return places.filter((place) => !isManners(place)).length <= 1
 }
 
 function hasSelf(sense: Sense, before: number): boolean {
