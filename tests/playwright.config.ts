@@ -19,6 +19,8 @@ export default defineConfig({
     ...devices['Desktop Chrome'],
     // The browser is the system's own; a channel would make Playwright look for another.
     channel: undefined,
+    actionTimeout: 20_000,
+    navigationTimeout: 40_000,
     screenshot: 'only-on-failure',
     launchOptions: {
       executablePath: process.env.CHROMIUM_PATH ?? '/usr/bin/chromium',

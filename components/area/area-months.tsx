@@ -31,8 +31,8 @@ function Month({ month, celsius, wet, wrong }: MonthProps) {
     <fieldset className="border-t border-rule pt-2">
       <legend className="sr-only">{name}</legend>
       <label className="block text-sm font-semibold">
-        {name.slice(0, 3)}
-        <span className="sr-only">{name.slice(3)}, °C</span>
+        <span aria-hidden>{name.slice(0, 3)}</span>
+        <span className="sr-only">{name}, °C</span>
         <input
           name={`celsius-${month}`}
           inputMode="decimal"
