@@ -1,3 +1,4 @@
+import type { Mark } from './reply-marks'
 import { promised } from './reply-figure'
 import {
   areBeside,
@@ -20,7 +21,7 @@ export type Answer = { kind: AnswerKind; sure: number }
 
 export function findAnswer(sense: Sense): Answer | null {
   const question = ask(sense)
-  if (question && isOpenedByQuestion(sense)) return question
+  if (question && (isOpenedByQuestion(sense) || asksOfPlan(sense))) return question
   const rules = [needPart, notYet, moved, () => question, done, keywords, thanksOnly, yesNo]
   for (const rule of rules) {
     const answer = rule(sense)
@@ -33,6 +34,12 @@ export function findAnswer(sense: Sense): Answer | null {
 function isOpenedByQuestion(sense: Sense): boolean {
   const marks = said(sense, 'ask')
   return sense.text.includes('?') ? marks.length > 0 : marks.some((mark) => mark.from === 0)
+}
+
+/** "Kapor kokhon bodlabo": when shall I change it; the plan is what is asked about. */
+function asksOfPlan(sense: Sense): boolean {
+  const isPlanOnly = !isSaid(sense, 'notYet', 'forgot', 'day') && isSaid(sense, 'future')
+  return isSaid(sense, 'ask') && isPlanOnly
 }
 
 function needPart(sense: Sense): Answer | null {
@@ -62,10 +69,19 @@ function notYet(sense: Sense): Answer | null {
     ...days,
     ...undone,
     ...unable,
+    ...timeless(sense),
     ...planned,
     ...promised(sense),
   ]
   return marks.length > 0 ? { kind: 'not-yet', sure: sureOf(0.85, marks) } : null
+}
+
+/** "Haven't found time". */
+function timeless(sense: Sense): Mark[] {
+  const denials = sense.marks.filter((mark) =>
+    ['not', 'notNext', 'notAround', 'notPlus', 'notBack', 'lack'].includes(mark.concept),
+  )
+  return said(sense, 'time').filter((mark) => areBeside(sense, [mark], denials, 3))
 }
 
 function moved(sense: Sense): Answer | null {
@@ -87,8 +103,9 @@ function done(sense: Sense): Answer | null {
   if (marks.length > 0) return { kind: 'done', sure: sureOf(0.85, marks) }
   if (isOver(sense)) return { kind: 'done', sure: 0.75 }
   const runsWell = areBeside(sense, said(sense, 'flow'), said(sense, 'good', 'fast'), 3)
+  const isCleaned = sense.asked === 'wash' && isSaid(sense, 'clean')
   const isWellNow = isSaid(sense, 'good') && isSaid(sense, 'now') && sense.asked !== 'none'
-  return runsWell || isWellNow ? { kind: 'done', sure: 0.7 } : null
+  return runsWell || isWellNow || isCleaned ? { kind: 'done', sure: 0.7 } : null
 }
 
 function keywords(sense: Sense): Answer | null {
@@ -125,10 +142,16 @@ const dangers: Concept[] = [
 function yesNo(sense: Sense): Answer | null {
   const yes = said(sense, 'yes')
   const no = said(sense, 'no')
-  const safe = denied(sense, ...dangers, ...(sense.asked === 'step' ? (['bad'] as const) : []))
+  const safe = denied(
+    sense,
+    ...dangers,
+    ...(sense.asked === 'step' ? (['bad', 'drip'] as const) : []),
+  )
   if (safe.length > 0) return { kind: 'no', sure: sureOf(0.75, safe) }
   if (yes.length > 0 && no.length > 0) return null
-  if (yes.length > 0) return { kind: 'yes', sure: sureOf(sense.unknownWords > 3 ? 0.5 : 0.85, yes) }
+  // "Ok?" asks whether all is well.
+  const isDoubted = sense.unknownWords > 3 || (sense.text.includes('?') && sense.words <= 2)
+  if (yes.length > 0) return { kind: 'yes', sure: sureOf(isDoubted ? 0.5 : 0.85, yes) }
   if (no.length > 0) return { kind: 'no', sure: noSureness(sense) }
   if (isSaid(sense, 'not') && sense.words <= 3 && sense.unknownWords === 0)
     return { kind: 'no', sure: 0.65 }

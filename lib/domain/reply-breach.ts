@@ -1,4 +1,4 @@
-import type { Danger } from './reply-danger'
+import type { Danger } from './reply-danger-kind'
 import type { Mark } from './reply-marks'
 import { areBeside, gapBetween, isSaid, said, sureOf, type Sense } from './reply-sense'
 
@@ -23,7 +23,13 @@ export function findBreach(sense: Sense): Danger | null {
   if (marks.length === 0) return null
   // "Very fast, thank you" may be joy over a washed filter; a mended leak may be none. A person asks.
   const isRushOnly = marks.every((mark) => mark.concept === 'fast') && isSaid(sense, 'thanks')
-  return { kind: 'broken', sure: isRushOnly || isSaid(sense, 'mended') ? 0.55 : sureOf(0.9, marks) }
+  // A torn cloth that they ask a new one for is no breach, yet near enough for a person to look.
+  const isCloth =
+    isSaid(sense, 'cloth') && isSaid(sense, 'need') && !isSaid(sense, 'piece', 'filter')
+  return {
+    kind: 'broken',
+    sure: isRushOnly || isCloth || isSaid(sense, 'mended') ? 0.55 : sureOf(0.9, marks),
+  }
 }
 
 /** "The flow dropped" is slow; "the filter dropped" may have broken its fibres. */

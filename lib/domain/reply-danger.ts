@@ -1,13 +1,8 @@
 import { findBreach } from './reply-breach'
+import type { Danger } from './reply-danger-kind'
 import { findIllness } from './reply-illness'
 import { findOddWater } from './reply-odd-water'
 import { isSaid, type Sense } from './reply-sense'
-
-export type Danger = {
-  kind: 'unwell' | 'broken' | 'odd-water'
-  sure: number
-  dangerSign?: boolean
-}
 
 /** Illness first, then a filter that must not be used, then water that must not be drunk. */
 export function findDanger(sense: Sense): Danger | null {

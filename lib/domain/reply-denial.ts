@@ -91,8 +91,12 @@ function denyBy(mark: Mark, field: Field): void {
   if (mark.concept === 'notNext') denyForward(mark, field, 1)
   if (mark.concept === 'notBack') denyBackward(mark, field, backwardReach)
   if (mark.concept === 'notPlus') denyPlus(mark, field)
-  if (mark.concept === 'notAround' && !denyBackward(mark, field, 1)) {
+  if (mark.concept === 'notAround' && (isOfThing(mark, field) || !denyBackward(mark, field, 1))) {
     denyForward(mark, field, forwardReach)
+  }
+  // "N'est plus rapide": announced by "ne", the comparison is a denial.
+  if (mark.concept === 'better' && field.tokens[mark.from]?.text === 'plus') {
+    mark.denied = isAnnounced(mark, field)
   }
   // "No hay fuga": what one has not is denied too; Bengali says it after the thing.
   const isAlsoNot = field.marks.some((other) => other.concept === 'not' && other.from === mark.from)
@@ -114,17 +118,27 @@ const comparable: ReadonlySet<Concept> = new Set<Concept>([
 ])
 
 function denyPlus(plus: Mark, field: Field): void {
-  const isAnnounced = field.marks.some(
+  const compares = field.marks.some((mark) => mark.from === plus.to && comparable.has(mark.concept))
+  const announced = isAnnounced(plus, field)
+  if (compares && !announced) return
+  if (!isOfThing(plus, field) && denyBackward(plus, field, 1)) return
+  denyForward(plus, field, announced ? forwardReach : 2)
+}
+
+/** "Ne" stands shortly before. */
+function isAnnounced(denial: Mark, field: Field): boolean {
+  return field.marks.some(
     (mark) =>
       mark.concept === 'ne' &&
-      mark.to <= plus.from &&
-      plus.from - mark.to <= 3 &&
-      !isFenced(mark.to, plus.from, field),
+      mark.to <= denial.from &&
+      denial.from - mark.to <= 3 &&
+      !isFenced(mark.to, denial.from, field),
   )
-  const compares = field.marks.some((mark) => mark.from === plus.to && comparable.has(mark.concept))
-  if (compares && !isAnnounced) return
-  if (denyBackward(plus, field, 1)) return
-  denyForward(plus, field, isAnnounced ? forwardReach : 2)
+}
+
+/** "Pas d'eau": what is denied is the thing after it, never the verb before. */
+function isOfThing(denial: Mark, { tokens }: Field): boolean {
+  return ['d', 'de'].includes(tokens[denial.to]?.text ?? '')
 }
 
 /** Places a denial does not cross: punctuation, "but" and "and". */

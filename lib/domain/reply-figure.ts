@@ -12,11 +12,17 @@ export function figureOf(sense: Sense): Figure | null {
   const spans = sense.figures.spans.filter((span) => span.minutes > 0)
   const last = spans.at(-1)
   if (last === undefined) return bareFigure(sense)
+  // "12 con 30 segundos": minutes stand bare before their seconds.
+  const whole = sense.figures.bare.find((bare) => bare.to <= last.from && last.from - bare.to === 1)
+  const isJoint = whole && secondsJoints.has(sense.tokens[whole.to]?.text ?? '')
+  if (isJoint && last.minutes < 1) return { minutes: whole.value + last.minutes, hasUnit: true }
   // "5 to 6 minutes": the low end stands bare just before the high one.
   const low = sense.figures.bare.find((bare) => isRangeBetween(sense, bare.to, last.from))
   const isRange = low && low.value > 0 && low.value < last.minutes && low.value >= last.minutes / 3
   return { minutes: isRange ? (low.value + last.minutes) / 2 : last.minutes, hasUnit: true }
 }
+
+const secondsJoints = new Set(['con', 'y', 'and', 'et'])
 
 /** Words that stand between the ends of a range. */
 const rangeWords = new Set('to or and a o y u ou et ba theke থেকে বা'.split(' '))

@@ -36,6 +36,18 @@ function readFigureAt(tokens: readonly Token[], from: number, { order, figures }
       { order, figures },
     )
   }
+  if (first.kind === 'shift') {
+    // "সোয়া এক ঘণ্টা": a quarter more than one hour.
+    const span = pieceAt(tokens, from + first.size, order)
+    if (span.kind === 'span') {
+      const minutes = span.minutes * (1 + first.by)
+      return pushSpan(
+        tokens,
+        { minutes, from, to: from + first.size + span.size },
+        { order, figures },
+      )
+    }
+  }
   const amount = readAmount(tokens, from, order)
   if (amount === null) return from + first.size
   const unit = pieceAt(tokens, amount.to, order)

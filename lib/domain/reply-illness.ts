@@ -1,4 +1,4 @@
-import type { Danger } from './reply-danger'
+import type { Danger } from './reply-danger-kind'
 import type { Mark } from './reply-marks'
 import { areBeside, denied, gapBetween, isNamed, said, sureOf, type Sense } from './reply-sense'
 import type { Concept } from './reply-words/concept'
@@ -40,7 +40,7 @@ function dangerSigns(sense: Sense): Mark[] {
     ...sleepy,
     ...unfed(sense),
     ...unroused(sense),
-    ...beside(sense, ['limp'], people, 5),
+    ...beside(sense, ['limp'], people, 10),
     ...beside(sense, ['frail', 'sleepy'], ['drink'], 4),
     ...beside(sense, ['blood'], ['ill', 'vomit', 'stool', 'belly'], 8),
     ...beside(sense, ['vomit'], ['all'], 3),
@@ -57,7 +57,9 @@ function unfed(sense: Sense): Mark[] {
 /** "Cannot wake him": not of a phone that nobody answers. */
 function unroused(sense: Sense): Mark[] {
   const things = said(sense, 'texts', 'phone', 'water', 'filter')
-  return denied(sense, 'wake').filter((mark) => !areBeside(sense, [mark], things, 8))
+  // "Ne se réveille pas bien": badly counts as not.
+  const badly = beside(sense, ['wake'], ['bad'], 0)
+  return [...denied(sense, 'wake'), ...badly].filter((mark) => !areBeside(sense, [mark], things, 8))
 }
 
 /** "Mi hijo está mal": something bad is said of a person, not of the water. */

@@ -60,7 +60,7 @@ function spellings(entry: string): string[] {
 
 function numberWords(pack: LanguagePack): string[] {
   const spoken = [pack.numbers, pack.weakNumbers, pack.spans, pack.halves, pack.shifts ?? '']
-  const others = [...Object.values(pack.units)]
+  const others = Object.values(pack.units)
   return [...spoken, ...others]
     .flatMap(listed)
     .flatMap((entry) => entry.split(' '))
@@ -191,6 +191,7 @@ export function guessedKeys(word: string, language: Language): string[] {
   for (const known of lexicon.words) {
     if (known.length < 4 || Math.abs(known.length - word.length) > 2) continue
     if (!beginsAlike(word, known)) continue
+    if (known.length === 4 && word.length !== 4 && squeezed !== squeeze(known)) continue
     if (length < 7 && !isBengali && !isLikelySlip(word, known)) continue
     const slips = isKeypadSlip(word, known)
       ? 1

@@ -1,4 +1,4 @@
-import type { Danger } from './reply-danger'
+import type { Danger } from './reply-danger-kind'
 import { areBeside, denied, gapBetween, isNamed, said, sureOf, type Sense } from './reply-sense'
 
 /** Water that must not be drunk: colour, smell, taste, fuel, things in it. */

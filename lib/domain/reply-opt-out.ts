@@ -37,7 +37,15 @@ export function optOutSureness(sense: Sense): number {
   if (stops.length > 0 && areBeside(sense, stops, said(sense, 'texts'), 3))
     return sureOf(0.9, stops)
   if (stops.length > 0 && isBareStop(sense)) return sureOf(0.9, stops)
+  if (isStopOfSomethingStrange(sense)) return 0.7
   return isMistypedStop(sense) ? 0.7 : 0
+}
+
+/** "Stop this nonsense": an order of two words or more, and nothing beside it that the desk knows. */
+function isStopOfSomethingStrange(sense: Sense): boolean {
+  const isOrder = said(sense, 'stopWord').some((mark) => mark.to - mark.from >= 2)
+  const isOnlyManners = sense.marks.every((mark) => manners.has(mark.concept))
+  return isOrder && isOnlyManners && sense.words <= 6 && !sense.text.includes('?')
 }
 
 /** "I don't want ... messages": the wish is denied, the messages stand beside it. */

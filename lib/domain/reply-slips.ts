@@ -2,7 +2,9 @@ import { distance } from 'fastest-levenshtein'
 
 /** Letters that share a key on a twelve-key phone. */
 const keys = ['abc', 'def', 'ghi', 'jkl', 'mno', 'pqrs', 'tuv', 'wxyz']
-const keyOf = new Map(keys.flatMap((letters, key) => [...letters].map((letter) => [letter, key])))
+const keyOf = new Map(
+  keys.flatMap((letters, key) => letters.split('').map((letter) => [letter, key])),
+)
 
 /**
  * How far a written word may stand from the word it is taken for. Short words are never guessed:

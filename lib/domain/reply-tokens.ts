@@ -87,7 +87,7 @@ export function foldText(text: string): string {
     .normalize('NFC')
     .replace(/œ/g, 'oe')
     .replace(/æ/g, 'ae')
-    .replace(/[\u200b-\u200f\u2060\ufeff\u00ad\ufe0f]/g, '')
+    .replace(/\u200b|\u200c|\u200d|\u200e|\u200f|\u2060|\ufeff|\u00ad|\ufe0f/g, '')
     .replace(/[‘’ʼ`´′]/g, "'")
     .replace(/[“”″]/g, '"')
     .replace(/#(?!\d)/g, ' number ')

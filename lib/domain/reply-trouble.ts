@@ -17,6 +17,9 @@ export function noFlowSureness(sense: Sense): number {
   const dry = denied(sense, 'water').concat(
     denied(sense, 'flow', 'fill').filter((mark) => !isQualified(sense, mark)),
   )
+  const idle = denied(sense, 'fall').filter((mark) =>
+    areBeside(sense, [mark], said(sense, 'outlet'), 5),
+  )
   const none = said(sense, 'none').filter(
     (mark) =>
       areBeside(sense, [mark], [...water, ...said(sense, 'outlet')], 4) ||
@@ -31,7 +34,7 @@ export function noFlowSureness(sense: Sense): number {
       areBeside(sense, [mark], water, 5) &&
       !said(sense, 'slow').some((slow) => slow.from === mark.from),
   )
-  const strong = [...dry, ...none, ...lacking, ...still, ...said(sense, 'blocked', 'dry')]
+  const strong = [...dry, ...none, ...idle, ...lacking, ...still, ...said(sense, 'blocked', 'dry')]
   if (strong.length > 0) return sureOf(0.85, strong)
   if (!isSaid(sense, 'none') || isNamed(sense, 'done', 'wash', 'change', 'notYet', 'ask')) return 0
   if (isSaid(sense, 'no') && !isSaid(sense, 'water', 'flow')) return 0

@@ -8,7 +8,7 @@ export function wrongNumberSureness(sense: Sense): number {
   if (areBeside(sense, mistaken, said(sense, 'phone', 'person', 'texts'), 2)) {
     return sureOf(0.8, mistaken)
   }
-  if (deniesName(sense)) return 0.7
+  if (deniesName(sense) || deniesPhone(sense)) return 0.7
   // "Who is this?" may be a forgotten programme or a stranger: a person answers.
   return isSaid(sense, 'who') ? 0.5 : 0
 }
@@ -27,6 +27,27 @@ function deniesName(sense: Sense): boolean {
   })
 }
 
+/** "This number is not hers", "ce numéro n'est pas celui de …", "eta … number na". */
+function deniesPhone(sense: Sense): boolean {
+  const denials = sense.marks.filter((mark) =>
+    ['not', 'notAround', 'notBack', 'notPlus', 'lack'].includes(mark.concept),
+  )
+  return said(sense, 'phone').some((phone) => {
+    const isThis = [1, 2, 3].some((back) => isThisWord(sense, phone.from - back))
+    const isDenied = denials.some(
+      (denial) => denial.from >= phone.to && denial.from - phone.to <= 2,
+    )
+    return isThis && isDenied
+  })
+}
+
+function isThisWord(sense: Sense, at: number): boolean {
+  const token = sense.tokens[at]
+  return token?.kind === 'word' && thisWords.has(token.text)
+}
+
+const thisWords = new Set('this that este ese ce cet ei eta eita ita এই এটা এইটা'.split(' '))
+
 /** "La señora", "Mrs", "madame". */
 function afterTitle(sense: Sense, at: number): number {
   const token = sense.tokens[at]
@@ -35,7 +56,7 @@ function afterTitle(sense: Sense, at: number): number {
 }
 
 const titles = new Set(
-  'la el le l mr mrs ms miss madam madame monsieur mme senor senora senorita don dona doctor the'.split(
+  'la el le l familia famille family mr mrs ms miss madam madame monsieur mme senor senora senorita don dona doctor the'.split(
     ' ',
   ),
 )

@@ -78,7 +78,8 @@ function isStopOrStopped(sense: Sense): boolean {
   if (isSaid(sense, 'itStopped')) return true
   if (isSaid(sense, 'notYet')) return false
   return (
-    isSaid(sense, 'ceased', 'stopWord') && !isDenied(sense, 'flow', 'water', 'slow', 'good', 'fast')
+    isSaid(sense, 'ceased', 'stopWord') &&
+    !isDenied(sense, 'flow', 'water', 'piece', 'cloth', 'slow', 'good', 'fast')
   )
 }
 

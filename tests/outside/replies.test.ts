@@ -10,16 +10,20 @@ import { freshEsReplies } from './replies/fresh-es'
 import { freshFrReplies } from './replies/fresh-fr'
 import { frReplies } from './replies/fr'
 import type { LabelledReply } from './replies/reply-set'
+import { thirdBnReplies } from './replies/third-bn'
+import { thirdEnReplies } from './replies/third-en'
+import { thirdEsReplies } from './replies/third-es'
+import { thirdFrReplies } from './replies/third-fr'
 
 // The aims of the issue: 97 % right or handed to a person, at most a tenth handed, and no danger,
 // opt-out or wrong number ever read as something else. Labels are by hand.
 
 const sets = { en: enReplies, es: esReplies, fr: frReplies, bn: bnReplies } as const
 const freshSets = {
-  en: freshEnReplies,
-  es: freshEsReplies,
-  fr: freshFrReplies,
-  bn: freshBnReplies,
+  en: [...freshEnReplies, ...thirdEnReplies],
+  es: [...freshEsReplies, ...thirdEsReplies],
+  fr: [...freshFrReplies, ...thirdFrReplies],
+  bn: [...freshBnReplies, ...thirdBnReplies],
 } as const
 const languages = ['en', 'es', 'fr', 'bn'] as const
 

@@ -1,4 +1,5 @@
 import type { LanguagePack } from './concept'
+import { bnContact } from './bn-contact'
 import { bnDanger } from './bn-danger'
 import { bnTalk } from './bn-talk'
 import { bnWater } from './bn-water'
@@ -6,9 +7,9 @@ import { bnWater } from './bn-water'
 /** Bengali as people text it, in its own script and in Latin letters. */
 export const bnPack: LanguagePack = {
   spelling: 'bengali',
-  concepts: { ...bnWater, ...bnDanger, ...bnTalk },
+  concepts: { ...bnWater, ...bnDanger, ...bnTalk, ...bnContact },
   numbers: `দুই 2, দু 2, তিন 3, চার 4, পাঁচ 5, পাচ 5, ছয় 6, সাত 7, আট 8, দশ 10, এগারো 11, এগার 11,
-    বারো 12, বার 12, তেরো 13, তের 13, চৌদ্দ 14, পনেরো 15, পনের 15, ষোল 16, ষোলো 16, সতেরো 17,
+    বারো 12, তেরো 13, তের 13, চৌদ্দ 14, পনেরো 15, পনের 15, ষোল 16, ষোলো 16, সতেরো 17,
     সতের 17, আঠারো 18, আঠার 18, উনিশ 19, ঊনিশ 19, বিশ 20, কুড়ি 20, একুশ 21, বাইশ 22, তেইশ 23,
     চব্বিশ 24, পঁচিশ 25, পচিশ 25, ছাব্বিশ 26, সাতাশ 27, আঠাশ 28, আটাশ 28, ঊনত্রিশ 29,
     উনত্রিশ 29, ত্রিশ 30, তিরিশ 30, পঁয়ত্রিশ 35, পয়ত্রিশ 35, চল্লিশ 40, পঁয়তাল্লিশ 45,
@@ -21,7 +22,7 @@ export const bnPack: LanguagePack = {
     chabbish 26, satash 27, athash 28, trish 30, tirish 30, tris 30, poytrish 35, chollish 40,
     collis 40, poytallish 45, ponchash 50, poncas 50, shaat 60, shottor 70, ashi 80, nobboi 90,
     eksho 100`,
-  weakNumbers: `এক 1, একটা 1, নয় 9, আধ 0.5, আধা 0.5, ek 1, ekta 1, noy 9, at 8, adh 0.5, adha 0.5,
+  weakNumbers: `বার 12, এক 1, একটা 1, নয় 9, আধ 0.5, আধা 0.5, ek 1, ekta 1, noy 9, at 8, adh 0.5, adha 0.5,
     আড়াই 2.5, দেড় 1.5, arai 2.5, aray 2.5, der 1.5, half 0.5`,
   units: {
     minute:

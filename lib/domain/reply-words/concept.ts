@@ -95,6 +95,7 @@ export const concepts = [
   'notYet',
   'day', // Bengali "kal": tomorrow or yesterday, as the verb has it
   'forgot',
+  'time', // denied, a reason for "not yet"
   'need',
   'lack', // "I have no"
   'lost',

@@ -50,7 +50,7 @@ export const enIllness: LanguagePack['concepts'] = {
   sleepy: `sleepy, sleepi, very sleepy, drowsy, drowzy, sleeps all, sleeps all day, sleeping all day, sleeping all the time, only sleeps, just sleeps, always sleeping, keeps sleeping, too sleepy, very tired, so tired, too tired, no energy, dazed, wont stay awake, cant stay awake, confused, out of it`,
   drink: `drink, drinks, drinking, drnk, swallow, breastfeed, breastfeeds, breast feed,
     breastfeeding, feed, suck, nurse, eat or drink, take milk, take any milk, sucking, sucks,
-    swallows, swallowing, feeding, drank`,
+    swallows, swallowing, feeding, drank, fed, drunk`,
   frail: `weak, tired, feeble`,
   breast: `breast, breasts, titty, boob, bottle feed, milk`,
   limp: `not moving, hardly moves, barely moves, hardly moving, floppy, limp, listless, shaking, trembling, jerking, stiff`,

@@ -1,4 +1,5 @@
 import type { LanguagePack } from './concept'
+import { enContact } from './en-contact'
 import { enIllness } from './en-danger'
 import { enTalk } from './en-talk'
 import { enWater } from './en-water'
@@ -6,7 +7,7 @@ import { enWater } from './en-water'
 /** English as people text it. */
 export const enPack: LanguagePack = {
   spelling: 'latin',
-  concepts: { ...enWater, ...enIllness, ...enTalk },
+  concepts: { ...enWater, ...enIllness, ...enTalk, ...enContact },
   numbers: `two 2, three 3, four 4, five 5, six 6, seven 7, eight 8, nine 9, ten 10, eleven 11,
     twelve 12, thirteen 13, fourteen 14, fifteen 15, sixteen 16, seventeen 17, eighteen 18,
     nineteen 19, twenty 20, thirty 30, forty 40, fourty 40, fifty 50, sixty 60, seventy 70,

@@ -69,7 +69,7 @@ export const esIllness: LanguagePack['concepts'] = {
     sueno`,
   drink: `beber, bebe agua, bebiendo, tomar, toma, tome, tomando, toman, tomarla, tomarlo, beberla,
     tragar, traga, mamar, mama leche, lactar, comer ni beber, comer ni tomar, beba, bebemos,
-    tomamos, tomo, tomas, beber nada`,
+    tomamos, tomo, tomas, beber nada, mamado, bebido, comido, tragado`,
   pronoun: `ella, ellos, yo, ellas`,
   frail: `debil, debiles, debilito, flojo, floja, cansado, cansada`,
   breast: `pecho, teta, chichi, seno, biberon, mamila, leche`,

@@ -54,8 +54,8 @@ export const frIllness: LanguagePack['concepts'] = {
     ne peut pas boire, peut pas boire, ne peut plus boire, peut plus boire, ne boit pas,
     n accepte rien, yeux se sont retournes, yeux retournes, yeux revulses, tient plus assis`,
   sleepy: `dort, dort tout le temps, dort beaucoup, dors tout le temps, ne fait que dormir, fait que dormir, fait rien que dormir, dort sans arret, dort toute la journee, dort trop, somnolent, somnolente, somnole, endormi, endormie, tres endormi, tres endormie, tres fatigue, tres fatiguee, trop fatigue, trop fatiguee, plus de force, plus de forces, sans force, sans forces, sans energie, plus d energie, epuise, epuisee, assoupi, assoupie, tout endormi, toute endormie, fatigue fatigue, dort encore et encore`,
-  drink:
-    'boire, boit, bois, boivent, boi, bu, buvait, teter, tete, avaler, avale, boire ni manger, manger ni boire, allaiter, allaite, buvons, buvez',
+  drink: `boire, boit, bois, boivent, boi, bu, buvait, teter, tete, avaler, avale, boire ni manger,
+    manger ni boire, allaiter, allaite, buvons, buvez, avalé, tété, allaité`,
   pronoun: `elle, il, ils, elles, on`,
   frail: `faible, faibles, fatigue, fatiguee, sans force`,
   breast: `sein, biberon, teton, lait, mamelle`,

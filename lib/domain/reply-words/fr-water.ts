@@ -2,7 +2,7 @@ import type { LanguagePack } from './concept'
 
 /** French: the filter, its water, and what can be wrong with them. Written without accents. */
 export const frWater: LanguagePack['concepts'] = {
-  water: 'eau, eaux, leau, deau, lo, o, debit, jet, filet, pression, d eau',
+  water: `eau, eaux, leau, deau, lo, o, debit, jet, filet, pression, d eau, flux`,
   filter: 'filtre, filtres, filtr, appareil, kit, systeme, purificateur, machine, dispositif',
   piece: `bouchon, bouchons, capuchon, couvercle, couvercles, tuyau, tuyaux, tuyo, tuyeau, tube, tubes, robinet, robinets, cartouche, cartouches, fibre, fibres, membrane, charbon, etage, etages,
     piece, pieces, partie, parties, seringue, seringues, serinque, joint, joints, raccord, raccords, vis, clapet, poignee, rechange, embout, coque, boitier, rondelle, collier, capsule`,
@@ -11,7 +11,8 @@ export const frWater: LanguagePack['concepts'] = {
     'seau, seaux, bidon, bidons, bac, cuve, recipient, reservoir, bassine, jarre, bouteille, bouteilles, marmite, citerne, fut, jerrican, canari, carafe',
   edge: `cote, cotes, bas, dessous, fond, bord, bords, jointure, partout, par terre, sol, base,
     dehors, a travers, l exterieur, dessus, par le haut, jonction, filetage, niveau du joint,
-    joint, joints, en dessous, autour`,
+    joint, joints, en dessous, autour, la ou le tuyau, se branche, se visse, la ou se,
+    au raccord`,
   source: 'riviere, puits, marigot, source, fleuve, lac, forage, ruisseau, pluie, etang',
   flow: `coule, coulent, coulait, couler, coulant, sort, sortent, sortait, sortir, sorte, sors,
     passe, passent, passait, passer, vient, viens, venait, venir, arrive, descend, descent,
@@ -27,14 +28,16 @@ export const frWater: LanguagePack['concepts'] = {
     presque plus, presque pas d eau, presque plus d eau, traine, tortue, escargot, emojislow,
     peu d eau, pas de pression, plus de pression, sans pression, pas beaucoup,
     pas grand chose, mollo, petit a petit, peu a peu, au ralenti, tarde, tarder,
-    tout petit debit, debit est tout petit, tout petit filet`,
+    tout petit debit, debit est tout petit, tout petit filet, fil d eau, petit fil, mince fil,
+    juste un fil`,
   little:
     'peu, un peu, tres peu, petit peu, moins, pe, peu peu, petit debit, petite quantite, trop peu',
   long: `longtemps, lontemps, lontemp, longtemp, long temps, tro long, long, longue, des heures,
     toute la journee, toute la nuit, toute la matinee, une eternite, des siecles,
     beaucoup de temps, bcp de temps, trop de temps, tout le temps pour, plus de temps,
     demi journee, met du temps, prend du temps, dure, perd du temps, des plombes,
-    un temps fou, heures pour, toute une nuit, tout une nuit, toute une journee`,
+    un temps fou, heures pour, toute une nuit, tout une nuit, toute une journee,
+    attendre des heures, attendre longtemps`,
   none: `rien, vide, zero, sec, seche, a sec, ryen, que dalle, neant, kedal, walou`,
   blocked: `bouche, bouché, bouchee, bouches, bouchait, bloque, bloquee, bloques, bloqué, obstrue,
     obstruee, coince, coincee, colmate, colmatee, encrasse, encrassee, engorge, bouch,

@@ -1,4 +1,5 @@
 import type { LanguagePack } from './concept'
+import { frContact } from './fr-contact'
 import { frIllness } from './fr-danger'
 import { frTalk } from './fr-talk'
 import { frWater } from './fr-water'
@@ -6,7 +7,7 @@ import { frWater } from './fr-water'
 /** French as people text it; elided words stand apart ("l eau", "n est"), without accents. */
 export const frPack: LanguagePack = {
   spelling: 'french',
-  concepts: { ...frWater, ...frIllness, ...frTalk },
+  concepts: { ...frWater, ...frIllness, ...frTalk, ...frContact },
   numbers: `deux 2, trois 3, troi 3, quatre 4, katre 4, cinq 5, cink 5, sept 7, huit 8, dix 10, onze 11,
     douze 12, treize 13, quatorze 14, quinze 15, kinze 15, seize 16, dix sept 17, dix huit 18,
     dix neuf 19, vingt 20, vint 20, vin 20, trente 30, quarante 40, cinquante 50, soixante 60,
