@@ -2,6 +2,7 @@ import 'server-only'
 import { verify } from '@node-rs/argon2'
 import { getServerSession, type NextAuthOptions } from 'next-auth'
 import Credentials from 'next-auth/providers/credentials'
+import { RateLimiterMemory } from 'rate-limiter-flexible'
 import { findStaff, findStaffByEmail } from '@/db/queries/staff'
 import { getDeps } from './deps'
 import type { Actor } from './domain/role'
@@ -27,14 +28,24 @@ declare module 'next-auth/jwt' {
 const NOBODY =
   '$argon2id$v=19$m=19456,t=2,p=1$c29tZXNhbHRzb21lc2FsdA$wDxGfHVQm0HT0oYW1Tq0dPTd7DW5v8XDXdtVDyDQ5zM'
 
+/** Ten tries in a quarter of an hour for one account: guessing is slow, a forgotten key is not. */
+const tries = new RateLimiterMemory({ points: 10, duration: 15 * 60 })
+
 async function authorize(given: Record<'email' | 'password', string> | undefined) {
   const email = given?.email?.trim() ?? ''
   const password = given?.password ?? ''
   if (!email || !password || password.length > 200) return null
+  const key = email.toLowerCase()
+  const isLeft = await tries.consume(key).then(
+    () => true,
+    () => false,
+  )
+  if (!isLeft) throw new Error('too many tries')
   const { store } = await getDeps()
   const found = await findStaffByEmail(store.db, email)
   const right = await verify(found?.passwordHash ?? NOBODY, password).catch(() => false)
   if (!found || !right || found.disabledAt !== null) return null
+  await tries.delete(key)
   return {
     id: found.id,
     email: found.email,

@@ -3,8 +3,6 @@ import { LargeColumn } from './column-large'
 import { SmallColumn } from './column-small'
 import type { ColumnStage } from './stage'
 
-export type { ColumnStage } from './stage'
-
 type ColumnProps = {
   size: 'small' | 'large'
   /** From the top down; positions left out are not drawn. */

@@ -21,20 +21,3 @@ export function MarginFigure({ figure, children }: { figure: ReactNode; children
     </div>
   )
 }
-
-type Pair = { name: string; value: ReactNode }
-
-/** Names and what they are, in pairs; a pair without a value is left out. */
-export function Pairs({ pairs }: { pairs: readonly (Pair | null | false)[] }) {
-  const given = pairs.filter((pair): pair is Pair => Boolean(pair))
-  return (
-    <dl className="grid grid-cols-[minmax(6rem,auto)_minmax(0,1fr)] gap-x-5 gap-y-1.5">
-      {given.map(({ name, value }) => (
-        <div key={name} className="contents">
-          <dt className="text-faint">{name}</dt>
-          <dd>{value}</dd>
-        </div>
-      ))}
-    </dl>
-  )
-}

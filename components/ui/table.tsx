@@ -54,18 +54,3 @@ export function Td({
     <td {...rest} className={`border-b border-rule px-3 py-2.5 align-top ${set} ${className}`} />
   )
 }
-
-/** A name over the rows below it, across `columns`. */
-export function GroupRow({ name, columns }: { name: string; columns: number }) {
-  return (
-    <tr>
-      <th
-        scope="rowgroup"
-        colSpan={columns}
-        className="border-b border-ink px-3 pt-5.5 pb-2.5 font-title text-lg font-semibold"
-      >
-        {name}
-      </th>
-    </tr>
-  )
-}

@@ -14,7 +14,7 @@ export async function findHealth(db: Handle, now: number) {
       (select (extract(epoch from max(created_at)) * 1000)::float8 from prompts) as last_plan_at,
       (select (extract(epoch from min(send_after)) * 1000)::float8 from texts
         where state = 'queued' and send_after <= ${new Date(now).toISOString()}::timestamptz) as oldest_unsent_at`)
-  const row = (found.rows[0] ?? {}) as Record<string, unknown>
+  const row = found.rows[0] ?? {}
   return {
     inDoubt: Number(row.in_doubt ?? 0),
     lastSentAt: instantOf(row.last_sent_at),

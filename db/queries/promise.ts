@@ -14,7 +14,7 @@ export async function listAvailable(db: Handle, partId: string, firstDepotId: st
         where p.depot_id = d.id and p.part_id = ${partId} and p.state = 'promised') as promised
     from depots d
     order by d.id <> ${firstDepotId}, d.name collate "C"`)
-  return (found.rows as Record<string, unknown>[]).map((row) => ({
+  return found.rows.map((row) => ({
     depotId: String(row.id),
     name: String(row.name),
     inHand: Number(row.in_hand),
@@ -32,15 +32,6 @@ export async function lockShelf(db: Handle, partId: string) {
 export async function insertPromise(db: Handle, row: typeof partPromises.$inferInsert) {
   const [made] = await db.insert(partPromises).values(row).onConflictDoNothing().returning()
   return made ?? null
-}
-
-export async function findPromiseForUpdate(db: Handle, promiseId: string) {
-  const [row] = await db
-    .select()
-    .from(partPromises)
-    .where(eq(partPromises.id, promiseId))
-    .for('update')
-  return row ?? null
 }
 
 export async function findOpenPromise(db: Handle, kitId: string) {

@@ -47,7 +47,7 @@ export async function listDue(db: Handle, horizon: string, limit: number): Promi
       )
     order by d.due_on, d.kit_id, d.kind, d.position
     limit ${limit}`)
-  return (found.rows as Record<string, unknown>[]).map((row) => ({
+  return found.rows.map((row) => ({
     kitId: String(row.kit_id),
     kind: row.kind as DueRow['kind'],
     dueOn: String(row.due_on),

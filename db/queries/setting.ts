@@ -1,14 +1,8 @@
-import { eq } from 'drizzle-orm'
 import type { Handle } from '../client'
 import { settings } from '../schema/area'
 
 export async function listSettings(db: Handle) {
   return db.select().from(settings)
-}
-
-export async function findSetting(db: Handle, key: string): Promise<unknown> {
-  const [row] = await db.select().from(settings).where(eq(settings.key, key))
-  return row?.value ?? null
 }
 
 export async function upsertSetting(db: Handle, row: typeof settings.$inferInsert) {

@@ -25,11 +25,6 @@ export async function findTextForUpdate(db: Handle, textId: string) {
   return row ?? null
 }
 
-export async function findTextByPurpose(db: Handle, purpose: string) {
-  const [row] = await db.select().from(texts).where(eq(texts.purpose, purpose))
-  return row ?? null
-}
-
 export async function updateText(
   db: Handle,
   textId: string,

@@ -57,7 +57,9 @@ function figure(random: Random, family: Family): string {
   return random.pick(voices[family.language].minutes(Math.max(2, Math.round(family.minutes))))
 }
 
-function words(random: Random, family: Family, moment: string, day: number): string | null {
+type Asked = { moment: string; day: number }
+
+function words(random: Random, family: Family, { moment, day }: Asked): string | null {
   const voice = voices[family.language]
   if (moment === 'wash-due' || moment === 'wash-nudge') {
     if (family.minutes > family.cleanMinutes * 2.2) return random.pick(voice.slow)
@@ -84,7 +86,7 @@ export function replyTo(
   { moment, at, day }: { moment: string; at: number; day: number },
 ): Reply | null {
   if (!random.chance(family.answers)) return null
-  const body = words(random, family, moment, day)
+  const body = words(random, family, { moment, day })
   if (body === null) return null
   const isWalking = moment.startsWith('step-') || moment.startsWith('ask-')
   const delay = isWalking ? 0.3 + random.next() * 3 : 0.5 + random.next() * 9

@@ -10,14 +10,9 @@ import { householdInputSchema } from '@/lib/schemas/household-entry'
 import { enterArea } from '@/lib/services/enter-area'
 import { enterDepot } from '@/lib/services/enter-depot'
 import { enterHousehold } from '@/lib/services/enter-household'
-import { newFamily, type Family } from './family'
+import { newFamily } from './family'
 import { places, timeZone, type Place } from './places'
 import type { Random } from './random'
-
-export type Settled = {
-  families: Map<string, Family>
-  phones: { number: string; label: string; language: string }[]
-}
 
 type Setting = { deps: Deps; coordinator: Actor; random: Random; modelId: string }
 

@@ -1,7 +1,7 @@
 import { normalQuantile, upperTail95 } from './quantile'
 
-export { medianInterval, quantileInterval, type Spread } from './measure-median'
-export { survival, survivalQuantile, type LifeTime, type SurvivalStep } from './measure-survival'
+export { medianInterval, quantileInterval } from './measure-median'
+export { survival, survivalQuantile, type LifeTime } from './measure-survival'
 
 /**
  * Wilson's 95 % interval of a proportion, `count` of `n`. Unlike the school-book interval it stays

@@ -1,7 +1,7 @@
 import { addDays } from './day'
 import { normalQuantile } from './quantile'
 
-export { available, countCorrection, onHand, stockOuts, type StockMove } from './part-ledger'
+export { available, countCorrection, onHand, stockOuts } from './part-ledger'
 
 function chanceArgument(chance: number) {
   if (!(chance > 0 && chance < 1)) throw new RangeError('a chance lies between 0 and 1')

@@ -1,7 +1,7 @@
 import { daysBetween } from './day'
 
 export { insideWindow, localDay, localMinute, nextInsideWindow, type Window } from './round-window'
-export { planAhead, type DayAhead, type KitAhead, type WhatIf } from './round-ahead'
+export { planAhead, type KitAhead } from './round-ahead'
 export { sendAfter } from './round-spread'
 
 export type DueKind = 'wash' | 'change' | 'flow check' | 'welcome'

@@ -64,7 +64,8 @@ export function outcomeOf(error: unknown): SendOutcome {
   if (typeof code === 'string' && neverConnected.includes(code)) {
     return { kind: 'refused', code, refusal: 'later', retryAfterSeconds: 60 }
   }
-  const what = typeof status === 'number' ? `answer ${status}` : String(code ?? 'no answer')
+  const what =
+    typeof status === 'number' ? `answer ${status}` : typeof code === 'string' ? code : 'no answer'
   return { kind: 'in doubt', why: what }
 }
 
@@ -80,7 +81,12 @@ export function hostedCarrier(settings: CarrierSettings): Carrier {
   return {
     async send({ to, body, receiptUrl }) {
       try {
-        const made = await client.messages.create({ to, body, statusCallback: receiptUrl, ...sender })
+        const made = await client.messages.create({
+          to,
+          body,
+          statusCallback: receiptUrl,
+          ...sender,
+        })
         return { kind: 'accepted', sid: made.sid, status: made.status }
       } catch (error) {
         return outcomeOf(error)

@@ -13,7 +13,7 @@ export const phoneNumberSchema = z
   .max(40, SHAPE)
   .transform((text, context) => {
     const number = parsePhoneNumberFromString(text.trim().replace(/^00/, '+'))
-    if (number?.isPossible() && !number.ext) return number.number as string
+    if (number?.isPossible() && !number.ext) return String(number.number)
     context.addIssue({ code: 'custom', message: SHAPE })
     return z.NEVER
   })

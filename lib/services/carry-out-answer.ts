@@ -23,8 +23,7 @@ export type AnswerRun = {
 async function changeConsent(
   tx: Transaction,
   deps: Deps,
-  run: AnswerRun,
-  consent: 'given' | 'withdrawn',
+  { run, consent }: { run: AnswerRun; consent: 'given' | 'withdrawn' },
 ) {
   await insertConsent(tx, {
     phoneId: run.phoneId,
@@ -37,7 +36,11 @@ async function changeConsent(
   if (consent === 'given') await updatePhone(tx, run.phoneId, { carrierBlocked: false })
 }
 
-async function reply(tx: Transaction, deps: Deps, run: AnswerRun, moment: Moment) {
+async function reply(
+  tx: Transaction,
+  deps: Deps,
+  { run, moment }: { run: AnswerRun; moment: Moment },
+) {
   const phone = await findPhone(tx, run.phoneId)
   if (!phone) return
   await queueText(tx, deps, {
@@ -55,8 +58,7 @@ async function reply(tx: Transaction, deps: Deps, run: AnswerRun, moment: Moment
 async function raise(
   tx: Transaction,
   deps: Deps,
-  run: AnswerRun,
-  raised: Omit<Parameters<typeof raiseTrouble>[2], 'facts'>,
+  { run, ...raised }: { run: AnswerRun } & Omit<Parameters<typeof raiseTrouble>[2], 'facts'>,
 ) {
   const applied = await raiseTrouble(tx, deps, { facts: run.facts, ...raised })
   if (applied.ok) await updateText(tx, run.text.id, { ticketId: applied.ticketId })
@@ -71,10 +73,10 @@ async function logFlow(
   const { facts, text } = run
   const flow = { facts, minutes: act.minutes, known: 'said' as const, textId: text.id }
   const { recovery, need } = await recordFlow(tx, deps, flow)
-  if (recovery.kind === 'too-fast') return raise(tx, deps, run, { trouble: 'unsafe' })
+  if (recovery.kind === 'too-fast') return raise(tx, deps, { run, trouble: 'unsafe' })
   const isSlow = recovery.kind !== 'restored' || need.kind !== 'enough'
-  if (!isSlow && !act.saysSlow) return reply(tx, deps, run, 'thanks')
-  return raise(tx, deps, run, { trouble: 'slow', figure: { recovery, need: need.kind } })
+  if (!isSlow && !act.saysSlow) return reply(tx, deps, { run, moment: 'thanks' })
+  return raise(tx, deps, { run, trouble: 'slow', figure: { recovery, need: need.kind } })
 }
 
 async function answerStep(
@@ -122,9 +124,9 @@ async function carryOut(
 ): Promise<unknown> {
   switch (act.kind) {
     case 'withdraw consent':
-      return changeConsent(tx, deps, run, 'withdrawn')
+      return changeConsent(tx, deps, { run, consent: 'withdrawn' })
     case 'give consent':
-      return changeConsent(tx, deps, run, 'given')
+      return changeConsent(tx, deps, { run, consent: 'given' })
     case 'suspend phone':
       return updatePhone(tx, run.phoneId, { state: 'suspended', stateWhy: act.why })
     case 'mark moved':
@@ -140,9 +142,9 @@ async function carryOut(
     case 'answer step':
       return answerStep(tx, deps, { run, act })
     case 'raise trouble':
-      return raise(tx, deps, run, { trouble: act.trouble })
+      return raise(tx, deps, { run, trouble: act.trouble })
     case 'send':
-      return reply(tx, deps, run, act.moment)
+      return reply(tx, deps, { run, moment: act.moment })
   }
 }
 

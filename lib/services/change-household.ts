@@ -41,7 +41,7 @@ async function unlinkPhone(
   link: { householdId: string; phoneId: string },
 ) {
   for (const text of await listWaitingPromptTexts(tx, link)) {
-    await dropText(tx, deps, text, 'the household has another phone')
+    await dropText(tx, deps, { text, why: 'the household has another phone' })
   }
   await deleteHouseholdPhone(tx, link.householdId, link.phoneId)
 }

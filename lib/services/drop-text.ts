@@ -7,8 +7,7 @@ import type { Deps } from '@/lib/deps'
 export async function dropText(
   tx: Transaction,
   deps: Deps,
-  text: TextRow,
-  why: string,
+  { text, why }: { text: TextRow; why: string },
 ): Promise<void> {
   await updateText(tx, text.id, { state: 'dropped', stateWhy: why })
   const prompts = await listPromptsOfText(tx, text.id)

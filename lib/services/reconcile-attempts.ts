@@ -61,7 +61,7 @@ async function reconcile(deps: Deps, { attempt, text }: { attempt: AttemptRow; t
             stateWhy: 'the carrier has no such text',
           })
         if (text.notAfter !== null && text.notAfter < deps.clock.now())
-          return dropText(tx, deps, text, 'too late')
+          return dropText(tx, deps, { text, why: 'too late' })
         return updateText(tx, text.id, { state: 'queued', sendAfter: deps.clock.now() })
     }
   })

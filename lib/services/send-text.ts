@@ -44,7 +44,7 @@ async function claim(tx: Transaction, deps: Deps, textId: string): Promise<Claim
   if (!text?.phoneId || text.state !== 'queued') return null
   const decision = await decisionFor(tx, text, now)
   if (decision.kind === 'drop') {
-    await dropText(tx, deps, text, decision.why)
+    await dropText(tx, deps, { text, why: decision.why })
     return null
   }
   if (decision.kind === 'wait') {

@@ -88,6 +88,6 @@ export async function refuseAttempt(
     deps.log.error({ textId: text.id, code: refusal.code }, 'the carrier refused a text')
     await updateText(tx, text.id, { state: 'failed', stateWhy: refusal.code })
   } else {
-    await dropText(tx, deps, text, refusal.code)
+    await dropText(tx, deps, { text, why: refusal.code })
   }
 }

@@ -1,4 +1,4 @@
-import { expect, type Browser, type Page } from '@playwright/test'
+import { expect, type Browser, type BrowserContextOptions, type Page } from '@playwright/test'
 
 const PASSWORD = 'water runs downhill'
 
@@ -25,8 +25,12 @@ export function expectQuietConsole(...pages: Page[]): void {
 }
 
 /** A browser of their own in which a person of staff has signed in. */
-export async function signIn(browser: Browser, desk: string, who: Who): Promise<Page> {
-  const context = await browser.newContext({ baseURL: desk })
+export async function signIn(
+  browser: Browser,
+  desk: string,
+  { as = {}, ...who }: Who & { as?: BrowserContextOptions },
+): Promise<Page> {
+  const context = await browser.newContext({ baseURL: desk, ...as })
   const page = await context.newPage()
   watchConsole(page)
   await page.goto('/')

@@ -1,5 +1,6 @@
 import { readFileSync } from 'node:fs'
 import path from 'node:path'
+import { AxeBuilder } from '@axe-core/playwright'
 import { expect, test, type Page } from '@playwright/test'
 import { phoneOf, type Phone } from './phone'
 import { startProgramme, type Programme } from './programme'
@@ -185,3 +186,57 @@ test('one household’s trouble, from a prompt in new words to water that runs, 
 
   expectQuietConsole(desk, shift)
 })
+
+const pages = [
+  '/shift',
+  '/households',
+  '/households/new',
+  '/wording',
+  '/wording/wash-due/es',
+  '/rounds',
+  '/areas',
+  '/areas/new',
+  '/depots',
+  '/depots/new',
+  '/practice',
+]
+
+for (const width of [1280, 375]) {
+  for (const colorScheme of ['light', 'dark'] as const) {
+    test(`axe finds nothing at ${width} px, ${colorScheme}, and nothing hangs over the side`, async ({
+      browser,
+    }) => {
+      test.setTimeout(300_000)
+      const page = await signIn(browser, programme.desk, {
+        ...coordinator,
+        as: { colorScheme, viewport: { width, height: 900 } },
+      })
+      const household = await firstHref(page, '/households', '/households/')
+      const sheet = await firstHref(page, '/shift', '/tickets/')
+      for (const address of [...pages, sheet, household]) {
+        await page.goto(address)
+        await expect(page.getByRole('heading', { level: 1 })).toBeVisible()
+        const found = await new AxeBuilder({ page }).analyze()
+        expect({
+          address,
+          found: found.violations.map(({ id, nodes }) => `${id} ${nodes[0]?.html}`),
+        }).toEqual({
+          address,
+          found: [],
+        })
+        const over = await page.evaluate(
+          () => document.documentElement.scrollWidth - window.innerWidth,
+        )
+        expect({ address, over: Math.max(0, over) }).toEqual({ address, over: 0 })
+      }
+    })
+  }
+}
+
+/** The first link of a list that leads into it, not to its form. */
+async function firstHref(page: Page, list: string, into: string): Promise<string> {
+  await page.goto(list)
+  const links = page.locator(`main a[href^="${into}"]:not([href$="/new"])`)
+  await expect(links.first()).toBeVisible()
+  return (await links.first().getAttribute('href')) ?? list
+}

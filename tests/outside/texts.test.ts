@@ -1,4 +1,4 @@
-import { createRequire } from 'node:module'
+import { split } from 'split-sms'
 import { describe, expect, it } from 'vitest'
 import { seeded } from '@/tests/factories/seeded'
 import { offendingCharacters, segmentsOf, unitsPerPart } from '@/lib/domain/wording'
@@ -7,10 +7,9 @@ import { readingGrade } from '@/lib/domain/wording-reading'
 
 /*
  * CHECKS.md section 10. Sources: 3GPP TS 23.038 (alphabet; 160/153 septets, 70/67 units) and
- * TS 23.040 §9.2.3.24.1 (an escape pair is not split). Oracle: split-sms 0.1.7, which ships no types.
+ * TS 23.040 §9.2.3.24.1 (an escape pair is not split). Oracle: split-sms 0.1.7.
  */
-type SplitSms = { split: (text: string) => { characterSet: 'GSM' | 'Unicode'; parts: unknown[] } }
-const oracle = createRequire(import.meta.url)('split-sms') as SplitSms
+const oracle = { split }
 
 describe('3GPP TS 23.038 and 23.040', () => {
   it.each([

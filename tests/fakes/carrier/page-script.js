@@ -195,7 +195,7 @@ async function poll() {
 
 async function keepFresh() {
   await poll().catch(report)
-  setTimeout(keepFresh, pollMilliseconds)
+  setTimeout(() => void keepFresh(), pollMilliseconds)
 }
 
 bottoms()

@@ -1,0 +1,5 @@
+export type Danger = {
+  kind: 'unwell' | 'broken' | 'odd-water'
+  sure: number
+  dangerSign?: boolean
+}
