@@ -15,6 +15,7 @@ import { startQueue } from '@/jobs/boss'
 import { buildQueue } from './build-queue'
 import { lastMorning, liveHistory, type History } from './history'
 import { makePeople } from './people'
+import { phoneHistory } from './phone-history'
 import { places, timeZone } from './places'
 import { random as seeded } from './random'
 import { modelIdOf, settleFamily, settlePlaces } from './settle'
@@ -131,6 +132,8 @@ async function main(): Promise<void> {
   phones.push(...(await settleNewcomers(settling, areas)))
   await lastMorning(history)
   writeFileSync(path.join(folder, 'phones.json'), JSON.stringify(phones))
+  const past = await phoneHistory(deps)
+  writeFileSync(path.join(folder, 'phone-history.json'), JSON.stringify(past))
   await deps.store.keepHouse()
   await deps.close()
   unlock()

@@ -2,6 +2,7 @@
  * `npm start`: the whole desk on one machine with invented data. Plain Node, so that it runs on a bare clone; it
  * installs and builds what is missing, then starts the practice carrier, the practice mail server and the desk.
  */
+import { existsSync, readFileSync, rmSync } from 'node:fs'
 import path from 'node:path'
 import { childGroup } from './children.mjs'
 import { ensureDemo } from './demo.mjs'
@@ -38,6 +39,7 @@ process.on('SIGTERM', () => void stopForSignal())
 
 startPrograms()
 await waitUntilReady()
+await fillPhones()
 tellAddresses()
 
 async function refuseTakenPorts() {
@@ -85,6 +87,21 @@ async function waitUntilReady() {
       await new Promise((resolve) => setTimeout(resolve, 250))
     }
   }
+}
+
+/** Once: the phones get what the demo's history has brought them. The carrier keeps it from then on. */
+async function fillPhones() {
+  const file = path.join(demoFolder, 'phone-history.json')
+  if (!existsSync(file)) return
+  const response = await fetch(`http://127.0.0.1:${ports.carrier}/practice/history`, {
+    method: 'POST',
+    headers: { 'content-type': 'application/json' },
+    body: readFileSync(file),
+    signal: AbortSignal.timeout(20_000),
+  })
+  if (!response.ok)
+    return giveUp(`The practice phones did not take their history. Logs: ${logFolder}`)
+  rmSync(file)
 }
 
 async function answers(address) {
