@@ -1,5 +1,7 @@
-import { and, eq } from 'drizzle-orm'
+import { and, asc, eq, isNull, or } from 'drizzle-orm'
 import type { Handle } from '../client'
+import { areas } from '../schema/area'
+import { households } from '../schema/household'
 import { visits } from '../schema/visit'
 
 /** A visit; null when the household has one due already. */
@@ -14,6 +16,28 @@ export async function findDueVisit(db: Handle, householdId: string) {
     .from(visits)
     .where(and(eq(visits.householdId, householdId), eq(visits.state, 'due')))
   return row ?? null
+}
+
+/** What a visitor has to do, earliest first: visits given to them, and those given to nobody yet. */
+export async function listDueVisits(db: Handle, visitorId: string) {
+  return db
+    .select({
+      id: visits.id,
+      visitorId: visits.visitorId,
+      dueOn: visits.dueOn,
+      why: visits.why,
+      household: households.name,
+      area: areas.name,
+      place: households.place,
+      language: households.language,
+    })
+    .from(visits)
+    .innerJoin(households, eq(households.id, visits.householdId))
+    .innerJoin(areas, eq(areas.id, households.areaId))
+    .where(
+      and(eq(visits.state, 'due'), or(eq(visits.visitorId, visitorId), isNull(visits.visitorId))),
+    )
+    .orderBy(asc(visits.dueOn), asc(households.name))
 }
 
 export async function endVisit(
