@@ -14,7 +14,8 @@ export class OutsideTransactionError extends Error {
 
 /** Runs `work` as the inside of a transaction; everything it awaits is inside too. */
 export function insideTransaction<T>(work: () => Promise<T>): Promise<T> {
-  return inside.run(true, work)
+  // A query starts when it is awaited: one that `work` only returns is awaited here, still inside.
+  return inside.run(true, async () => await work())
 }
 
 /** Throws when called from inside a transaction. */
