@@ -103,9 +103,12 @@ function done(sense: Sense): Answer | null {
   if (marks.length > 0) return { kind: 'done', sure: sureOf(0.85, marks) }
   if (isOver(sense)) return { kind: 'done', sure: 0.75 }
   const runsWell = areBeside(sense, said(sense, 'flow'), said(sense, 'good', 'fast'), 3)
+  const isWashOk = isSaid(sense, 'wash') && isSaid(sense, 'yes', 'good') && sense.words <= 3
   const isCleaned = sense.asked === 'wash' && isSaid(sense, 'clean')
   const isWellNow = isSaid(sense, 'good') && isSaid(sense, 'now') && sense.asked !== 'none'
-  return runsWell || isWellNow || isCleaned ? { kind: 'done', sure: 0.7 } : null
+  return runsWell || isWellNow || isCleaned || (sense.asked === 'wash' && isWashOk)
+    ? { kind: 'done', sure: 0.7 }
+    : null
 }
 
 function keywords(sense: Sense): Answer | null {
@@ -153,8 +156,8 @@ function yesNo(sense: Sense): Answer | null {
   const isDoubted = sense.unknownWords > 3 || (sense.text.includes('?') && sense.words <= 2)
   if (yes.length > 0) return { kind: 'yes', sure: sureOf(isDoubted ? 0.5 : 0.85, yes) }
   if (no.length > 0) return { kind: 'no', sure: noSureness(sense) }
-  if (isSaid(sense, 'not') && sense.words <= 3 && sense.unknownWords === 0)
-    return { kind: 'no', sure: 0.65 }
+  const isPlainNo = isSaid(sense, 'not') && !isDenied(sense, 'drip', 'texts', 'phone')
+  if (isPlainNo && sense.words <= 3 && sense.unknownWords === 0) return { kind: 'no', sure: 0.65 }
   return isSaid(sense, 'good') && sense.unknownWords <= 2 ? { kind: 'yes', sure: 0.62 } : null
 }
 

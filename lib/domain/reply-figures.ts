@@ -8,6 +8,8 @@ import type { NumberUnit } from './reply-words/concept'
 export type Figures = {
   spans: { minutes: number; from: number; to: number }[]
   bare: { value: number; from: number; to: number }[]
+  /** An amount by the hour was given: "one cup an hour". */
+  hasRate: boolean
 }
 
 const minutesPer: Record<Exclude<NumberUnit, 'other'>, number> = {
@@ -18,7 +20,7 @@ const minutesPer: Record<Exclude<NumberUnit, 'other'>, number> = {
 
 /** Every time span and bare number, whichever language it is said in. */
 export function readFigures(tokens: readonly Token[], own: Language): Figures {
-  const figures: Figures = { spans: [], bare: [] }
+  const figures: Figures = { spans: [], bare: [], hasRate: false }
   const order = languageOrder(own)
   let at = 0
   while (at < tokens.length) at = readFigureAt(tokens, at, { order, figures })
@@ -52,7 +54,7 @@ function readFigureAt(tokens: readonly Token[], from: number, { order, figures }
   if (amount === null) return from + first.size
   const unit = pieceAt(tokens, amount.to, order)
   if (unit.kind === 'unit' && unit.unit === 'other')
-    return afterRate(tokens, amount.to + unit.size, order)
+    return afterRate(tokens, amount.to + unit.size, { order, figures })
   if (unit.kind === 'unit') return readSpan(tokens, { ...amount, from }, { order, figures })
   // "One" alone is a figure; within a sentence it is an article.
   const isAlone = tokens.length === 1 && amount.value >= 1
@@ -61,10 +63,17 @@ function readFigureAt(tokens: readonly Token[], from: number, { order, figures }
 }
 
 /** "One cup an hour" is a rate, not the time of a bottle. */
-function afterRate(tokens: readonly Token[], at: number, order: Language[]): number {
-  const next = pieceAt(tokens, at, order)
-  return next.kind === 'span' && next.minutes >= 60 ? at + next.size : at
+function afterRate(tokens: readonly Token[], at: number, { order, figures }: Reader): number {
+  const skip = perWords.has(tokens[at]?.text ?? '') ? 1 : 0
+  const next = pieceAt(tokens, at + skip, order)
+  const isHour =
+    (next.kind === 'span' && next.minutes >= 60) || (next.kind === 'unit' && next.unit === 'hour')
+  if (!isHour) return at
+  figures.hasRate = true
+  return at + skip + next.size
 }
+
+const perWords = new Set(['per', 'por', 'par', 'a', 'la', 'l', 'every', 'each', 'cada'])
 
 /** Keeps a span, joined to the one just before it: "an hour and ten minutes". */
 function pushSpan(

@@ -56,9 +56,9 @@ function tablesFor(language: Language): Tables {
 }
 
 /**
- * The number, unit or span that begins at a token, in the first language that has it. Languages
- * other than the household's own and English count only where those two do not know the word:
- * "no" is nine to a Bengali and a refusal to everyone else.
+ * The number, unit or span that begins at a token, in the first language that has it. English counts
+ * where the household's own language does not know the word, the others where English does not
+ * either: "no" is nine to a Bengali and a refusal to everyone else.
  */
 export function numberPieceAt(
   tokens: readonly Token[],
@@ -71,13 +71,19 @@ export function numberPieceAt(
     if (Number.isNaN(token.value)) return { kind: 'rest', size: 1 }
     return { kind: 'value', value: token.value, weak: false, size: 1 }
   }
-  const near = order.slice(0, 2)
-  const isNear = near.some((language) => exactKeys(token.text, language).length > 0)
-  for (const language of isNear ? near : order) {
+  for (const language of askedIn(token.text, order)) {
     const piece = pieceIn(language, tokens, at)
     if (piece) return piece
   }
   return { kind: 'rest', size: 1 }
+}
+
+function askedIn(word: string, order: readonly Language[]): readonly Language[] {
+  for (const nearest of [1, 2]) {
+    const near = order.slice(0, nearest)
+    if (near.some((language) => exactKeys(word, language).length > 0)) return near
+  }
+  return order
 }
 
 function pieceIn(language: Language, tokens: readonly Token[], at: number): NumberPiece | null {

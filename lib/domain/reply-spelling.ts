@@ -34,8 +34,8 @@ export function foldSpanish(word: string): string {
       .replace(/z/g, 's')
       .replace(/[cq]/g, 'k')
       .replace(/v/g, 'b')
-      .replace(/ge/g, 'je')
-      .replace(/gi/g, 'ji'),
+      .replace(/gu(?=[ei])/g, 'g')
+      .replace(/(?<=\w{3})it(?=[oa]s?$)/, ''),
   )
 }
 

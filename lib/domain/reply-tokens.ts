@@ -47,6 +47,7 @@ const digitWords: Readonly<Record<string, string>> = {
   b4: 'before',
   gr8: 'great',
   l8r: 'later',
+  l8er: 'later',
   '4u': 'for you',
   u2: 'you too',
   m1: 'mañana',

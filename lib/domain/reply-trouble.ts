@@ -4,6 +4,7 @@ import {
   areBeside,
   denied,
   gapBetween,
+  isDenied,
   isNamed,
   isSaid,
   said,
@@ -38,6 +39,8 @@ export function noFlowSureness(sense: Sense): number {
   if (strong.length > 0) return sureOf(0.85, strong)
   if (!isSaid(sense, 'none') || isNamed(sense, 'done', 'wash', 'change', 'notYet', 'ask')) return 0
   if (isSaid(sense, 'no') && !isSaid(sense, 'water', 'flow')) return 0
+  // "Nothing broken".
+  if (isDenied(sense, 'broken', 'leak', 'fall', 'frozen', 'odd', 'ill')) return 0
   const isAnswer = sense.asked === 'flow' || sense.asked === 'step'
   if (isAnswer) return sense.words <= 4 ? 0.7 : 0
   return sense.words >= 2 && sense.words <= 4 && sense.unknownWords <= 1 ? 0.62 : 0
@@ -72,6 +75,8 @@ export function slowSureness(sense: Sense): number {
     ...falls,
   ]
   if (marks.length > 0) return sureOf(0.85, marks)
+  // "One cup an hour" complains, whatever the cup.
+  if (sense.figures.hasRate) return 0.65
   const isStep = sense.asked === 'step'
   if (isSaid(sense, 'same') && (isStep || isSaid(sense, 'still'))) return 0.7
   return isStep && isSaid(sense, 'little') && sense.words <= 3 ? 0.65 : 0

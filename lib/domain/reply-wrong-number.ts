@@ -8,7 +8,7 @@ export function wrongNumberSureness(sense: Sense): number {
   if (areBeside(sense, mistaken, said(sense, 'phone', 'person', 'texts'), 2)) {
     return sureOf(0.8, mistaken)
   }
-  if (deniesName(sense) || deniesPhone(sense)) return 0.7
+  if (deniesName(sense) || deniesPhone(sense) || namesOwner(sense)) return 0.7
   // "Who is this?" may be a forgotten programme or a stranger: a person answers.
   return isSaid(sense, 'who') ? 0.5 : 0
 }
@@ -20,10 +20,13 @@ function deniesName(sense: Sense): boolean {
   )
   return denials.some((denial) => {
     const isBack = denial.concept === 'notBack'
+    const isShort = sense.words <= 3 && said(sense, 'name').length > 0
     if (isBack) return isName(sense, denial.from - 1) && hasSelf(sense, denial.from - 1)
     const isCopula = isSelf(sense, denial.to)
     const at = isCopula ? denial.to + 1 : denial.to
-    return isName(sense, afterTitle(sense, at)) && (isCopula || hasSelf(sense, denial.to))
+    return (
+      isName(sense, afterTitle(sense, at)) && (isCopula || isShort || hasSelf(sense, denial.to))
+    )
   })
 }
 
@@ -39,6 +42,11 @@ function deniesPhone(sense: Sense): boolean {
     )
     return isThis && isDenied
   })
+}
+
+/** "This is John's phone", "es el teléfono de Juan". */
+function namesOwner(sense: Sense): boolean {
+  return areBeside(sense, said(sense, 'name'), said(sense, 'phone'), 1)
 }
 
 function isThisWord(sense: Sense, at: number): boolean {

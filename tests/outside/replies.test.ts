@@ -8,6 +8,10 @@ import { freshBnReplies } from './replies/fresh-bn'
 import { freshEnReplies } from './replies/fresh-en'
 import { freshEsReplies } from './replies/fresh-es'
 import { freshFrReplies } from './replies/fresh-fr'
+import { fourthBnReplies } from './replies/fourth-bn'
+import { fourthEnReplies } from './replies/fourth-en'
+import { fourthEsReplies } from './replies/fourth-es'
+import { fourthFrReplies } from './replies/fourth-fr'
 import { frReplies } from './replies/fr'
 import type { LabelledReply } from './replies/reply-set'
 import { thirdBnReplies } from './replies/third-bn'
@@ -20,10 +24,10 @@ import { thirdFrReplies } from './replies/third-fr'
 
 const sets = { en: enReplies, es: esReplies, fr: frReplies, bn: bnReplies } as const
 const freshSets = {
-  en: [...freshEnReplies, ...thirdEnReplies],
-  es: [...freshEsReplies, ...thirdEsReplies],
-  fr: [...freshFrReplies, ...thirdFrReplies],
-  bn: [...freshBnReplies, ...thirdBnReplies],
+  en: [...freshEnReplies, ...thirdEnReplies, ...fourthEnReplies],
+  es: [...freshEsReplies, ...thirdEsReplies, ...fourthEsReplies],
+  fr: [...freshFrReplies, ...thirdFrReplies, ...fourthFrReplies],
+  bn: [...freshBnReplies, ...thirdBnReplies, ...fourthBnReplies],
 } as const
 const languages = ['en', 'es', 'fr', 'bn'] as const
 

@@ -19,7 +19,7 @@ export const bnDanger: LanguagePack['concepts'] = {
     krak, tukra, tukro, broken, break, dui vag, kete felse, kete felche, kete dise,
     kete diyeche, কেটে দিছে, indure ~ kete, indure ~ kat*, idure ~ kete, ইঁদুরে ~ কেটে,
     ইদুরে ~ কেটে, ভাঙে, ভাঙ্গে, vange, bhange, ভাঙছিল, ভেঙে গিয়েছে, কামড়ায়া, kamraya,
-    ছিঁড়া`,
+    ছিঁড়া, কাটছে, কেটেছে, কাটসে, katse, katche, ketese, keteche`,
   leak: `লিক, লিক*, লিকেজ, লীক, চুঁইয়ে, চুইয়ে, চুইয়া, চুয়ায়, চোঁয়ায়, চুয়ে, চুয়ে চুয়ে,
     উপচে, গড়িয়ে, পানি পড়ে যাচ্ছে, পানি পড়ে যায়, পানি পইড়া যায়, পানি পড়ে যাইতেছে,
     ছিটকে, ভিজে যাচ্ছে, ভিজে যায়, ভিজা যায়, মেঝে ভিজে, চুষে পড়ে, leak, lik, leek, likej,
@@ -33,7 +33,8 @@ export const bnDanger: LanguagePack['concepts'] = {
     ধাক্কা লেগে, উল্টে গেছে, উল্টে পড়ে, কাত হয়ে, pore gese, pore geche, pore gesilo,
     pore gechilo, pore giyechilo, poira gese, poira gesilo, pore giye, pore gelo,
     hat theke pore, hat thaika, fele dise, fele diyeche, felay dise, falay dise, asar khaise,
-    achar kheyeche, dhakka lege, ulte gese, ulte geche, ফসকে, foske, হাত ফসকে, hat foske`,
+    achar kheyeche, dhakka lege, ulte gese, ulte geche, ফসকে, foske, হাত ফসকে, hat foske,
+    ছুড়ে ফেল*, ছুঁড়ে ফেল*, chure fel*, chhure fel*, পড়ে যায়, pore jay`,
   frozen:
     'বরফ, বরফ হয়ে, জমে বরফ, জমে গেছে, জমে গেসে, জইমা গেছে, ঠান্ডায় জমে, borof, borof hoye, jome gese, jome geche, joima gese, thanday jome, frozen',
   mended:

@@ -27,7 +27,8 @@ export const enWater: LanguagePack['concepts'] = {
     slo, slw, not enough, emojislow, poor flow, poorly, lazy, thin stream, tiny stream, thin,
     losing speed, no pressure, pressure down, pressure dropped, pressure is low,
     less and less, takes ages, taking ages, hardly moves, barely moves, hardly moving,
-    barely moving, not giving enough, thread of, just a thread, a thread, like a thread`,
+    barely moving, not giving enough, thread of, just a thread, a thread, like a thread,
+    isnt enough, is not enough, not be enough, gone down, went down, going down, goes down`,
   little: `little, less, few, small, tiny, not much, not a lot, only some, bit, hardly any, barely any, very little`,
   long: `long time, so long, too long, very long, longer, takes forever, take forever,
     taking forever, forever, for ever, ages, all day, whole day, all night, whole night,
@@ -89,5 +90,6 @@ export const enWater: LanguagePack['concepts'] = {
   fill: `fill, fills, filling, filled, fill up, fills up`,
   outlet: `tap, spout, spigot, faucet, hose`,
   dry: `bone dry, not a drop, not one drop, no drop, no drops, not a single drop, not even a drop,
-    not even one drop, single drop, dried up, dried out, dried`,
+    not even one drop, single drop, dried up, dried out, dried, not even drip,
+    doesnt even drip, doesnt drip even, dont even drip`,
 }

@@ -19,7 +19,7 @@ export const enPack: LanguagePack = {
       'minute, minutes, min, mins, minuts, minuets, minites, minits, minit, minet, minets, mints, mn, mns, m, minuit, minuits, minz, mnts, mnt, mint',
     hour: 'hour, hours, hr, hrs, h, our, ours, hrz, houres',
     second: 'second, seconds, sec, secs, s, scnds, seconde',
-    other: `litre*, liter*, l, ml, lt, gallon*, bottle, bottles, cup, cups, bucket, buckets, glass, glasses, day, days, week, weeks, month, months, year, years, yr, yrs, time, times, x, kid, kids, child, children, people, persons, person, member, members, son, sons, daughter, daughters, boy, girl, boys, girls, stroke, strokes, syringe, syringes, filter, filters, stage, stages, part, parts, cap, caps, pm, am, oclock, percent, degrees, dollars, of, drop, drops, nights, night, mornings, thing, things, others, more, cm, inch, inches, house, houses, th, nd, rd, st`,
+    other: `litre*, liter*, l, ml, lt, gallon*, bottle, bottles, cup, cups, mug, jug, jugs, bucket, buckets, glass, glasses, day, days, week, weeks, month, months, year, years, yr, yrs, time, times, x, kid, kids, child, children, people, persons, person, member, members, son, sons, daughter, daughters, boy, girl, boys, girls, stroke, strokes, syringe, syringes, filter, filters, stage, stages, part, parts, cap, caps, pm, am, oclock, percent, degrees, dollars, of, drop, drops, nights, night, mornings, thing, things, others, more, cm, inch, inches, house, houses, th, nd, rd, st`,
   },
   spans: `half an hour 30, half hour 30, half hr 30, half an hr 30, half a hour 30, half n hour 30,
     hour and a half 90, an hour and a half 90, one hour and a half 90, quarter of an hour 15,

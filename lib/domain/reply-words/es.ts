@@ -23,7 +23,7 @@ export const esPack: LanguagePack = {
     hour: 'hora, horas, hr, hrs, h, hs, ora, oras, horitas, horita',
     second: 'segundo, segundos, seg, segs, s, sg, sgs, sec, segunditos',
     other:
-      'litro*, lt, lts, l, galon*, botella*, balde, baldes, cubeta*, vaso, vasos, dia, dias, semana, semanas, mes, meses, ano, anos, año, años, vez, veces, nino, ninos, nina, ninas, hijo, hijos, hija, hijas, persona, personas, jeringa, jeringas, jeringazo*, filtro, filtros, parte, partes, pieza, piezas, tapa, tapas, pm, am, gota, gotas, noche, noches, poco, cosas, cosa, cm, familias, casas, pesos, bebes, bebe, de, manguera, repuesto*, cartucho*, poquito, rato, ratito, momento, problema, pregunta',
+      'litro*, lt, lts, l, galon*, botella*, balde, baldes, cubeta*, vaso, vasos, taza, tazas, jarra, jarras, dia, dias, semana, semanas, mes, meses, ano, anos, año, años, vez, veces, nino, ninos, nina, ninas, hijo, hijos, hija, hijas, persona, personas, jeringa, jeringas, jeringazo*, filtro, filtros, parte, partes, pieza, piezas, tapa, tapas, pm, am, gota, gotas, noche, noches, poco, cosas, cosa, cm, familias, casas, pesos, bebes, bebe, de, manguera, repuesto*, cartucho*, poquito, rato, ratito, momento, problema, pregunta',
   },
   spans: `media hora 30, media hr 30, media ora 30, media horita 30, hora y media 90,
     una hora y media 90, cuarto de hora 15, un cuarto de hora 15, tres cuartos de hora 45,

@@ -25,7 +25,7 @@ export const frIllness: LanguagePack['concepts'] = {
     toilettes tout le temps, toilettes sans arret, toilette tout le temps, rend malade,
     rendu malade, rendus malades, tombe malade, tombee malade, tombes malades, mourant,
     mourir, frissons, brulant, brulante, beaucoup de temperature, tres liquide,
-    comme de l eau, pas bien du tout`,
+    comme de l eau, pas bien du tout, fievreux, fievreuse, febrile, hospitalise, hospitalisee`,
   pain: 'douleur, douleurs, mal au, mal aux, mal a l, mal a la, mal de, mal o, a mal, ai mal, ont mal, avons mal, fait mal, font mal, doulleur, maux, maux de',
   blood: 'sang, saigne, saignement, saignements, sanglante, sanglant, ensanglante',
   vomit: `vomi, vomis, vomit, vomissement, vomissements, vomir, vomissent, vomissait, vomie,

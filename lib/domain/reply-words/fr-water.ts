@@ -29,7 +29,7 @@ export const frWater: LanguagePack['concepts'] = {
     peu d eau, pas de pression, plus de pression, sans pression, pas beaucoup,
     pas grand chose, mollo, petit a petit, peu a peu, au ralenti, tarde, tarder,
     tout petit debit, debit est tout petit, tout petit filet, fil d eau, petit fil, mince fil,
-    juste un fil`,
+    juste un fil, pas suffisant, pas suffisante, pas suffisamment, tout doux, doux`,
   little:
     'peu, un peu, tres peu, petit peu, moins, pe, peu peu, petit debit, petite quantite, trop peu',
   long: `longtemps, lontemps, lontemp, longtemp, long temps, tro long, long, longue, des heures,
@@ -83,7 +83,8 @@ export const frWater: LanguagePack['concepts'] = {
     arrete pas de couler`,
   fall: `tombe, tombé, tombee, tombes, tomber, tomba, chute, chuté, renverse, renversee, renversé,
     laisse tomber, fait tomber, echappe des mains, cogne, heurte, choc, basculé, bascule,
-    glisse, glissé, glisse des mains, m a glisse, m a echappe`,
+    glisse, glissé, glisse des mains, m a glisse, m a echappe, jete par terre, l a jete,
+    jetee par terre`,
   frozen:
     'gele, gelee, geles, gelé, gel, gelait, congele, congelee, congelé, glace, glacon, glacé, givre, givré, verglas',
   mended:
@@ -113,5 +114,7 @@ export const frWater: LanguagePack['concepts'] = {
   dirty: `sale, sales, salle, crade, dégueu, malpropre`,
   fill: `remplir, remplit, rempli, remplie, se remplit, remplissait`,
   outlet: `robinet, robinets, tuyau`,
-  dry: `aucune goutte, pas une goutte, pas une seule goutte, plus une goutte, pas la moindre goutte, la moindre goutte, une seule goutte`,
+  dry: `aucune goutte, pas une goutte, pas une seule goutte, plus une goutte,
+    pas la moindre goutte, la moindre goutte, une seule goutte, goutte meme pas,
+    meme pas une goutte, goutte meme plus, meme pas de goutte`,
 }

@@ -19,7 +19,7 @@ export const frPack: LanguagePack = {
       'minute, minutes, min, mins, mn, mns, mnt, mnts, minut, minuts, m, minite, minites, minu, mint',
     hour: 'heure, heures, h, hr, hrs, heur, heurs, eur, ere, hres',
     second: 'seconde, secondes, sec, secs, s, segonde, segondes, second, sgd',
-    other: `litre*, lt, l, bouteille*, seau, seaux, verre, verres, bidon*, jour, jours, semaine*, mois, an, ans, annee*, fois, fs, enfant, enfants, fils, filles, fille, personne, personnes, seringue*, filtre*, piece, pieces, partie*, bouchon, bouchons, tuyau, goutte*, nuit, nuits, peu, chose, choses, cm, francs, familles, maisons, gosses, bebe, probleme, question, petit, petite, autre, nouveau, nouvelle, cartouche*, de, des, moment, instant, aide`,
+    other: `litre*, lt, l, bouteille*, seau, seaux, verre, verres, tasse, tasses, cruche, bidon*, jour, jours, semaine*, mois, an, ans, annee*, fois, fs, enfant, enfants, fils, filles, fille, personne, personnes, seringue*, filtre*, piece, pieces, partie*, bouchon, bouchons, tuyau, goutte*, nuit, nuits, peu, chose, choses, cm, francs, familles, maisons, gosses, bebe, probleme, question, petit, petite, autre, nouveau, nouvelle, cartouche*, de, des, moment, instant, aide`,
   },
   spans: `demi heure 30, demie heure 30, une demi heure 30, une demie heure 30, heure et demie 90,
     une heure et demie 90, une heure et demi 90, quart d heure 15, un quart d heure 15,
@@ -30,7 +30,7 @@ export const frPack: LanguagePack = {
     quarantaine de minutes 40, demi eure 30, une trentaine de minutes 30`,
   halves: `et demie 0.5, et demi 0.5, et quart 0.25, et un quart 0.25, et dmi 0.5`,
   light: `donner donne donnait laisse laisser est sont suis a ai as ont avons avez ete etre bien tres trop tro assez du de des la le les l d un une en y ce c ca que qu pu encore vraiment tellement peux peut veut veux peuvent si tout plus beaucoup completement`,
-  common: `verse haut cruche marmite joliment franchement le la les l un une des de du d a au aux et ou mais donc or ni car que qu qui quoi dont ce cet
+  common: `sien sienne siens mien tien leurs verse haut cruche marmite joliment franchement le la les l un une des de du d a au aux et ou mais donc or ni car que qu qui quoi dont ce cet
     cette ces c ca cela sa son ses mon ma mes ton ta tes notre nos votre vos leur leurs je j
     tu il elle on nous vous ils elles me m te t se s lui y en ne n pas plus est es suis sommes
     etes sont etait sera soit ete etre ai as avons avez ont avait aura avoir eu fait faire
