@@ -10,11 +10,16 @@ const words: readonly (Word & { act: Act })[] = [
 ]
 
 const visits: Word = { name: 'Visits', href: '/visits' }
+const practice: Word = { name: 'Practice', href: '/practice' }
 
-/** The words of the head that a role may open, in order. */
-export function wordsFor(role: Role): Word[] {
+function workOf(role: Role): Word[] {
   if (role === 'visitor') return [visits]
   return words.filter(({ act }) => may(role, act)).map(({ act: _act, ...word }) => word)
+}
+
+/** The words of the head that a role may open, in order; the last only where the clock can be moved. */
+export function wordsFor(role: Role, practising = false): Word[] {
+  return practising ? [...workOf(role), practice] : workOf(role)
 }
 
 /** Where a role begins its day. */
