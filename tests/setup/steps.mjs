@@ -70,6 +70,6 @@ export function browserStep(browser) {
     command: bin('playwright'),
     parameters: ['test', '--config', path.join('tests', 'playwright.config.ts')],
     environment: { CHROMIUM_PATH: browser },
-    limitSeconds: 720,
+    limitSeconds: 1080,
   }
 }
