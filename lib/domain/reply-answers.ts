@@ -62,7 +62,7 @@ function notYet(sense: Sense): Answer | null {
     () => isNamed(sense, 'wash', 'change', 'done') || sense.words <= 3,
   )
   const isCare = sense.asked === 'wash' || sense.asked === 'change'
-  const unable = isCare ? denied(sense, 'can') : []
+  const unable = isCare ? denied(sense, 'can', 'be') : []
   const days = isSaid(sense, 'done') ? [] : said(sense, 'day')
   const marks = [
     ...said(sense, 'notYet', 'forgot'),

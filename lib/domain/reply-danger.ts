@@ -2,7 +2,7 @@ import { findBreach } from './reply-breach'
 import type { Danger } from './reply-danger-kind'
 import { findIllness } from './reply-illness'
 import { findOddWater } from './reply-odd-water'
-import { isSaid, type Sense } from './reply-sense'
+import { isSupposed, type Sense } from './reply-sense'
 
 /** Illness first, then a filter that must not be used, then water that must not be drunk. */
 export function findDanger(sense: Sense): Danger | null {
@@ -12,7 +12,6 @@ export function findDanger(sense: Sense): Danger | null {
   const best = Math.max(0, ...dangers.map((danger) => danger.sure))
   const danger = dangers.find((each) => each.sure > best - 0.15)
   if (danger === undefined) return null
-  // "What if it cracks?" reports nothing; a person answers it.
-  const isSupposed = isSaid(sense, 'if') && (sense.text.includes('?') || isSaid(sense, 'ask'))
-  return isSupposed ? { ...danger, sure: 0.5 } : danger
+  // "What if it cracks?": a person answers it.
+  return isSupposed(sense) ? { ...danger, sure: 0.5 } : danger
 }

@@ -8,6 +8,7 @@ const deniable: ReadonlySet<Concept> = new Set<Concept>([
   'ceased',
   'flow',
   'fill',
+  'be',
   'can',
   'wake',
   'limp',
@@ -63,6 +64,7 @@ const passedOver: ReadonlySet<Concept> = new Set<Concept>([
   'little',
   'piece',
   'cloth',
+  'be',
   'can',
 ])
 

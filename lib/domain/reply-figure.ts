@@ -8,7 +8,8 @@ type Figure = { minutes: number; hasUnit: boolean }
 
 /** The bottle-fill time a text gives, if it gives one. */
 export function figureOf(sense: Sense): Figure | null {
-  if (isSaid(sense, 'future', 'notYet', 'ago') || promised(sense).length > 0) return null
+  if (isSaid(sense, 'future', 'notYet') || isPastTime(sense) || promised(sense).length > 0)
+    return null
   const spans = sense.figures.spans.filter((span) => span.minutes > 0)
   const last = spans.at(-1)
   if (last === undefined) return bareFigure(sense)
@@ -33,6 +34,13 @@ function isRangeBetween(sense: Sense, from: number, to: number): boolean {
     from <= to &&
     between.length <= 1 &&
     between.every((token) => token.text === '-' || rangeWords.has(token.text))
+  )
+}
+
+/** "10 minutes ago", "hace 10 minutos". */
+function isPastTime(sense: Sense): boolean {
+  return said(sense, 'ago').some((ago) =>
+    sense.figures.spans.some((span) => span.from - ago.to === 0 || ago.from - span.to === 0),
   )
 }
 

@@ -64,7 +64,7 @@ function mainLanguage(known: readonly Known[], own: Language): Language {
   let best = own
   let bestScore = -1
   for (const language of languageOrder(own)) {
-    let score = language === own ? 0.9 : 0
+    let score = language === own ? 1.4 : 0
     for (const word of known) {
       const found = word.get(language)
       if (found) score += weight[found.likeness]

@@ -1,12 +1,23 @@
 import type { Danger } from './reply-danger-kind'
-import { areBeside, denied, gapBetween, isNamed, said, sureOf, type Sense } from './reply-sense'
+import {
+  areBeside,
+  areParted,
+  denied,
+  gapBetween,
+  isNamed,
+  said,
+  sureOf,
+  type Sense,
+} from './reply-sense'
 
 /** Water that must not be drunk: colour, smell, taste, fuel, things in it. */
 export function findOddWater(sense: Sense): Danger | null {
   const water = said(sense, 'water', 'flow', 'fill', 'drink')
   const strong = said(sense, 'oddSmell', 'fuel')
+  const goods = said(sense, 'good')
   const smells = said(sense, 'smell', 'taste').filter(
-    (mark) => !areBeside(sense, [mark], said(sense, 'good'), 3),
+    (mark) =>
+      !goods.some((good) => gapBetween(sense, mark, good) <= 3 && !areParted(sense, mark, good)),
   )
   const things = said(sense, 'cloth', 'filter', 'piece', 'container', 'source')
   const coloured = said(sense, 'odd').filter(

@@ -23,6 +23,7 @@ const manners: ReadonlySet<Concept> = new Set<Concept>([
 /** How sure the text asks to end the texts; 0 when it does not. Read before anything else. */
 export function optOutSureness(sense: Sense): number {
   if (isStopKeyword(sense.text)) return 1
+  if (hasBareSentence(sense.text)) return 0.9
   const asks = said(sense, 'stopAsk')
   if (asks.length > 0 && !isSaid(sense, 'if')) return sureOf(0.9, asks)
   if (asks.length > 0) return 0.5
@@ -46,6 +47,12 @@ function isStopOfSomethingStrange(sense: Sense): boolean {
   const isOrder = said(sense, 'stopWord').some((mark) => mark.to - mark.from >= 2)
   const isOnlyManners = sense.marks.every((mark) => manners.has(mark.concept))
   return isOrder && isOnlyManners && sense.words <= 6 && !sense.text.includes('?')
+}
+
+/** "STOP. Wrong number": the keyword is a sentence by itself. */
+function hasBareSentence(text: string): boolean {
+  const sentences = text.split(/[.!\n]+/)
+  return sentences.length > 1 && sentences.some((sentence) => isStopKeyword(sentence))
 }
 
 /** "I don't want ... messages": the wish is denied, the messages stand beside it. */

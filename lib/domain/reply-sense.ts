@@ -86,6 +86,17 @@ export function areBeside(
   )
 }
 
+/** "But" stands between: what is said of the one is not said of the other. */
+export function areParted(sense: Sense, one: Mark, other: Mark): boolean {
+  const [left, right] = one.from <= other.from ? [one, other] : [other, one]
+  return said(sense, 'but').some((but) => but.from >= left.to && but.to <= right.from)
+}
+
+/** "What if it cracks?" reports nothing. */
+export function isSupposed(sense: Sense): boolean {
+  return isSaid(sense, 'if') && (sense.text.includes('?') || isSaid(sense, 'ask'))
+}
+
 const trust = { exact: 1, respelled: 0.95, guessed: 0.78 } as const
 
 /** Sureness of a rule, lowered when the words it rests on had to be guessed. */

@@ -35,6 +35,9 @@ export function noFlowSureness(sense: Sense): number {
       areBeside(sense, [mark], water, 5) &&
       !said(sense, 'slow').some((slow) => slow.from === mark.from),
   )
+  // "0 water".
+  const isZero = sense.tokens.some((token) => token.kind === 'number' && token.value === 0)
+  if (isZero && water.length > 0 && sense.words <= 4) return 0.8
   const strong = [...dry, ...none, ...idle, ...lacking, ...still, ...said(sense, 'blocked', 'dry')]
   if (strong.length > 0) return sureOf(0.85, strong)
   if (!isSaid(sense, 'none') || isNamed(sense, 'done', 'wash', 'change', 'notYet', 'ask')) return 0
@@ -61,6 +64,10 @@ export function slowSureness(sense: Sense): number {
   if (isOver(sense)) return 0
   const water = said(sense, 'water', 'flow', 'drip')
   const little = said(sense, 'little').filter((mark) => areBeside(sense, [mark], water, 3))
+  // "Coule bien mais peu".
+  const butLittle = said(sense, 'little').filter((mark) =>
+    said(sense, 'but').some((but) => but.to <= mark.from && gapBetween(sense, but, mark) <= 2),
+  )
   const weakly = denied(sense, 'flow', 'fill').filter((mark) => isQualified(sense, mark))
   const badly = [...said(sense, 'bad'), ...denied(sense, 'good')].filter((mark) =>
     areBeside(sense, [mark], said(sense, 'flow'), 3),
@@ -70,6 +77,7 @@ export function slowSureness(sense: Sense): number {
     ...said(sense, 'slow', 'drip', 'long'),
     ...denied(sense, 'fast', 'better'),
     ...little,
+    ...butLittle,
     ...weakly,
     ...badly,
     ...falls,
@@ -78,7 +86,8 @@ export function slowSureness(sense: Sense): number {
   // "One cup an hour" complains, whatever the cup.
   if (sense.figures.hasRate) return 0.65
   const isStep = sense.asked === 'step'
-  if (isSaid(sense, 'same') && (isStep || isSaid(sense, 'still'))) return 0.7
+  const isAfterCare = isSaid(sense, 'still', 'but', 'done', 'wash')
+  if (isSaid(sense, 'same') && (isStep || isAfterCare)) return 0.7
   return isStep && isSaid(sense, 'little') && sense.words <= 3 ? 0.65 : 0
 }
 

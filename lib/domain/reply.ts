@@ -5,7 +5,7 @@ import { figureOf, isMostlyFigure } from './reply-figure'
 import { findDanger } from './reply-danger'
 import { optOutSureness } from './reply-opt-out'
 import { wrongNumberSureness } from './reply-wrong-number'
-import { isDenied, isSaid, senseOf, type Asked, type Sense } from './reply-sense'
+import { isDenied, isSaid, isSupposed, senseOf, type Asked, type Sense } from './reply-sense'
 import { noFlowSureness, slowSureness } from './reply-trouble'
 
 export type { Asked }
@@ -85,11 +85,15 @@ function isStopOrStopped(sense: Sense): boolean {
 
 /** Figures and trouble: the figure answers when one was asked for. */
 function readTrouble(sense: Sense): ReplyReading | null {
+  if (isSupposed(sense)) return null
   const noFlow = noFlowSureness(sense)
   const slow = slowSureness(sense)
   const isAsked = sense.asked === 'flow' || sense.asked === 'step'
   const figure = figureOf(sense)
   if (figure && (figure.hasUnit || isMostlyFigure(sense))) {
+    // "Is 12 minutes ok?"
+    if (!isAsked && sense.text.includes('?') && isSaid(sense, 'ask', 'where', 'yes', 'good'))
+      return null
     if (slow > 0 && !isAsked) return { kind: 'slow', minutes: figure.minutes, sure: slow }
     return readFigure(sense, figure, slow >= sureEnough)
   }

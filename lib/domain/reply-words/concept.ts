@@ -87,6 +87,7 @@ export const concepts = [
   'problem',
   'sleepy',
   'drink',
+  'be', // Bengali "hoy": passes a denial on
   'can', // can, will, want
   // what they say
   'done',

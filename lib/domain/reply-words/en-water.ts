@@ -91,5 +91,5 @@ export const enWater: LanguagePack['concepts'] = {
   outlet: `tap, spout, spigot, faucet, hose`,
   dry: `bone dry, not a drop, not one drop, no drop, no drops, not a single drop, not even a drop,
     not even one drop, single drop, dried up, dried out, dried, not even drip,
-    doesnt even drip, doesnt drip even, dont even drip`,
+    doesnt even drip, doesnt drip even, dont even drip, no water`,
 }

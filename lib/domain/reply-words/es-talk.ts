@@ -12,7 +12,7 @@ export const esTalk: LanguagePack['concepts'] = {
   future: `voy a, vamos a, va a, lo voy, la voy, lo hare, la hare, lavare, limpiare, cambiare, lo lavare, lo cambiare, pienso, hare, haremos, lavaremos, lo lavo, lo cambio, lo limpio, lo vamos, quiero lavar, tengo que lavar, tengo que, tenemos que, hay que lavar, ahorita lo, ahora lo lavo, ya voy`,
   past: 'era, antes, estaba, estuvo, salia, ayer, la semana pasada, al principio, venia',
   now: 'ahora, ya, hoy, ahorita, orita, por fin, al fin, haora, aora, aorita',
-  ago: 'hace, desde hace, hace como',
+  ago: `hace, desde hace, hace como, desde la manana, desde ayer, desde hoy, desde temprano`,
   still:
     'todavia, aun, sigue, siguen, sigo, seguimos, todabia, toavia, aunque lave, aunque lo lave, continua',
   very: 'muy, mucho, mucha, demasiado, demaciado, bastante, tan, super, bien, re, harto, harta, tanto, tanta, un monton',
@@ -41,7 +41,8 @@ export const esTalk: LanguagePack['concepts'] = {
     ahorita no ., hoy no ., ahora no ., por ahora no ., estoy en el campo, estoy en la milpa,
     estoy en el mercado, estamos en el campo, ando en el campo, en el trabajo ., no he tenido,
     cuando deje de, no he tenido chance, cuando haya, no me ha dado tiempo, me ha dado tiempo,
-    falta de tiempo, cuando pare, deje de llover, pare de llover, lueguito, luego luego`,
+    falta de tiempo, cuando pare, deje de llover, pare de llover, lueguito, luego luego,
+    nada todavia, todavia nada, nada aun, no nada todavia`,
   forgot:
     'olvide, olvido, olvidado, se me olvido, se nos olvido, se me paso, olvidaba, no me acorde, me olvide, no recorde, se me fue, olbide, olvidamos, ya ni me acordaba',
   need: `necesito, necesita, necesitamos, nesecito, nesesito, necesitan, nececito, ocupo, ocupamos,

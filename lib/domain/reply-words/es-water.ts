@@ -27,10 +27,9 @@ export const esWater: LanguagePack['concepts'] = {
     poca presion, poco caudal, poca fuerza, sin fuerza, sin presion, poquito a poco,
     poco a poco, de a poco, de a poquito, de poquito, a poquitos, de a poquitos,
     ya no sale igual, no sale igual, emojislow, disminuyo, disminuido, disminuye, reducido,
-    se demora, demora, demorando, demoro, demorado, demorada, demorar, demoran, tarda,
-    tardando, tardo, tardado, tardada, tardar, tardan, tortuga, lerdo, lerda, pausado,
-    insuficiente, escaso, escasa, flojita, flojito, casi ni, no es suficiente,
-    no hay suficiente, suficiente agua`,
+    se demora, demora, demorando, demoro, demorado, demorada, demoran, tarda, tardando, tardo,
+    tardado, tardada, tardan, tortuga, lerdo, lerda, pausado, insuficiente, escaso, escasa,
+    flojita, flojito, casi ni, no es suficiente, no hay suficiente, suficiente agua`,
   little:
     'poco, poca, poquito, poquita, poquitito, pokito, poko, poka, pokita, poquisima, poquisimo, menos, pocas, pocos, un poquito, un poco, bien poquita, nomas un poco',
   long: `mucho tiempo, mucho rato, muchisimo, horas y horas, muchas horas, todo el dia,
