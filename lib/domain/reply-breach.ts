@@ -23,9 +23,12 @@ export function findBreach(sense: Sense): Danger | null {
   if (marks.length === 0) return null
   // "Very fast, thank you" may be joy over a washed filter; a mended leak may be none. A person asks.
   const isRushOnly = marks.every((mark) => mark.concept === 'fast') && isSaid(sense, 'thanks')
-  // A torn cloth that they ask a new one for is no breach, yet near enough for a person to look.
-  const isCloth =
-    isSaid(sense, 'cloth') && isSaid(sense, 'need') && !isSaid(sense, 'piece', 'filter')
+  // A torn cloth or a spoiled syringe that they ask a new one for is no breach, yet near enough for a person to look.
+  const tools = said(sense, 'tool')
+  const pieces = said(sense, 'piece', 'filter').filter(
+    (mark) => !tools.some((tool) => tool.from === mark.from),
+  )
+  const isCloth = isSaid(sense, 'cloth', 'tool') && isSaid(sense, 'need') && pieces.length === 0
   return {
     kind: 'broken',
     sure: isRushOnly || isCloth || isSaid(sense, 'mended') ? 0.55 : sureOf(0.9, marks),

@@ -51,7 +51,6 @@ const deniable: ReadonlySet<Concept> = new Set<Concept>([
   'little',
   'long',
   'water',
-  'none',
   'piece',
   'cloth',
   'dirty',

@@ -51,7 +51,8 @@ const denials: Concept[] = ['not', 'notAround', 'notPlus', 'notBack', 'ceased', 
 
 /** "Won't take the breast". */
 function unfed(sense: Sense): Mark[] {
-  return beside(sense, ['breast'], denials, 4)
+  const refused: Concept[] = isNamed(sense, 'child') ? [...denials, 'notNext'] : denials
+  return beside(sense, ['breast'], refused, 4)
 }
 
 /** "Cannot wake him": not of a phone that nobody answers. */

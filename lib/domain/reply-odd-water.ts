@@ -25,7 +25,10 @@ export function findOddWater(sense: Sense): Danger | null {
   )
   const dirty = said(sense, 'dirty').filter((mark) => areBeside(sense, [mark], water, 3))
   const bad = said(sense, 'bad').filter(
-    (mark) => areBeside(sense, [mark], said(sense, 'water'), 3) && !isNamed(sense, 'flow'),
+    (mark) =>
+      areBeside(sense, [mark], said(sense, 'water'), 3) &&
+      !areBeside(sense, [mark], said(sense, 'current'), 4) &&
+      !isNamed(sense, 'flow'),
   )
   // "No sale clara": the denial is of the clearness, not of the flow.
   const unclear = said(sense, 'clean').filter((mark) =>

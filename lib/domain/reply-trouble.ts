@@ -70,7 +70,7 @@ export function slowSureness(sense: Sense): number {
   )
   const weakly = denied(sense, 'flow', 'fill').filter((mark) => isQualified(sense, mark))
   const badly = [...said(sense, 'bad'), ...denied(sense, 'good')].filter((mark) =>
-    areBeside(sense, [mark], said(sense, 'flow'), 3),
+    areBeside(sense, [mark], said(sense, 'flow', 'current'), 3),
   )
   const falls = said(sense, 'fall').filter((mark) => isFallOfFlow(sense, mark))
   const marks = [

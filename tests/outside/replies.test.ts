@@ -4,6 +4,7 @@ import { readReply, type ReplyReading } from '@/lib/domain/reply'
 import { bnReplies } from './replies/bn'
 import { enReplies } from './replies/en'
 import { esReplies } from './replies/es'
+import { fifthReplies } from './replies/fifth'
 import { freshBnReplies } from './replies/fresh-bn'
 import { freshEnReplies } from './replies/fresh-en'
 import { freshEsReplies } from './replies/fresh-es'
@@ -61,7 +62,7 @@ function told(reads: readonly Read[]): string[] {
 
 describe.each(languages)('replies in %s', (language) => {
   const own = readAll(sets[language])
-  const hard = hardReplies.filter((reply) => reply.language === language)
+  const hard = [...hardReplies, ...fifthReplies].filter((reply) => reply.language === language)
   const fresh = readAll([...freshSets[language], ...hard])
 
   it('are at least 400 different ones, every kind among them', () => {

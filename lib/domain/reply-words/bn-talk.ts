@@ -48,7 +48,7 @@ export const bnTalk: LanguagePack['concepts'] = {
     lagano hoise, lagano sesh, done, dan, don, complete, complit, sarsi, vorechi, vorsi,
     soja korsi, tight disi, ধুয়ে দিছে, ধুয়ে দিয়েছে, ধুয়ে ফেলছে, dhuye dise, dhuye diyeche,
     dhuye felche, লাগায় দিছি, লাগায়ে দিছি, lagay disi, lagaye disi, করে দিছে, kore dise,
-    করে দিয়েছে, ধুইছে, dhuise, dhuiche`,
+    করে দিয়েছে, ধুইছে, dhuise, dhuiche, সব পরিষ্কার, পরিষ্কার এখন, sob porishkar`,
   wash: `ধোয়া, ধোওয়া, ধুইতে, ধুতে, ধুই, ধোয়ার, পরিষ্কার করা, পরিষ্কার করতে, পরিষ্কার করি, করা,
     করতে, করি, ধুয়ে, ধুয়ে দিতে, করা হয়, ধোয়া হয়, ওয়াশ, dhoya, dhoa, dhowa, dhuite,
     dhute, dhui, dhoyar, porishkar kora, porishkar korte, porishkar kori, wash, wash kora,

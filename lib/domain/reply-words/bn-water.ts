@@ -92,4 +92,6 @@ export const bnWater: LanguagePack['concepts'] = {
   fill: `ভরে, ভরতে, ভরছে, ভরতেছে, ভরাতে, ভর্তি হতে, ভর্তি হইতে, ভরত, bhore, vore, vorte, bhorte, vorche, vortese, bhorti hote, vorti hote, vorto`,
   outlet: `কল, কলটা, ট্যাপ*, পাইপ*, kol, kolta, tap, pipe`,
   dry: `একফোঁটাও, এক ফোঁটাও, এক ফোটাও, ek fotao, ekfotao, ek fota o, ek fota pani, এক ফোঁটা পানি, এক ফোটা পানি, এক ফোঁটা জল, ek fota panio`,
+  current: `ফ্লো, পানির ফ্লো, চাপ, প্রেসার, প্রেশার, ধারা, স্রোত, flow, pressure, presar, srot, panir flow`,
+  tool: `সিরিঞ্জ*, সিরিন্জ*, syringe, siringe, sirinj, sirinz, siringta`,
 }

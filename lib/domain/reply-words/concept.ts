@@ -32,6 +32,7 @@ export const concepts = [
   'piece', // a part that can be broken, lost or wanted
   'outlet', // a part that water comes from when all is well
   'edge', // where water should not come out: the side, the joint
+  'tool', // the syringe: broken, it is wanted, but the water is none the worse
   'cloth', // what may be dirty without the water being odd
   'container',
   'person',
@@ -54,6 +55,7 @@ export const concepts = [
   'fill',
   'drip',
   'slow',
+  'current', // the flow as a thing: a bad one is slow, where bad water is odd
   'dry', // "not a drop": of water only
   'none', // nothing, empty
   'blocked',

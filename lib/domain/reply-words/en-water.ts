@@ -2,7 +2,7 @@ import type { LanguagePack } from './concept'
 
 /** English: the filter, its water, and what can be wrong with them. */
 export const enWater: LanguagePack['concepts'] = {
-  water: 'water, waters, h2o, watr, wata, flow rate',
+  water: `water, waters, h2o, watr, wata, flow rate, watery, liquid`,
   filter: 'filter, filters, filtr, kit, unit, machine, device, purifier, system, the thing',
   piece: `cap, caps, lid, lids, hose, hoses, pipe, pipes, tube, tubes, tubing, tap, taps, spout, spigot, faucet,
     cartridge*, fibre, fiber, fibres, fibers, membrane, carbon, stage, stages, part, parts, piece, pieces, syringe*,
@@ -28,14 +28,15 @@ export const enWater: LanguagePack['concepts'] = {
     losing speed, no pressure, pressure down, pressure dropped, pressure is low,
     less and less, takes ages, taking ages, hardly moves, barely moves, hardly moving,
     barely moving, not giving enough, thread of, just a thread, a thread, like a thread,
-    isnt enough, is not enough, not be enough, gone down, went down, going down, goes down`,
+    isnt enough, is not enough, not be enough, gone down, went down, going down, goes down,
+    little by little, small small`,
   little: `little, less, few, small, tiny, not much, not a lot, only some, bit, hardly any, barely any, very little`,
   long: `long time, so long, too long, very long, longer, takes forever, take forever,
     taking forever, forever, for ever, ages, all day, whole day, all night, whole night,
     all morning, hours and hours, hours to fill, many hours, half day, half a day,
     half the day, long to fill, takes long, take long, takes hours, is taking long,
     taking long, too much time, much time, lot of time, lots of time, too many minutes,
-    till evening, wait hours, waiting hours, hours for, wait all`,
+    till evening, wait hours, waiting hours, hours for, wait all, until evening, till night`,
   none: `nothing, none, empty, zero, zilch, nil, dry, not any, nuthin, nothin, nowt`,
   blocked: `blocked, block, blocks, blocking, clog, clogs, clogged, clogging, plugged, plugd, stuck, jam, jammed, choked, blockage, bunged, clogd`,
   fast: 'fast, quick, quickly, faster, rapid, rapidly, speedy, strong',
@@ -92,4 +93,6 @@ export const enWater: LanguagePack['concepts'] = {
   dry: `bone dry, not a drop, not one drop, no drop, no drops, not a single drop, not even a drop,
     not even one drop, single drop, dried up, dried out, dried, not even drip,
     doesnt even drip, doesnt drip even, dont even drip, no water`,
+  current: `flow, flow rate, pressure, speed, stream, output`,
+  tool: `syringe*`,
 }

@@ -2,7 +2,13 @@ import type { LanguagePack } from './concept'
 
 /** Spanish: the texts themselves, ending them, and who is at the phone. */
 export const esContact: LanguagePack['concepts'] = {
-  texts: `mensaje, mensajes, mensajito, mensajitos, msj, msjs, mensje, mensajes de texto, sms, texto, textos, escribir, escriban, escriba, escribas, escribirme, escribiendo, escribirnos, escribime, escrivan, escribanme, molestar, molesten, moleste, molestes, molestando, molestarme, llamar, llamen, llame, llames, llamando, mandar, manden, mande, mandes, mandando, mandarme, enviar, envien, envie, envies, enviando, enviarme, recados, notificaciones, avisos, fastidiar, fastidien, jodan, joder, jodas, chinguen, contactar, contacten, contacte, recordatorios, avisen`,
+  texts: `mensaje, mensajes, mensajito, mensajitos, msj, msjs, mensje, mensajes de texto, sms,
+    texto, textos, escribir, escriban, escriba, escribas, escribirme, escribiendo,
+    escribirnos, escribime, escrivan, escribanme, molestar, molesten, moleste, molestes,
+    molestando, molestarme, llamar, llamen, llame, llames, llamando, mandar, manden, mande,
+    mandes, mandando, mandarme, enviar, envien, envie, envies, enviando, enviarme, recados,
+    notificaciones, avisos, fastidiar, fastidien, jodan, joder, jodas, chinguen, contactar,
+    contacten, contacte, recordatorios, avisen, contactarnos, contactarme, llamarnos`,
   phone: 'numero, telefono, celular, cel, linea, chip, tel, num',
   receive: `recibi, recibo, recibido, recibiendo, recibimos, llego, llega el, llegan, llegaron,
     entiendo, entendi, entendimos, entender, leer, lei, leo, contestar, conteste, contesto,

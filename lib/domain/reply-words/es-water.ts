@@ -2,7 +2,8 @@ import type { LanguagePack } from './concept'
 
 /** Spanish: the filter, its water, and what can be wrong with them. Written without accents. */
 export const esWater: LanguagePack['concepts'] = {
-  water: `agua, aguas, aguita, awa, agwa, augua, agu, chorro, chorrito, caudal, presion, flujo`,
+  water: `agua, aguas, aguita, awa, agwa, augua, agu, chorro, chorrito, caudal, presion, flujo,
+    aguado, aguada, liquido, liquida`,
   filter: 'filtro, filtros, filtrito, fltro, purificador, aparato, equipo, kit, unidad, maquina',
   piece: `tapa, tapas, tapita, tapon, manguera, mangueras, manguerita, tubo, tubos, tubito, llave, grifo, canilla, cartucho, cartuchos, fibra, fibras, membrana, carbon, etapa, etapas,
     pieza, piezas, parte, partes, jeringa, jeringas, jeringuilla, empaque, sello, arandela, rosca, conector, carcasa, repuesto, repuestos, valvula, asa, soporte, codo, niple, abrazadera, liga, refaccion`,
@@ -36,7 +37,7 @@ export const esWater: LanguagePack['concepts'] = {
     toda la noche, toda la manana, una eternidad, eterno, siglos, rato largo, largo rato,
     bastante tiempo, medio dia, tanto tiempo, demasiado tiempo, mas tiempo, varias horas,
     un monton de tiempo, dura mucho, se lleva mucho, esperar horas, horas para, esperar mucho,
-    esperamos horas`,
+    esperamos horas, hasta la tarde, hasta la noche`,
   none: `nada, vacio, vacia, cero, seco, seca, nadita, ni un poco, ni madres, nada de nada`,
   blocked: `tapado, tapada, tapados, tapo, se tapo, tapando, tapar, taponado, taponada, obstruido, obstruida, bloqueado, bloqueada, bloqueo, atascado, atascada, atasco, atorado, atorada, atoro, trabado, trabada, trancado, trancada, atrancado`,
   fast: `rapido, rapida, rapidito, veloz, fuerte, ligero, aprisa, rapidisimo, de prisa,
@@ -72,7 +73,8 @@ export const esWater: LanguagePack['concepts'] = {
     malogro, flojo la tapa, se salio la, se desconecto, desconectado, desconecto, astillado,
     astillada, fisura, fisurado, fisurada, trizado, trizada, se trozo, trozado, se abrio,
     abrio el, se doblo, doblado, doblada, torcido, no cierra, no serrar, ya no cierra,
-    no quiere cerrar, destrozado, destrozada, destrozo, despedazado`,
+    no quiere cerrar, destrozado, destrozada, destrozo, despedazado, se salio el asa,
+    se salio la llave, se salio la manguera`,
   leak: `fuga, fugas, fugando, se fuga, fuga de agua, gotera, goteras, se sale, se esta saliendo,
     saliendose, se le sale, se salia, derrama, derramando, derramo, se derrama, chorrea,
     chorreando, se chorrea, escurre, escurriendo, se escurre, se escapa, escapa agua,
@@ -116,4 +118,6 @@ export const esWater: LanguagePack['concepts'] = {
   outlet: `llave, grifo, canilla, manguera`,
   dry: `ni gota, ni una gota, ninguna gota, ni gotas, ni una sola gota, ni una gotita,
     ni un chorrito, ni goteo, ni gotea, ni siquiera gotea`,
+  current: `flujo, caudal, chorro, chorrito, presion, velocidad`,
+  tool: `jeringa, jeringas, jeringuilla`,
 }

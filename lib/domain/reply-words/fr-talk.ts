@@ -4,7 +4,7 @@ import type { LanguagePack } from './concept'
 export const frTalk: LanguagePack['concepts'] = {
   not: `personne ne, personne n, sans, ni, aucun, aucune, nul ne, pas aucun, refuse, refuse de,
     refusent`,
-  notAround: 'pas, jamais, pa, ps, guere, point de, rien ne, rien n, rien de',
+  notAround: `pas, jamais, pa, ps, guere, point de, rien ne, rien n, rien de, pas du tout`,
   notPlus: 'plus, pu, plu, +',
   ne: 'ne, n',
   ceased:
@@ -28,7 +28,8 @@ export const frTalk: LanguagePack['concepts'] = {
     mis la nouvelle, remis, installe, installé, pose, posé, effectue, effectué, accompli,
     realise, realisé, deja fait, ok fait, c est bon, cest bon, c bon, c fait, c fé, fé,
     sé fait, se fait, acheve, boulot fait, pret, prete, ca y est, sa y est, ca yest, voila,
-    voilà, purge, purgé, redresse, rempli le, resserre, revisse`,
+    voilà, purge, purgé, redresse, rempli le, resserre, revisse, viens de le laver,
+    viens de laver, viens de le faire, viens de finir, refait`,
   wash: `laver, le laver, nettoyer, rincer, faire, le faire, nettoye le, pu laver, pu le laver,
     pu nettoyer, pu faire, pu le faire, pu, eu le temps, temps de, lavons, je lave, lavage,
     nettoyage, m en occuper, nettoie, rince le, nettoies`,
@@ -47,7 +48,8 @@ export const frTalk: LanguagePack['concepts'] = {
     avons pas le temps, n avons pas le temps, a pas le temps, n ai pas eu le temps,
     ai pas eu le temps, n a pas eu le temps, pas eu de temps, n ai plus le temps,
     toujours pas ., tjs pas ., tjr pas ., tjrs pas ., toujours pa ., toujours pas fait,
-    toujours pas lave, l occasion, pas eu l occasion, quand la pluie`,
+    toujours pas lave, l occasion, pas eu l occasion, quand la pluie, quand je reviens,
+    quand je reviendrai, quand on rentre`,
   forgot:
     'oublie, oublié, oubliee, oublier, oubli, zappe, zappé, j avais oublie, plus pense, pas pense, oublie de, m est sorti de la tete, pensais plus',
   need: `besoin, besoins, bezoin, bezouin, besouin, il me faut, il nous faut, me faut, nous faut,

@@ -2,7 +2,7 @@ import type { LanguagePack } from './concept'
 
 /** French: the filter, its water, and what can be wrong with them. Written without accents. */
 export const frWater: LanguagePack['concepts'] = {
-  water: `eau, eaux, leau, deau, lo, o, debit, jet, filet, pression, d eau, flux`,
+  water: `eau, eaux, leau, deau, lo, o, debit, jet, filet, pression, d eau, flux, liquide, liquides`,
   filter: 'filtre, filtres, filtr, appareil, kit, systeme, purificateur, machine, dispositif',
   piece: `bouchon, bouchons, capuchon, couvercle, couvercles, tuyau, tuyaux, tuyo, tuyeau, tube, tubes, robinet, robinets, cartouche, cartouches, fibre, fibres, membrane, charbon, etage, etages,
     piece, pieces, partie, parties, seringue, seringues, serinque, joint, joints, raccord, raccords, vis, clapet, poignee, rechange, embout, coque, boitier, rondelle, collier, capsule`,
@@ -29,7 +29,8 @@ export const frWater: LanguagePack['concepts'] = {
     peu d eau, pas de pression, plus de pression, sans pression, pas beaucoup,
     pas grand chose, mollo, petit a petit, peu a peu, au ralenti, tarde, tarder,
     tout petit debit, debit est tout petit, tout petit filet, fil d eau, petit fil, mince fil,
-    juste un fil, pas suffisant, pas suffisante, pas suffisamment, tout doux, doux`,
+    juste un fil, pas suffisant, pas suffisante, pas suffisamment, tout doux, doux,
+    petit petit`,
   little:
     'peu, un peu, tres peu, petit peu, moins, pe, peu peu, petit debit, petite quantite, trop peu',
   long: `longtemps, lontemps, lontemp, longtemp, long temps, tro long, long, longue, des heures,
@@ -37,7 +38,7 @@ export const frWater: LanguagePack['concepts'] = {
     beaucoup de temps, bcp de temps, trop de temps, tout le temps pour, plus de temps,
     demi journee, met du temps, prend du temps, dure, perd du temps, des plombes,
     un temps fou, heures pour, toute une nuit, tout une nuit, toute une journee,
-    attendre des heures, attendre longtemps`,
+    attendre des heures, attendre longtemps, jusqu au soir, jusqu a demain`,
   none: `rien, vide, zero, sec, seche, a sec, ryen, que dalle, neant, kedal, walou`,
   blocked: `bouche, bouché, bouchee, bouches, bouchait, bloque, bloquee, bloques, bloqué, obstrue,
     obstruee, coince, coincee, colmate, colmatee, encrasse, encrassee, engorge, bouch,
@@ -117,4 +118,6 @@ export const frWater: LanguagePack['concepts'] = {
   dry: `aucune goutte, pas une goutte, pas une seule goutte, plus une goutte,
     pas la moindre goutte, la moindre goutte, une seule goutte, goutte meme pas,
     meme pas une goutte, goutte meme plus, meme pas de goutte`,
+  current: `debit, jet, filet, pression, flux, vitesse, ecoulement`,
+  tool: `seringue, seringues, serinque`,
 }
