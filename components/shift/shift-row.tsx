@@ -35,7 +35,7 @@ export function ShiftRowView({ row, ruled, isNew, onSeen }: ShiftRowProps) {
               href={`/tickets/${row.ticketId}`}
               className="no-underline after:absolute after:inset-y-0 after:right-0 after:left-lead"
             >
-              {row.sentence}
+              <span lang={row.sentenceLanguage}>{row.sentence}</span>
               <span className="sr-only"> {row.house}</span>
             </Link>
           </p>

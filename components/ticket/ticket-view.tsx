@@ -14,10 +14,10 @@ import { useTicket, type TicketDesk } from './use-ticket'
 /** One household's trouble: the column with its suspects, what is to do now, the texts, the margin. */
 export function TicketView({ initial }: { initial: TicketSheetView }) {
   const desk = useTicket(initial)
-  const { title, household, column, slips } = desk.ticket
+  const { title, titleLanguage, household, column, slips } = desk.ticket
   return (
     <TicketSheet
-      title={title}
+      title={<span lang={titleLanguage}>{title}</span>}
       place={
         <Link
           href={`/households/${household.id}`}

@@ -1,38 +1,61 @@
 import { format } from 'date-fns'
 import { TZDate } from '@date-fns/tz'
 import { daysBetween } from './day'
+import { bnHarmPhrases } from './harm-phrases/bn'
+import { enHarmPhrases } from './harm-phrases/en'
+import { esHarmPhrases } from './harm-phrases/es'
+import { frHarmPhrases } from './harm-phrases/fr'
+import type { HarmPhrases } from './harm-phrases/phrases'
+import type { Language } from './language'
 import type { House } from './need'
 import { localDay } from './round-window'
 
-/** "6 people, an infant": who is in the house, the vulnerable named. */
-export function houseInWords(house: House): string {
-  const vulnerable = [
-    house.infant && 'an infant',
-    house.pregnant && 'a pregnancy',
-    house.elderly && 'an old person',
-    house.ill && 'an ill person',
-  ].filter((words) => words !== false)
-  return [peopleInWords(house.people), ...vulnerable].join(', ')
+/** The phrases of the shift's sentence in each language that staff may have. */
+export const harmPhrases: Record<Language, HarmPhrases> = {
+  en: enHarmPhrases,
+  es: esHarmPhrases,
+  fr: frHarmPhrases,
+  bn: bnHarmPhrases,
 }
 
-export function peopleInWords(people: number): string {
-  return people === 1 ? '1 person' : `${people} people`
+/** "6 people, an infant": who is in the house, the vulnerable named. */
+export function houseInWords(house: House, language: Language = 'en'): string {
+  const phrases = harmPhrases[language]
+  const vulnerable = [
+    house.infant && phrases.infant,
+    house.pregnant && phrases.pregnant,
+    house.elderly && phrases.elderly,
+    house.ill && phrases.ill,
+  ].filter((words) => words !== false)
+  return [peopleInWords(house.people, language), ...vulnerable].join(', ')
+}
+
+export function peopleInWords(people: number, language: Language = 'en'): string {
+  return harmPhrases[language].people(people)
 }
 
 /**
  * A past moment as the shift says it, on the area's own clock: "07:40" today, "yesterday 18:20",
  * "Friday 18:20" within the week, "3 March" before that.
  */
-export function sinceInWords(at: number, { now, timeZone }: { now: number; timeZone: string }) {
+export function sinceInWords(
+  at: number,
+  { now, timeZone, language = 'en' }: { now: number; timeZone: string; language?: Language },
+): string {
+  const { locale, yesterday } = harmPhrases[language]
   const local = new TZDate(at, timeZone)
   const days = daysBetween(localDay(at, timeZone), localDay(now, timeZone))
-  if (days <= 0) return format(local, 'HH:mm')
-  if (days === 1) return `yesterday ${format(local, 'HH:mm')}`
-  return days < 7 ? format(local, 'EEEE HH:mm') : format(local, 'd MMMM')
+  const clock = format(local, 'HH:mm')
+  if (days <= 0) return clock
+  if (days === 1) return yesterday(clock)
+  return format(local, days < 7 ? 'EEEE HH:mm' : 'd MMMM', { locale })
 }
 
 /** "8 h 05"; whole minutes, rounded. */
-export function hoursInWords(hours: number): string {
+export function hoursInWords(hours: number, language: Language = 'en'): string {
   const minutes = Math.round(hours * 60)
-  return `${Math.floor(minutes / 60)} h ${String(minutes % 60).padStart(2, '0')}`
+  return harmPhrases[language].hours(
+    Math.floor(minutes / 60),
+    String(minutes % 60).padStart(2, '0'),
+  )
 }

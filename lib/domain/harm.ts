@@ -1,4 +1,6 @@
-import { houseInWords, hoursInWords, peopleInWords, sinceInWords } from './harm-words'
+import { harmPhrases, houseInWords, hoursInWords, peopleInWords, sinceInWords } from './harm-words'
+import type { HarmPhrases } from './harm-phrases/phrases'
+import type { Language } from './language'
 import type { House } from './need'
 import type { Trouble } from './trouble'
 
@@ -29,6 +31,8 @@ export type HarmInput = {
   timeZone: string
   /** The unwell were told to go to the health worker. */
   toldToGo?: boolean
+  /** Of the person who reads the sentence. */
+  language?: Language
 }
 
 export type Harm = {
@@ -91,47 +95,54 @@ function sentenceOf(
   input: HarmInput,
   { harmClass, sinceAt }: { harmClass: HarmClass; sinceAt: number },
 ): string {
-  const { house, toldToGo } = input
-  const people = peopleInWords(house.people)
+  const phrases = harmPhrases[input.language ?? 'en']
+  return phrases.digits(phrased(input, { phrases, harmClass, sinceAt }))
+}
+
+function phrased(
+  input: HarmInput,
+  { phrases, harmClass, sinceAt }: { phrases: HarmPhrases; harmClass: HarmClass; sinceAt: number },
+): string {
+  const { toldToGo, language } = input
+  const house = houseInWords(input.house, language)
+  const people = peopleInWords(input.house.people, language)
   const since = sinceInWords(sinceAt, input)
   const opened = sinceInWords(input.openedAt, input)
   switch (harmClass) {
     case 1:
-      return `A danger sign; ${houseInWords(house)}. ${toldToGo ? 'Told to go to the health worker now.' : 'Not yet told to go to the health worker.'}`
+      return `${phrases.dangerSign(house)} ${toldToGo ? phrases.toldToGo : phrases.notToldToGo}`
     case 2:
-      return `Someone is unwell since ${opened}; ${houseInWords(house)}.`
+      return phrases.unwell(house, opened)
     case 3:
     case 4:
-      return `${houseInWords(house)}; nothing safe since ${since}.`
+      return phrases.nothingSafe(house, since)
     case 5:
-      return `${houseInWords(house)}; unsafe filter still in use since ${since}.`
+      return phrases.unsafe(house, since)
     case 6:
-      return `${houseInWords(house)}; no water at all since ${since}.`
+      return phrases.noWater(house, since)
     case 7:
     case 8:
-      return `${people}; ${flowInWords(input)}`
+      return flowInWords(input, people)
     case 9:
-      return `${people}; words nobody has read since ${opened}.`
+      return phrases.unread(people, opened)
     case 10:
-      return `${people}; no answer since ${opened}.`
+      return phrases.silent(people, opened)
   }
 }
 
 /** "4.6 L an hour at 20 °C, needs 37 L a day: 8 h 05." */
-function flowInWords({
-  litresPerHour,
-  errorLitresPerHour,
-  litresPerDay,
-  hours,
-  need,
-}: HarmInput): string {
-  const needed = Math.round(litresPerDay)
-  if (litresPerHour === null || hours === null) {
-    return `slow, nobody has timed a litre yet; needs ${needed} L a day.`
-  }
+function flowInWords(input: HarmInput, people: string): string {
+  const { litresPerHour, errorLitresPerHour, hours, need, language = 'en' } = input
+  const phrases = harmPhrases[language]
+  const litresPerDay = String(Math.round(input.litresPerDay))
+  if (litresPerHour === null || hours === null) return phrases.untimed(people, litresPerDay)
   const error = errorLitresPerHour ? ` ± ${errorLitresPerHour.toFixed(1)}` : ''
-  const flow = `${litresPerHour.toFixed(1)}${error} L an hour at 20 °C`
-  if (need === 'short' || hours > 24) return `${flow}, needs ${needed} L a day: not in a day.`
-  const enough = need === 'enough' ? 'slow but enough: ' : ''
-  return `${enough}${flow}, needs ${needed} L a day: ${hoursInWords(hours)}.`
+  const isOverADay = need === 'short' || hours > 24
+  return phrases.flow({
+    people,
+    flow: `${litresPerHour.toFixed(1)}${error}`,
+    litresPerDay,
+    time: isOverADay ? null : hoursInWords(hours, language),
+    enough: need === 'enough',
+  })
 }

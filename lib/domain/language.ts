@@ -24,3 +24,8 @@ export const languageNamesInEnglish: Record<Language, string> = {
 export function isLanguage(text: string): text is Language {
   return (languages as readonly string[]).includes(text)
 }
+
+/** A person's own language, from the tags they can serve, own first: English where we have none of them. */
+export function ownLanguage(tags: readonly string[]): Language {
+  return tags.find(isLanguage) ?? 'en'
+}

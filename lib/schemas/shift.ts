@@ -13,6 +13,8 @@ export const shiftRowSchema = z.object({
   language: languageSchema,
   /** Why it stands where it stands. */
   sentence: z.string(),
+  /** The reader's own. */
+  sentenceLanguage: languageSchema,
   /** The last words received, as they came; null when none ever came. */
   words: z.string().nullable(),
   /** What is being done: where the walk stands, which advice went. */

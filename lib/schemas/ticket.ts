@@ -81,8 +81,9 @@ const causesSchema = z.array(z.object({ cause: z.string(), words: z.string() }))
 export const ticketSheetSchema = z.object({
   id: z.string(),
   version: z.number(),
-  /** The sentence of harm. */
+  /** The sentence of harm, in the reader's own language. */
   title: z.string(),
+  titleLanguage: languageSchema,
   /** What it is about, in a word or two. */
   trouble: z.string(),
   waited: z.string(),

@@ -3,7 +3,7 @@ import { listTimeZones } from '@/db/queries/time-zone'
 import type { Deps } from '@/lib/deps'
 import { compareHarm, type Band } from '@/lib/domain/harm'
 import { sinceInWords } from '@/lib/domain/harm-words'
-import { languageNamesInEnglish, type Language } from '@/lib/domain/language'
+import { languageNamesInEnglish, ownLanguage, type Language } from '@/lib/domain/language'
 import { allow, type Actor } from '@/lib/domain/role'
 import { bandNote, dayStart, eitherOf, shiftTitle } from '@/lib/domain/shift-words'
 import { houseName } from '@/lib/domain/ticket-words'
@@ -14,11 +14,15 @@ import { judge, rowOf, type Judged } from './shift-row'
 const bandNames: readonly Band[] = ['Unwell', 'No safe water', 'Slow', 'Unread words', 'Silent']
 
 /** Open tickets in order of harm, with what the rows are made of. */
-export async function judgedShift(deps: Deps): Promise<{ judged: Judged[]; cut: boolean }> {
+export async function judgedShift(
+  deps: Deps,
+  actor: Actor,
+): Promise<{ judged: Judged[]; cut: boolean }> {
+  const language = ownLanguage(actor.languages)
   const now = deps.clock.now()
   const facts = await shiftFacts(deps.store.db)
   const judged = facts.open
-    .map((open) => judge(open, facts, now))
+    .map((open) => judge(open, { facts, now, language }))
     .sort((a, b) => compareHarm(a.harm, b.harm) || a.ticket.openedAt - b.ticket.openedAt)
   return { judged, cut: facts.cut }
 }
@@ -60,7 +64,7 @@ export async function listShift(deps: Deps, actor: Actor): Promise<Shift> {
   const { db } = deps.store
   const now = deps.clock.now()
   const timeZone = (await listTimeZones(db))[0] ?? 'UTC'
-  const { judged, cut } = await judgedShift(deps)
+  const { judged, cut } = await judgedShift(deps, actor)
   const waiting = judged.filter(({ ticket }) => ticket.takenBy === null)
   const [longest] = [...waiting].sort((a, b) => a.harm.sinceAt - b.harm.sinceAt)
   return {

@@ -1,6 +1,7 @@
 import type { OpenTicket } from '@/db/queries/shift'
 import { fixedTextWords, isFixedMoment, wasToldToGo } from '@/lib/domain/fixed-texts'
 import { sinceInWords } from '@/lib/domain/harm-words'
+import type { Language } from '@/lib/domain/language'
 import { dailyNeed } from '@/lib/domain/need'
 import { localDay } from '@/lib/domain/round'
 import { waitedInWords } from '@/lib/domain/shift-words'
@@ -13,7 +14,12 @@ import { kitLook } from './kit-look'
 import type { ShiftFacts } from './shift-facts'
 import { isOfNow, ticketHarm, type TicketHarm } from './ticket-harm'
 
-export type Judged = OpenTicket & { harm: TicketHarm; facts: ShiftFacts; now: number }
+export type Judged = OpenTicket & {
+  harm: TicketHarm
+  facts: ShiftFacts
+  now: number
+  language: Language
+}
 
 function readingOf({ ticket, kit }: OpenTicket, facts: ShiftFacts) {
   const reading = facts.readings.get(kit.id)
@@ -23,7 +29,10 @@ function readingOf({ ticket, kit }: OpenTicket, facts: ShiftFacts) {
 }
 
 /** An open ticket with its place in the shift. */
-export function judge(open: OpenTicket, facts: ShiftFacts, now: number): Judged {
+export function judge(
+  open: OpenTicket,
+  { facts, now, language }: { facts: ShiftFacts; now: number; language: Language },
+): Judged {
   const held = {
     ...open,
     timeZone: open.area.timeZone,
@@ -31,7 +40,13 @@ export function judge(open: OpenTicket, facts: ShiftFacts, now: number): Judged 
     toldToGo: wasToldToGo(facts.fixed.get(open.ticket.id) ?? []),
   }
   const { litresPerPersonDay } = facts
-  return { ...open, harm: ticketHarm(held, { now, litresPerPersonDay }), facts, now }
+  return {
+    ...open,
+    harm: ticketHarm(held, { now, litresPerPersonDay, language }),
+    facts,
+    now,
+    language,
+  }
 }
 
 /** What was sent at once, where the walk stands, how often it was washed. */
@@ -111,13 +126,14 @@ function columnOf(judged: Judged): ShiftRow['column'] {
 
 /** A ticket as its row in the shift. */
 export function rowOf(judged: Judged, staffId: string): ShiftRow {
-  const { ticket, household, area, harm, facts, now } = judged
+  const { ticket, household, area, harm, facts, now, language } = judged
   return {
     ticketId: ticket.id,
     house: houseName(household.name),
     area: area.name,
     language: household.language,
     sentence: harm.sentence,
+    sentenceLanguage: language,
     words: facts.lastIn.get(household.id)?.body ?? null,
     about: aboutWords(judged),
     waited: waitedInWords(harm.sinceAt, now),

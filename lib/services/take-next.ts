@@ -11,7 +11,7 @@ const TRIES = 5
 export async function takeNext(deps: Deps, actor: Actor): Promise<Worked> {
   allow(actor, 'work tickets')
   for (let tries = 0; tries < TRIES; tries++) {
-    const { judged } = await judgedShift(deps)
+    const { judged } = await judgedShift(deps, actor)
     const next = judged.find(({ ticket, ...one }) => !ticket.takenBy && isServedBy(one, actor))
     if (!next) return { ok: false, reason: nextFor(judged, actor).words }
     const { id: ticketId, version } = next.ticket

@@ -1,6 +1,7 @@
 import type { KitFacts } from '@/db/queries/kit-facts'
 import type { TicketRow } from '@/db/queries/ticket-events'
 import { harmOf, type Harm } from '@/lib/domain/harm'
+import type { Language } from '@/lib/domain/language'
 import { dailyNeed, enough } from '@/lib/domain/need'
 
 type Reading = {
@@ -35,7 +36,11 @@ export function ticketHarm(
     reading: Reading | null
     toldToGo: boolean
   },
-  { now, litresPerPersonDay }: { now: number; litresPerPersonDay: number },
+  {
+    now,
+    litresPerPersonDay,
+    language,
+  }: { now: number; litresPerPersonDay: number; language: Language },
 ): TicketHarm {
   const { ticket, household, reading } = held
   const litresPerDay = dailyNeed({ people: household.people, litresPerPersonDay })
@@ -56,6 +61,7 @@ export function ticketHarm(
     now,
     timeZone: held.timeZone,
     toldToGo: held.toldToGo,
+    language,
   })
   return { ...harm, need, hours }
 }

@@ -4,7 +4,7 @@ import type { Deps } from '@/lib/deps'
 import { addDays } from '@/lib/domain/day'
 import { causesFor } from '@/lib/domain/end-causes'
 import { fixedTextNames, isFixedMoment, wasToldToGo } from '@/lib/domain/fixed-texts'
-import { languageNamesInEnglish, type Language } from '@/lib/domain/language'
+import { languageNamesInEnglish, ownLanguage, type Language } from '@/lib/domain/language'
 import { allow, type Actor } from '@/lib/domain/role'
 import { waitedInWords } from '@/lib/domain/shift-words'
 import { sinceInWords } from '@/lib/domain/harm-words'
@@ -47,12 +47,15 @@ function holderOf(
 function headOf(facts: TicketFacts, actor: Actor) {
   const { ticket, household, area, now, settings } = facts
   const held = { ...facts, timeZone: area.timeZone, toldToGo: wasToldToGo(facts.fixed) }
-  const harm = ticketHarm(held, { now, litresPerPersonDay: settings.litresPerPersonDay })
+  const language = ownLanguage(actor.languages)
+  const { litresPerPersonDay } = settings
+  const harm = ticketHarm(held, { now, litresPerPersonDay, language })
   const until = ticket.endedAt ?? now
   return {
     id: ticket.id,
     version: ticket.version,
-    title: harm.sentence.replace(/\.$/, ''),
+    title: harm.sentence.replace(/[.।]$/, ''),
+    titleLanguage: language,
     waited: waitedInWords(Math.min(harm.sinceAt, until), until),
     since: `since ${sinceInWords(harm.sinceAt, { now, timeZone: area.timeZone })}`,
     trouble: troubleWords[ticket.trouble],

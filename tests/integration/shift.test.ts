@@ -65,6 +65,18 @@ describe('the order of the shift', () => {
     expect(longest).toBe('11:00')
   })
 
+  test('says why in the language of who reads it', async () => {
+    await house(slow)
+    await say(deps, slow.number, 'no sale agua')
+    const spanish: Actor = { ...agent, languages: ['es', 'en'] }
+    const [row] = (await listShift(deps, spanish)).bands[0]?.rows ?? []
+    expect(row).toMatchObject({ sentenceLanguage: 'es' })
+    expect(row?.sentence).toContain('nada de agua')
+    const sheet = await ticketSheet(deps, spanish, { ticketId: row?.ticketId ?? '' })
+    expect(sheet).toMatchObject({ titleLanguage: 'es' })
+    expect('title' in sheet && sheet.title).toContain('nada de agua')
+  })
+
   test('says that nobody waits when nobody does', async () => {
     const shift = await listShift(deps, agent)
     expect(shift).toMatchObject({ bands: [], waiting: 0, next: { ticketId: null } })

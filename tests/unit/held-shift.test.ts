@@ -8,6 +8,7 @@ const row = (ticketId: string, change: Partial<ShiftRow> = {}): ShiftRow => ({
   area: 'Loma Clara',
   language: 'es',
   sentence: '6 people; slow.',
+  sentenceLanguage: 'en',
   words: null,
   about: null,
   waited: '0 h 10',

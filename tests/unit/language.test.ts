@@ -1,5 +1,5 @@
 import { expect, it } from 'vitest'
-import { isLanguage, languageNames, languages } from '@/lib/domain/language'
+import { isLanguage, languageNames, languages, ownLanguage } from '@/lib/domain/language'
 
 it('every language is named in its own tongue, as the runtime names its tag', () => {
   for (const language of languages) {
@@ -13,4 +13,10 @@ it('every language is named in its own tongue, as the runtime names its tag', ()
 it('only those four are languages of the desk', () => {
   expect(isLanguage('bn')).toBe(true)
   expect(isLanguage('de')).toBe(false)
+})
+
+it('a person’s own language is the first of theirs that the desk has', () => {
+  expect(ownLanguage(['sw', 'fr', 'en'])).toBe('fr')
+  expect(ownLanguage(['sw'])).toBe('en')
+  expect(ownLanguage([])).toBe('en')
 })
