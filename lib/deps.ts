@@ -22,6 +22,8 @@ export type Deps = {
   practice: PracticeClock | null
   /** Where the practice phones are; null where the clock cannot be moved. */
   practicePhonesUrl: string | null
+  /** Keys the hashes of numbers that opted out. */
+  suppressionKey: string
   /** Under which the carrier calls us, without a slash at the end. */
   publicBaseUrl: string
   log: Pick<typeof log, 'info' | 'warn' | 'error'>
@@ -61,6 +63,7 @@ async function open(): Promise<Deps> {
     clock: practice ?? systemClock,
     practice,
     practicePhonesUrl: practice ? settings.carrier.apiBaseUrl : null,
+    suppressionKey: settings.suppressionKey,
     publicBaseUrl: settings.publicBaseUrl,
     log,
     async close() {

@@ -5,6 +5,16 @@ import { phones } from './household'
 import { staff } from './staff'
 import { texts } from './text'
 
+/**
+ * Numbers that asked for no texts, as keyed hashes: they outlive the phone's own row, so that neither an erasure
+ * nor an entry of old lists brings texts back. `keyMark` tells which key made the hash.
+ */
+export const suppressions = pgTable('suppressions', {
+  hash: text('hash').primaryKey(),
+  keyMark: text('key_mark').notNull(),
+  at: instant('at').notNull(),
+})
+
 /** Each yes and no a phone gave, append-only; `phones.consent` is the last of them. */
 export const consents = pgTable(
   'consents',

@@ -48,6 +48,7 @@ async function openDesk(folder: string) {
     clock,
     practice: clock,
     practicePhonesUrl: null,
+    suppressionKey: env().suppressionKey,
     publicBaseUrl: env().publicBaseUrl,
     log: { info: () => undefined, warn: () => undefined, error: log.error.bind(log) },
     close: () => store.close(),

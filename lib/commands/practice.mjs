@@ -50,6 +50,7 @@ export function deskEnvironment({ dataFolder, ports, keys }) {
     DATA_DIR: dataFolder,
     DATABASE_URL: '',
     NEXTAUTH_SECRET: keys.sessionSecret,
+    SUPPRESSION_KEY: '',
     TWILIO_ACCOUNT_SID: accountSid,
     TWILIO_AUTH_TOKEN: keys.carrierToken,
     TWILIO_AUTH_TOKEN_PREVIOUS: '',

@@ -61,10 +61,12 @@ export type MayText =
  */
 export function mayText(phone: {
   consent: Consent
+  /** The number is kept as one that wants no texts, whatever its present row says. */
+  suppressed?: boolean
   phoneState: PhoneState
   carrierBlocked: boolean
 }): MayText {
-  if (phone.consent === 'withdrawn') return { ok: false, reason: 'withdrawn' }
+  if (phone.consent === 'withdrawn' || phone.suppressed) return { ok: false, reason: 'withdrawn' }
   if (phone.consent === 'none') return { ok: false, reason: 'no consent' }
   if (phone.phoneState === 'gone') return { ok: false, reason: 'gone' }
   if (phone.phoneState === 'suspended') return { ok: false, reason: 'suspended' }

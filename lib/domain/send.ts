@@ -1,4 +1,4 @@
-import { mayText, type Consent, type PhoneState } from './consent'
+import { mayText } from './consent'
 import { insideWindow, nextInsideWindow, type Window } from './round-window'
 
 /** What to do with a text whose hour has come. */
@@ -20,7 +20,7 @@ export function decideSend(text: {
   anyHour: boolean
   moment: string | null
   window: Window | null
-  phone: { consent: Consent; phoneState: PhoneState; carrierBlocked: boolean }
+  phone: Parameters<typeof mayText>[0]
 }): SendDecision {
   const allowed = mayText(text.phone)
   const isLastWord = lastWords.includes(text.moment ?? '')

@@ -23,6 +23,8 @@ export type Environment = {
   /** Null means the embedded database in `dataDir`. */
   databaseUrl: string | null
   sessionSecret: string
+  /** Keys the hashes of numbers that opted out; the session secret where none is set. */
+  suppressionKey: string
   carrier: CarrierSettings
   /** Null means that no mail is sent. */
   mail: { smtpUrl: string; from: string } | null
@@ -65,6 +67,10 @@ const variables = z.object({
   NEXTAUTH_SECRET: z
     .string({ error: 'NEXTAUTH_SECRET is missing: it signs the sign-in of every member of staff.' })
     .min(shortestSecret, wanted('NEXTAUTH_SECRET', `at least ${shortestSecret} characters long`)),
+  SUPPRESSION_KEY: z
+    .string()
+    .min(shortestSecret, wanted('SUPPRESSION_KEY', `at least ${shortestSecret} characters long`))
+    .optional(),
   TWILIO_ACCOUNT_SID: z
     .string({ error: 'TWILIO_ACCOUNT_SID is missing.' })
     .regex(/^AC[0-9a-f]{32}$/i, wanted('TWILIO_ACCOUNT_SID', 'AC and 32 hexadecimal digits')),
@@ -173,6 +179,7 @@ function shape(read: z.output<typeof variables>): Environment {
     dataDir: read.DATA_DIR,
     databaseUrl: read.DATABASE_URL ?? null,
     sessionSecret: read.NEXTAUTH_SECRET,
+    suppressionKey: read.SUPPRESSION_KEY ?? read.NEXTAUTH_SECRET,
     carrier: {
       accountSid: read.TWILIO_ACCOUNT_SID,
       authToken: read.TWILIO_AUTH_TOKEN,

@@ -12,6 +12,7 @@ import { applyTicketEvent, raiseTrouble } from './apply-ticket-event'
 import { closePrompts, logWash, refitStage } from './care-for-kit'
 import { queueText } from './queue-text'
 import { recordFlow } from './record-flow'
+import { liftSuppression, suppressNumber } from './suppress-number'
 
 export type AnswerRun = {
   text: TextRow
@@ -32,8 +33,10 @@ async function changeConsent(
     textId: run.text.id,
     at: deps.clock.now(),
   })
+  if (consent === 'withdrawn') return suppressNumber(tx, deps, run.text.e164)
+  await liftSuppression(tx, deps, run.text.e164)
   // A phone whose owner opts in again is reachable again, as far as we know.
-  if (consent === 'given') await updatePhone(tx, run.phoneId, { carrierBlocked: false })
+  return updatePhone(tx, run.phoneId, { carrierBlocked: false })
 }
 
 async function reply(

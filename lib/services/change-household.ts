@@ -54,7 +54,7 @@ async function setFirstPhone(tx: Transaction, deps: Deps, { actor, found, input,
   const { number, answeredBy } = input.phone
   const isSame = first?.phone.e164 === number
   if (first && !isSame) await unlinkPhone(tx, deps, { householdId, phoneId: first.phone.id })
-  return linkPhone(tx, {
+  return linkPhone(tx, deps, {
     householdId,
     number,
     answeredBy,

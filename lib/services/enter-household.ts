@@ -11,18 +11,19 @@ import { handOverKit } from './hand-over-kit'
 import { linkPhone } from './link-phone'
 
 type Refused = { ok: false; reason: string }
-type Entry = { actor: Actor; input: HouseholdInput; at: number }
+type Entry = { deps: Deps; actor: Actor; input: HouseholdInput; at: number }
 
 async function keepWho(tx: Transaction, { input, at }: Entry) {
   const { phones: _phones, consent: _consent, kit: _kit, reading: _reading, ...who } = input
   return insertHousehold(tx, { ...who, createdAt: at })
 }
 
-async function linkPhones(tx: Transaction, { actor, input, at }: Entry, householdId: string) {
+async function linkPhones(tx: Transaction, entry: Entry, householdId: string) {
+  const { deps, actor, input, at } = entry
   const notes: string[] = []
   let firstId: string | null = null
   for (const { number, answeredBy } of input.phones) {
-    const linked = await linkPhone(tx, {
+    const linked = await linkPhone(tx, deps, {
       householdId,
       number,
       answeredBy,
@@ -86,5 +87,5 @@ export async function enterHousehold(
 ): Promise<EnteredHousehold | Refused> {
   allow(actor, 'enter households')
   const at = deps.clock.now()
-  return deps.store.transaction((tx) => keep(tx, { actor, input, at }))
+  return deps.store.transaction((tx) => keep(tx, { deps, actor, input, at }))
 }

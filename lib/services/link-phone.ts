@@ -1,7 +1,9 @@
 import type { Transaction } from '@/db/client'
 import { listSharers, upsertHouseholdPhone, upsertPhone } from '@/db/queries/household'
 import { insertConsent } from '@/db/queries/phone'
+import type { Deps } from '@/lib/deps'
 import { looksUnused, spacedNumber } from '@/lib/schemas/phone-number'
+import { isSuppressed } from './suppress-number'
 
 type Link = {
   householdId: string
@@ -34,9 +36,14 @@ function silenceNotes(phone: Phone): string[] {
  * Makes a phone answer for a household. A number that is known already is shared, and said to be. A yes given at
  * the door is written down, but never over a no that came from the phone itself.
  */
-export async function linkPhone(tx: Transaction, link: Link): Promise<Linked> {
+export async function linkPhone(tx: Transaction, deps: Deps, link: Link): Promise<Linked> {
   const { householdId, number, answeredBy, first, consent, staffId, at } = link
   const { phone, isNew } = await upsertPhone(tx, { e164: number, createdAt: at })
+  if (phone.consent !== 'withdrawn' && (await isSuppressed(tx, deps, number))) {
+    const how = 'opted out before this entry'
+    await insertConsent(tx, { phoneId: phone.id, consent: 'withdrawn', how, at })
+    phone.consent = 'withdrawn'
+  }
   await upsertHouseholdPhone(tx, { householdId, phoneId: phone.id, answeredBy, first })
   const notes = silenceNotes(phone)
   const sharers = await listSharers(tx, [phone.id], householdId)

@@ -6,6 +6,7 @@ import { en } from '@/lib/domain/first-wordings/en'
 import { es } from '@/lib/domain/first-wordings/es'
 import { fr } from '@/lib/domain/first-wordings/fr'
 import { languages } from '@/lib/domain/language'
+import { keepSuppressions } from './suppress-number'
 
 const first = { en, es, fr, bn }
 const toCheck = 'Draft of a first edition: to be checked by a native speaker.'
@@ -26,5 +27,6 @@ export async function prepareDesk(deps: Deps): Promise<void> {
       })),
     )
     await insertFirstEditions(tx, editions, deps.clock.now())
+    await keepSuppressions(tx, deps)
   })
 }

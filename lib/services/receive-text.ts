@@ -7,6 +7,7 @@ import {
   insertReplyReading,
   insertText,
   updateText,
+  type TextRow,
 } from '@/db/queries/text'
 import { findOpenTicket } from '@/db/queries/ticket-events'
 import type { Deps } from '@/lib/deps'
@@ -15,6 +16,7 @@ import { isHelpKeyword, isStartKeyword, isStopKeyword } from '@/lib/domain/conse
 import { readReply } from '@/lib/domain/reply'
 import { mayMeanStop } from '@/lib/domain/reply-stop'
 import type { InboundText } from '@/lib/schemas/carrier'
+import { liftSuppression, suppressNumber } from './suppress-number'
 import { carryOutAnswer } from './carry-out-answer'
 
 /** A question older than this is no longer what a reply is about, in milliseconds. */
@@ -57,13 +59,20 @@ async function whoAnswers(tx: Transaction, deps: Deps, phoneId: string) {
   return facts && { facts, asked: lastAsked?.asked ?? 'none' }
 }
 
+/** Who asks for no texts gets none, though we do not know them: an old list may be entered tomorrow. */
+async function readStranger(tx: Transaction, deps: Deps, text: TextRow): Promise<void> {
+  const { kind } = readReply({ text: text.body, language: text.language, asked: 'none' })
+  if (kind === 'stop') await suppressNumber(tx, deps, text.e164)
+  if (kind === 'start') await liftSuppression(tx, deps, text.e164)
+  await updateText(tx, text.id, { state: 'read', stateWhy: 'from a number we do not know' })
+}
+
 async function read(tx: Transaction, deps: Deps, textId: string): Promise<void> {
   const text = await findTextForUpdate(tx, textId)
   if (text?.state !== 'received') return
   const from = text.phoneId ? await whoAnswers(tx, deps, text.phoneId) : null
   if (!from || !text.phoneId) {
-    await updateText(tx, textId, { state: 'read', stateWhy: 'from a number we do not know' })
-    return
+    return readStranger(tx, deps, text)
   }
   const { facts, asked } = from
   const ticket = await findOpenTicket(tx, facts.kit.id)

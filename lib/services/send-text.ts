@@ -9,10 +9,12 @@ import { decideSend, type SendDecision } from '@/lib/domain/send'
 import { rewordText } from './reword-text'
 import { acceptAttempt, refuseAttempt } from './settle-attempt'
 import { dropText } from './drop-text'
+import { isSuppressed } from './suppress-number'
 
 type Claim = { text: TextRow; attempt: AttemptRow }
 
-async function decisionFor(tx: Transaction, text: TextRow, now: number): Promise<SendDecision> {
+async function decisionFor(tx: Transaction, deps: Deps, text: TextRow): Promise<SendDecision> {
+  const now = deps.clock.now()
   const phone = text.phoneId ? await findPhone(tx, text.phoneId) : null
   if (!phone) return { kind: 'drop', why: 'no phone' }
   const facts = text.kitId ? await findKitFacts(tx, text.kitId) : null
@@ -31,6 +33,7 @@ async function decisionFor(tx: Transaction, text: TextRow, now: number): Promise
     },
     phone: {
       consent: phone.consent,
+      suppressed: await isSuppressed(tx, deps, phone.e164),
       phoneState: phone.state,
       carrierBlocked: phone.carrierBlocked,
     },
@@ -42,7 +45,7 @@ async function claim(tx: Transaction, deps: Deps, textId: string): Promise<Claim
   const now = deps.clock.now()
   const text = await findTextForUpdate(tx, textId)
   if (!text?.phoneId || text.state !== 'queued') return null
-  const decision = await decisionFor(tx, text, now)
+  const decision = await decisionFor(tx, deps, text)
   if (decision.kind === 'drop') {
     await dropText(tx, deps, { text, why: decision.why })
     return null

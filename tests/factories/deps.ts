@@ -51,6 +51,7 @@ export async function testDeps({ at }: { at: number | string }): Promise<TestDep
     clock,
     practice: clock,
     practicePhonesUrl: 'http://127.0.0.1:4010',
+    suppressionKey: 'a key that only the tests know, of any length',
     publicBaseUrl: 'http://127.0.0.1:3000',
     log: silent,
     jobs: () => waitingJobs(store),

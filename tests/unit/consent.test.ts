@@ -46,6 +46,7 @@ describe('a text', () => {
   it.each([
     [{ ...free, consent: 'none' as const }, 'no consent'],
     [{ ...free, consent: 'withdrawn' as const }, 'withdrawn'],
+    [{ ...free, suppressed: true }, 'withdrawn'],
     [{ ...free, phoneState: 'suspended' as const }, 'suspended'],
     [{ ...free, phoneState: 'gone' as const }, 'gone'],
     [{ ...free, carrierBlocked: true }, 'carrier blocked'],

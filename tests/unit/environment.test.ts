@@ -78,6 +78,16 @@ describe('settings that stand', () => {
   })
 })
 
+test('numbers that opted out are keyed by their own secret, or else by the session secret', () => {
+  const own = 'k'.repeat(40)
+  const keyOf = (values: EnvironmentValues) => {
+    const read = readEnvironment(values)
+    return read.ok ? read.env.suppressionKey : null
+  }
+  expect(keyOf({ ...real, SUPPRESSION_KEY: own })).toBe(own)
+  expect(keyOf(real)).toBe(real.NEXTAUTH_SECRET)
+})
+
 describe('settings that are refused with one line each', () => {
   test.each<[string, EnvironmentValues, string]>([
     ['no public address', { ...real, PUBLIC_BASE_URL: undefined }, 'PUBLIC_BASE_URL is missing'],
@@ -89,6 +99,11 @@ describe('settings that are refused with one line each', () => {
     ],
     ['no session secret', { ...real, NEXTAUTH_SECRET: '' }, 'NEXTAUTH_SECRET is missing'],
     ['a short session secret', { ...real, NEXTAUTH_SECRET: 'x'.repeat(31) }, 'at least 32'],
+    [
+      'a short suppression key',
+      { ...real, SUPPRESSION_KEY: 'x'.repeat(31) },
+      'SUPPRESSION_KEY must',
+    ],
     ['no account', { ...real, TWILIO_ACCOUNT_SID: undefined }, 'TWILIO_ACCOUNT_SID is missing'],
     ['a wrong account', { ...real, TWILIO_ACCOUNT_SID: 'AC12' }, 'TWILIO_ACCOUNT_SID must be'],
     ['an empty token', { ...real, TWILIO_AUTH_TOKEN: '' }, 'TWILIO_AUTH_TOKEN is missing or empty'],
@@ -161,6 +176,7 @@ test('the example file names every setting', () => {
     'DATA_DIR',
     'DATABASE_URL',
     'NEXTAUTH_SECRET',
+    'SUPPRESSION_KEY',
     'TWILIO_ACCOUNT_SID',
     'TWILIO_AUTH_TOKEN',
     'TWILIO_AUTH_TOKEN_PREVIOUS',
