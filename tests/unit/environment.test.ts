@@ -32,6 +32,7 @@ describe('settings that stand', () => {
         publicBaseUrl: 'https://desk.example',
         dataDir: '.data',
         databaseUrl: null,
+        suppressionKey: secret,
         sessionSecret: secret,
         carrier: {
           accountSid: `AC${'0'.repeat(32)}`,
