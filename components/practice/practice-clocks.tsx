@@ -10,7 +10,9 @@ export function PracticeClocks({ practice }: { practice: Practice }) {
         {first.hour}
         <span className="block text-lg">{first.day}</span>
       </p>
-      <p className="mt-1 text-sm text-faint">in {zoneWords(first.zone)}</p>
+      <p className="mt-1 text-sm text-faint">
+        by the clocks of the areas in {zoneWords(first.zone)}
+      </p>
       {others.length > 0 && (
         <ul className="mt-3 text-sm">
           {others.map(({ zone, hour, day }) => (

@@ -67,7 +67,7 @@ function saidAfterYes({ draft, inUse }: DraftDesk['cell']): string {
 function hindranceOf(desk: DraftDesk, blocked: boolean): string | null {
   const { cell, changed } = desk
   if (changed) return 'Save the draft before it is approved.'
-  if (!cell.draft) return 'There is no draft yet: change the words and save.'
+  if (!cell.draft) return 'There is no draft: change the words and save.'
   if (blocked) return 'The checks name what must be mended first.'
   if (cell.approvedByMe) return 'You gave the first yes. A second person must give theirs.'
   return null

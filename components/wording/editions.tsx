@@ -53,10 +53,16 @@ function EditionRow({ edition, cell }: { edition: WordingEdition; cell: WordingC
         <span className="block whitespace-nowrap text-faint">{writtenOn}</span>
       </Td>
       <Td className="min-w-32">
-        {[approvedBy, secondApprovedBy].filter(Boolean).join(' and ') || 'nobody yet'}
+        {[approvedBy, secondApprovedBy].filter(Boolean).join(' and ') || unapprovedWords(edition)}
       </Td>
     </tr>
   )
+}
+
+/** The editions that a desk starts with stand without anybody's yes. */
+function unapprovedWords({ state, inUseFrom }: WordingEdition): string {
+  if (state === 'draft') return 'nobody yet'
+  return inUseFrom === null ? 'nobody' : 'came with the desk'
 }
 
 function stateWords({ state, inUseFrom }: WordingEdition): string {

@@ -51,7 +51,7 @@ export function WordingDesk({ initial }: { initial: WordingCell }) {
 }
 
 function draftTitle({ draft, editions }: WordingCell): string {
-  if (!draft) return `A new draft, to be edition ${(editions[0]?.edition ?? 0) + 1}`
+  if (!draft) return `To be edition ${(editions[0]?.edition ?? 0) + 1}`
   const by = draft.writtenBy ? ` by ${draft.writtenBy}` : ''
   return `Draft of edition ${draft.edition}${by}`
 }
