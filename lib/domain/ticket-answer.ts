@@ -11,7 +11,7 @@ import { answerStep, nextStep, startWalk, type Walk } from './walk'
 import { stepOf } from './walk-catalogue'
 import type { Next } from './walk-rules'
 import { coldCelsius, suspectIds } from './walk-suspects'
-import { failedWashesInARow, trialsOf } from './walk-trials'
+import { failedWashesInARow, isWashAnswer, trialsOf } from './walk-trials'
 
 type Answered = Extract<TicketEvent, { kind: 'answered' }>
 
@@ -87,12 +87,25 @@ export function answered(state: TicketState, event: Answered, now: number): Tick
     waitingFor: null,
   }
   const next = nextStep(walk)
+  const { state: after, effects } = following(heard, next, { need: event.need, now })
+  const known = event.recovery ? ('measured' as const) : ('said' as const)
+  const washed: TicketEffect[] = isWashAnswer(event.stepId, event.answer)
+    ? [{ kind: 'log wash', known }]
+    : []
+  return { state: after, effects: [...washed, ...effects] }
+}
+
+function following(
+  heard: TicketState,
+  next: Next,
+  { need, now }: { need: Need | undefined; now: number },
+): TicketOutcome {
   if (next.kind === 'step') {
     return heard.automatic && !isUnderWay(heard)
       ? sendStep(heard, next.step.id)
       : { state: heard, effects: [] }
   }
-  return ended(heard, next, { need: event.need, now })
+  return ended(heard, next, { need, now })
 }
 
 function ended(
@@ -124,12 +137,7 @@ function restored(state: TicketState, now: number): TicketOutcome {
   if (isDanger(state.trouble) || state.trouble === 'unread') return { state, effects: [] }
   const cause = state.cause ?? causeOf(state.walk)
   const end = endTicket(state, { end: 'flowing', cause, now })
-  const wasWashed = trialsOf(state.walk?.tried ?? []).at(-1)?.step.id === 'wash-fibre'
-  const washed: TicketEffect[] = wasWashed ? [{ kind: 'log wash' }] : []
-  return {
-    state: end.state,
-    effects: [...washed, { kind: 'send', moment: 'flowing' }, ...end.effects],
-  }
+  return { state: end.state, effects: [{ kind: 'send', moment: 'flowing' }, ...end.effects] }
 }
 
 /** What a walk that brought the flow back tells of the cause. */

@@ -72,7 +72,8 @@ export type TicketEffect =
   | { kind: 'send'; moment: Moment }
   | { kind: 'promise part'; stage: StageNumber }
   | { kind: 'ask for visit' }
-  | { kind: 'log wash' }
+  /** The fibre stage was washed, whatever it brought. */
+  | { kind: 'log wash'; known: 'said' | 'measured' }
   | { kind: 'out of service' }
   | { kind: 'back in service' }
   | { kind: 'tell coordinator'; why: string }

@@ -17,6 +17,18 @@ export type Trial = {
 
 const notCarriedOut: readonly StepAnswer[] = ['not done', 'no', 'no answer']
 
+/** True for an answer that means the cure was done, whatever it did. */
+function isCarriedOut(step: Step, answer: StepAnswer): boolean {
+  const isEnd = step.answers.some((choice) => choice.answer === answer && choice.ends)
+  return step.kind === 'cure' && !notCarriedOut.includes(answer) && !isEnd
+}
+
+/** True for an answer by which the fibre stage was washed. */
+export function isWashAnswer(stepId: StepId, answer: StepAnswer): boolean {
+  const step = stepOf(stepId)
+  return step?.id === 'wash-fibre' && isCarriedOut(step, answer)
+}
+
 /**
  * The cures of a walk in order. A flow figure belongs to the last cure before it, also when it
  * comes later or is asked for again: it is the best knowledge of what that cure did.
@@ -27,8 +39,7 @@ export function trialsOf(tried: readonly Tried[]): Trial[] {
     const step = stepOf(stepId)
     const last = trials.at(-1)
     if (step?.kind === 'cure') {
-      if (notCarriedOut.includes(answer) || step.answers.some((a) => a.answer === answer && a.ends))
-        continue
+      if (!isCarriedOut(step, answer)) continue
       trials.push({ step, said: answer, recovery: recovery ?? null, asks: 0, wasAskedAgain: false })
     } else if (step?.asks === 'flow' && last) {
       last.asks += 1

@@ -151,7 +151,7 @@ async function runPlain(
       return sendMoment(tx, deps, { run, moment: effect.moment, values })
     }
     case 'log wash':
-      return logWash(tx, deps, { facts, ticketId, known: 'measured' })
+      return logWash(tx, deps, { facts, ticketId, known: effect.known })
     case 'out of service': {
       const outOfServiceSince = deps.clock.now()
       return updateKit(tx, facts.kit.id, { state: 'out of service', outOfServiceSince })

@@ -63,7 +63,7 @@ describe('a slow filter that an agent takes', () => {
       walking.state,
     )
     expect(effects).toEqual([
-      { kind: 'log wash' },
+      { kind: 'log wash', known: 'measured' },
       { kind: 'send', moment: 'flowing' },
       { kind: 'closed' },
     ])
@@ -87,13 +87,32 @@ describe('a slow filter that is walked by itself', () => {
       { kind: 'send step', stepId: 'wash-fibre' },
     ])
     const once = play(twiceWashed.slice(0, 5))
-    expect(once.effects).toEqual([{ kind: 'send step', stepId: 'wash-fibre' }])
+    expect(once.effects).toEqual([
+      { kind: 'log wash', known: 'measured' },
+      { kind: 'send step', stepId: 'wash-fibre' },
+    ])
     expect(once.state.failedWashes).toBe(1)
+  })
+
+  it.each([
+    ['done', [{ kind: 'log wash', known: 'said' }]],
+    ['not cured', [{ kind: 'log wash', known: 'said' }]],
+    ['not done', []],
+    ['no answer', []],
+  ] as const)('counts the wash when the answer is %s', (answer, logged) => {
+    const { effects } = play([
+      ...twiceWashed.slice(0, 4),
+      { kind: 'answered', stepId: 'wash-fibre', answer },
+    ])
+    expect(effects.filter(({ kind }) => kind === 'log wash')).toEqual(logged)
   })
 
   it('is owed a fibre stage after the second wash that fails', () => {
     const { state, effects } = play([...twiceWashed, figure('wash-fibre', 11)])
-    expect(effects).toEqual([{ kind: 'promise part', stage: 3 }])
+    expect(effects).toEqual([
+      { kind: 'log wash', known: 'measured' },
+      { kind: 'promise part', stage: 3 },
+    ])
     expect(state).toMatchObject({
       stage: 'part owed',
       cause: 'spent-fibre',
@@ -109,6 +128,7 @@ describe('a slow filter that is walked by itself', () => {
       { ...figure('wash-fibre', 11), need: 'short' } as TicketEvent,
     ])
     expect(effects).toEqual([
+      { kind: 'log wash', known: 'measured' },
       { kind: 'promise part', stage: 3 },
       { kind: 'out of service' },
       { kind: 'send', moment: 'drink-advice' },
@@ -143,7 +163,7 @@ describe('a slow filter that is walked by itself', () => {
     const { state } = play([...twiceWashed.slice(0, 4), { kind: 'taken', staffId: 'ana' }])
     expect(state).toMatchObject({ stage: 'waiting', automatic: false, takenBy: 'ana' })
     const answered = play([figure('wash-fibre', 12)], state)
-    expect(answered.effects).toEqual([])
+    expect(answered.effects).toEqual([{ kind: 'log wash', known: 'measured' }])
     expect(answered.state.stage).toBe('walking')
     expect(
       decide(answered.state, { kind: 'step sent', stepId: 'wash-fibre', by: null }, 0),
