@@ -6,6 +6,7 @@ import * as kit from './schema/kit'
 import * as part from './schema/part'
 import * as promise from './schema/promise'
 import * as reading from './schema/reading'
+import * as replyWord from './schema/reply-word'
 import * as staff from './schema/staff'
 import * as stock from './schema/stock'
 import * as text from './schema/text'
@@ -21,6 +22,7 @@ export const tables = {
   ...part,
   ...promise,
   ...reading,
+  ...replyWord,
   ...stock,
   ...staff,
   ...text,

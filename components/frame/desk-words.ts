@@ -5,6 +5,7 @@ const words: readonly (Word & { act: Act })[] = [
   { name: 'Shift', href: '/shift', also: ['/tickets'], act: 'see the shift' },
   { name: 'Households', href: '/households', also: ['/areas'], act: 'see households' },
   { name: 'Wording', href: '/wording', act: 'see wording' },
+  { name: 'Reply words', href: '/reply-words', act: 'set reply words' },
   { name: 'Rounds', href: '/rounds', act: 'see rounds' },
   { name: 'Parts', href: '/depots', act: 'keep stock' },
 ]

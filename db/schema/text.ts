@@ -120,6 +120,9 @@ export const texts = pgTable(
     index('texts_household').on(t.householdId, t.n),
     index('texts_phone').on(t.phoneId, t.n),
     index('texts_ticket').on(t.ticketId),
+    index('texts_in_language')
+      .on(t.language, t.n)
+      .where(sql`${t.direction} = 'in'`),
     check('texts_direction_known', sql`${t.direction} in ('in', 'out')`),
     check(
       'texts_state_fits_direction',
@@ -197,6 +200,9 @@ export const replyReadings = pgTable(
   },
   (t) => [
     unique('reply_readings_once_a_reader').on(t.textId, t.readBy),
+    index('reply_readings_by_people')
+      .on(t.n)
+      .where(sql`${t.readBy} <> 'desk'`),
     check('reply_readings_sure_share', sql`${t.sure} between 0 and 1`),
   ],
 )

@@ -1,25 +1,34 @@
 import type { Language } from './language'
 import type { Likeness } from './reply-lexicon'
-import { readReply, type Asked, type ReplyReading } from './reply'
+import { readReply, type Reply, type ReplyReading } from './reply'
 import { senseOf } from './reply-sense'
+import type { Token } from './reply-tokens'
 import type { Concept } from './reply-words/concept'
 
-/** One thing the reader found in a text. */
+/** One thing the reader found in a text: its words `from` up to, not including, `to`. */
 export type Found = {
   words: string
+  from: number
+  to: number
   concept: Concept
   language: Language
   likeness: Likeness
   denied: boolean
 }
 
-/** A reading with what it rests on, for the page on which a coordinator tries a text. */
-export function explainReply(reply: { text: string; language: Language; asked: Asked }): {
+/** A text as the reader cuts it. */
+export type SeenWord = { text: string; kind: Token['kind']; known: boolean }
+
+export type Explained = {
   reading: ReplyReading
+  words: SeenWord[]
   found: Found[]
   unknownWords: string[]
-} {
-  const sense = senseOf(reply.text, reply.language, reply.asked)
+}
+
+/** A reading with what it rests on, for the page on which a coordinator tries a text. */
+export function explainReply(reply: Reply): Explained {
+  const sense = senseOf(reply.text, reply.language, reply.asked, reply.added)
   const wordsBetween = (from: number, to: number): string =>
     sense.tokens
       .slice(from, to)
@@ -27,8 +36,15 @@ export function explainReply(reply: { text: string; language: Language; asked: A
       .join(' ')
   return {
     reading: readReply(reply),
+    words: sense.tokens.map(({ text, kind }, at) => ({
+      text,
+      kind,
+      known: !sense.unknownAt.includes(at),
+    })),
     found: sense.marks.map(({ from, to, concept, language, likeness, denied }) => ({
       words: wordsBetween(from, to),
+      from,
+      to,
       concept,
       language,
       likeness,

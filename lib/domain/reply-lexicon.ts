@@ -4,6 +4,7 @@ import type { Concept, LanguagePack } from './reply-words/concept'
 import { enPack } from './reply-words/en'
 import { esPack } from './reply-words/es'
 import { frPack } from './reply-words/fr'
+import { packWith, type AddedWord } from './reply-added'
 import { foldText } from './reply-tokens'
 import { allowedSlips, isKeypadSlip, isLikelySlip, shareKey, slipsBetween } from './reply-slips'
 import { foldBengali, foldFrench, foldRoman, foldSpanish, squeeze } from './reply-spelling'
@@ -58,7 +59,8 @@ function spellings(entry: string): string[] {
     : [entry]
 }
 
-function numberWords(pack: LanguagePack): string[] {
+/** Every word of a pack that belongs to a figure. */
+export function numberWords(pack: LanguagePack): string[] {
   const spoken = [pack.numbers, pack.weakNumbers, pack.spans, pack.halves, pack.shifts ?? '']
   const others = Object.values(pack.units)
   return [...spoken, ...others]
@@ -86,8 +88,8 @@ function learn(lexicon: Lexicon, key: string): void {
   lexicon.respelled.set(respelled, [...(lexicon.respelled.get(respelled) ?? []), key])
 }
 
-function buildLexicon(language: Language): Lexicon {
-  const pack = languagePacks[language]
+function buildLexicon(language: Language, added: readonly AddedWord[]): Lexicon {
+  const pack = packWith(languagePacks[language], language, added)
   const lexicon: Lexicon = {
     entriesByFirstKey: new Map(),
     words: new Set(),
@@ -117,13 +119,31 @@ function buildLexicon(language: Language): Lexicon {
   return lexicon
 }
 
-const lexicons = new Map<Language, Lexicon>()
+const noneAdded: readonly AddedWord[] = []
+const lexicons = new WeakMap<readonly AddedWord[], Map<Language, Lexicon>>()
 
-function lexiconOf(language: Language): Lexicon {
-  const known = lexicons.get(language)
+/** The added words of the reading under way: it awaits nothing, so no other reading can meet them. */
+let inForce = noneAdded
+
+/** Reads with added words beside the packs. A list is indexed once: hand the same one over each time. */
+export function readingWith<T>(added: readonly AddedWord[] | undefined, read: () => T): T {
+  const before = inForce
+  inForce = added ?? noneAdded
+  try {
+    return read()
+  } finally {
+    inForce = before
+  }
+}
+
+function lexiconOf(language: Language, added = inForce): Lexicon {
+  const ofList = lexicons.get(added) ?? new Map<Language, Lexicon>()
+  lexicons.set(added, ofList)
+  const known = ofList.get(language)
   if (known) return known
-  const built = buildLexicon(language)
-  lexicons.set(language, built)
+  const isBare = added !== noneAdded && !added.some((word) => word.language === language)
+  const built = isBare ? lexiconOf(language, noneAdded) : buildLexicon(language, added)
+  ofList.set(language, built)
   return built
 }
 

@@ -1,7 +1,9 @@
 import type { Language } from './language'
+import type { AddedWord } from './reply-added'
 import { denyMarks } from './reply-denial'
 import { readFigures, type Figures } from './reply-figures'
 import { partJoinedDenials } from './reply-joined-denial'
+import { readingWith } from './reply-lexicon'
 import { markTokens, type Mark } from './reply-marks'
 import { tokenise, type Token } from './reply-tokens'
 import type { Concept } from './reply-words/concept'
@@ -22,7 +24,17 @@ export type Sense = {
   words: number
 }
 
-export function senseOf(text: string, language: Language, asked: Asked): Sense {
+/** A text with its concepts found; `added` are the programme's own words beside the packs. */
+export function senseOf(
+  text: string,
+  language: Language,
+  asked: Asked,
+  added?: readonly AddedWord[],
+): Sense {
+  return readingWith(added, () => findSense(text, language, asked))
+}
+
+function findSense(text: string, language: Language, asked: Asked): Sense {
   const tokens = partJoinedDenials(tokenise(text), language)
   const { marks, knownWords } = markTokens(tokens, language)
   const figures = readFigures(tokens, language)

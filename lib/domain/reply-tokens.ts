@@ -20,6 +20,12 @@ const emojiWords: readonly (readonly [RegExp, string])[] = [
   [/[🐌🐢]/gu, ' emojislow '],
 ]
 
+/** The emoji that a word of the packs stands for; null for any other word. */
+export function emojiOf(word: string): string | null {
+  const found = emojiWords.find(([, name]) => name.trim() === word)
+  return found ? [...found[0].source.slice(1, -1)].join(' ') : null
+}
+
 /** French words that lose their vowel before an apostrophe; elsewhere an apostrophe just goes. */
 const elided = new Set([
   'l',

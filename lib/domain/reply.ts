@@ -1,5 +1,6 @@
 import { isHelpKeyword, isStartKeyword } from './consent'
 import type { Language } from './language'
+import type { AddedWord } from './reply-added'
 import { findAnswer } from './reply-answers'
 import { figureOf, isMostlyFigure } from './reply-figure'
 import { findDanger } from './reply-danger'
@@ -49,14 +50,22 @@ export type ReplyReading = {
 /** Below this a person reads the text. */
 export const sureEnough = 0.6
 
+export type Reply = {
+  text: string
+  language: Language
+  asked: Asked
+  /** The programme's own words beside the packs. */
+  added?: readonly AddedWord[] | undefined
+}
+
 /**
  * What a household's text means. Order: opt-out, danger, wrong number, what was asked, the rest.
  * The household's own language is tried first, then English, then the others.
  *
  * @example readReply({ text: 'sale poca agua', language: 'es', asked: 'wash' }).kind // 'slow'
  */
-export function readReply(reply: { text: string; language: Language; asked: Asked }): ReplyReading {
-  const sense = senseOf(reply.text, reply.language, reply.asked)
+export function readReply(reply: Reply): ReplyReading {
+  const sense = senseOf(reply.text, reply.language, reply.asked, reply.added)
   const reading = readUrgent(sense) ?? readTrouble(sense) ?? readRest(sense)
   const sure = Math.round(reading.sure * 100) / 100
   return sure < sureEnough ? { ...reading, kind: 'unclear', sure } : { ...reading, sure }

@@ -17,6 +17,7 @@ const acts = {
   'enter households': ['agent', 'coordinator'],
   'write wording': ['coordinator'],
   'see wording': ['coordinator'],
+  'set reply words': ['coordinator'],
   'see rounds': ['coordinator'],
   'set up areas': ['coordinator'],
   'keep stock': ['coordinator'],

@@ -4,6 +4,7 @@ import type { Endpoint } from './endpoint'
 import { householdEndpoints } from './household'
 import { openEndpoints } from './open-endpoints'
 import { practiceEndpoints } from './practice'
+import { replyWordsEndpoints } from './reply-words'
 import { roundsEndpoints } from './rounds'
 import { shiftEndpoints } from './shift'
 import { ticketEndpoints } from './ticket-work'
@@ -18,6 +19,7 @@ export const endpoints: readonly Endpoint[] = [
   ...areaEndpoints,
   ...depotEndpoints,
   ...wordingEndpoints,
+  ...replyWordsEndpoints,
   ...roundsEndpoints,
   ...practiceEndpoints,
 ]

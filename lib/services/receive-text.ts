@@ -16,8 +16,9 @@ import { isHelpKeyword, isStartKeyword, isStopKeyword } from '@/lib/domain/conse
 import { readReply } from '@/lib/domain/reply'
 import { mayMeanStop } from '@/lib/domain/reply-stop'
 import type { InboundText } from '@/lib/schemas/carrier'
-import { liftSuppression, suppressNumber } from './suppress-number'
+import { addedWordsInForce } from './added-words'
 import { carryOutAnswer } from './carry-out-answer'
+import { liftSuppression, suppressNumber } from './suppress-number'
 
 /** A question older than this is no longer what a reply is about, in milliseconds. */
 const ASKED_WITHIN = 21 * 24 * 60 * 60_000
@@ -76,7 +77,12 @@ async function read(tx: Transaction, deps: Deps, textId: string): Promise<void> 
   }
   const { facts, asked } = from
   const ticket = await findOpenTicket(tx, facts.kit.id)
-  const reading = readReply({ text: text.body, language: facts.household.language, asked })
+  const reading = readReply({
+    text: text.body,
+    language: facts.household.language,
+    asked,
+    added: await addedWordsInForce(tx),
+  })
   await insertReplyReading(tx, {
     textId,
     asked,

@@ -1,0 +1,40 @@
+import type { Asked, ReplyReading } from './reply'
+import { replyKindWords } from './slip-words'
+
+/** What a reading says, in words for staff: `slow water, 12 minutes a bottle`. */
+export function meaningWords(
+  reading: Pick<ReplyReading, 'kind' | 'dangerSign' | 'alsoSlow'> & {
+    minutes?: number | null | undefined
+    choice?: number | null | undefined
+  },
+): string {
+  const { kind, minutes, choice } = reading
+  const isChoice = typeof choice === 'number'
+  const parts = [
+    isChoice ? `choice ${choice}` : replyKindWords[kind],
+    !isChoice && typeof minutes === 'number' ? `${roundedMinutes(minutes)} minutes a bottle` : '',
+    reading.dangerSign ? 'with a danger sign' : '',
+    reading.alsoSlow ? 'and slow water' : '',
+  ]
+  return parts.filter(Boolean).join(', ')
+}
+
+function roundedMinutes(minutes: number): number {
+  return Math.round(minutes * 10) / 10
+}
+
+/** How sure a reading is, from 0 to 1, as `85 % sure`. */
+export function sureWords(sure: number): string {
+  return `${Math.round(sure * 100)} % sure`
+}
+
+/** What a reply was an answer to, in words for staff. */
+export const askedWords: Record<Asked, string> = {
+  wash: 'to wash the filter',
+  change: 'to change a stage',
+  flow: 'how long a bottle takes',
+  step: 'a step of the walk',
+  none: 'nothing',
+}
+
+export const askedKinds = Object.keys(askedWords) as readonly Asked[]
