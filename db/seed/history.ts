@@ -11,6 +11,7 @@ import { storeInbound } from '@/lib/services/receive-text'
 import { sendDueTexts } from '@/lib/services/send-text'
 import type { BuildQueue } from './build-queue'
 import { renew, replyTo, useFilter, type Family, type Reply } from './family'
+import { oddWordsOf, setRight } from './odd-words'
 import { timeZone } from './places'
 import type { Random } from './random'
 import { workShift } from './shift-work'
@@ -52,12 +53,24 @@ async function deliver(
   if (reply) replies.push(reply)
 }
 
-/** A family's text comes in through the same door as a webhook's. */
-export async function hear(history: History, { number, body }: Omit<Reply, 'at'>): Promise<void> {
+/** A family's text comes in through the same door as a webhook's: the carrier's id for it. */
+export async function hear(history: History, { number, body }: Omit<Reply, 'at'>): Promise<string> {
   history.texts += 1
   const sid = `SM${history.texts.toString(16).padStart(32, '0')}`
   await storeInbound(history.deps, { sid, from: number, body, raw: { MessageSid: sid } })
   await history.queue.drain(history.deps)
+  return sid
+}
+
+/** A family puts it in words that no list has, and the agent reads them. */
+async function speakOddly(history: History, day: number): Promise<void> {
+  const { deps, agent, families } = history
+  for (const { language, body, kind } of oddWordsOf(day)) {
+    const family = [...families.values()].find((one) => one.language === language)
+    if (!family) continue
+    const sid = await hear(history, { number: family.number, body })
+    await setRight(deps, agent, { sid, kind })
+  }
 }
 
 /** Something happens to a family that nobody asked about. */
@@ -102,6 +115,7 @@ async function dayOf(history: History, day: number): Promise<void> {
   if (random.chance(0.08)) await mishap(history, 'broken')
   if (random.chance(0.2)) await mishap(history, 'unsure')
   if (random.chance(0.12)) await mishap(history, 'noFlow')
+  await speakOddly(history, day)
   await workShift(history.deps, history.agent, (householdId) => {
     const family = families.get(history.numbers.get(householdId) ?? '')
     if (family) renew(family)

@@ -65,7 +65,8 @@ export function mayAddWord(asked: AddedWord, added: readonly AddedWord[]): MayAd
   return refusal ? { ok: false, ...refusal } : { ok: true, word: { language, concept, phrase } }
 }
 
-const lettersOnly = /^[\p{L}\p{M}\s'’\u200c\u200d-]+$/u
+/** The two joiners are part of how Bengali is written. */
+const lettersOnly = /^(?:[\p{L}\p{M}\s'’-]|\u200c|\u200d)+$/u
 
 /** The words as the reader sees them; empty where something but letters stands among them. */
 function wordsOf(phrase: string): string[] {

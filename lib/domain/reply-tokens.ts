@@ -23,7 +23,7 @@ const emojiWords: readonly (readonly [RegExp, string])[] = [
 /** The emoji that a word of the packs stands for; null for any other word. */
 export function emojiOf(word: string): string | null {
   const found = emojiWords.find(([, name]) => name.trim() === word)
-  return found ? [...found[0].source.slice(1, -1)].join(' ') : null
+  return found?.[0].source.match(/\p{Extended_Pictographic}/gu)?.join(' ') ?? null
 }
 
 /** French words that lose their vowel before an apostrophe; elsewhere an apostrophe just goes. */

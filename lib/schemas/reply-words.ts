@@ -13,7 +13,9 @@ const addedWordSchema = z.object({
   /** Its meaning, in words. */
   meaning: z.string(),
   addedBy: z.string(),
-  addedOn: z.string(),
+  /** As printed: `12 Mar`, `2026`. */
+  day: z.string(),
+  year: z.string(),
   /** The text it was taken from. */
   from: z.string().nullable(),
   retiredBy: z.string().nullable(),
@@ -44,8 +46,9 @@ export const proposalSchema = z.object({
   body: z.string(),
   language: languageSchema,
   asked: askedSchema,
-  /** When the person read it, as printed. */
-  on: z.string(),
+  /** The day on which the person read it, as printed: `12 Mar`, `2026`. */
+  day: z.string(),
+  year: z.string(),
   desk: meaningSchema,
   person: z.object({ meaning: z.string(), by: z.string() }),
   /** With the words in force by now the desk reads it as the person did. */

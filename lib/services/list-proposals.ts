@@ -6,7 +6,7 @@ import type { AddedWord } from '@/lib/domain/reply-added'
 import { meaningWords, sureWords } from '@/lib/domain/reply-meaning-words'
 import { allow, type Actor } from '@/lib/domain/role'
 import { localDay } from '@/lib/domain/round-window'
-import { dayWords } from '@/lib/domain/stamp'
+import { shortDayWords } from '@/lib/domain/stamp'
 import type { Proposal, ProposalPage } from '@/lib/schemas/reply-words'
 import { addedWordsInForce } from './added-words'
 
@@ -52,13 +52,15 @@ function viewOf(
   timeZone: string,
 ): Proposal {
   const now = readReply({ text: text.body, language: text.language, asked: desk.asked, added })
+  const readOn = localDay(person.at, timeZone)
   return {
     textId: text.id,
     readingN: person.n,
     body: text.body,
     language: text.language,
     asked: desk.asked,
-    on: dayWords(localDay(person.at, timeZone)),
+    day: shortDayWords(readOn),
+    year: readOn.slice(0, 4),
     desk: { meaning: meaningWords(desk), sure: sureWords(desk.sure) },
     person: { meaning: meaningWords(person), by: by ?? 'somebody' },
     settledByNow: isSame(now, person),

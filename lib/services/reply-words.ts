@@ -7,7 +7,7 @@ import { conceptNames } from '@/lib/domain/reply-concept-names'
 import { wordLists } from '@/lib/domain/reply-word-lists'
 import { allow, type Actor } from '@/lib/domain/role'
 import { localDay } from '@/lib/domain/round-window'
-import { dayWords } from '@/lib/domain/stamp'
+import { dayWords, shortDayWords } from '@/lib/domain/stamp'
 import type { AddedWordView, ReplyWords } from '@/lib/schemas/reply-words'
 
 /** So many retired words are still shown. */
@@ -31,16 +31,17 @@ export async function replyWords(
 }
 
 function viewerOf(timeZone: string) {
-  const printDay = (at: number) => dayWords(localDay(at, timeZone))
+  const dayOf = (at: number) => localDay(at, timeZone)
   const names: Partial<Record<string, string>> = conceptNames
   return ({ word, body, addedBy, retiredBy }: WordWithPeople): AddedWordView => ({
     id: word.id,
     phrase: word.phrase,
     meaning: names[word.concept] ?? 'a meaning the desk no longer has',
     addedBy: addedBy ?? 'somebody',
-    addedOn: printDay(word.addedAt),
+    day: shortDayWords(dayOf(word.addedAt)),
+    year: dayOf(word.addedAt).slice(0, 4),
     from: body,
     retiredBy,
-    retiredOn: word.retiredAt === null ? null : printDay(word.retiredAt),
+    retiredOn: word.retiredAt === null ? null : dayWords(dayOf(word.retiredAt)),
   })
 }
