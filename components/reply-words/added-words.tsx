@@ -16,7 +16,8 @@ export function AddedWords({ language, added, retired }: AddedWordsProps) {
     <>
       {added.length === 0 && (
         <p className="mt-1 pl-lead text-faint">
-          None yet. Open a proposal, or try a text and give a word of it a meaning.
+          {retired.length > 0 ? 'None in force.' : 'None yet.'} Open a proposal, or try a text and
+          give a word of it a meaning.
         </p>
       )}
       <ul>

@@ -83,6 +83,9 @@ function TrialActions({ trial, isProposal }: { trial: Trial; isProposal: boolean
   const isRefused = (tried?.refused.length ?? 0) > 0
   return (
     <div className="mt-5 flex flex-wrap items-center gap-3">
+      {isRefused && (
+        <p className="w-full text-sm text-faint">Take off what may not be added first.</p>
+      )}
       <Button
         kind="main"
         busy={busy}

@@ -4,16 +4,12 @@ import { Notice } from '../ui/notice'
 
 type Effect = NonNullable<TriedReply['effect']>
 
-function counted(count: number, one: string, many: string): string {
-  return `${count} ${count === 1 ? one : many}`
-}
-
 function headOf({ looked, changed }: Effect, language: Language): string {
   const name = languageNamesInEnglish[language]
   if (looked === 0) return `There is no stored text in ${name} to try it on yet.`
   const texts = looked === 1 ? `the last text in ${name}` : `the last ${looked} texts in ${name}`
   if (changed === 0) return `None of ${texts} would be read otherwise.`
-  return `Of ${texts}, ${counted(changed, 'would', 'would')} be read otherwise.`
+  return `Of ${texts}, ${changed} would be read otherwise.`
 }
 
 /** What the words on trial would have changed in texts that came before. */
@@ -24,7 +20,9 @@ export function WordEffect({ effect, language }: { effect: Effect; language: Lan
       <p className="font-semibold">{headOf(effect, language)}</p>
       {calmed > 0 && (
         <Notice tone="danger" title="A danger would no longer be seen" className="mt-2">
-          {counted(calmed, 'of them speaks', 'of them speak')} of a danger today. They stand on top.
+          {calmed === 1
+            ? 'The text on top is read as a danger now.'
+            : `The ${calmed} texts on top are read as a danger now.`}
         </Notice>
       )}
       <ul className="mt-1">

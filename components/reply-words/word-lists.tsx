@@ -6,34 +6,46 @@ type List = ReplyWords['groups'][number]['lists'][number]
 /** A list longer than this is folded behind its first words. */
 const shownAtFirst = 12
 
-/** Every word that came with the desk, by what it is taken for. */
+/** Every word that came with the desk, by what it is taken for; each heading opens its lists. */
 export function WordLists({ language, groups }: WordListsProps) {
-  return groups.map(({ name, lists }) => (
-    <section key={name} aria-label={name} className="mt-6 first:mt-3">
-      <h3 className="border-b border-ink pb-1.5 font-semibold">{name}</h3>
-      <dl>
-        {lists.map((list) => (
-          <ListRow key={list.name} list={list} language={language} />
-        ))}
-      </dl>
-    </section>
-  ))
+  return (
+    <div className="mt-3 border-t border-ink">
+      {groups.map(({ name, lists }) => (
+        <details key={name} className="border-b border-rule open:border-ink">
+          <summary className="py-2.5">
+            <h3 className="inline font-semibold">{name}</h3>{' '}
+            <span className="text-sm text-faint">{countOf(lists)}</span>
+          </summary>
+          <dl className="mb-4 border-t border-rule">
+            {lists.map((list) => (
+              <ListRow key={list.name} list={list} language={language} />
+            ))}
+          </dl>
+        </details>
+      ))}
+    </div>
+  )
+}
+
+function countOf(lists: readonly List[]): string {
+  const words = lists.reduce((sum, list) => sum + list.words.length + list.more, 0)
+  return `${words.toLocaleString('en')} ${words === 1 ? 'word' : 'words'}`
 }
 
 function ListRow({ list, language }: { list: List; language: ReplyWords['language'] }) {
   const first = list.words.slice(0, shownAtFirst)
   const rest = list.words.slice(shownAtFirst)
   return (
-    <div className="grid gap-x-4 border-b border-rule py-2 md:grid-cols-[13rem_minmax(0,1fr)]">
+    <div className="grid gap-x-4 border-b border-rule py-2 last:border-0 md:grid-cols-[13rem_minmax(0,1fr)]">
       <dt className="text-sm font-semibold">{list.name}</dt>
       <dd lang={language} className="min-w-0 font-mono text-sm">
-        {first.join(' · ')}
+        {first.join(', ')}
         {rest.length > 0 && (
           <details>
             <summary lang="en" className="py-1 font-sans text-faint pointer-coarse:py-2.5">
               {rest.length} more
             </summary>
-            {rest.join(' · ')}
+            {rest.join(', ')}
             {list.more > 0 && (
               <span lang="en" className="font-sans text-faint">
                 {' '}

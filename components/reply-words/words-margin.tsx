@@ -9,7 +9,7 @@ export function WordsMargin({ language }: { language: Language }) {
       <MarginBlock title="Language">
         <LanguageChoice language={language} />
       </MarginBlock>
-      <div className="max-lg:hidden">
+      <div className="mt-4.5 border-t border-rule pt-3 max-lg:hidden">
         <MarginBlock title="On this page">
           <ul>
             {places.map(([id, name]) => (

@@ -19,10 +19,14 @@ export type Found = {
 /** A text as the reader cuts it. */
 export type SeenWord = { text: string; kind: Token['kind']; known: boolean }
 
+/** A number in the text; its minutes where it says so. */
+export type FoundFigure = { from: number; to: number; minutes: number | null }
+
 export type Explained = {
   reading: ReplyReading
   words: SeenWord[]
   found: Found[]
+  figures: FoundFigure[]
   unknownWords: string[]
 }
 
@@ -50,6 +54,10 @@ export function explainReply(reply: Reply): Explained {
       likeness,
       denied,
     })),
+    figures: [
+      ...sense.figures.spans,
+      ...sense.figures.bare.map(({ from, to }) => ({ from, to, minutes: null })),
+    ],
     unknownWords: sense.unknownAt.map((at) => wordsBetween(at, at + 1)),
   }
 }

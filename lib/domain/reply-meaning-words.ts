@@ -11,21 +11,23 @@ export function meaningWords(
   const { kind, minutes, choice } = reading
   const isChoice = typeof choice === 'number'
   const parts = [
-    isChoice ? `choice ${choice}` : replyKindWords[kind],
-    !isChoice && typeof minutes === 'number' ? `${roundedMinutes(minutes)} minutes a bottle` : '',
+    isChoice ? `choice ${choice}` : kind === 'unclear' ? 'not clear' : replyKindWords[kind],
+    !isChoice && typeof minutes === 'number' ? `${spanWords(minutes)} a bottle` : '',
     reading.dangerSign ? 'with a danger sign' : '',
     reading.alsoSlow ? 'and slow water' : '',
   ]
   return parts.filter(Boolean).join(', ')
 }
 
-function roundedMinutes(minutes: number): number {
-  return Math.round(minutes * 10) / 10
+/** `12 minutes`, to a tenth. */
+export function spanWords(minutes: number): string {
+  const rounded = Math.round(minutes * 10) / 10
+  return `${rounded} ${rounded === 1 ? 'minute' : 'minutes'}`
 }
 
 /** How sure a reading is, from 0 to 1, as `85 % sure`. */
 export function sureWords(sure: number): string {
-  return `${Math.round(sure * 100)} % sure`
+  return `${Math.round(sure * 100)}\u00a0% sure`
 }
 
 /** What a reply was an answer to, in words for staff. */

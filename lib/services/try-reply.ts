@@ -5,9 +5,14 @@ import { readReply } from '@/lib/domain/reply'
 import type { AddedWord } from '@/lib/domain/reply-added'
 import { conceptNames } from '@/lib/domain/reply-concept-names'
 import { replyEffect } from '@/lib/domain/reply-effect'
-import { explainReply, type Explained, type Found } from '@/lib/domain/reply-explain'
+import {
+  explainReply,
+  type Explained,
+  type Found,
+  type FoundFigure,
+} from '@/lib/domain/reply-explain'
 import { addedRefusalWords } from '@/lib/domain/reply-may-add'
-import { meaningWords, sureWords } from '@/lib/domain/reply-meaning-words'
+import { meaningWords, spanWords, sureWords } from '@/lib/domain/reply-meaning-words'
 import { allow, type Actor } from '@/lib/domain/role'
 import type { TriedReply, TryReply } from '@/lib/schemas/reply-words'
 import { addedWordsInForce } from './added-words'
@@ -35,10 +40,8 @@ export async function tryReply(deps: Deps, actor: Actor, input: TryReply): Promi
   }
 }
 
-function explainedView(
-  { reading, words, found, unknownWords }: Explained,
-  added: readonly AddedWord[],
-) {
+function explainedView(explained: Explained, added: readonly AddedWord[]) {
+  const { reading, words, found, figures, unknownWords } = explained
   return {
     reading: {
       meaning: meaningWords(reading),
@@ -46,16 +49,25 @@ function explainedView(
       clear: reading.kind !== 'unclear',
     },
     words,
-    found: found.map((mark) => ({
-      from: mark.from,
-      to: mark.to,
-      meaning: conceptNames[mark.concept],
-      denied: mark.denied,
-      guessed: mark.likeness === 'guessed',
-      added: isAdded(mark, added),
-    })),
+    found: [...found.map((mark) => markView(mark, added)), ...figures.map(figureView)],
     unknownWords,
   }
+}
+
+function markView(mark: Found, added: readonly AddedWord[]) {
+  return {
+    from: mark.from,
+    to: mark.to,
+    meaning: conceptNames[mark.concept],
+    denied: mark.denied,
+    guessed: mark.likeness === 'guessed',
+    added: isAdded(mark, added),
+  }
+}
+
+function figureView({ from, to, minutes }: FoundFigure) {
+  const meaning = minutes === null ? 'a number' : spanWords(minutes)
+  return { from, to, meaning, denied: false, guessed: false, added: false }
 }
 
 function isAdded(mark: Found, added: readonly AddedWord[]): boolean {

@@ -37,7 +37,7 @@ describe('a proposal', () => {
       body: 'el agua muy chivo',
       language: 'es',
       asked: 'none',
-      desk: { meaning: 'not clear: for a person to read' },
+      desk: { meaning: 'not clear' },
       person: { meaning: 'slow water', by: 'Ana Belmar' },
       settledByNow: false,
     })

@@ -45,6 +45,7 @@ describe('a reading in words', () => {
       reading('broken', { alsoSlow: true, minutes: 12.26 }),
       'something broken, 12.3 minutes a bottle, and slow water',
     ],
+    [reading('unclear'), 'not clear'],
     [reading('choice', { choice: 2, minutes: 2 }), 'choice 2'],
     [{ kind: 'slow' as const, minutes: null, choice: null }, 'slow water'],
   ])('%j is “%s”', (read, words) => {
