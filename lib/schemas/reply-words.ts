@@ -72,7 +72,7 @@ const effectSchema = z.object({
 })
 
 export const triedReplySchema = z.object({
-  reading: meaningSchema.extend({ clear: z.boolean() }),
+  reading: meaningSchema,
   /** The text as the desk cuts it. */
   words: z.array(
     z.object({ text: z.string(), kind: z.enum(['word', 'number', 'break']), known: z.boolean() }),

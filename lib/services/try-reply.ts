@@ -43,11 +43,7 @@ export async function tryReply(deps: Deps, actor: Actor, input: TryReply): Promi
 function explainedView(explained: Explained, added: readonly AddedWord[]) {
   const { reading, words, found, figures, unknownWords } = explained
   return {
-    reading: {
-      meaning: meaningWords(reading),
-      sure: sureWords(reading.sure),
-      clear: reading.kind !== 'unclear',
-    },
+    reading: { meaning: meaningWords(reading), sure: sureWords(reading.sure) },
     words,
     found: [...found.map((mark) => markView(mark, added)), ...figures.map(figureView)],
     unknownWords,

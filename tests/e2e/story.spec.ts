@@ -193,6 +193,7 @@ const pages = [
   '/households/new',
   '/wording',
   '/wording/wash-due/es',
+  '/reply-words',
   '/rounds',
   '/areas',
   '/areas/new',

@@ -106,7 +106,7 @@ describe('trying a text', () => {
     await desk.deskReads('chivo')
     const words = [goat, { phrase: '12', concept: 'slow' as const }]
     const tried = await tryReply(deps, desk.tomas, { ...spanish, text: 'chivo', words })
-    expect(tried.reading).toMatchObject({ meaning: 'slow water', clear: true })
+    expect(tried.reading).toMatchObject({ meaning: 'slow water' })
     expect(tried.found[0]).toMatchObject({ meaning: 'slow', added: true })
     expect(tried.refused).toMatchObject([{ phrase: '12' }])
     expect(tried.effect).toMatchObject({ looked: 3, changed: 2, calmed: 0 })
