@@ -7,6 +7,8 @@ type FlowChartProps = {
   points: readonly FlowPoint[]
   needLitresPerHour: number
   forecast: FlowForecast
+  /** The forecast as staff read it. */
+  forecastWords: string
   /** The area's, in which days are named. */
   timeZone: string
 }
@@ -14,19 +16,6 @@ type FlowChartProps = {
 function dayFormat(timeZone: string): (at: number) => string {
   const format = new Intl.DateTimeFormat('en-GB', { day: 'numeric', month: 'short', timeZone })
   return (at) => format.format(at)
-}
-
-function forecastWords(forecast: FlowForecast, formatDay: (at: number) => string): string {
-  switch (forecast.kind) {
-    case 'too few':
-      return 'Too few readings since the last change to say where it goes.'
-    case 'holds':
-      return 'It does not fall: no day can be named.'
-    case 'falls': {
-      const latest = forecast.latestAt ? formatDay(forecast.latestAt) : 'no day one can name'
-      return `Under the need about ${formatDay(forecast.onAt)}: between ${formatDay(forecast.earliestAt)} and ${latest}.`
-    }
-  }
 }
 
 function Readings({
@@ -58,11 +47,11 @@ function Readings({
 }
 
 /** A kit's flow against its need, in words, as a drawing, and as a table for who wants the figures. */
-export function FlowChart({ points, needLitresPerHour, forecast, timeZone }: FlowChartProps) {
+export function FlowChart({ points, needLitresPerHour, forecast, ...rest }: FlowChartProps) {
+  const { forecastWords: words, timeZone } = rest
   const formatDay = dayFormat(timeZone)
   const last = points.at(-1)
   if (!last) return <p className="text-faint">No flow reading yet.</p>
-  const words = forecastWords(forecast, formatDay)
   const label = `${points.length} flow readings, the last ${last.litresPerHour.toFixed(1)} litres an hour; need ${needLitresPerHour.toFixed(1)}. ${words}`
   return (
     <figure className="m-0">

@@ -18,11 +18,17 @@ const inside = { left: 34, right: 366, top: 14, bottom: 188 }
 const dayMilliseconds = 86_400_000
 /** Room kept right of the last reading, so that a forecast has somewhere to go. */
 const daysAhead = 21
+/** A latest day this far behind the likeliest would press the readings together: the fan runs off the page. */
+const widestDays = 90
+
+function latestDrawn({ onAt, latestAt }: Extract<FlowForecast, { kind: 'falls' }>): number | null {
+  return latestAt !== null && latestAt <= onAt + widestDays * dayMilliseconds ? latestAt : null
+}
 
 function scalesOf({ points, needLitresPerHour, forecast }: FlowDrawingProps): Scales {
   const first = points[0]?.at ?? 0
   const last = points.at(-1)?.at ?? 0
-  const falls = forecast.kind === 'falls' ? (forecast.latestAt ?? forecast.onAt) : last
+  const falls = forecast.kind === 'falls' ? (latestDrawn(forecast) ?? forecast.onAt) : last
   const tallest = points.map((point) => point.litresPerHour + (point.errorLitresPerHour ?? 0))
   return {
     x: scaleLinear(
@@ -47,16 +53,18 @@ function Axis({ y }: { y: Scales['y'] }) {
 type FanProps = { scales: Scales; last: FlowPoint; need: number; forecast: FlowForecast }
 
 function Fan({ scales: { x, y }, last, need, forecast }: FanProps) {
-  if (forecast.kind !== 'falls') return null
+  // What lies before the last reading is no forecast; the words say that it is under the need.
+  if (forecast.kind !== 'falls' || forecast.onAt <= last.at) return null
   const from = `${x(last.at)} ${y(last.litresPerHour)}`
   // Without a latest day the slow edge of the fan never falls: it runs level to the right edge.
-  const slow = forecast.latestAt
-    ? `${x(forecast.latestAt)} ${y(need)}`
+  const latest = latestDrawn(forecast)
+  const slow = latest
+    ? `${x(latest)} ${y(need)}`
     : `${inside.right} ${y(last.litresPerHour)}L${inside.right} ${y(need)}`
   return (
     <>
       <path
-        d={`M${from}L${slow}L${x(forecast.earliestAt)} ${y(need)}Z`}
+        d={`M${from}L${slow}L${x(Math.max(forecast.earliestAt, last.at))} ${y(need)}Z`}
         className="fill-water"
         fillOpacity="0.18"
       />

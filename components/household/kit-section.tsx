@@ -21,12 +21,7 @@ export function KitSection({ kit, today, timeZone }: KitSectionProps) {
         </h2>
         <div className="mt-3 grid grid-cols-[3.5rem_minmax(0,1fr)] gap-5">
           <Column size="small" {...kit.column} className="h-auto w-14" />
-          <FlowChart
-            points={kit.flow.points}
-            needLitresPerHour={kit.flow.needLitresPerHour}
-            forecast={kit.flow.forecast}
-            timeZone={timeZone}
-          />
+          <FlowChart {...kit.flow} timeZone={timeZone} />
         </div>
         <h3 className="mt-7 mb-1 font-title text-lg font-semibold">Its life</h3>
       </div>

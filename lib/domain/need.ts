@@ -30,6 +30,20 @@ export function dailyNeed({
   return people * (perPerson + Math.max(0, seasonExtraLitres))
 }
 
+/** Hours of running in which the day's water is to come: common practice, no source. */
+const defaultEnoughHours = 8
+
+/** The flow in L/h that gives the house its day's water in the hours that are enough. */
+export function neededLitresPerHour({
+  litresPerDay,
+  enoughHours = defaultEnoughHours,
+}: {
+  litresPerDay: number
+  enoughHours?: number
+}): number {
+  return litresPerDay / enoughHours
+}
+
 export type Enough = { kind: 'enough' | 'slow' | 'short'; hours: number }
 
 /**
@@ -39,7 +53,7 @@ export type Enough = { kind: 'enough' | 'slow' | 'short'; hours: number }
 export function enough({
   litresPerHour,
   litresPerDay,
-  enoughHours = 8,
+  enoughHours = defaultEnoughHours,
 }: {
   litresPerHour: number
   litresPerDay: number

@@ -74,6 +74,7 @@ const flowSchema = z.object({
       perDay: z.number(),
     }),
   ]),
+  forecastWords: z.string(),
 })
 
 export const kitViewSchema = z.object({

@@ -69,12 +69,13 @@ export async function householdSheet(
   if (!found) return { ok: false, reason: 'not found' }
   const { household, area } = found
   const { id: areaId, name: areaName, timeZone } = area
-  const today = localDay(deps.clock.now(), timeZone)
+  const now = deps.clock.now()
+  const today = localDay(now, timeZone)
   const { litresPerPersonDay } = readSettings(await listSettings(db))
   const litresPerDay = dailyNeed({ people: household.people, litresPerPersonDay })
   const kits = []
   for (const { kit, model } of await listKitsOfHousehold(db, householdId)) {
-    kits.push(await kitSheet(db, { kit, model, timeZone, today, litresPerDay }))
+    kits.push(await kitSheet(db, { kit, model, timeZone, now, today, litresPerDay }))
   }
   const { areaId: _areaId, createdAt, movedAt, ...who } = household
   return {

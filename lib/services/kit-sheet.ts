@@ -8,13 +8,15 @@ import {
   type listKitsOfHousehold,
 } from '@/db/queries/kit'
 import { trend } from '@/lib/domain/flow'
+import { forecastWords } from '@/lib/domain/forecast-words'
 import { kitPast, kitPlan } from '@/lib/domain/kit-life'
+import { neededLitresPerHour } from '@/lib/domain/need'
 import { localDay } from '@/lib/domain/round'
 import type { KitView } from '@/lib/schemas/household'
 import { kitLook } from './kit-look'
 
 type KitRow = Awaited<ReturnType<typeof listKitsOfHousehold>>[number]
-type Around = KitRow & { timeZone: string; today: string; litresPerDay: number }
+type Around = KitRow & { timeZone: string; now: number; today: string; litresPerDay: number }
 
 type Facts = {
   fittings: Awaited<ReturnType<typeof listFittings>>[number]['fitting'][]
@@ -23,9 +25,6 @@ type Facts = {
   prompts: Awaited<ReturnType<typeof listPromptsOfKit>>
   tickets: Awaited<ReturnType<typeof listTicketsOfKit>>
 }
-
-/** Hours of running in which the day's water is to come: common practice, no source. */
-const ENOUGH_HOURS = 8
 
 async function factsOf(db: Handle, kitId: string): Promise<Facts> {
   return {
@@ -38,7 +37,7 @@ async function factsOf(db: Handle, kitId: string): Promise<Facts> {
 }
 
 function flowOf({ readings, washes, fittings }: Facts, around: Around): KitView['flow'] {
-  const needLitresPerHour = around.litresPerDay / ENOUGH_HOURS
+  const needLitresPerHour = neededLitresPerHour(around)
   const firsts = new Map(readings.toReversed().map((one) => [one.fibreFittingId, one.n]))
   const washDays = new Set(washes.map(({ washedOn }) => washedOn))
   const points = readings.map((reading) => {
@@ -55,7 +54,8 @@ function flowOf({ readings, washes, fittings }: Facts, around: Around): KitView[
   const standing = fittings.find(({ position, removedOn }) => position === 3 && removedOn === null)
   const current = readings.filter(({ fibreFittingId }) => fibreFittingId === standing?.id)
   const line = current.map(({ at, normalised }) => ({ takenAt: at, normalised }))
-  return { points, needLitresPerHour, forecast: trend(line, needLitresPerHour) }
+  const forecast = trend(line, needLitresPerHour)
+  return { points, needLitresPerHour, forecast, forecastWords: forecastWords(forecast, around) }
 }
 
 function pastOf(facts: Facts, { kit, timeZone, today }: Around) {

@@ -76,6 +76,7 @@ describe('what is drawn on the server', () => {
           points={[{ at: Date.UTC(2026, 2, 3), litresPerHour: 9.8 }]}
           needLitresPerHour={4}
           forecast={{ kind: 'too few' }}
+          forecastWords="Too few readings."
           timeZone="America/Bogota"
         />
       </>,
@@ -100,6 +101,7 @@ describe('what is drawn on the server', () => {
         points={[{ at, litresPerHour: 5 }]}
         needLitresPerHour={4}
         forecast={{ kind: 'holds' }}
+        forecastWords="It holds."
         timeZone="America/Bogota"
       />,
     )
