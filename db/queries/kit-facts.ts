@@ -46,6 +46,20 @@ export async function findFirstReading(db: Handle, fibreFittingId: string) {
   return row ?? null
 }
 
+/** A forecast looks at so many readings at most: the latest. */
+const READINGS = 400
+
+/** What a kit's fibre fitting let through, oldest first, as the trend wants it. */
+export async function listReadingsOfFitting(db: Handle, kitId: string, fibreFittingId: string) {
+  const rows = await db
+    .select({ takenAt: flowReadings.at, normalised: flowReadings.normalised })
+    .from(flowReadings)
+    .where(and(eq(flowReadings.kitId, kitId), eq(flowReadings.fibreFittingId, fibreFittingId)))
+    .orderBy(desc(flowReadings.at), desc(flowReadings.n))
+    .limit(READINGS)
+  return rows.toReversed()
+}
+
 export async function findLastReading(db: Handle, kitId: string) {
   const [row] = await db
     .select()

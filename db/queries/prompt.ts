@@ -90,6 +90,22 @@ export async function listPromptsOfText(db: Handle, textId: string) {
   return db.select().from(prompts).where(eq(prompts.textId, textId))
 }
 
+/** Whether something is asked of a kit, or is about to be. */
+export async function hasOpenPrompt(db: Handle, kitId: string, kind: PromptRow['kind']) {
+  const [row] = await db
+    .select({ id: prompts.id })
+    .from(prompts)
+    .where(
+      and(
+        eq(prompts.kitId, kitId),
+        eq(prompts.kind, kind),
+        inArray(prompts.state, ['planned', 'asked']),
+      ),
+    )
+    .limit(1)
+  return row !== undefined
+}
+
 /** Prompts of a kit that wait for an answer, oldest first. */
 export async function listAskedPrompts(db: Handle, kitId: string) {
   return db

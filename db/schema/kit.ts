@@ -65,7 +65,11 @@ export const kits = pgTable(
       .default('in use'),
     outOfServiceSince: instant('out_of_service_since'),
     lastWashOn: date('last_wash_on').notNull(),
+    /** The day the wash interval counts from: the last wash, or when a question about it was closed. */
+    washCountedFrom: date('wash_counted_from').notNull(),
     nextWashOn: date('next_wash_on').notNull(),
+    /** When the wash would be due without the trend; later than `nextWashOn` where it was brought forward. */
+    calendarWashOn: date('calendar_wash_on').notNull(),
     nextFlowCheckOn: date('next_flow_check_on').notNull(),
     createdAt: instant('created_at').notNull(),
   },
@@ -74,6 +78,7 @@ export const kits = pgTable(
     index('kits_next_wash').on(t.nextWashOn),
     index('kits_next_flow_check').on(t.nextFlowCheckOn),
     check('kits_state_known', sql`${t.state} in ('in use', 'out of service', 'retired')`),
+    check('kits_wash_never_put_off', sql`${t.nextWashOn} <= ${t.calendarWashOn}`),
     check(
       'kits_out_has_since',
       sql`(${t.state} = 'out of service') = (${t.outOfServiceSince} is not null)`,

@@ -1,4 +1,4 @@
-import { addDays, addMonths } from './day'
+import { addDays, addMonths, daysBetween, monthOf } from './day'
 
 /** How the household's raw water looks, as the trainer or the household told. */
 export type SourceClass = 'clear' | 'cloudy' | 'very cloudy'
@@ -68,13 +68,36 @@ export function washIntervalDays({
   return Math.max(settings.floorDays, Math.min(calendarDays, neededDays))
 }
 
-/** The day the next wash is due. */
-export function nextWashOn({
-  lastWashOn,
-  intervalDays,
+/** The next wash: the day that stands, and the day that the calendar alone gives. */
+export type WashPlan = { nextWashOn: string; calendarWashOn: string }
+
+/**
+ * Plans the next wash, counted from the last one or from the day on which a question about it was
+ * closed. `shortOn` is the day on which the trend sees the flow fall under the need: it brings the
+ * wash forward, but not into the past and not under the floor, and never puts it off. Whether the
+ * water is brown is told by the month the days are counted from.
+ */
+export function planWash({
+  countedFrom,
+  today,
+  shortOn,
+  sourceClass,
+  wetMonths,
+  settings = washDefaults,
 }: {
-  lastWashOn: string
-  intervalDays: number
-}): string {
-  return addDays(lastWashOn, intervalDays)
+  countedFrom: string
+  today: string
+  shortOn: string | null
+  sourceClass: SourceClass
+  wetMonths: readonly number[]
+  settings?: WashSettings
+}): WashPlan {
+  const wet = wetMonths.includes(monthOf(countedFrom))
+  const inDays = (trendDays: number | null) =>
+    addDays(countedFrom, washIntervalDays({ sourceClass, wet, trendDays, settings }))
+  const neededOn = shortOn !== null && shortOn < today ? today : shortOn
+  return {
+    nextWashOn: inDays(neededOn === null ? null : daysBetween(countedFrom, neededOn)),
+    calendarWashOn: inDays(null),
+  }
 }

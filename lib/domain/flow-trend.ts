@@ -1,5 +1,6 @@
 import { flowDefaults, flowErrorShare, type FlowSettings } from './flow-settings'
 import { normalQuantile, studentQuantile, upperTail95 } from './quantile'
+import { localDay } from './round-window'
 
 /** A flow reading; `normalised` is L/h at 20 °C and full head. */
 export type Reading = { takenAt: number; normalised: number }
@@ -113,10 +114,11 @@ export function trend(
 }
 
 /**
- * Whole days after `sinceAt` (the last wash) on which the line meets the need, for the wash
- * interval; null where no fall is foretold. Under 0 when it was under the need before.
+ * The local day on which a falling line meets the need, for the wash cycle; in the past when it was
+ * under the need before. Null where no fall is foretold: more washes do not help a filter that runs
+ * low without falling.
  */
-export function daysUntilShort(forecast: Forecast, sinceAt: number): number | null {
-  if (forecast.kind !== 'falls') return null
-  return Math.floor((forecast.onAt - sinceAt) / millisecondsPerDay)
+export function shortOn(forecast: Forecast, timeZone: string): string | null {
+  if (forecast.kind !== 'falls' || forecast.perDay === 0) return null
+  return localDay(forecast.onAt, timeZone)
 }

@@ -2,7 +2,7 @@ import { flowDefaults, flowErrorShare, type FlowSettings } from './flow-settings
 import { waterViscosity } from './flow-water'
 
 export { flowDefaults, flowErrorShare, type FlowSettings } from './flow-settings'
-export { daysUntilShort, trend, type Forecast, type Reading } from './flow-trend'
+export { shortOn, trend, type Forecast, type Reading } from './flow-trend'
 export { waterDensity, waterViscosity } from './flow-water'
 
 /** A bottle-fill time as litres per hour, as read. No time or no litres is no flow: 0. */

@@ -148,16 +148,24 @@ export function kitPast(past: KitPast, today: string): LifeBead[] {
 export type KitPlan = {
   state: 'in use' | 'out of service' | 'retired'
   nextWashOn: string
+  /** When the wash would be due without the trend of the flow. */
+  calendarWashOn: string
   nextFlowCheckOn: string
   /** What stands in the stages now. */
   fittings: readonly { position: Position; dueOn: string }[]
 }
 
+/** Why a wash comes before its time by the calendar. */
+function washNote({ nextWashOn, calendarWashOn }: KitPlan): { note?: string } {
+  if (nextWashOn >= calendarWashOn) return {}
+  return { note: `brought forward from ${shortDayWords(calendarWashOn)} by the trend of the flow` }
+}
+
 /** What comes next for a kit, soonest first; nothing for one that is retired. */
 export function kitPlan(plan: KitPlan, today: string): LifeBead[] {
   if (plan.state === 'retired') return []
-  const due = [
-    { id: 'next-wash', on: plan.nextWashOn, title: 'Wash' },
+  const due: Pick<LifeBead, 'id' | 'on' | 'title' | 'note'>[] = [
+    { id: 'next-wash', on: plan.nextWashOn, title: 'Wash', ...washNote(plan) },
     { id: 'next-flow-check', on: plan.nextFlowCheckOn, title: 'Flow reading' },
     ...plan.fittings.map(({ position, dueOn }) => ({
       id: `next-change-${position}`,

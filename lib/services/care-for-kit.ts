@@ -10,17 +10,13 @@ import {
 import { listAskedPrompts, updatePrompts } from '@/db/queries/prompt'
 import { listSettings } from '@/db/queries/setting'
 import type { Deps } from '@/lib/deps'
-import { nextChangeOn, nextWashOn, washIntervalDays } from '@/lib/domain/cycle'
-import { addDays, monthOf } from '@/lib/domain/day'
+import { nextChangeOn } from '@/lib/domain/cycle'
+import { addDays } from '@/lib/domain/day'
 import { localDay } from '@/lib/domain/round'
 import { readSettings } from '@/lib/schemas/settings'
+import { washFrom } from './plan-wash'
 
 type Known = 'said' | 'measured' | 'seen'
-
-function washDays({ household, area }: KitFacts, day: string): number {
-  const wet = area.wetMonths.includes(monthOf(day))
-  return washIntervalDays({ sourceClass: household.sourceClass, wet })
-}
 
 /** Keeps a wash of today and starts the wash clock anew. */
 export async function logWash(
@@ -33,7 +29,7 @@ export async function logWash(
   await insertWash(tx, { kitId: facts.kit.id, ticketId, washedOn, known, at: now })
   await updateKit(tx, facts.kit.id, {
     lastWashOn: washedOn,
-    nextWashOn: nextWashOn({ lastWashOn: washedOn, intervalDays: washDays(facts, washedOn) }),
+    ...(await washFrom(tx, deps, { facts, countedFrom: washedOn })),
   })
 }
 
@@ -61,7 +57,7 @@ export async function refitStage(
   // A new fibre stage is a clean one: its wash clock starts with it.
   await updateKit(tx, facts.kit.id, {
     lastWashOn: day,
-    nextWashOn: nextWashOn({ lastWashOn: day, intervalDays: washDays(facts, day) }),
+    ...(await washFrom(tx, deps, { facts, countedFrom: day })),
   })
 }
 
@@ -83,11 +79,12 @@ export async function closePrompts(
     { state, nudgeAfter: null, answeredAt: state === 'answered' ? now : null },
   )
   const has = (kind: string) => asked.some((prompt) => prompt.kind === kind)
-  const { flowCheckDays } = readSettings(await listSettings(tx))
-  await updateKit(tx, facts.kit.id, {
-    ...(has('wash') ? { nextWashOn: addDays(today, washDays(facts, today)) } : {}),
-    ...(has('flow check') ? { nextFlowCheckOn: addDays(today, flowCheckDays) } : {}),
-    lastWashOn: facts.kit.lastWashOn,
-  })
+  if (has('wash')) {
+    await updateKit(tx, facts.kit.id, await washFrom(tx, deps, { facts, countedFrom: today }))
+  }
+  if (has('flow check')) {
+    const { flowCheckDays } = readSettings(await listSettings(tx))
+    await updateKit(tx, facts.kit.id, { nextFlowCheckOn: addDays(today, flowCheckDays) })
+  }
   return asked
 }

@@ -7,7 +7,6 @@ import {
   type HouseholdInArea,
 } from '@/db/queries/household'
 import { listKitsOfHousehold } from '@/db/queries/kit'
-import { updateKit } from '@/db/queries/kit-facts'
 import { findPhone, insertConsent, updatePhone } from '@/db/queries/phone'
 import { listWaitingPromptTexts } from '@/db/queries/slip'
 import { insertAudit } from '@/db/queries/staff'
@@ -15,20 +14,17 @@ import type { Deps } from '@/lib/deps'
 import { allow, type Actor } from '@/lib/domain/role'
 import type { ChangedHousehold, HouseholdChange } from '@/lib/schemas/household-entry'
 import { dropText } from './drop-text'
-import { firstWashOn } from './hand-over-kit'
 import { linkPhone } from './link-phone'
+import { replanWash } from './plan-wash'
 
 type Refused = { ok: false; reason: string }
 type Change = { actor: Actor; found: HouseholdInArea; input: HouseholdChange; at: number }
 
-/** Clearer or cloudier water moves the next wash: the days run from the last one. */
-async function replanWashes(tx: Transaction, { found, input }: Change) {
-  if (found.household.sourceClass === input.sourceClass) return
-  const kits = await listKitsOfHousehold(tx, found.household.id)
-  for (const { kit } of kits) {
-    const source = { sourceClass: input.sourceClass, wetMonths: found.area.wetMonths }
-    await updateKit(tx, kit.id, { nextWashOn: firstWashOn(kit.lastWashOn, source) })
-  }
+/** Other water or other people move the next wash. */
+async function replanWashes(tx: Transaction, deps: Deps, { found, input }: Change) {
+  const { id, sourceClass, people } = found.household
+  if (sourceClass === input.sourceClass && people === input.people) return
+  for (const { kit } of await listKitsOfHousehold(tx, id)) await replanWash(tx, deps, kit.id)
 }
 
 /**
@@ -71,7 +67,7 @@ async function keep(tx: Transaction, deps: Deps, change: Change): Promise<Change
   const { phone: _phone, consent: _consent, ...who } = input
   const householdId = found.household.id
   await updateHousehold(tx, householdId, who)
-  await replanWashes(tx, change)
+  await replanWashes(tx, deps, change)
   const { phoneId, notes } = await setFirstPhone(tx, deps, change)
   const changed = Object.entries(who)
     .filter(([key, value]) => found.household[key as keyof typeof who] !== value)

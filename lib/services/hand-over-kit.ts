@@ -5,9 +5,10 @@ import { insertFirstFittings, insertKit } from '@/db/queries/kit'
 import { insertReading } from '@/db/queries/kit-facts'
 import { type findKitModel, listModelStages } from '@/db/queries/reference'
 import { listSettings } from '@/db/queries/setting'
-import { nextChangeOn, nextWashOn, washIntervalDays, type SourceClass } from '@/lib/domain/cycle'
+import { nextChangeOn, planWash, type SourceClass } from '@/lib/domain/cycle'
 import { addDays, monthOf } from '@/lib/domain/day'
 import { flowDefaults, flowErrorShare, litresPerHour, normalisedFlow } from '@/lib/domain/flow'
+import { localDay } from '@/lib/domain/round'
 import type { HouseholdInput } from '@/lib/schemas/household-entry'
 import { readSettings } from '@/lib/schemas/settings'
 
@@ -24,15 +25,6 @@ type HandOver = {
 function noonOf(day: string, timeZone: string, now: number): number {
   const [year = 0, month = 1, date = 1] = day.split('-').map(Number)
   return Math.min(now, new TZDate(year, month - 1, date, 12, timeZone).getTime())
-}
-
-/** When the first wash is due: days by the source, fewer in a wet month. */
-export function firstWashOn(
-  lastWashOn: string,
-  { sourceClass, wetMonths }: { sourceClass: SourceClass; wetMonths: readonly number[] },
-): string {
-  const wet = wetMonths.includes(monthOf(lastWashOn))
-  return nextWashOn({ lastWashOn, intervalDays: washIntervalDays({ sourceClass, wet }) })
 }
 
 async function keepFirstReading(
@@ -70,7 +62,12 @@ export async function handOverKit(tx: Transaction, handOver: HandOver) {
     modelId: model.id,
     handedOverOn,
     lastWashOn: handedOverOn,
-    nextWashOn: firstWashOn(handedOverOn, {
+    washCountedFrom: handedOverOn,
+    ...planWash({
+      countedFrom: handedOverOn,
+      today: localDay(now, area.timeZone),
+      // One reading at most: there is no trend yet.
+      shortOn: null,
       sourceClass: household.sourceClass,
       wetMonths: area.wetMonths,
     }),

@@ -19,6 +19,7 @@ import {
 import { dailyNeed, enough, type Enough } from '@/lib/domain/need'
 import { localDay } from '@/lib/domain/round'
 import { readSettings } from '@/lib/schemas/settings'
+import { replanWash } from './plan-wash'
 
 export type FlowVerdict = {
   recovery: Recovery
@@ -38,7 +39,8 @@ export function areaCelsius(area: KitFacts['area'], at: number): number {
 
 /**
  * Keeps a bottle-fill time as a flow reading and sets it against the first reading of the fibre fitting
- * and the family's need. `minutes` is for the model's bottle. A text gives one reading, however often read.
+ * and the family's need; the next wash follows the trend. `minutes` is for the model's bottle. A text gives
+ * one reading, however often read.
  */
 export async function recordFlow(
   tx: Transaction,
@@ -75,6 +77,7 @@ export async function recordFlow(
     known: reading.known,
     at: now,
   })
+  await replanWash(tx, deps, kit.id)
   const { litresPerPersonDay } = readSettings(await listSettings(tx))
   return {
     recovery: recovery({

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest'
-import { daysUntilShort, trend, type Forecast, type Reading } from '@/lib/domain/flow'
+import { shortOn, trend, type Forecast, type Reading } from '@/lib/domain/flow'
 
 const day = 86_400_000
 const start = 1_750_000_000_000
@@ -113,12 +113,19 @@ describe('the trend of a filter', () => {
     expect(trend(falling(-0.06, [0, 10, 20]), 30)).toEqual({ kind: 'holds' })
   })
 
-  it('tells the wash how many days are left', () => {
+  it('tells the wash the local day on which a fall meets the need', () => {
+    // 60 days after 15 June 2025, 15:06 UTC: the 14th of August, and the 15th east of UTC+9.
     const forecast = trend(falling(Math.log(4) / 60, [0, 10, 20, 30, 40]), 4)
-    expect(daysUntilShort(forecast, start + 40.5 * day)).toBe(19)
-    expect(daysUntilShort(forecast, start + 70 * day)).toBe(-10)
-    expect(daysUntilShort({ kind: 'holds' }, start)).toBeNull()
-    expect(daysUntilShort({ kind: 'too few' }, start)).toBeNull()
+    expect(shortOn(forecast, 'Africa/Nairobi')).toBe('2025-08-14')
+    expect(shortOn(forecast, 'Pacific/Auckland')).toBe('2025-08-15')
+  })
+
+  it('tells the wash of no day where nothing falls, though the flow be low', () => {
+    expect(shortOn({ kind: 'holds' }, 'UTC')).toBeNull()
+    expect(shortOn({ kind: 'too few' }, 'UTC')).toBeNull()
+    const low = trend(falling(-0.001, [0, 10, 20]), 20)
+    expect(low.kind).toBe('falls')
+    expect(shortOn(low, 'UTC')).toBeNull()
   })
 
   it('does not depend on the order the readings were stored in', () => {

@@ -1,0 +1,62 @@
+import type { Transaction } from '@/db/client'
+import {
+  findKitFacts,
+  listOpenFittings,
+  listReadingsOfFitting,
+  updateKit,
+  type KitFacts,
+} from '@/db/queries/kit-facts'
+import { hasOpenPrompt } from '@/db/queries/prompt'
+import { listSettings } from '@/db/queries/setting'
+import type { Deps } from '@/lib/deps'
+import { planWash, type WashPlan } from '@/lib/domain/cycle'
+import { shortOn, trend } from '@/lib/domain/flow'
+import { dailyNeed, neededLitresPerHour } from '@/lib/domain/need'
+import { localDay } from '@/lib/domain/round'
+import { readSettings } from '@/lib/schemas/settings'
+
+/** The day on which the readings since the last change of the fibre see the flow fall under the need. */
+async function shortDay(
+  tx: Transaction,
+  { kit, household, area }: Pick<KitFacts, 'kit' | 'household' | 'area'>,
+): Promise<string | null> {
+  const fibre = (await listOpenFittings(tx, kit.id)).find(({ stage }) => stage.kind === 'fibre')
+  if (!fibre) return null
+  const readings = await listReadingsOfFitting(tx, kit.id, fibre.fitting.id)
+  const { litresPerPersonDay } = readSettings(await listSettings(tx))
+  const litresPerDay = dailyNeed({ people: household.people, litresPerPersonDay })
+  return shortOn(trend(readings, neededLitresPerHour({ litresPerDay })), area.timeZone)
+}
+
+/** A kit's next wash, counted from a day, as the columns that keep it. */
+export async function washFrom(
+  tx: Transaction,
+  deps: Deps,
+  { facts, countedFrom }: { facts: KitFacts; countedFrom: string },
+): Promise<WashPlan & { washCountedFrom: string }> {
+  const { household, area } = facts
+  const plan = planWash({
+    countedFrom,
+    today: localDay(deps.clock.now(), area.timeZone),
+    shortOn: await shortDay(tx, facts),
+    sourceClass: household.sourceClass,
+    wetMonths: area.wetMonths,
+  })
+  return { ...plan, washCountedFrom: countedFrom }
+}
+
+/**
+ * Plans a kit's wash anew after something it hangs on has changed: a flow reading, the people, the
+ * water. A wash that is asked for already keeps its day, or it would be asked for twice.
+ */
+export async function replanWash(tx: Transaction, deps: Deps, kitId: string): Promise<void> {
+  if (await hasOpenPrompt(tx, kitId, 'wash')) return
+  // Read now: what came before in this transaction may have moved its days.
+  const facts = await findKitFacts(tx, kitId)
+  if (!facts) return
+  await updateKit(
+    tx,
+    kitId,
+    await washFrom(tx, deps, { facts, countedFrom: facts.kit.washCountedFrom }),
+  )
+}
