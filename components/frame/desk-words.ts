@@ -8,6 +8,7 @@ const words: readonly (Word & { act: Act })[] = [
   { name: 'Reply words', href: '/reply-words', act: 'set reply words' },
   { name: 'Rounds', href: '/rounds', act: 'see rounds' },
   { name: 'Parts', href: '/depots', act: 'keep stock' },
+  { name: 'Settings', href: '/settings', act: 'change settings' },
 ]
 
 const visits: Word = { name: 'Visits', href: '/visits' }

@@ -25,7 +25,7 @@ const stock: Record<string, readonly number[]> = {
 /** The programme's depots and areas. Gives the areas' ids by name. */
 export async function settlePlaces({ deps, coordinator, modelId }: Omit<Setting, 'random'>) {
   await upsertSetting(deps.store.db, {
-    key: 'programme',
+    key: 'programme.name',
     value: 'Three Fords Water',
     setAt: deps.clock.now(),
   })

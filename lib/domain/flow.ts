@@ -41,6 +41,8 @@ export type Recovery = {
   lowShare: number
   highShare: number
   against: 'first reading' | 'nominal'
+  /** The line it was judged by, kept so that a later setting judges it no other way. */
+  partlyShare?: number
 }
 
 /**
@@ -71,6 +73,7 @@ export function recovery({
     lowShare: share * (1 - error),
     highShare: share * (1 + error),
     against: hasFirst ? 'first reading' : 'nominal',
+    partlyShare: settings.partlyShare,
   }
 }
 
@@ -80,16 +83,23 @@ function verdictOf(share: number, settings: FlowSettings): RecoveryKind {
   return share >= settings.partlyShare ? 'partly' : 'not'
 }
 
+/** The share under which a wash had not worked when this reading was judged. */
+export function partlyLine({ partlyShare = flowDefaults.partlyShare }: Recovery): number {
+  return partlyShare
+}
+
 /**
  * Whether a stage is past washing, from its washes in order. Two in a row that did not bring the
  * flow back, with both error bars wholly below the line: spent, whatever its age. If a bar
- * straddles the line the readings cannot tell: ask again.
+ * straddles the line the readings cannot tell: ask again. The line is that of each reading's own day,
+ * unless `settings` gives another.
  */
 export function isSpent(
   results: readonly Recovery[],
-  settings: Pick<FlowSettings, 'partlyShare'> = flowDefaults,
+  settings?: Pick<FlowSettings, 'partlyShare'>,
 ): 'spent' | 'ask again' | 'no' {
   const lastTwo = results.slice(-2)
   if (lastTwo.length < 2 || lastTwo.some(({ kind }) => kind !== 'not')) return 'no'
-  return lastTwo.every(({ highShare }) => highShare < settings.partlyShare) ? 'spent' : 'ask again'
+  const lineOf = (result: Recovery) => settings?.partlyShare ?? partlyLine(result)
+  return lastTwo.every((result) => result.highShare < lineOf(result)) ? 'spent' : 'ask again'
 }

@@ -137,12 +137,11 @@ function flowInWords(input: HarmInput, people: string): string {
   const litresPerDay = String(Math.round(input.litresPerDay))
   if (litresPerHour === null || hours === null) return phrases.untimed(people, litresPerDay)
   const error = errorLitresPerHour ? ` ± ${errorLitresPerHour.toFixed(1)}` : ''
-  const isOverADay = need === 'short' || hours > 24
   return phrases.flow({
     people,
     flow: `${litresPerHour.toFixed(1)}${error}`,
     litresPerDay,
-    time: isOverADay ? null : hoursInWords(hours, language),
+    time: hours > 24 ? null : hoursInWords(hours, language),
     enough: need === 'enough',
   })
 }

@@ -1,5 +1,6 @@
 import { daysBetween } from './day'
-import { enough } from './need'
+import { enough, needDefaults } from './need'
+import { sendingDefaults } from './round'
 
 /** A stage as the drawn column shows it; `left` is the share of its cycle that is left, 0 to 1. */
 export type StageLook = {
@@ -12,10 +13,17 @@ type Fitted = { position: 1 | 2 | 3; fittedOn: string; dueOn: string }
 
 const stageNames = { 1: 'cloth', 2: 'carbon', 3: 'fibre' } as const
 
-/** From how many days before its day a change counts as due: what one text bundles. */
-const dueDays = 4
+type Seen = {
+  today: string
+  outPosition: 1 | 2 | 3 | null
+  /** From how many days before its day a change counts as due: what one text bundles. */
+  dueDays?: number
+}
 
-function stateOf(fitted: Fitted, today: string): StageLook['state'] {
+function stateOf(
+  fitted: Fitted,
+  { today, dueDays = sendingDefaults.bundleDays }: Seen,
+): StageLook['state'] {
   const daysLeft = daysBetween(today, fitted.dueOn)
   if (daysLeft < 0) return 'overdue'
   return daysLeft <= dueDays ? 'due' : 'good'
@@ -25,15 +33,13 @@ function stateOf(fitted: Fitted, today: string): StageLook['state'] {
  * How a kit's stages are drawn today, top to bottom. `outPosition` is the stage that keeps the kit out of
  * service: the spent one, or the fibre stage when none is known.
  */
-export function stageLooks(
-  fitted: readonly Fitted[],
-  { today, outPosition }: { today: string; outPosition: 1 | 2 | 3 | null },
-): StageLook[] {
+export function stageLooks(fitted: readonly Fitted[], seen: Seen): StageLook[] {
+  const { today, outPosition } = seen
   return fitted
     .map((one): StageLook => {
       const cycleDays = Math.max(1, daysBetween(one.fittedOn, one.dueOn))
       const left = Math.min(1, Math.max(0, daysBetween(today, one.dueOn) / cycleDays))
-      const state = one.position === outPosition ? 'out' : stateOf(one, today)
+      const state = one.position === outPosition ? 'out' : stateOf(one, seen)
       return { position: one.position, left, state }
     })
     .sort((a, b) => a.position - b.position)
@@ -43,7 +49,7 @@ export function stageLooks(
 export function vesselLevel(
   litresPerHour: number | null,
   litresPerDay: number,
-  enoughHours = 8,
+  enoughHours = needDefaults.enoughHours,
 ): number | null {
   if (litresPerHour === null) return null
   const { hours } = enough({ litresPerHour, litresPerDay, enoughHours })

@@ -10,6 +10,22 @@ export type House = {
 /** Drinking and food of a grown person, litres a day (WHO, Domestic water quantity, 2nd ed. 2020). */
 export const designLitresPerPersonDay = 5.3
 
+/** What a coordinator may set about the water a house needs. */
+export type NeedSettings = {
+  litresPerPersonDay: number
+  /** The day's water comes in so many hours of running at most: enough. */
+  enoughHours: number
+  /** It comes in so many hours at most: slow; later: short. */
+  slowHours: number
+}
+
+/** The hours: common practice, no source. */
+export const needDefaults: NeedSettings = {
+  litresPerPersonDay: designLitresPerPersonDay,
+  enoughHours: 8,
+  slowHours: 24,
+}
+
 /** Survival intake (Sphere Handbook); no setting may go below it. */
 export const floorLitresPerPersonDay = 3
 
@@ -30,13 +46,10 @@ export function dailyNeed({
   return people * (perPerson + Math.max(0, seasonExtraLitres))
 }
 
-/** Hours of running in which the day's water is to come: common practice, no source. */
-const defaultEnoughHours = 8
-
 /** The flow in L/h that gives the house its day's water in the hours that are enough. */
 export function neededLitresPerHour({
   litresPerDay,
-  enoughHours = defaultEnoughHours,
+  enoughHours = needDefaults.enoughHours,
 }: {
   litresPerDay: number
   enoughHours?: number
@@ -47,19 +60,21 @@ export function neededLitresPerHour({
 export type Enough = { kind: 'enough' | 'slow' | 'short'; hours: number }
 
 /**
- * Whether a flow gives the house its day's water: enough within `enoughHours` of running, slow if
- * it takes all day, short if a day is not long enough. `hours` is Infinity when nothing flows.
+ * Whether a flow gives the house its day's water: enough within `enoughHours` of running, slow
+ * within `slowHours`, short if that is not long enough. `hours` is Infinity when nothing flows.
  */
 export function enough({
   litresPerHour,
   litresPerDay,
-  enoughHours = defaultEnoughHours,
+  enoughHours = needDefaults.enoughHours,
+  slowHours = needDefaults.slowHours,
 }: {
   litresPerHour: number
   litresPerDay: number
   enoughHours?: number
+  slowHours?: number
 }): Enough {
   const hours = litresPerHour > 0 ? litresPerDay / litresPerHour : Infinity
   if (hours <= enoughHours) return { kind: 'enough', hours }
-  return { kind: hours <= 24 ? 'slow' : 'short', hours }
+  return { kind: hours <= slowHours ? 'slow' : 'short', hours }
 }

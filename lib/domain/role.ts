@@ -20,6 +20,7 @@ const acts = {
   'set reply words': ['coordinator'],
   'see rounds': ['coordinator'],
   'set up areas': ['coordinator'],
+  'change settings': ['coordinator'],
   'keep stock': ['coordinator'],
   'see own visits': ['visitor', 'coordinator'],
   'move the practice clock': ['agent', 'coordinator', 'visitor'],

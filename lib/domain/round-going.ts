@@ -1,4 +1,4 @@
-import { bundle, overWeeklyLimit, type Due } from './round'
+import { bundle, overWeeklyLimit, sendingDefaults, type Due, type SendingSettings } from './round'
 import { textFor } from './round-text'
 import { sendAfter } from './round-spread'
 import {
@@ -38,10 +38,15 @@ export function openingsAhead(window: Window, now: number, until: number): Openi
   return openings
 }
 
+type Rules = { window: Window; settings: SendingSettings }
 type Wanted = Opening & { kit: KitDue; due: Due[] }
 
 /** The first hour of an opening at which a household has room for a prompt; null when it has none. */
-function hourFor({ on, at }: Opening, sentAt: readonly number[], window: Window): number | null {
+function hourFor(
+  { on, at }: Opening,
+  sentAt: readonly number[],
+  { window, settings }: Rules,
+): number | null {
   // One prompt a day.
   if (sentAt.some((sent) => localDay(sent, window.timeZone) >= on)) return null
   const roomAgainAt = sentAt
@@ -49,19 +54,20 @@ function hourFor({ on, at }: Opening, sentAt: readonly number[], window: Window)
     .filter((room) => room > at && localDay(room, window.timeZone) === on)
     .filter((room) => insideWindow(room, window))
   const hours = [at, ...roomAgainAt.sort((one, other) => one - other)]
-  return hours.find((now) => !overWeeklyLimit({ sentAt, now })) ?? null
+  const limit = settings.promptsAWeek
+  return hours.find((now) => !overWeeklyLimit({ sentAt, now, limit })) ?? null
 }
 
 /** Bundles kit by kit and day by day, as the planning of each of those days will. */
-function wantedOf(kits: readonly KitDue[], openings: readonly Opening[], window: Window): Wanted[] {
+function wantedOf(kits: readonly KitDue[], openings: readonly Opening[], rules: Rules): Wanted[] {
   const sentTo = new Map<string, number[]>()
   return kits.flatMap((kit) => {
     const sentAt = sentTo.get(kit.householdId) ?? [...kit.sentAt]
     sentTo.set(kit.householdId, sentAt)
     let left = [...kit.due]
     return openings.flatMap((opening) => {
-      const due = textFor(bundle(left, opening.on))?.due ?? []
-      const at = due.length === 0 ? null : hourFor(opening, sentAt, window)
+      const due = textFor(bundle(left, opening.on, rules.settings))?.due ?? []
+      const at = due.length === 0 ? null : hourFor(opening, sentAt, rules)
       if (at === null) return []
       left = left.filter((one) => !due.includes(one))
       sentAt.push(at)
@@ -81,17 +87,21 @@ export function goingOut({
   now,
   days,
   perMinute,
+  settings = sendingDefaults,
 }: {
   kits: readonly KitDue[]
   windows: ReadonlyMap<string, Window>
   now: number
   days: number
   perMinute: number
+  settings?: SendingSettings
 }): Going[] {
   return [...windows].flatMap(([areaId, window]) => {
     const openings = openingsAhead(window, now, now + days * day)
     const ofArea = kits.filter((kit) => kit.areaId === areaId)
-    const inOrder = wantedOf(ofArea, openings, window).sort((one, other) => one.at - other.at)
+    const inOrder = wantedOf(ofArea, openings, { window, settings }).sort(
+      (one, other) => one.at - other.at,
+    )
     const places = new Map<string, number>()
     return inOrder.map(({ kit, on, at, due }) => {
       const spreadIndex = places.get(on) ?? 0

@@ -9,13 +9,35 @@ export type DueKind = 'wash' | 'change' | 'flow check' | 'welcome'
 /** Something due for a kit. `stagePosition` says which stage, for a change. */
 export type Due = { kind: DueKind; dueOn: string; stagePosition?: number }
 
-const bundleDays = 4
+/** What a coordinator may set about the sending of prompts. */
+export type SendingSettings = {
+  /** Prompts to a household in 7 days at most. */
+  promptsAWeek: number
+  /** What falls due within so many days goes into one text. */
+  bundleDays: number
+  /** From a prompt that nobody answers to its first nudge. */
+  firstNudgeDays: number
+  /** From the first nudge to the second. */
+  secondNudgeDays: number
+}
+
+/** Common practice, no source. */
+export const sendingDefaults: SendingSettings = {
+  promptsAWeek: 2,
+  bundleDays: 4,
+  firstNudgeDays: 3,
+  secondNudgeDays: 7,
+}
 
 /**
- * What goes into one text today: all that is due, and what falls within 4 days, in order of its
- * day, so that a household hears once. Empty if nothing is due yet.
+ * What goes into one text today: all that is due, and what falls within `bundleDays`, in order of
+ * its day, so that a household hears once. Empty if nothing is due yet.
  */
-export function bundle(due: readonly Due[], today: string): Due[] {
+export function bundle(
+  due: readonly Due[],
+  today: string,
+  { bundleDays }: Pick<SendingSettings, 'bundleDays'> = sendingDefaults,
+): Due[] {
   if (!due.some(({ dueOn }) => dueOn <= today)) return []
   return due
     .filter(({ dueOn }) => daysBetween(today, dueOn) <= bundleDays)
@@ -29,7 +51,7 @@ const day = 24 * hour
 export function overWeeklyLimit({
   sentAt,
   now,
-  limit = 2,
+  limit = sendingDefaults.promptsAWeek,
 }: {
   sentAt: readonly number[]
   now: number
@@ -45,10 +67,14 @@ export function expiresAt(sendAfterAt: number): number {
 
 /**
  * When to nudge a silent household. `sentAt` is the last text of this prompt, the prompt itself or
- * its first nudge; `nudges` how many nudges it has had. Three days after the prompt, seven after
- * the first nudge; after the second there is no more nudging and silence is a trouble: null.
+ * its first nudge; `nudges` how many nudges it has had. After the second there is no more nudging
+ * and silence is a trouble: null.
  */
-export function nudgeAfter(sentAt: number, nudges: number): number | null {
-  if (nudges === 0) return sentAt + 3 * day
-  return nudges === 1 ? sentAt + 7 * day : null
+export function nudgeAfter(
+  sentAt: number,
+  nudges: number,
+  settings: Pick<SendingSettings, 'firstNudgeDays' | 'secondNudgeDays'> = sendingDefaults,
+): number | null {
+  if (nudges === 0) return sentAt + settings.firstNudgeDays * day
+  return nudges === 1 ? sentAt + settings.secondNudgeDays * day : null
 }

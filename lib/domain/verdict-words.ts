@@ -51,9 +51,9 @@ export function bottleWords({ litres, seconds }: Pick<Verdict, 'litres' | 'secon
 
 function needWords({ kind, hours }: Enough): string {
   if (kind === 'enough') return `Enough to drink in ${hoursInWords(hours)}.`
-  return kind === 'slow'
-    ? `The day's water takes ${hoursInWords(hours)}.`
-    : `Less than the family needs in a day.`
+  if (hours > 24) return 'Less than the family needs in a day.'
+  const tooLong = kind === 'short' ? ': too long' : ''
+  return `The day's water takes ${hoursInWords(hours)}${tooLong}.`
 }
 
 /** What the last reading comes to: the flow with its error, what it is held against, the water it was. */

@@ -1,5 +1,4 @@
-import { isSpent, type Recovery } from './flow'
-import { flowDefaults } from './flow-settings'
+import { isSpent, partlyLine, type Recovery } from './flow'
 import { costMinutes, visitMinutes, type Step, type StepId } from './walk-catalogue'
 import { likelihoodWord } from './walk-odds'
 import { bestChoice } from './walk-search'
@@ -102,7 +101,7 @@ export const washRule: Rule = ({ tried, from }) => {
   const verdict = isSpent(figures)
   if (verdict === 'spent') return { kind: 'end', end: 'part', stage: 3, why: spentWords(figures) }
   if (verdict === 'ask again' && !last.wasAskedAgain) {
-    const why = `The error of the figure straddles ${percent(flowDefaults.partlyShare)}: ask again.`
+    const why = `The error of the figure straddles ${lineWords(figures)}: ask again.`
     return stepNext('ask-again', { tried, from, why })
   }
   const isSecondDue = washes.length === 1 || verdict === 'ask again'
@@ -112,8 +111,13 @@ export const washRule: Rule = ({ tried, from }) => {
 
 function spentWords(figures: readonly Recovery[]): string {
   const [before, after] = figures.slice(-2).map(({ share }) => percent(share))
-  const line = percent(flowDefaults.partlyShare)
-  return `Two washes in a row left ${before}, then ${after} of the flow, both wholly under ${line}: spent, whatever its age.`
+  return `Two washes in a row left ${before}, then ${after} of the flow, both wholly under ${lineWords(figures)}: spent, whatever its age.`
+}
+
+/** The line that the last figure was held against. */
+function lineWords(figures: readonly Recovery[]): string {
+  const last = figures.at(-1)
+  return last ? percent(partlyLine(last)) : ''
 }
 
 function stepNext(

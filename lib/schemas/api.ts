@@ -6,6 +6,7 @@ import { openEndpoints } from './open-endpoints'
 import { practiceEndpoints } from './practice'
 import { replyWordsEndpoints } from './reply-words'
 import { roundsEndpoints } from './rounds'
+import { settingsEndpoints } from './settings'
 import { shiftEndpoints } from './shift'
 import { ticketEndpoints } from './ticket-work'
 import { wordingEndpoints } from './wording'
@@ -21,5 +22,6 @@ export const endpoints: readonly Endpoint[] = [
   ...wordingEndpoints,
   ...replyWordsEndpoints,
   ...roundsEndpoints,
+  ...settingsEndpoints,
   ...practiceEndpoints,
 ]

@@ -1,27 +1,113 @@
 import { z } from 'zod'
+import {
+  percentOf,
+  settingInfos,
+  settingPaths,
+  type SettingInfo,
+} from '@/lib/domain/setting-catalogue'
+import {
+  contradictions,
+  defaultSettings,
+  withValue,
+  type SettingPath,
+  type Settings,
+  type SettingValue,
+} from '@/lib/domain/settings'
+import { endpoint } from './endpoint'
 
-/** What the coordinator can set; what is not set has these defaults. */
-export const settingsSchema = z.object({
-  /** The programme's name as the texts say it. */
-  programme: z.string().min(1).max(40).default('Clear Water'),
-  /** Price of one part of a text, in the programme's currency. */
-  pricePerSegment: z.number().min(0).max(10).default(0.02),
-  currency: z.string().min(1).max(8).default('EUR'),
-  /** Texts the sender may hand over in a minute: one part a second is the carrier's common rate. */
-  textsPerMinute: z.number().int().min(1).max(6000).default(60),
-  litresPerPersonDay: z.number().min(3).max(20).default(5.3),
-  flowCheckDays: z.number().int().min(14).max(365).default(60),
+function numberSchema(least: number, most: number, unit: string) {
+  return z
+    .number({ error: 'Write a number.' })
+    .min(least, `At least ${unit === '%' ? percentOf(least) : least} ${unit}.`)
+    .max(most, `At most ${unit === '%' ? percentOf(most) : most} ${unit}.`)
+}
+
+function valueSchema(info: SettingInfo): z.ZodType<SettingValue> {
+  switch (info.kind) {
+    case 'text':
+      return z
+        .string({ error: 'Write something.' })
+        .trim()
+        .min(1, 'Write something.')
+        .max(info.longest, `At most ${info.longest} characters.`)
+    case 'share':
+      return numberSchema(info.least, info.most, '%')
+    case 'number': {
+      const number = numberSchema(info.least, info.most, info.unit)
+      return info.whole ? number.int('Write a whole number.') : number
+    }
+  }
+}
+
+type Shape = { [key: string]: z.ZodType | Shape }
+
+function objectOf(shape: Shape): z.ZodType {
+  const fields = Object.entries(shape).map(([key, field]) => [
+    key,
+    field instanceof z.ZodType ? field : objectOf(field),
+  ])
+  return z.object(Object.fromEntries(fields) as Record<string, z.ZodType>)
+}
+
+/** One object in the groups of the settings, each field within the bounds of the catalogue. */
+function schemaOfCatalogue(): z.ZodType<Settings> {
+  const shape: Shape = {}
+  for (const path of settingPaths) {
+    const keys = path.split('.')
+    const name = keys.pop() ?? ''
+    let group = shape
+    for (const key of keys) group = (group[key] ??= {}) as Shape
+    group[name] = valueSchema(settingInfos[path])
+  }
+  return objectOf(shape) as z.ZodType<Settings>
+}
+
+const settingsSchema = schemaOfCatalogue().superRefine((settings, context) => {
+  for (const { path, message } of contradictions(settings)) {
+    context.addIssue({ code: 'custom', path: path.split('.'), message })
+  }
 })
-
-export type Settings = z.output<typeof settingsSchema>
 
 /** The settings from rows of key and value; a value that no longer fits falls back to its default. */
 export function readSettings(rows: readonly { key: string; value: unknown }[]): Settings {
-  const settings = { ...settingsSchema.parse({}) }
-  for (const [key, schema] of Object.entries(settingsSchema.shape)) {
-    const row = rows.find((one) => one.key === key)
-    const value = row && schema.safeParse(row.value)
-    if (value?.success) Object.assign(settings, { [key]: value.data })
-  }
-  return settings
+  const values = new Map(rows.map(({ key, value }) => [key, value]))
+  return settingPaths.reduce((settings: Settings, path: SettingPath) => {
+    const value = valueSchema(settingInfos[path]).safeParse(values.get(path))
+    return value.success ? withValue(settings, path, value.data) : settings
+  }, defaultSettings)
 }
+
+export const settingsInputSchema = z.object({
+  /** Which state of the settings the person saw: a change of an older one is refused. */
+  version: z.number().int().min(0),
+  settings: settingsSchema,
+})
+
+export type SettingsInput = z.output<typeof settingsInputSchema>
+
+const settingsViewSchema = z.object({ version: z.number(), settings: settingsSchema })
+
+export type SettingsView = z.infer<typeof settingsViewSchema>
+
+const keptSchema = z.object({ ok: z.literal(true), version: z.number(), changed: z.number() })
+
+export type KeptSettings = z.infer<typeof keptSchema>
+
+export const seeSettingsApi = endpoint({
+  method: 'get',
+  path: '/api/settings',
+  act: 'change settings',
+  summary: 'What the coordinator has set, and the defaults of all that nobody has',
+  response: settingsViewSchema,
+})
+
+export const changeSettingsApi = endpoint({
+  method: 'put',
+  path: '/api/settings',
+  act: 'change settings',
+  summary: 'Change the settings; each change is audited with its old and new value',
+  body: settingsInputSchema,
+  response: keptSchema,
+})
+
+export const settingsEndpoints = [seeSettingsApi, changeSettingsApi]

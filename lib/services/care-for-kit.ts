@@ -8,13 +8,12 @@ import {
   type KitFacts,
 } from '@/db/queries/kit-facts'
 import { listAskedPrompts, updatePrompts } from '@/db/queries/prompt'
-import { listSettings } from '@/db/queries/setting'
 import type { Deps } from '@/lib/deps'
 import { nextChangeOn } from '@/lib/domain/cycle'
 import { addDays } from '@/lib/domain/day'
 import { localDay } from '@/lib/domain/round'
-import { readSettings } from '@/lib/schemas/settings'
 import { washFrom } from './plan-wash'
+import { settingsNow } from './settings-now'
 
 type Known = 'said' | 'measured' | 'seen'
 
@@ -83,8 +82,8 @@ export async function closePrompts(
     await updateKit(tx, facts.kit.id, await washFrom(tx, deps, { facts, countedFrom: today }))
   }
   if (has('flow check')) {
-    const { flowCheckDays } = readSettings(await listSettings(tx))
-    await updateKit(tx, facts.kit.id, { nextFlowCheckOn: addDays(today, flowCheckDays) })
+    const { wash } = await settingsNow(tx)
+    await updateKit(tx, facts.kit.id, { nextFlowCheckOn: addDays(today, wash.flowCheckDays) })
   }
   return asked
 }

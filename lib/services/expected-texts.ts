@@ -9,6 +9,7 @@ import type { Due } from '@/lib/domain/round'
 import { goingOut, type KitDue } from '@/lib/domain/round-going'
 import { localDay, nextInsideWindow, type Window } from '@/lib/domain/round-window'
 import { dueWords, listWords } from '@/lib/domain/round-words'
+import type { Settings } from '@/lib/domain/settings'
 import type { Going, RoundKind } from '@/lib/schemas/rounds'
 
 /** One text that is going to leave, as far as is known now. */
@@ -28,18 +29,17 @@ type Horizon = {
   today: string
   days: number
   windows: ReadonlyMap<string, Window>
-  perMinute: number
+  settings: Settings
 }
 
 const weight: readonly RoundKind[] = ['welcome', 'change', 'wash', 'flow check']
 const LIMIT = 10_000
-const BUNDLED_DAYS = 4
 const day = 86_400_000
 
 /** Texts written and waiting, texts that planning will write, and nudges to who stays silent. */
 export async function expectedTexts(deps: Deps, horizon: Horizon) {
   const until = horizon.now + horizon.days * day
-  const lastDueOn = addDays(horizon.today, horizon.days + BUNDLED_DAYS)
+  const lastDueOn = addDays(horizon.today, horizon.days + horizon.settings.sending.bundleDays)
   const due = await listDue(deps.store.db, lastDueOn, LIMIT)
   const queued = await listQueuedTexts(deps.store.db, until, LIMIT)
   const nudges = await listNudgesAhead(deps.store.db, until, LIMIT)
@@ -109,23 +109,27 @@ async function fromDue(deps: Deps, due: readonly DueRow[], horizon: Horizon): Pr
   const found = await listKitPlaces(deps.store.db, [...new Set(due.map(({ kitId }) => kitId))])
   const places = new Map(found.map((place) => [place.kitId, place]))
   const kits = await kitsDue(deps, due, places)
-  return goingOut({ ...horizon, kits }).flatMap(({ kitId, on, at, due: about }): Expected[] => {
-    const place = places.get(kitId)
-    if (!place) return []
-    const positions = about.flatMap(({ stagePosition }) => stagePosition ?? [])
-    return [
-      {
-        on,
-        at,
-        householdId: place.householdId,
-        house: place.house,
-        area: place.area,
-        kinds: about.map(({ kind }) => kind),
-        what: listWords(inOrder(about).map(({ kind }) => dueWords({ kind, positions }))),
-        state: 'planned',
-      },
-    ]
-  })
+  const { programme, sending } = horizon.settings
+  const perMinute = programme.textsPerMinute
+  return goingOut({ ...horizon, kits, perMinute, settings: sending }).flatMap(
+    ({ kitId, on, at, due: about }): Expected[] => {
+      const place = places.get(kitId)
+      if (!place) return []
+      const positions = about.flatMap(({ stagePosition }) => stagePosition ?? [])
+      return [
+        {
+          on,
+          at,
+          householdId: place.householdId,
+          house: place.house,
+          area: place.area,
+          kinds: about.map(({ kind }) => kind),
+          what: listWords(inOrder(about).map(({ kind }) => dueWords({ kind, positions }))),
+          state: 'planned',
+        },
+      ]
+    },
+  )
 }
 
 type Nudge = Awaited<ReturnType<typeof listNudgesAhead>>[number]

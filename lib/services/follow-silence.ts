@@ -16,6 +16,7 @@ import { stageKey } from '@/lib/domain/round-text'
 import { raiseTrouble } from './apply-ticket-event'
 import { closePrompts } from './care-for-kit'
 import { queueText } from './queue-text'
+import { settingsNow } from './settings-now'
 
 const DAY = 24 * 60 * 60_000
 const BATCH = 500
@@ -36,7 +37,9 @@ async function nudge(tx: Transaction, deps: Deps, prompt: PromptRow): Promise<vo
   const phone = facts && (await findFirstPhone(tx, facts.household.id))
   if (!facts || !phone) return updatePrompts(tx, [prompt.id], { state: 'silent', nudgeAfter: null })
   const hours = await listPromptHours(tx, [facts.household.id], now - 7 * DAY)
-  if (overWeeklyLimit({ sentAt: hours.map(({ at }) => Math.min(at, now)), now })) {
+  const { sending } = await settingsNow(tx)
+  const sentAt = hours.map(({ at }) => Math.min(at, now))
+  if (overWeeklyLimit({ sentAt, now, limit: sending.promptsAWeek })) {
     return updatePrompts(tx, [prompt.id], { nudgeAfter: now + DAY })
   }
   const { area } = facts
@@ -73,7 +76,7 @@ async function nudge(tx: Transaction, deps: Deps, prompt: PromptRow): Promise<vo
     together.map(({ id }) => id),
     {
       nudges,
-      nudgeAfter: nudgeAfter(sendAt, nudges) ?? sendAt + AFTER_LAST_NUDGE,
+      nudgeAfter: nudgeAfter(sendAt, nudges, sending) ?? sendAt + AFTER_LAST_NUDGE,
     },
   )
 }

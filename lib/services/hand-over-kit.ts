@@ -4,13 +4,12 @@ import type { AreaRow } from '@/db/queries/area'
 import { insertFirstFittings, insertKit } from '@/db/queries/kit'
 import { insertReading } from '@/db/queries/kit-facts'
 import { type findKitModel, listModelStages } from '@/db/queries/reference'
-import { listSettings } from '@/db/queries/setting'
 import { nextChangeOn, planWash, type SourceClass } from '@/lib/domain/cycle'
 import { addDays, monthOf } from '@/lib/domain/day'
-import { flowDefaults, flowErrorShare, litresPerHour, normalisedFlow } from '@/lib/domain/flow'
+import { flowErrorShare, litresPerHour, normalisedFlow } from '@/lib/domain/flow'
 import { localDay } from '@/lib/domain/round'
 import type { HouseholdInput } from '@/lib/schemas/household-entry'
-import { readSettings } from '@/lib/schemas/settings'
+import { settingsNow } from './settings-now'
 
 type HandOver = {
   household: { id: string; sourceClass: SourceClass }
@@ -47,7 +46,7 @@ async function keepFirstReading(
     celsiusFrom: reading.celsius === null ? 'area month' : 'told',
     litresPerHour: litresPerHour(bottle),
     normalised: normalisedFlow({ ...bottle, celsius, headRatio: 1 }),
-    errorShare: flowErrorShare(flowDefaults),
+    errorShare: flowErrorShare((await settingsNow(tx)).flow),
     known: 'measured',
     at: noonOf(handedOverOn, area.timeZone, now),
   })
@@ -56,7 +55,7 @@ async function keepFirstReading(
 /** A kit in a household's hands: every stage fitted that day, its cycles begun, its first flow kept. */
 export async function handOverKit(tx: Transaction, handOver: HandOver) {
   const { household, area, model, handedOverOn, now } = handOver
-  const { flowCheckDays } = readSettings(await listSettings(tx))
+  const settings = await settingsNow(tx)
   const kit = await insertKit(tx, {
     householdId: household.id,
     modelId: model.id,
@@ -70,8 +69,9 @@ export async function handOverKit(tx: Transaction, handOver: HandOver) {
       shortOn: null,
       sourceClass: household.sourceClass,
       wetMonths: area.wetMonths,
+      settings: settings.wash,
     }),
-    nextFlowCheckOn: addDays(handedOverOn, flowCheckDays),
+    nextFlowCheckOn: addDays(handedOverOn, settings.wash.flowCheckDays),
     createdAt: now,
   })
   const stages = await listModelStages(tx, model.id)

@@ -7,7 +7,6 @@ import {
   type HouseholdInArea,
 } from '@/db/queries/household'
 import { listKitsOfHousehold } from '@/db/queries/kit'
-import { listSettings } from '@/db/queries/setting'
 import type { Deps } from '@/lib/deps'
 import { dailyNeed } from '@/lib/domain/need'
 import { allow, type Actor } from '@/lib/domain/role'
@@ -16,9 +15,9 @@ import { silenceWords } from '@/lib/domain/silence-words'
 import { dayWords, momentWords } from '@/lib/domain/stamp'
 import type { HouseholdSheet, PhoneView } from '@/lib/schemas/household'
 import { spacedNumber } from '@/lib/schemas/phone-number'
-import { readSettings } from '@/lib/schemas/settings'
 import { kitSheet } from './kit-sheet'
 import { slipPage } from './list-slips'
+import { settingsNow } from './settings-now'
 
 type ConsentRow = Awaited<ReturnType<typeof listConsents>>[number]
 
@@ -71,11 +70,11 @@ export async function householdSheet(
   const { id: areaId, name: areaName, timeZone } = area
   const now = deps.clock.now()
   const today = localDay(now, timeZone)
-  const { litresPerPersonDay } = readSettings(await listSettings(db))
-  const litresPerDay = dailyNeed({ people: household.people, litresPerPersonDay })
+  const settings = await settingsNow(db)
+  const litresPerDay = dailyNeed({ people: household.people, ...settings.need })
   const kits = []
   for (const { kit, model } of await listKitsOfHousehold(db, householdId)) {
-    kits.push(await kitSheet(db, { kit, model, timeZone, now, today, litresPerDay }))
+    kits.push(await kitSheet(db, { kit, model, timeZone, now, today, litresPerDay, settings }))
   }
   const { areaId: _areaId, createdAt, movedAt, ...who } = household
   return {

@@ -12,11 +12,18 @@ import { forecastWords } from '@/lib/domain/forecast-words'
 import { kitPast, kitPlan } from '@/lib/domain/kit-life'
 import { neededLitresPerHour } from '@/lib/domain/need'
 import { localDay } from '@/lib/domain/round'
+import type { Settings } from '@/lib/domain/settings'
 import type { KitView } from '@/lib/schemas/household'
 import { kitLook } from './kit-look'
 
 type KitRow = Awaited<ReturnType<typeof listKitsOfHousehold>>[number]
-type Around = KitRow & { timeZone: string; now: number; today: string; litresPerDay: number }
+type Around = KitRow & {
+  timeZone: string
+  now: number
+  today: string
+  litresPerDay: number
+  settings: Settings
+}
 
 type Facts = {
   fittings: Awaited<ReturnType<typeof listFittings>>[number]['fitting'][]
@@ -37,7 +44,8 @@ async function factsOf(db: Handle, kitId: string): Promise<Facts> {
 }
 
 function flowOf({ readings, washes, fittings }: Facts, around: Around): KitView['flow'] {
-  const needLitresPerHour = neededLitresPerHour(around)
+  const { need, flow } = around.settings
+  const needLitresPerHour = neededLitresPerHour({ litresPerDay: around.litresPerDay, ...need })
   const firsts = new Map(readings.toReversed().map((one) => [one.fibreFittingId, one.n]))
   const washDays = new Set(washes.map(({ washedOn }) => washedOn))
   const points = readings.map((reading) => {
@@ -54,7 +62,7 @@ function flowOf({ readings, washes, fittings }: Facts, around: Around): KitView[
   const standing = fittings.find(({ position, removedOn }) => position === 3 && removedOn === null)
   const current = readings.filter(({ fibreFittingId }) => fibreFittingId === standing?.id)
   const line = current.map(({ at, normalised }) => ({ takenAt: at, normalised }))
-  const forecast = trend(line, needLitresPerHour)
+  const forecast = trend(line, needLitresPerHour, flow)
   return { points, needLitresPerHour, forecast, forecastWords: forecastWords(forecast, around) }
 }
 
@@ -79,7 +87,7 @@ export async function kitSheet(db: Handle, around: Around) {
     number: kit.number,
     model: model.name,
     state: kit.state,
-    column: kitLook({ state: kit.state, fittings: standing, litresPerHour, litresPerDay }, today),
+    column: kitLook({ state: kit.state, fittings: standing, litresPerHour, litresPerDay }, around),
     past: pastOf(facts, around),
     planned: kitPlan({ ...kit, fittings: standing }, today),
     flow: flowOf(facts, around),

@@ -1,18 +1,18 @@
 import { listPhonesOfHouseholds } from '@/db/queries/household'
 import { listHouseholdRows } from '@/db/queries/household-list'
 import { listLastReadings, listOpenFittingsOfKits } from '@/db/queries/kit'
-import { listSettings } from '@/db/queries/setting'
 import type { Deps } from '@/lib/deps'
 import { daysBetween } from '@/lib/domain/day'
 import { kitPlan } from '@/lib/domain/kit-life'
 import { dailyNeed } from '@/lib/domain/need'
 import { allow, type Actor } from '@/lib/domain/role'
 import { localDay } from '@/lib/domain/round'
+import type { Settings } from '@/lib/domain/settings'
 import { silenceWords } from '@/lib/domain/silence-words'
 import type { HouseholdList, HouseholdQuery, HouseholdRow } from '@/lib/schemas/household'
 import { spacedNumber } from '@/lib/schemas/phone-number'
-import { readSettings } from '@/lib/schemas/settings'
 import { kitLook } from './kit-look'
+import { settingsNow } from './settings-now'
 
 const PAGE = 40
 
@@ -21,7 +21,7 @@ type Around = {
   fittings: Awaited<ReturnType<typeof listOpenFittingsOfKits>>
   readings: Awaited<ReturnType<typeof listLastReadings>>
   phones: Awaited<ReturnType<typeof listPhonesOfHouseholds>>
-  litresPerPersonDay: number
+  settings: Settings
   now: number
 }
 
@@ -43,8 +43,8 @@ function viewOf(row: Row, around: Around): HouseholdRow {
   const fittings = around.fittings.filter(({ kitId }) => kitId === kit.id)
   const reading = around.readings.find(({ kitId }) => kitId === kit.id)
   const phone = around.phones.find(({ link }) => link.householdId === household.id)?.phone
-  const { litresPerPersonDay } = around
-  const litresPerDay = dailyNeed({ people: household.people, litresPerPersonDay })
+  const { settings } = around
+  const litresPerDay = dailyNeed({ people: household.people, ...settings.need })
   const litresPerHour = reading?.litresPerHour ?? null
   return {
     key: kit.id,
@@ -55,7 +55,10 @@ function viewOf(row: Row, around: Around): HouseholdRow {
     people: household.people,
     kitNumber: kit.number,
     kitState: kit.state,
-    column: kitLook({ state: kit.state, fittings, litresPerHour, litresPerDay }, today),
+    column: kitLook(
+      { state: kit.state, fittings, litresPerHour, litresPerDay },
+      { today, settings },
+    ),
     phone: phone ? spacedNumber(phone.e164) : null,
     silentBecause: phone ? silenceWords(phone) : 'no phone',
     nextDue: nextDue(row, fittings, today),
@@ -84,7 +87,7 @@ export async function listHouseholds(
       db,
       rows.map(({ household }) => household.id),
     ),
-    litresPerPersonDay: readSettings(await listSettings(db)).litresPerPersonDay,
+    settings: await settingsNow(db),
     now: deps.clock.now(),
   }
   return { rows: rows.map((row) => viewOf(row, around)), total, page: Math.min(page, pages), pages }

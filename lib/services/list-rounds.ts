@@ -1,5 +1,4 @@
 import { listAreaRows, type AreaRow } from '@/db/queries/area'
-import { listSettings } from '@/db/queries/setting'
 import type { Deps } from '@/lib/deps'
 import { addDays } from '@/lib/domain/day'
 import { allow, type Actor } from '@/lib/domain/role'
@@ -7,9 +6,9 @@ import { carriedADay, openingsAhead } from '@/lib/domain/round-going'
 import { localDay, type Window } from '@/lib/domain/round-window'
 import { clockWords } from '@/lib/domain/stamp'
 import type { Going, RoundDay, RoundKind, Rounds } from '@/lib/schemas/rounds'
-import { readSettings } from '@/lib/schemas/settings'
 import { dayNames } from './day-names'
 import { expectedTexts, type Expected } from './expected-texts'
+import { settingsNow } from './settings-now'
 
 const DAYS = 14
 const LISTED_A_DAY = 60
@@ -30,7 +29,7 @@ export function windowOf(area: AreaRow): Window {
 export async function listRounds(deps: Deps, actor: Actor): Promise<Rounds> {
   allow(actor, 'see rounds')
   const now = deps.clock.now()
-  const settings = readSettings(await listSettings(deps.store.db))
+  const settings = await settingsNow(deps.store.db)
   const rows = await listAreaRows(deps.store.db)
   const windows = new Map(rows.map(({ area }) => [area.id, windowOf(area)]))
   const zones = [...windows.values()].map(({ timeZone }) => timeZone)
@@ -40,7 +39,7 @@ export async function listRounds(deps: Deps, actor: Actor): Promise<Rounds> {
     today,
     days: DAYS,
     windows,
-    perMinute: settings.textsPerMinute,
+    settings,
   })
   const open = new Set(
     [...windows.values()].flatMap((window) =>
@@ -53,13 +52,13 @@ export async function listRounds(deps: Deps, actor: Actor): Promise<Rounds> {
     return dayOf(on, ofDay, windows.size > 0 && !open.has(on))
   })
   const carried = [...windows.values()].map((window) =>
-    carriedADay(window, settings.textsPerMinute),
+    carriedADay(window, settings.programme.textsPerMinute),
   )
   return {
     days,
     texts: days.reduce((sum, { texts }) => sum + texts, 0),
     carriesADay: Math.max(0, ...carried),
-    textsPerMinute: settings.textsPerMinute,
+    textsPerMinute: settings.programme.textsPerMinute,
     cut,
   }
 }

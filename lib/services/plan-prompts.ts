@@ -1,7 +1,6 @@
 import { findKitFacts, type KitFacts } from '@/db/queries/kit-facts'
 import { findFirstPhone } from '@/db/queries/phone'
 import { countTries, listDue, upsertPrompt, type DueRow } from '@/db/queries/prompt'
-import { listSettings } from '@/db/queries/setting'
 import { countWaitingTexts, listPromptHours } from '@/db/queries/text'
 import type { Transaction } from '@/db/client'
 import type { Deps } from '@/lib/deps'
@@ -15,11 +14,10 @@ import {
   type Due,
 } from '@/lib/domain/round'
 import { stageKey, textFor, type RoundText } from '@/lib/domain/round-text'
-import { readSettings } from '@/lib/schemas/settings'
 import { queueText } from './queue-text'
+import { settingsNow } from './settings-now'
 
 const WEEK = 7 * 24 * 60 * 60_000
-const BUNDLE_DAYS = 4
 const KITS_A_RUN = 2000
 
 function byKit(rows: readonly DueRow[]): Map<string, DueRow[]> {
@@ -97,10 +95,10 @@ export async function planPrompts(deps: Deps): Promise<{ planned: number }> {
   const { db } = deps.store
   const now = deps.clock.now()
   const latestDay = localDay(now, 'Pacific/Kiritimati')
-  const horizon = addDays(latestDay, BUNDLE_DAYS)
+  const { programme, sending } = await settingsNow(db)
+  const horizon = addDays(latestDay, sending.bundleDays)
   const kits = byKit(await listDue(db, horizon, KITS_A_RUN))
   if (kits.size === 0) return { planned: 0 }
-  const { textsPerMinute } = readSettings(await listSettings(db))
   let spreadIndex = await countWaitingTexts(db, now)
   let planned = 0
   for (const [kitId, rows] of kits) {
@@ -116,18 +114,20 @@ export async function planPrompts(deps: Deps): Promise<{ planned: number }> {
         stagePosition: position ?? undefined,
       })),
       today,
+      sending,
     )
     const text = textFor(due)
     if (!text) continue
     const hours = await listPromptHours(db, [facts.household.id], now - WEEK)
-    if (overWeeklyLimit({ sentAt: hours.map(({ at }) => Math.min(at, now)), now })) continue
+    const sentAt = hours.map(({ at }) => Math.min(at, now))
+    if (overWeeklyLimit({ sentAt, now, limit: sending.promptsAWeek })) continue
     // What one text cannot ask waits for another day: nobody is prompted twice in one morning.
     if (hours.some(({ at }) => localDay(at, facts.area.timeZone) >= today)) continue
     const sendAt = sendAfter({
       now,
       window: windowOf(facts),
       spreadIndex,
-      perMinute: textsPerMinute,
+      perMinute: programme.textsPerMinute,
     })
     const done = await deps.store.transaction((tx) => writePlan(tx, deps, { facts, text, sendAt }))
     if (done) {

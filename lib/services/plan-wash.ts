@@ -7,25 +7,26 @@ import {
   type KitFacts,
 } from '@/db/queries/kit-facts'
 import { hasOpenPrompt } from '@/db/queries/prompt'
-import { listSettings } from '@/db/queries/setting'
 import type { Deps } from '@/lib/deps'
 import { planWash, type WashPlan } from '@/lib/domain/cycle'
 import { shortOn, trend } from '@/lib/domain/flow'
 import { dailyNeed, neededLitresPerHour } from '@/lib/domain/need'
 import { localDay } from '@/lib/domain/round'
-import { readSettings } from '@/lib/schemas/settings'
+import type { Settings } from '@/lib/domain/settings'
+import { settingsNow } from './settings-now'
 
 /** The day on which the readings since the last change of the fibre see the flow fall under the need. */
 async function shortDay(
   tx: Transaction,
-  { kit, household, area }: Pick<KitFacts, 'kit' | 'household' | 'area'>,
+  { kit, household, area }: KitFacts,
+  { need, flow }: Settings,
 ): Promise<string | null> {
   const fibre = (await listOpenFittings(tx, kit.id)).find(({ stage }) => stage.kind === 'fibre')
   if (!fibre) return null
   const readings = await listReadingsOfFitting(tx, kit.id, fibre.fitting.id)
-  const { litresPerPersonDay } = readSettings(await listSettings(tx))
-  const litresPerDay = dailyNeed({ people: household.people, litresPerPersonDay })
-  return shortOn(trend(readings, neededLitresPerHour({ litresPerDay })), area.timeZone)
+  const litresPerDay = dailyNeed({ people: household.people, ...need })
+  const needed = neededLitresPerHour({ litresPerDay, ...need })
+  return shortOn(trend(readings, needed, flow), area.timeZone)
 }
 
 /** A kit's next wash, counted from a day, as the columns that keep it. */
@@ -35,12 +36,14 @@ export async function washFrom(
   { facts, countedFrom }: { facts: KitFacts; countedFrom: string },
 ): Promise<WashPlan & { washCountedFrom: string }> {
   const { household, area } = facts
+  const settings = await settingsNow(tx)
   const plan = planWash({
     countedFrom,
     today: localDay(deps.clock.now(), area.timeZone),
-    shortOn: await shortDay(tx, facts),
+    shortOn: await shortDay(tx, facts, settings),
     sourceClass: household.sourceClass,
     wetMonths: area.wetMonths,
+    settings: settings.wash,
   })
   return { ...plan, washCountedFrom: countedFrom }
 }

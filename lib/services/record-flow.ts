@@ -5,11 +5,9 @@ import {
   listOpenFittings,
   type KitFacts,
 } from '@/db/queries/kit-facts'
-import { listSettings } from '@/db/queries/setting'
 import type { Deps } from '@/lib/deps'
 import { monthOf } from '@/lib/domain/day'
 import {
-  flowDefaults,
   flowErrorShare,
   litresPerHour,
   normalisedFlow,
@@ -18,8 +16,8 @@ import {
 } from '@/lib/domain/flow'
 import { dailyNeed, enough, type Enough } from '@/lib/domain/need'
 import { localDay } from '@/lib/domain/round'
-import { readSettings } from '@/lib/schemas/settings'
 import { replanWash } from './plan-wash'
+import { settingsNow } from './settings-now'
 
 export type FlowVerdict = {
   recovery: Recovery
@@ -62,6 +60,7 @@ export async function recordFlow(
   const celsiusFrom = reading.celsius === undefined ? 'area month' : 'told'
   const bottle = { litres: model.bottleLitres, seconds: reading.minutes * 60 }
   const normalised = normalisedFlow({ ...bottle, celsius, headRatio: 1 })
+  const { flow, need } = await settingsNow(tx)
   const first = await findFirstReading(tx, fibre.fitting.id)
   await insertReading(tx, {
     kitId: kit.id,
@@ -73,21 +72,22 @@ export async function recordFlow(
     celsiusFrom,
     litresPerHour: litresPerHour(bottle),
     normalised,
-    errorShare: flowErrorShare(flowDefaults),
+    errorShare: flowErrorShare(flow),
     known: reading.known,
     at: now,
   })
   await replanWash(tx, deps, kit.id)
-  const { litresPerPersonDay } = readSettings(await listSettings(tx))
   return {
     recovery: recovery({
       flow: normalised,
       first: first?.normalised ?? null,
       nominal: model.nominalLitresPerHour,
+      settings: flow,
     }),
     need: enough({
       litresPerHour: litresPerHour(bottle),
-      litresPerDay: dailyNeed({ people: household.people, litresPerPersonDay }),
+      litresPerDay: dailyNeed({ people: household.people, ...need }),
+      ...need,
     }),
     litresPerHour: litresPerHour(bottle),
     normalised,

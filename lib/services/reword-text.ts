@@ -1,10 +1,9 @@
 import type { Transaction } from '@/db/client'
 import { findHousehold } from '@/db/queries/kit-facts'
-import { listSettings } from '@/db/queries/setting'
 import { updateText, type TextRow } from '@/db/queries/text'
 import { findWordingInUse } from '@/db/queries/wording'
 import { renderWording, segmentsOf } from '@/lib/domain/wording'
-import { readSettings } from '@/lib/schemas/settings'
+import { settingsNow } from './settings-now'
 
 /**
  * Words a text that waited anew when another edition has come into use meanwhile, so that what a
@@ -15,8 +14,8 @@ export async function rewordText(tx: Transaction, text: TextRow): Promise<TextRo
   const wording = await findWordingInUse(tx, text.moment, text.language)
   if (!wording || wording.id === text.wordingId) return text
   const household = await findHousehold(tx, text.householdId)
-  const { programme } = readSettings(await listSettings(tx))
-  const values = { programme, house: household?.name ?? '', ...text.values }
+  const { programme } = await settingsNow(tx)
+  const values = { programme: programme.name, house: household?.name ?? '', ...text.values }
   const rendered = renderWording(wording.body, values, wording.language)
   if (!rendered.ok) return text
   const change = {

@@ -7,6 +7,7 @@ import type { Deps } from '@/lib/deps'
 import type { RefusalClass } from '@/lib/domain/carrier-code'
 import { nudgeAfter } from '@/lib/domain/round'
 import { dropText } from './drop-text'
+import { settingsNow } from './settings-now'
 
 const RETRY_MILLISECONDS = 15 * 60_000
 const RETRY_LIMIT = 3
@@ -28,10 +29,11 @@ export async function acceptAttempt(
     welcome.map((prompt) => prompt.id),
     { state: 'answered', answeredAt: now },
   )
+  const { sending } = await settingsNow(tx)
   await updatePrompts(
     tx,
     planned.filter((prompt) => prompt.kind !== 'welcome').map((prompt) => prompt.id),
-    { state: 'asked', nudgeAfter: nudgeAfter(now, 0) },
+    { state: 'asked', nudgeAfter: nudgeAfter(now, 0, sending) },
   )
   for (const receipt of await listLooseReceipts(tx, sid)) {
     await deps.queue.add(tx, 'receive-receipt', { receiptN: receipt.n })

@@ -1,7 +1,6 @@
 import type { Handle } from '@/db/client'
 import { listDepotRows, listInHand } from '@/db/queries/depot'
 import { listLastReadings, listOpenFittingsOfKits } from '@/db/queries/kit'
-import { listSettings } from '@/db/queries/setting'
 import {
   listDueVisits,
   listHandedOn,
@@ -12,7 +11,7 @@ import {
   listWalkCounts,
 } from '@/db/queries/shift'
 import { fixedMoments } from '@/lib/domain/fixed-texts'
-import { readSettings } from '@/lib/schemas/settings'
+import { settingsNow } from './settings-now'
 
 /** More open tickets than this are more than a shift can read: the worst are on the page. */
 const MOST = 500
@@ -54,7 +53,7 @@ export async function shiftFacts(db: Handle) {
     visits: byKey(await listDueVisits(db, householdIds), (row) => row.householdId),
     depots: byKey(await listDepotRows(db), ({ id }) => id),
     inHand: await listInHand(db),
-    litresPerPersonDay: readSettings(await listSettings(db)).litresPerPersonDay,
+    settings: await settingsNow(db),
   }
 }
 

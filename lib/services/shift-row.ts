@@ -39,14 +39,8 @@ export function judge(
     reading: readingOf(open, facts),
     toldToGo: wasToldToGo(facts.fixed.get(open.ticket.id) ?? []),
   }
-  const { litresPerPersonDay } = facts
-  return {
-    ...open,
-    harm: ticketHarm(held, { now, litresPerPersonDay, language }),
-    facts,
-    now,
-    language,
-  }
+  const { need } = facts.settings
+  return { ...open, harm: ticketHarm(held, { now, need, language }), facts, now, language }
 }
 
 /** What was sent at once, where the walk stands, how often it was washed. */
@@ -112,15 +106,14 @@ function flowNow({ ticket, kit, facts, ...open }: Judged): number | null {
 
 function columnOf(judged: Judged): ShiftRow['column'] {
   const { kit, household, area, facts, now } = judged
-  const { litresPerPersonDay } = facts
   return kitLook(
     {
       state: kit.state,
       fittings: facts.fittings.get(kit.id) ?? [],
       litresPerHour: flowNow(judged),
-      litresPerDay: dailyNeed({ people: household.people, litresPerPersonDay }),
+      litresPerDay: dailyNeed({ people: household.people, ...facts.settings.need }),
     },
-    localDay(now, area.timeZone),
+    { today: localDay(now, area.timeZone), settings: facts.settings },
   )
 }
 

@@ -1,5 +1,5 @@
 import { monthOf } from '@/lib/domain/day'
-import { recovery } from '@/lib/domain/flow'
+import { recovery, type Recovery } from '@/lib/domain/flow'
 import { columnWords, stageLooks, vesselLevel } from '@/lib/domain/kit-column'
 import { dailyNeed, enough } from '@/lib/domain/need'
 import { oddsInWords } from '@/lib/domain/odds-words'
@@ -50,6 +50,18 @@ function stageLabels(facts: TicketFacts, odds: Odds): Label[] {
   })
 }
 
+/** How a reading was judged on its day; one that the walk has not heard of is judged by the settings of now. */
+function recoveryOf(
+  { state, model, settings }: TicketFacts,
+  reading: NonNullable<TicketFacts['reading']>,
+): Recovery {
+  const { normalised, first } = reading
+  const nominal = model.nominalLitresPerHour
+  const now = recovery({ flow: normalised, first, nominal, settings: settings.flow })
+  const heard = state.walk?.readings.at(-1)
+  return heard && Math.abs(heard.share - now.share) < 1e-9 ? heard : now
+}
+
 /** The last litre in words: what it comes to beside the vessel, how it is judged below the drawing. */
 function flowWords(facts: TicketFacts, litresPerDay: number): { label: Label; verdict: string } {
   const { reading, model, area } = facts
@@ -62,8 +74,8 @@ function flowWords(facts: TicketFacts, litresPerDay: number): { label: Label; ve
     ...reading,
     month: monthOf(localDay(reading.at, area.timeZone)),
     reference: reading.first ?? nominal,
-    recovery: recovery({ flow: reading.normalised, first: reading.first, nominal }),
-    need: enough({ litresPerHour: reading.litresPerHour, litresPerDay }),
+    recovery: recoveryOf(facts, reading),
+    need: enough({ litresPerHour: reading.litresPerHour, litresPerDay, ...facts.settings.need }),
   })
   const label = { at: 'vessel' as const, title: bottleWords(reading), notes: flow ? [flow] : [] }
   return { label, verdict: verdict.join(' ') }
@@ -91,14 +103,18 @@ export function ticketColumn(facts: TicketFacts): TicketColumn {
   const isWalked = ticket.trouble === 'slow' || ticket.trouble === 'no flow'
   const walk = state.walk ?? (isWalked ? walkOf(facts) : null)
   const odds = walk?.odds ?? null
-  const { litresPerPersonDay } = settings
-  const litresPerDay = dailyNeed({ people: household.people, litresPerPersonDay })
+  const { need, sending } = settings
+  const litresPerDay = dailyNeed({ people: household.people, ...need })
   const isOut = kit.state === 'out of service'
   const stages = stageLooks(
     facts.fittings.map(({ fitting }) => fitting),
-    { today: facts.today, outPosition: isOut ? (state.promisedStage ?? 3) : null },
+    {
+      today: facts.today,
+      outPosition: isOut ? (state.promisedStage ?? 3) : null,
+      dueDays: sending.bundleDays,
+    },
   )
-  const level = vesselLevel(reading?.litresPerHour ?? null, litresPerDay)
+  const level = vesselLevel(reading?.litresPerHour ?? null, litresPerDay, need.enoughHours)
   const flow = flowWords(facts, litresPerDay)
   const container = suspected(odds, ['low-container']) ?? { title: 'Container' }
   return {

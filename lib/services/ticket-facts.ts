@@ -7,7 +7,6 @@ import {
   listOpenFittings,
 } from '@/db/queries/kit-facts'
 import { findOpenPromise } from '@/db/queries/promise'
-import { listSettings } from '@/db/queries/setting'
 import { listTextsOfMoments } from '@/db/queries/shift'
 import { listTicketEvents } from '@/db/queries/ticket-events'
 import {
@@ -20,7 +19,7 @@ import { findDueVisit } from '@/db/queries/wording-values'
 import { fixedMoments } from '@/lib/domain/fixed-texts'
 import { localDay } from '@/lib/domain/round'
 import { fold } from '@/lib/domain/ticket'
-import { readSettings } from '@/lib/schemas/settings'
+import { settingsNow } from './settings-now'
 import { isOfNow } from './ticket-harm'
 
 type Event = Awaited<ReturnType<typeof listTicketEvents>>[number]
@@ -77,7 +76,7 @@ export async function ticketFacts(db: Handle, ticketId: string, now: number) {
     fixed: await listTextsOfMoments(db, [ticketId], [...fixedMoments]),
     lastStep: await findLastStepText(db, ticketId),
     words: await findLastWords(db, ticketId),
-    settings: readSettings(await listSettings(db)),
+    settings: await settingsNow(db),
     now,
     today: localDay(now, facts.area.timeZone),
   }

@@ -2,7 +2,7 @@ import type { KitFacts } from '@/db/queries/kit-facts'
 import type { TicketRow } from '@/db/queries/ticket-events'
 import { harmOf, type Harm } from '@/lib/domain/harm'
 import type { Language } from '@/lib/domain/language'
-import { dailyNeed, enough } from '@/lib/domain/need'
+import { dailyNeed, enough, type NeedSettings } from '@/lib/domain/need'
 
 type Reading = {
   at: number
@@ -36,15 +36,12 @@ export function ticketHarm(
     reading: Reading | null
     toldToGo: boolean
   },
-  {
-    now,
-    litresPerPersonDay,
-    language,
-  }: { now: number; litresPerPersonDay: number; language: Language },
+  { now, need: settings, language }: { now: number; need: NeedSettings; language: Language },
 ): TicketHarm {
   const { ticket, household, reading } = held
-  const litresPerDay = dailyNeed({ people: household.people, litresPerPersonDay })
-  const given = reading && enough({ litresPerHour: reading.litresPerHour, litresPerDay })
+  const litresPerDay = dailyNeed({ people: household.people, ...settings })
+  const given =
+    reading && enough({ litresPerHour: reading.litresPerHour, litresPerDay, ...settings })
   const need = given?.kind ?? null
   const hours = given?.hours ?? null
   const harm = harmOf({

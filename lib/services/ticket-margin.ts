@@ -17,8 +17,7 @@ import { walkOf } from './ticket-step'
 /** Who is in the house and what they need. */
 export function peopleLines({ household, settings }: TicketFacts): string[] {
   const { people, place, sourceClass } = household
-  const { litresPerPersonDay } = settings
-  const need = Math.round(dailyNeed({ people, litresPerPersonDay }))
+  const need = Math.round(dailyNeed({ people, ...settings.need }))
   return [
     `${houseInWords(household)}.`,
     `Needs ${need} L a day.`,

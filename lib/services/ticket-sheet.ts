@@ -48,8 +48,7 @@ function headOf(facts: TicketFacts, actor: Actor) {
   const { ticket, household, area, now, settings } = facts
   const held = { ...facts, timeZone: area.timeZone, toldToGo: wasToldToGo(facts.fixed) }
   const language = ownLanguage(actor.languages)
-  const { litresPerPersonDay } = settings
-  const harm = ticketHarm(held, { now, litresPerPersonDay, language })
+  const harm = ticketHarm(held, { now, need: settings.need, language })
   const until = ticket.endedAt ?? now
   return {
     id: ticket.id,

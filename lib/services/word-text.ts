@@ -1,10 +1,9 @@
 import type { Handle } from '@/db/client'
-import { listSettings } from '@/db/queries/setting'
 import { findWordingInUse } from '@/db/queries/wording'
 import { languages, type Language } from '@/lib/domain/language'
 import { momentInfo, type Moment } from '@/lib/domain/moments'
 import { renderWording, type Values } from '@/lib/domain/wording'
-import { readSettings } from '@/lib/schemas/settings'
+import { settingsNow } from './settings-now'
 import { wordingValues } from './wording-values'
 
 type Reader = { id: string; name: string; language: Language }
@@ -30,8 +29,8 @@ export async function wordText(
 ): Promise<Worded> {
   const wording = await findWordingInUse(db, moment, language)
   if (!wording) return { ok: false, reason: `no wording in use for ${moment}` }
-  const { programme } = readSettings(await listSettings(db))
-  const known = { programme, house: household.name, ...values }
+  const { programme } = await settingsNow(db)
+  const known = { programme: programme.name, house: household.name, ...values }
   const rendered = renderWording(wording.body, known, wording.language)
   if (!rendered.ok) {
     return { ok: false, reason: `${moment}: ${rendered.reason}, ${rendered.detail}` }

@@ -1,4 +1,3 @@
-import { listSettings } from '@/db/queries/setting'
 import { listTimeZones } from '@/db/queries/time-zone'
 import {
   countTextsSince,
@@ -15,8 +14,8 @@ import { dayWords } from '@/lib/domain/stamp'
 import { partsOf } from '@/lib/domain/wording-examples'
 import { lags } from '@/lib/domain/wording-life'
 import type { Refusal } from '@/lib/schemas/endpoint'
-import { readSettings } from '@/lib/schemas/settings'
 import type { WordingCell, WordingEdition } from '@/lib/schemas/wording'
+import { settingsNow } from './settings-now'
 import { placeOf, type Place, type PlaceName } from './wording-place'
 
 const day = 86_400_000
@@ -33,10 +32,10 @@ export async function wordingCell(
   if (!place) return { ok: false, reason: 'not found' }
   const { db } = deps.store
   const since = deps.clock.now() - 30 * day
-  const settings = readSettings(await listSettings(db))
+  const { programme } = await settingsNow(db)
   const timeZone = (await listTimeZones(db))[0] ?? 'UTC'
   const rows = await listEditions(db, place)
-  const print = printerOf(settings.programme, timeZone)
+  const print = printerOf(programme.name, timeZone)
   const open = rows.find(({ wording }) => ['draft', 'approved'].includes(wording.state))
   const inUse = rows.find(({ wording }) => wording.state === 'in use')
   return {
@@ -47,8 +46,8 @@ export async function wordingCell(
     ...(await besideFirst(deps, place, { inUse, print })),
     editions: rows.map(print),
     month: await countTextsSince(db, { ...place, since }),
-    pricePerPart: settings.pricePerSegment,
-    currency: settings.currency,
+    pricePerPart: programme.pricePerSegment,
+    currency: programme.currency,
     households: await listHouseholdsToTry(db, place.language),
   }
 }

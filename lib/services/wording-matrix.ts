@@ -1,4 +1,3 @@
-import { listSettings } from '@/db/queries/setting'
 import { listLivingWordings, type WordingWithPeople } from '@/db/queries/wording'
 import type { Deps } from '@/lib/deps'
 import { languageNames, languages, type Language } from '@/lib/domain/language'
@@ -6,8 +5,8 @@ import { moments, type MomentInfo } from '@/lib/domain/moments'
 import { allow, type Actor } from '@/lib/domain/role'
 import { partsOf } from '@/lib/domain/wording-examples'
 import { lags } from '@/lib/domain/wording-life'
-import { readSettings } from '@/lib/schemas/settings'
 import type { WordingMatrix, WordingMatrixCell } from '@/lib/schemas/wording'
+import { settingsNow } from './settings-now'
 
 const firstLanguage = languages[0]
 
@@ -15,7 +14,7 @@ const firstLanguage = languages[0]
 export async function wordingMatrix(deps: Deps, actor: Actor): Promise<WordingMatrix> {
   allow(actor, 'see wording')
   const living = await listLivingWordings(deps.store.db)
-  const { programme } = readSettings(await listSettings(deps.store.db))
+  const { programme } = await settingsNow(deps.store.db)
   const names = [...new Set(moments.map(({ group }) => group))]
   return {
     languages: languages.map((language) => ({ language, name: languageNames[language] })),
@@ -27,7 +26,7 @@ export async function wordingMatrix(deps: Deps, actor: Actor): Promise<WordingMa
           moment: info.moment,
           name: info.name,
           safety: info.safety,
-          cells: cellsOf(info, living, programme),
+          cells: cellsOf(info, living, programme.name),
         })),
     })),
   }

@@ -1,12 +1,11 @@
 import type { Handle } from '@/db/client'
 import { findLastReading, listOpenFittings } from '@/db/queries/kit-facts'
 import { findOpenPromise } from '@/db/queries/promise'
-import { listSettings } from '@/db/queries/setting'
 import { findDueVisit, findHouseholdToTry } from '@/db/queries/wording-values'
 import type { MomentInfo } from '@/lib/domain/moments'
 import type { Values } from '@/lib/domain/wording'
-import { readSettings } from '@/lib/schemas/settings'
 import { boilMinutes } from './boil-minutes'
+import { settingsNow } from './settings-now'
 
 type Found = NonNullable<Awaited<ReturnType<typeof findHouseholdToTry>>>
 
@@ -45,12 +44,12 @@ export async function wordingValues(
 ): Promise<Values | null> {
   const found = await findHouseholdToTry(db, householdId)
   if (!found) return null
-  const { programme } = readSettings(await listSettings(db))
+  const { programme } = await settingsNow(db)
   const { changeOn, ...stage } = await stageValues(db, found.kit.id)
   const visit = await findDueVisit(db, householdId)
   const aboutStage = info.values.includes('stage')
   return {
-    programme,
+    programme: programme.name,
     house: found.household.name,
     depot: found.depot.name,
     ...stage,

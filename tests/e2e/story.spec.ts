@@ -196,6 +196,7 @@ const pages = [
   '/reply-words',
   '/rounds',
   '/areas',
+  '/settings',
   '/areas/new',
   '/depots',
   '/depots/new',

@@ -118,4 +118,13 @@ describe('a spent stage', () => {
   it('goes by the line that was set', () => {
     expect(isSpent([wash(0.3), wash(0.3)], { partlyShare: 0.3 })).toBe('ask again')
   })
+
+  it('is judged by the line of each reading’s own day, kept with it', () => {
+    const under = (partlyShare: number) =>
+      recovery({ flow: 0.5, first: 1, nominal: 1, settings: { ...flowDefaults, partlyShare } })
+    expect(isSpent([under(0.6), under(0.6)])).toBe('spent')
+    expect(isSpent([under(0.6), under(0.55)])).toBe('ask again')
+    const { partlyShare: _line, ...old } = wash(0.3)
+    expect(isSpent([old, old])).toBe('spent')
+  })
 })

@@ -28,6 +28,11 @@ describe('the look of a kit', () => {
     expect(states(today)).toEqual(expected)
   })
 
+  it('counts a change as due from the days that one text bundles', () => {
+    const seen = { today: '2026-01-27', outPosition: null }
+    expect(stageLooks(fitted, { ...seen, dueDays: 5 })[0]?.state).toBe('due')
+  })
+
   it('bars the stage that keeps it out of service', () => {
     expect(states('2026-02-02', 3)).toEqual(['overdue', 'good', 'out'])
   })
@@ -47,6 +52,10 @@ describe('the level in the vessel', () => {
     [50, 40, 1],
   ])('with %s L/h for %i L a day is %s', (litresPerHour, litresPerDay, level) => {
     expect(vesselLevel(litresPerHour, litresPerDay)).toBe(level)
+  })
+
+  it('is full at the hours that were set', () => {
+    expect(vesselLevel(2.5, 40, 16)).toBe(1)
   })
 
   it('is said in words with the stages', () => {

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest'
-import { dailyNeed, enough } from '@/lib/domain/need'
+import { dailyNeed, enough, neededLitresPerHour } from '@/lib/domain/need'
 
 describe('what a house needs', () => {
   it('goes with its people', () => {
@@ -32,5 +32,10 @@ describe('enough water', () => {
 
   it('takes the hours that were set', () => {
     expect(enough({ litresPerHour: 2, litresPerDay: 24, enoughHours: 12 }).kind).toBe('enough')
+    expect(enough({ litresPerHour: 2, litresPerDay: 24, enoughHours: 9 }).kind).toBe('slow')
+    expect(enough({ litresPerHour: 2, litresPerDay: 26, slowHours: 13 }).kind).toBe('slow')
+    expect(enough({ litresPerHour: 2, litresPerDay: 26, slowHours: 12 }).kind).toBe('short')
+    expect(neededLitresPerHour({ litresPerDay: 24 })).toBe(3)
+    expect(neededLitresPerHour({ litresPerDay: 24, enoughHours: 12 })).toBe(2)
   })
 })

@@ -1,7 +1,7 @@
 import fc from 'fast-check'
 import { describe, expect, test } from 'vitest'
 import { daysBetween } from '@/lib/domain/day'
-import type { Due } from '@/lib/domain/round'
+import { sendingDefaults, type Due } from '@/lib/domain/round'
 import { carriedADay, goingOut, openingsAhead, type KitDue } from '@/lib/domain/round-going'
 import { insideWindow, localDay, type Window } from '@/lib/domain/round-window'
 import { dueWords, listWords } from '@/lib/domain/round-words'
@@ -23,8 +23,11 @@ function kit(kitId: string, due: readonly Due[], sentAt: readonly number[] = [])
   return { kitId, householdId: `house of ${kitId}`, areaId: 'area', due, sentAt }
 }
 
-function plan(kits: readonly KitDue[], { perMinute = 60, days = 14 } = {}) {
-  return goingOut({ kits, windows: new Map([['area', window]]), now, days, perMinute })
+function plan(
+  kits: readonly KitDue[],
+  { perMinute = 60, days = 14, settings = sendingDefaults } = {},
+) {
+  return goingOut({ kits, windows: new Map([['area', window]]), now, days, perMinute, settings })
 }
 
 describe('the openings ahead', () => {
@@ -58,6 +61,25 @@ describe('the openings ahead', () => {
 })
 
 describe('what is going out', () => {
+  test('is bundled and limited by what the coordinator set', () => {
+    const due: Due[] = [
+      { kind: 'change', dueOn: '2026-03-02', stagePosition: 1 },
+      { kind: 'change', dueOn: '2026-03-05', stagePosition: 2 },
+      { kind: 'wash', dueOn: '2026-03-02' },
+    ]
+    const days = (settings = sendingDefaults) =>
+      plan([kit('a', due)], { settings }).map((text) => [text.on, text.due.length])
+    expect(days()).toEqual([
+      ['2026-03-02', 2],
+      ['2026-03-03', 1],
+    ])
+    expect(days({ ...sendingDefaults, bundleDays: 0, promptsAWeek: 1 })).toEqual([
+      ['2026-03-02', 1],
+      ['2026-03-09', 1],
+      ['2026-03-16', 1],
+    ])
+  })
+
   test('says one thing a text, the rest on the days that follow, under the weekly limit', () => {
     const due: Due[] = [
       { kind: 'wash', dueOn: '2026-03-06' },

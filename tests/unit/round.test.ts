@@ -117,6 +117,8 @@ describe('a bundle', () => {
       { kind: 'change', dueOn: '2025-06-20', stagePosition: 2 },
     ] as const
     expect(bundle(due, '2025-07-01')).toEqual([due[3], due[2], due[0]])
+    expect(bundle(due, '2025-07-01', { bundleDays: 3 })).toEqual([due[3], due[2]])
+    expect(bundle(due, '2025-07-01', { bundleDays: 5 })).toHaveLength(4)
   })
 })
 
@@ -140,6 +142,10 @@ describe('the manners of prompting', () => {
     expect(nudgeAfter(now, 0)).toBe(now + 72 * hour)
     expect(nudgeAfter(now, 1)).toBe(now + week)
     expect(nudgeAfter(now, 2)).toBeNull()
+    const set = { firstNudgeDays: 1, secondNudgeDays: 2 }
+    expect(nudgeAfter(now, 0, set)).toBe(now + 24 * hour)
+    expect(nudgeAfter(now, 1, set)).toBe(now + 48 * hour)
+    expect(nudgeAfter(now, 2, set)).toBeNull()
   })
 })
 

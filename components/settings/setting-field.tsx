@@ -1,0 +1,61 @@
+'use client'
+
+import { useState } from 'react'
+import { boundsWords, percentOf, type SettingInfo } from '@/lib/domain/setting-catalogue'
+import type { SettingPath, SettingValue } from '@/lib/domain/settings'
+import { Button } from '../ui/button'
+import { TextField } from '../ui/field'
+
+type SettingFieldProps = {
+  path: SettingPath
+  info: SettingInfo
+  value: SettingValue
+  /** What holds where nothing is set. */
+  standard: SettingValue
+  error: string | undefined
+}
+
+/** A value as it is written in its field. */
+function written(info: SettingInfo, value: SettingValue): string {
+  return String(info.kind === 'share' ? percentOf(Number(value)) : value)
+}
+
+function unitOf(info: SettingInfo): string | null {
+  if (info.kind === 'share') return '%'
+  return info.kind === 'number' ? info.unit : null
+}
+
+/** One setting: its unit, bounds and source, and a way back to its default. */
+export function SettingField({ path, info, value, standard, error }: SettingFieldProps) {
+  const [text, setText] = useState(written(info, value))
+  const usual = written(info, standard)
+  const unit = unitOf(info)
+  return (
+    <div className="flex flex-col justify-end">
+      <TextField
+        name={path}
+        value={text}
+        onChange={(event) => setText(event.target.value)}
+        mono={info.kind !== 'text'}
+        inputMode={info.kind === 'text' ? 'text' : 'decimal'}
+        label={
+          <>
+            {info.label}
+            {unit && <span className="font-normal text-faint">, {unit}</span>}
+          </>
+        }
+        hint={`${boundsWords(info)} ${info.source}`}
+        error={error}
+      />
+      <p className="flex min-h-11 items-center text-sm text-faint">
+        {text.trim() === usual ? (
+          'default'
+        ) : (
+          <Button kind="quiet" size="small" onClick={() => setText(usual)}>
+            Back to the default, {usual}
+          </Button>
+        )}
+      </p>
+    </div>
+  )
+}
