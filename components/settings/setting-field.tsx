@@ -4,6 +4,7 @@ import { useState } from 'react'
 import { boundsWords, percentOf, type SettingInfo } from '@/lib/domain/setting-catalogue'
 import type { SettingPath, SettingValue } from '@/lib/domain/settings'
 import { Button } from '../ui/button'
+import { Choice } from '../ui/choice-field'
 import { TextField } from '../ui/field'
 
 type SettingFieldProps = {
@@ -13,6 +14,22 @@ type SettingFieldProps = {
   /** What holds where nothing is set. */
   standard: SettingValue
   error: string | undefined
+}
+
+/** One that is on or off. */
+function SwitchField({ path, info, value, standard }: Omit<SettingFieldProps, 'error'>) {
+  const [isOn, setOn] = useState(value === true)
+  const usual = standard === true ? 'on' : 'off'
+  return (
+    <Choice
+      name={path}
+      value="on"
+      checked={isOn}
+      onChange={(event) => setOn(event.target.checked)}
+      label={info.label}
+      hint={isOn === standard ? `${usual}: the default` : `the default is ${usual}`}
+    />
+  )
 }
 
 /** A value as it is written in its field. */
@@ -26,7 +43,11 @@ function unitOf(info: SettingInfo): string | null {
 }
 
 /** One setting: its unit, bounds and source, and a way back to its default. */
-export function SettingField({ path, info, value, standard, error }: SettingFieldProps) {
+export function SettingField(props: SettingFieldProps) {
+  return props.info.kind === 'switch' ? <SwitchField {...props} /> : <WrittenField {...props} />
+}
+
+function WrittenField({ path, info, value, standard, error }: SettingFieldProps) {
   const [text, setText] = useState(written(info, value))
   const usual = written(info, standard)
   const unit = unitOf(info)

@@ -3,24 +3,32 @@
 import { useRouter } from 'next/navigation'
 import { useState } from 'react'
 import { pathsOf, settingGroups, settingInfos, settingPaths } from '@/lib/domain/setting-catalogue'
-import { defaultSettings, valueAt, type SettingPath, type Settings } from '@/lib/domain/settings'
+import {
+  defaultSettings,
+  valueAt,
+  type SettingPath,
+  type Settings,
+  type SettingValue,
+} from '@/lib/domain/settings'
 import type { KeptSettings, SettingsView } from '@/lib/schemas/settings'
 import { sendJson } from '../api'
 import { EntryForm, EntryPart } from '../entry/entry-form'
-import { numberOf, textOf } from '../entry/form-values'
+import { isTicked, numberOf, textOf } from '../entry/form-values'
 import { useEntry, type EntryState } from '../entry/use-entry'
 import { SettingField } from './setting-field'
+import { StartingOdds } from './starting-odds'
 
 const groups = Object.keys(settingGroups) as (keyof Settings)[]
 
-function valueIn(form: FormData, path: SettingPath): string | number | undefined {
+function valueIn(form: FormData, path: SettingPath): SettingValue | undefined {
   const info = settingInfos[path]
+  if (info.kind === 'switch') return isTicked(form, path)
   if (info.kind === 'text') return textOf(form, path)
   const number = numberOf(form, path)
   return info.kind === 'share' && number !== undefined ? number / 100 : number
 }
 
-type Written = { [key: string]: string | number | undefined | Written }
+type Written = { [key: string]: SettingValue | undefined | Written }
 
 /** What is written in the fields, in the groups of the settings. A hole is refused at its own place. */
 function settingsIn(form: FormData): Written {
@@ -89,6 +97,7 @@ export function SettingsForm({ initial }: { initial: SettingsView }) {
       {groups.map((group) => (
         <Group key={group} group={group} settings={initial.settings} wrong={entry.wrong} />
       ))}
+      <StartingOdds rows={initial.startingOdds} areOn={initial.settings.walks.fromClosedTickets} />
     </EntryForm>
   )
 }

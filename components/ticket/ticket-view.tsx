@@ -41,7 +41,7 @@ export function TicketView({ initial }: { initial: TicketSheetView }) {
 }
 
 function TicketColumnView({ column }: { column: TicketSheetView['column'] }) {
-  const { stages, suspects, labels, verdict, also, ...rest } = column
+  const { stages, suspects, labels, verdict, oddsFrom, also, ...rest } = column
   return (
     <Cutaway
       {...rest}
@@ -49,6 +49,7 @@ function TicketColumnView({ column }: { column: TicketSheetView['column'] }) {
         <div className="space-y-2">
           {verdict && <p className="text-ink">{verdict}</p>}
           {also && <p>{also}</p>}
+          {oddsFrom && <p>{oddsFrom}</p>}
         </div>
       }
       stages={stages.map((stage) => {

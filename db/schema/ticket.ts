@@ -48,6 +48,9 @@ export const tickets = pgTable(
       .on(t.openedAt)
       .where(sql`${t.endedAt} is null`),
     index('tickets_household').on(t.householdId),
+    index('tickets_flowing')
+      .on(t.endedAt)
+      .where(sql`${t.stage} = 'flowing'`),
     check(
       'tickets_stage_known',
       sql`${t.stage} in ('new', 'walking', 'waiting', 'part owed', 'visit due', 'flowing', 'retired', 'withdrawn')`,

@@ -13,6 +13,7 @@ export type SettingInfo = Said &
     /** A share of 1, read and written as per cent. */
     | { kind: 'share'; least: number; most: number }
     | { kind: 'text'; longest: number }
+    | { kind: 'switch' }
   )
 
 const practice = 'Common practice, no source.'
@@ -44,6 +45,10 @@ export const settingGroups: Record<keyof Settings, { title: string; lead: string
     lead: 'How often by the calendar; the trend of the flow may ask sooner.',
   },
   sending: { title: 'Sending', lead: 'How often a household hears from us, and how long we wait.' },
+  walks: {
+    title: 'Where walks start',
+    lead: 'The odds of each suspect before anything is asked: by the catalogue alone, or moved by what cured the tickets of the same area, season and trouble in the last year.',
+  },
 }
 
 /** Every setting, in the order of the page. */
@@ -92,6 +97,12 @@ export const settingInfos: Record<SettingPath, SettingInfo> = {
   'sending.bundleDays': whole('Into one text goes what falls due within', 'days', [0, 10]),
   'sending.firstNudgeDays': whole('First nudge, after the prompt', 'days', [1, 30]),
   'sending.secondNudgeDays': whole('Second nudge, after the first', 'days', [1, 60]),
+  'walks.fromClosedTickets': {
+    kind: 'switch',
+    label: 'Start walks from the causes of closed tickets',
+    source: practice,
+  },
+  'walks.priorTickets': whole('The catalogue’s odds weigh as much as', 'closed tickets', [1, 500]),
 }
 
 export const settingPaths = Object.keys(settingInfos) as readonly SettingPath[]
@@ -109,6 +120,8 @@ export function percentOf(share: number): number {
 /** What the bounds of a setting are, in words. */
 export function boundsWords(info: SettingInfo): string {
   switch (info.kind) {
+    case 'switch':
+      return 'On or off.'
     case 'text':
       return `At most ${info.longest} characters.`
     case 'share':

@@ -2,6 +2,7 @@ import { washDefaults, type WashSettings } from './cycle'
 import { flowDefaults, type FlowSettings } from './flow-settings'
 import { needDefaults, type NeedSettings } from './need'
 import { sendingDefaults, type SendingSettings } from './round'
+import { walkDefaults, type WalkSettings } from './walk-history'
 
 /** What a coordinator can set. Each group is what the rules of its area take. */
 export type Settings = {
@@ -18,6 +19,7 @@ export type Settings = {
   flow: FlowSettings
   wash: WashSettings & { flowCheckDays: number }
   sending: SendingSettings
+  walks: WalkSettings
 }
 
 /** What holds where nothing is set. */
@@ -27,6 +29,7 @@ export const defaultSettings: Settings = {
   flow: flowDefaults,
   wash: { ...washDefaults, flowCheckDays: 60 },
   sending: sendingDefaults,
+  walks: walkDefaults,
 }
 
 export type SettingValue = string | number | boolean

@@ -46,10 +46,16 @@ function isWalked(trouble: Trouble): boolean {
 
 function startWalking(
   state: TicketState,
-  { odds, cues, celsius, figure }: Omit<Opened, 'kind' | 'trouble'>,
+  { odds, oddsOrigin, cues, celsius, figure }: Omit<Opened, 'kind' | 'trouble'>,
   now: number,
 ): TicketOutcome {
-  const walk = startWalk({ trouble: state.trouble, priors: odds, cues, celsius })
+  const walk = startWalk({
+    trouble: state.trouble,
+    priors: odds,
+    origin: oddsOrigin,
+    cues,
+    celsius,
+  })
   const walking: TicketState = { ...state, walk, automatic: true, stage: 'walking' }
   if (figure) {
     return answered(

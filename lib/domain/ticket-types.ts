@@ -3,6 +3,7 @@ import type { Moment } from './moments'
 import type { Trouble } from './trouble'
 import type { Walk } from './walk'
 import type { StepAnswer, StepId } from './walk-catalogue'
+import type { OddsOrigin } from './walk-history'
 import type { Cue, Odds } from './walk-suspects'
 
 export type StageNumber = 1 | 2 | 3
@@ -41,6 +42,8 @@ export type TicketEvent =
       trouble: Trouble
       /** Counted for the area and season; without them the catalogue's own. */
       odds?: Odds
+      /** Where those were counted, kept as it was that day. */
+      oddsOrigin?: OddsOrigin
       cues?: readonly Cue[]
       celsius?: number
       /** A flow figure that came with the complaint: it need not be asked for. */

@@ -59,9 +59,12 @@ export function likelihoodWord(chance: number): 'likely' | 'possible' | 'unlikel
  * How often each suspect was the cause of closed tickets. Causes that are no suspect, such as a kit
  * that was withdrawn, tell nothing of what makes water slow and are left out.
  */
-export function countCauses(causes: readonly string[]): Evidence {
+export function countCauses(closed: readonly { cause: string; tickets: number }[]): Evidence {
   const counts: Evidence = {}
-  for (const id of suspectIds) counts[id] = causes.filter((cause) => cause === id).length
+  for (const id of suspectIds) {
+    const ofCause = closed.filter(({ cause }) => cause === id)
+    counts[id] = ofCause.reduce((sum, { tickets }) => sum + tickets, 0)
+  }
   return counts
 }
 

@@ -2,6 +2,7 @@ import type { Recovery } from './flow'
 import type { Trouble } from './trouble'
 import { stepOf, type Step, type StepAnswer, type StepId } from './walk-catalogue'
 import { soundSteps } from './walk-check'
+import type { OddsOrigin } from './walk-history'
 import { afterAnswer, afterOutcome, normalise, withEvidence } from './walk-odds'
 import { bestByCost, figureRule, safetyRule, settledRule, washRule, type Next } from './walk-rules'
 import {
@@ -40,27 +41,32 @@ export type Walk = {
   /** Every flow figure in order. */
   readings: readonly Recovery[]
   celsius: number | null
+  /** Where the odds at the start were counted; without it they are the catalogue's. */
+  origin?: OddsOrigin
 }
 
 /**
- * A walk with nothing tried. `priors` are the odds counted for the kit's area and season; without
- * them the catalogue's own are taken; any trouble but no flow is walked like slow water. `cues` are what was told or known before the first step.
+ * A walk with nothing tried. `priors` are the odds counted for the kit's area and season, `origin`
+ * where; without them the catalogue's own are taken; any trouble but no flow is walked like slow water. `cues` are what was told or known before the first step.
  */
 export function startWalk({
   trouble,
   priors,
+  origin,
   cues = [],
   celsius = null,
 }: {
   trouble: Trouble
   priors?: Odds
+  origin?: OddsOrigin
   cues?: readonly Cue[]
   celsius?: number | null
 }): Walk {
   const own = trouble === 'no flow' ? defaultPriors['no flow'] : defaultPriors.slow
   const told = cues.reduce((odds, cue) => withEvidence(odds, cueEvidence[cue]), priors ?? own)
   const start = celsius === null ? normalise(told) : withEvidence(told, coldEvidence(celsius))
-  return { trouble, start, odds: start, tried: [], readings: [], celsius }
+  const walk = { trouble, start, odds: start, tried: [], readings: [], celsius }
+  return priors && origin ? { ...walk, origin } : walk
 }
 
 /** No water at all is a figure without error, whatever it is set against. */

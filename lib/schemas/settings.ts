@@ -24,6 +24,8 @@ function numberSchema(least: number, most: number, unit: string) {
 
 function valueSchema(info: SettingInfo): z.ZodType<SettingValue> {
   switch (info.kind) {
+    case 'switch':
+      return z.boolean()
     case 'text':
       return z
         .string({ error: 'Write something.' })
@@ -85,7 +87,28 @@ export const settingsInputSchema = z.object({
 
 export type SettingsInput = z.output<typeof settingsInputSchema>
 
-const settingsViewSchema = z.object({ version: z.number(), settings: settingsSchema })
+const startingOddsSchema = z.array(
+  z.object({
+    areaId: z.string(),
+    area: z.string(),
+    season: z.enum(['wet', 'dry']),
+    trouble: z.enum(['slow', 'no flow']),
+    /** Closed in a year with a cause that is a suspect. */
+    tickets: z.number(),
+    /** The cause that most of them had. */
+    likely: z.object({ words: z.string(), tickets: z.number() }),
+    /** The likeliest suspects at the start, 0 to 1, with these tickets counted and without. */
+    odds: z.array(z.object({ words: z.string(), used: z.number(), catalogue: z.number() })),
+  }),
+)
+
+export type StartingOdds = z.infer<typeof startingOddsSchema>
+
+const settingsViewSchema = z.object({
+  version: z.number(),
+  settings: settingsSchema,
+  startingOdds: startingOddsSchema,
+})
 
 export type SettingsView = z.infer<typeof settingsViewSchema>
 

@@ -20,6 +20,8 @@ const ticketColumnSchema = columnSchema.extend({
   ),
   /** How the last reading is judged, against what, and at which temperature. */
   verdict: z.string().nullable(),
+  /** Where the odds began; null where nothing is walked. */
+  oddsFrom: z.string().nullable(),
   /** Suspects that have no place in the drawing, what is ruled out. */
   also: z.string().nullable(),
 })

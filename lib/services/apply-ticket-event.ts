@@ -16,6 +16,7 @@ import type { Trouble } from '@/lib/domain/trouble'
 import { noticeIllness } from './notice-illness'
 import { areaCelsius } from './record-flow'
 import { runTicketEffects } from './run-ticket-effects'
+import { oddsAtOpening } from './starting-odds'
 
 export type Applied =
   { ok: true; state: TicketState; ticketId: string } | { ok: false; reason: string }
@@ -136,7 +137,14 @@ async function openTicket(
 ): Promise<Applied> {
   const now = deps.clock.now()
   const celsius = areaCelsius(facts.area, now)
-  const event: TicketEvent = { kind: 'opened', trouble, celsius, ...(figure ? { figure } : {}) }
+  const counted = await oddsAtOpening(tx, { area: facts.area, trouble, now })
+  const event: TicketEvent = {
+    kind: 'opened',
+    trouble,
+    celsius,
+    ...counted,
+    ...(figure ? { figure } : {}),
+  }
   const decision = decide(null, event, now)
   if (!decision.ok) return decision
   const row = await insertTicket(tx, {

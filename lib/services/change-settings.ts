@@ -13,6 +13,7 @@ import { defaultSettings, valueAt, type SettingPath, type Settings } from '@/lib
 import type { Refusal } from '@/lib/schemas/endpoint'
 import type { KeptSettings, SettingsInput, SettingsView } from '@/lib/schemas/settings'
 import { settingsNow } from './settings-now'
+import { startingOdds } from './starting-odds'
 
 const CHANGED_BY_OTHERS = 'Somebody has changed the settings since you opened this page.'
 
@@ -20,7 +21,12 @@ const CHANGED_BY_OTHERS = 'Somebody has changed the settings since you opened th
 export async function seeSettings(deps: Deps, actor: Actor): Promise<SettingsView> {
   allow(actor, 'change settings')
   const { db } = deps.store
-  return { version: await findLastSettingChange(db), settings: await settingsNow(db) }
+  const settings = await settingsNow(db)
+  return {
+    version: await findLastSettingChange(db),
+    settings,
+    startingOdds: await startingOdds(db, { now: deps.clock.now(), settings }),
+  }
 }
 
 type Change = { before: Settings; after: Settings; actor: Actor; at: number }

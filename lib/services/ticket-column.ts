@@ -2,7 +2,7 @@ import { monthOf } from '@/lib/domain/day'
 import { recovery, type Recovery } from '@/lib/domain/flow'
 import { columnWords, stageLooks, vesselLevel } from '@/lib/domain/kit-column'
 import { dailyNeed, enough } from '@/lib/domain/need'
-import { oddsInWords } from '@/lib/domain/odds-words'
+import { oddsInWords, originWords } from '@/lib/domain/odds-words'
 import { localDay } from '@/lib/domain/round'
 import { distanceWords } from '@/lib/domain/stamp'
 import { stageWords } from '@/lib/domain/ticket-words'
@@ -127,6 +127,7 @@ export function ticketColumn(facts: TicketFacts): TicketColumn {
     }),
     labels: [{ at: 'container', ...container, notes: [] }, ...stageLabels(facts, odds), flow.label],
     verdict: flow.verdict || null,
+    oddsFrom: walk && originWords(walk.origin ?? null),
     also: alsoWords(walk, reading?.celsius ?? walk?.celsius ?? null),
   }
 }

@@ -27,7 +27,12 @@ describe('odds counted from closed tickets', () => {
   })
 
   it('count causes that are suspects, and no others', () => {
-    const counts = countCauses(['full-cloth', 'kit withdrawn', 'air-lock', 'full-cloth', ''])
+    const counts = countCauses([
+      { cause: 'full-cloth', tickets: 2 },
+      { cause: 'kit withdrawn', tickets: 5 },
+      { cause: 'air-lock', tickets: 1 },
+      { cause: '', tickets: 3 },
+    ])
     expect(counts).toMatchObject({ 'full-cloth': 2, 'air-lock': 1, 'fouled-fibre': 0 })
     expect(Object.values(counts).reduce((sum, count) => sum + count, 0)).toBe(3)
   })

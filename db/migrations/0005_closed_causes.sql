@@ -1,0 +1,1 @@
+CREATE INDEX "tickets_flowing" ON "tickets" USING btree ("ended_at") WHERE "tickets"."stage" = 'flowing';
