@@ -27,6 +27,7 @@ function SwitchField({ path, info, value, standard }: Omit<SettingFieldProps, 'e
       checked={isOn}
       onChange={(event) => setOn(event.target.checked)}
       label={info.label}
+      className="sm:col-span-2"
       hint={isOn === standard ? `${usual}: the default` : `the default is ${usual}`}
     />
   )
@@ -52,7 +53,7 @@ function WrittenField({ path, info, value, standard, error }: SettingFieldProps)
   const usual = written(info, standard)
   const unit = unitOf(info)
   return (
-    <div className="flex flex-col justify-end">
+    <div className="self-end">
       <TextField
         name={path}
         value={text}
@@ -67,16 +68,18 @@ function WrittenField({ path, info, value, standard, error }: SettingFieldProps)
         }
         hint={`${boundsWords(info)} ${info.source}`}
         error={error}
+        beside={
+          <span className="w-2/5 shrink-0 text-sm text-faint">
+            {text.trim() === usual ? (
+              'default'
+            ) : (
+              <Button kind="quiet" size="small" onClick={() => setText(usual)}>
+                Back to {usual}
+              </Button>
+            )}
+          </span>
+        }
       />
-      <p className="flex min-h-11 items-center text-sm text-faint">
-        {text.trim() === usual ? (
-          'default'
-        ) : (
-          <Button kind="quiet" size="small" onClick={() => setText(usual)}>
-            Back to the default, {usual}
-          </Button>
-        )}
-      </p>
     </div>
   )
 }

@@ -50,7 +50,7 @@ function Group({
 }: { group: keyof Settings; settings: Settings } & Pick<EntryState, 'wrong'>) {
   return (
     <EntryPart {...settingGroups[group]}>
-      <div className="grid gap-x-6 gap-y-3 sm:grid-cols-2">
+      <div className="grid gap-x-6 gap-y-5 sm:grid-cols-2">
         {pathsOf(group).map((path) => (
           <SettingField
             key={path}

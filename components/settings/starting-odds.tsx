@@ -16,7 +16,7 @@ function Row({ row }: { row: Rows[number] }) {
     <tr>
       <RowTh>
         {row.area}
-        <span className="block font-normal text-faint">{row.season} months</span>
+        <span className="block font-normal whitespace-nowrap text-faint">{row.season} months</span>
       </RowTh>
       <Td>{troubleWords[row.trouble]}</Td>
       <Td number>{row.tickets}</Td>
@@ -51,7 +51,7 @@ export function StartingOdds({ rows, areOn }: StartingOddsProps) {
   }
   const caption = areOn ? 'Where walks start now' : 'Where walks would start'
   return (
-    <div>
+    <div className="min-w-0">
       <Table caption={caption}>
         <thead>
           <tr>

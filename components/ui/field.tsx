@@ -58,22 +58,37 @@ function Labelled({ ids, around, children }: { ids: Ids; around: Around; childre
   )
 }
 
-type TextFieldProps = Around & ComponentProps<'input'> & { mono?: boolean }
+type TextFieldProps = Around &
+  ComponentProps<'input'> & {
+    mono?: boolean
+    /** Stands at the right of what is written. */
+    beside?: ReactNode
+  }
 
 /** One line to write in. `mono` for numbers, phone numbers and texts. */
 export function TextField({ label, hint, error, optional, mono, ...input }: TextFieldProps) {
   const ids = useFieldIds()
   const around = { label, hint, error, optional }
-  const { className, ...attributes } = input
+  const { className, beside, ...attributes } = input
+  const control = (
+    <input
+      required={!optional}
+      {...attributes}
+      {...described(ids, around)}
+      id={ids.id}
+      className={controlClass(error, `${mono ? 'font-mono' : ''} ${className ?? ''}`)}
+    />
+  )
   return (
     <Labelled ids={ids} around={around}>
-      <input
-        required={!optional}
-        {...attributes}
-        {...described(ids, around)}
-        id={ids.id}
-        className={controlClass(error, `${mono ? 'font-mono' : ''} ${className ?? ''}`)}
-      />
+      {beside ? (
+        <div className="flex items-center gap-3">
+          {control}
+          {beside}
+        </div>
+      ) : (
+        control
+      )}
     </Labelled>
   )
 }

@@ -37,5 +37,5 @@ function fallWords(fall: Fall, { now, timeZone }: Today): string {
   if (earliest)
     return `${about}, hardly before ${earliest}; how much later the readings do not tell.`
   if (latest) return `${about}, perhaps already, and by ${latest} at the latest.`
-  return `${about}, but that is a guess: the readings are too few or too uneven to tell.`
+  return `It may fall under the need about ${printed(on)}; the readings are too few or too uneven to say more.`
 }

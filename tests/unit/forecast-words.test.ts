@@ -21,7 +21,7 @@ describe('a forecast in words', () => {
     ['2026-04-20', '2026-04-10', '2026-05-02', 'about 20 Apr, perhaps already, and by 2 May at'],
     ['2026-04-20', '2026-04-15', null, 'hardly before 15 Apr; how much later the readings do'],
     ['2026-04-20', '2026-04-15', '2029-01-01', 'hardly before 15 Apr; how much later the'],
-    ['2026-04-20', '2026-03-01', null, 'about 20 Apr, but that is a guess: the readings are too'],
+    ['2026-04-20', '2026-03-01', null, 'It may fall under the need about 20 Apr; the readings are too few or too uneven'],
     ['2027-01-20', '2026-12-15', '2027-03-02', 'about 20 Jan 2027: between 15 Dec and 2 Mar 2027.'],
     ['2026-04-02', '2026-03-01', '2026-04-20', 'already, since about 2 Apr.'],
     ['2026-04-10', '2026-03-01', null, 'already, since about 10 Apr.'],
