@@ -27,8 +27,8 @@ function fallWords(fall: Fall, { now, timeZone }: Today): string {
   const printed = (day: string) =>
     day.slice(0, 4) === today.slice(0, 4) ? shortDayWords(day) : dayWords(day)
   const on = dayOf(fall.onAt)
-  if (fall.perDay === 0) return 'Under the need already, without falling further.'
-  if (on <= today) return `Under the need already, since about ${printed(on)}.`
+  if (fall.perDay === 0) return 'By its readings under the need already, without falling further.'
+  if (on <= today) return `By its trend under the need already, since about ${printed(on)}.`
   const earliest = dayOf(fall.earliestAt) > today ? printed(dayOf(fall.earliestAt)) : null
   const last = fall.latestAt === null ? null : dayOf(fall.latestAt)
   const latest = last !== null && last <= addDays(today, worthNamingDays) ? printed(last) : null
