@@ -1,21 +1,7 @@
 'use client'
 
+import { monthNames } from '@/lib/domain/month-names'
 import { FieldError } from '../ui/field'
-
-const names = [
-  'January',
-  'February',
-  'March',
-  'April',
-  'May',
-  'June',
-  'July',
-  'August',
-  'September',
-  'October',
-  'November',
-  'December',
-] as const
 
 type AreaMonthsProps = {
   monthCelsius: readonly number[]
@@ -26,7 +12,7 @@ type AreaMonthsProps = {
 type MonthProps = { month: number; celsius: number | undefined; wet: boolean; wrong: boolean }
 
 function Month({ month, celsius, wet, wrong }: MonthProps) {
-  const name = names[month - 1] ?? ''
+  const name = monthNames[month - 1] ?? ''
   return (
     <fieldset className="border-t border-rule pt-2">
       <legend className="sr-only">{name}</legend>
@@ -58,12 +44,12 @@ function Month({ month, celsius, wet, wrong }: MonthProps) {
 
 /** A year of the area’s water: how warm each month, and which months bring brown water. */
 export function AreaMonths({ monthCelsius, wetMonths, wrong }: AreaMonthsProps) {
-  const faults = names.map((_name, index) => wrong(`monthCelsius.${index}`))
+  const faults = monthNames.map((_name, index) => wrong(`monthCelsius.${index}`))
   const said = wrong('monthCelsius') ?? faults.find(Boolean)
   return (
     <div>
       <div className="grid grid-cols-3 gap-x-3 gap-y-4 sm:grid-cols-6">
-        {names.map((name, index) => (
+        {monthNames.map((name, index) => (
           <Month
             key={name}
             month={index + 1}

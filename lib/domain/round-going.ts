@@ -1,4 +1,4 @@
-import { bundle, overWeeklyLimit, sendingDefaults, type Due, type SendingSettings } from './round'
+import { hasRoom, sendingDefaults, type Due, type SendingSettings } from './round'
 import { textFor } from './round-text'
 import { sendAfter } from './round-spread'
 import {
@@ -47,15 +47,14 @@ function hourFor(
   sentAt: readonly number[],
   { window, settings }: Rules,
 ): number | null {
-  // One prompt a day.
-  if (sentAt.some((sent) => localDay(sent, window.timeZone) >= on)) return null
   const roomAgainAt = sentAt
     .map((sent) => sent + 7 * day)
     .filter((room) => room > at && localDay(room, window.timeZone) === on)
     .filter((room) => insideWindow(room, window))
   const hours = [at, ...roomAgainAt.sort((one, other) => one - other)]
   const limit = settings.promptsAWeek
-  return hours.find((now) => !overWeeklyLimit({ sentAt, now, limit })) ?? null
+  const { timeZone } = window
+  return hours.find((now) => hasRoom({ sentAt, now, timeZone, limit })) ?? null
 }
 
 /** Bundles kit by kit and day by day, as the planning of each of those days will. */
@@ -66,7 +65,7 @@ function wantedOf(kits: readonly KitDue[], openings: readonly Opening[], rules: 
     sentTo.set(kit.householdId, sentAt)
     let left = [...kit.due]
     return openings.flatMap((opening) => {
-      const due = textFor(bundle(left, opening.on, rules.settings))?.due ?? []
+      const due = textFor(left, opening.on, rules.settings)?.due ?? []
       const at = due.length === 0 ? null : hourFor(opening, sentAt, rules)
       if (at === null) return []
       left = left.filter((one) => !due.includes(one))

@@ -1,4 +1,5 @@
 import { daysBetween } from './day'
+import { localDay } from './round-window'
 
 export { insideWindow, localDay, localMinute, nextInsideWindow, type Window } from './round-window'
 export { planAhead, type KitAhead } from './round-ahead'
@@ -60,21 +61,48 @@ export function overWeeklyLimit({
   return sentAt.filter((at) => at > now - 7 * day && at <= now).length >= limit
 }
 
+/**
+ * Whether a household may be prompted now: under the weekly limit, and only if nothing goes or has gone to
+ * it on this local day or is planned for a later one. Hours that lie ahead count as sent.
+ */
+export function hasRoom({
+  sentAt,
+  now,
+  timeZone,
+  limit = sendingDefaults.promptsAWeek,
+}: {
+  sentAt: readonly number[]
+  now: number
+  timeZone: string
+  limit?: number
+}): boolean {
+  if (overWeeklyLimit({ sentAt: sentAt.map((at) => Math.min(at, now)), now, limit })) return false
+  const today = localDay(now, timeZone)
+  return !sentAt.some((at) => localDay(at, timeZone) >= today)
+}
+
 /** A prompt that has not gone 36 hours after its hour is dropped and planned anew. */
 export function expiresAt(sendAfterAt: number): number {
   return sendAfterAt + 36 * hour
 }
 
+/** How long the last nudge is given before silence goes to a person. Common practice, no source. */
+const afterLastNudgeDays = 3
+
 /**
- * When to nudge a silent household. `sentAt` is the last text of this prompt, the prompt itself or
- * its first nudge; `nudges` how many nudges it has had. After the second there is no more nudging
- * and silence is a trouble: null.
+ * Until when an answer is waited for. `sentAt` is the last text of a prompt, the prompt itself or a nudge;
+ * `nudges` how many nudges it has had by then.
  */
-export function nudgeAfter(
+export function waitUntil(
   sentAt: number,
   nudges: number,
   settings: Pick<SendingSettings, 'firstNudgeDays' | 'secondNudgeDays'> = sendingDefaults,
-): number | null {
-  if (nudges === 0) return sentAt + settings.firstNudgeDays * day
-  return nudges === 1 ? sentAt + settings.secondNudgeDays * day : null
+): number {
+  const { firstNudgeDays, secondNudgeDays } = settings
+  return sentAt + ([firstNudgeDays, secondNudgeDays][nudges] ?? afterLastNudgeDays) * day
+}
+
+/** Whether a prompt has had all its nudges: silence after that is a trouble, for a person to look into. */
+export function hadLastNudge(nudges: number): boolean {
+  return nudges >= 2
 }

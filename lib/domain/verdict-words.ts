@@ -1,21 +1,7 @@
 import type { Recovery, RecoveryKind } from './flow'
 import { hoursInWords } from './harm-words'
+import { monthNames } from './month-names'
 import type { Enough } from './need'
-
-const monthNames = [
-  'January',
-  'February',
-  'March',
-  'April',
-  'May',
-  'June',
-  'July',
-  'August',
-  'September',
-  'October',
-  'November',
-  'December',
-]
 
 const recoveryWords: Record<RecoveryKind, string> = {
   restored: 'restored',

@@ -5,12 +5,12 @@ import { listPromptHours } from '@/db/queries/text'
 import type { Deps } from '@/lib/deps'
 import { addDays } from '@/lib/domain/day'
 import { momentInfo } from '@/lib/domain/moments'
-import type { Due } from '@/lib/domain/round'
 import { goingOut, type KitDue } from '@/lib/domain/round-going'
 import { localDay, nextInsideWindow, type Window } from '@/lib/domain/round-window'
 import { dueWords, listWords } from '@/lib/domain/round-words'
 import type { Settings } from '@/lib/domain/settings'
 import type { Going, RoundKind } from '@/lib/schemas/rounds'
+import { asDue } from './as-due'
 
 /** One text that is going to leave, as far as is known now. */
 export type Expected = {
@@ -84,11 +84,6 @@ function fromQueued({ at, area, householdId, house, prompts, moment, purpose }: 
     what: about.length > 0 && !isNudge ? listWords(about) : (info?.name.toLowerCase() ?? 'text'),
     state: 'queued',
   }
-}
-
-function asDue(row: DueRow): Due {
-  const { kind, dueOn, position } = row
-  return position === null ? { kind, dueOn } : { kind, dueOn, stagePosition: position }
 }
 
 async function kitsDue(deps: Deps, due: readonly DueRow[], places: Map<string, KitPlace>) {

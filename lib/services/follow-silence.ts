@@ -11,18 +11,22 @@ import {
 import { listPromptHours } from '@/db/queries/text'
 import type { Deps } from '@/lib/deps'
 import type { Moment } from '@/lib/domain/moments'
-import { expiresAt, nextInsideWindow, nudgeAfter, overWeeklyLimit } from '@/lib/domain/round'
+import {
+  expiresAt,
+  hadLastNudge,
+  nextInsideWindow,
+  overWeeklyLimit,
+  waitUntil,
+} from '@/lib/domain/round'
 import { stageKey } from '@/lib/domain/round-text'
 import { raiseTrouble } from './apply-ticket-event'
+import { windowOf } from './area-window'
 import { closePrompts } from './care-for-kit'
 import { queueText } from './queue-text'
 import { settingsNow } from './settings-now'
 
 const DAY = 24 * 60 * 60_000
 const BATCH = 500
-
-/** How long the last nudge is given before silence goes to a person, in milliseconds. */
-const AFTER_LAST_NUDGE = 3 * DAY
 
 const nudgeMoment: Record<PromptRow['kind'], Moment> = {
   wash: 'wash-nudge',
@@ -42,14 +46,7 @@ async function nudge(tx: Transaction, deps: Deps, prompt: PromptRow): Promise<vo
   if (overWeeklyLimit({ sentAt, now, limit: sending.promptsAWeek })) {
     return updatePrompts(tx, [prompt.id], { nudgeAfter: now + DAY })
   }
-  const { area } = facts
-  const sendAt = nextInsideWindow(now, {
-    timeZone: area.timeZone,
-    opensMinute: area.windowOpensMinute,
-    closesMinute: area.windowClosesMinute,
-    sundaysOff: area.sundaysOff,
-    holidays: area.holidays,
-  })
+  const sendAt = nextInsideWindow(now, windowOf(facts.area))
   const nudges = prompt.nudges + 1
   // One text asked for all of these: one nudge reminds of all.
   const together = (await listPromptsOfText(tx, prompt.textId)).filter(
@@ -74,10 +71,7 @@ async function nudge(tx: Transaction, deps: Deps, prompt: PromptRow): Promise<vo
   await updatePrompts(
     tx,
     together.map(({ id }) => id),
-    {
-      nudges,
-      nudgeAfter: nudgeAfter(sendAt, nudges, sending) ?? sendAt + AFTER_LAST_NUDGE,
-    },
+    { nudges, nudgeAfter: waitUntil(sendAt, nudges, sending) },
   )
 }
 
@@ -97,7 +91,7 @@ export async function followSilence(deps: Deps): Promise<{ nudged: number; silen
       const prompt = await findPromptForUpdate(tx, id)
       if (prompt?.state !== 'asked' || prompt.nudgeAfter === null) return
       if (prompt.nudgeAfter > deps.clock.now()) return
-      const isLast = nudgeAfter(0, prompt.nudges) === null
+      const isLast = hadLastNudge(prompt.nudges)
       if (isLast) await giveUp(tx, deps, prompt)
       else await nudge(tx, deps, prompt)
       done[isLast ? 'silent' : 'nudged'] += 1

@@ -1,11 +1,12 @@
-import { listAreaRows, type AreaRow } from '@/db/queries/area'
+import { listAreaRows } from '@/db/queries/area'
 import type { Deps } from '@/lib/deps'
 import { addDays } from '@/lib/domain/day'
 import { allow, type Actor } from '@/lib/domain/role'
 import { carriedADay, openingsAhead } from '@/lib/domain/round-going'
-import { localDay, type Window } from '@/lib/domain/round-window'
+import { localDay } from '@/lib/domain/round-window'
 import { clockWords } from '@/lib/domain/stamp'
 import type { Going, RoundDay, RoundKind, Rounds } from '@/lib/schemas/rounds'
+import { windowOf } from './area-window'
 import { dayNames } from './day-names'
 import { expectedTexts, type Expected } from './expected-texts'
 import { settingsNow } from './settings-now'
@@ -13,17 +14,6 @@ import { settingsNow } from './settings-now'
 const DAYS = 14
 const LISTED_A_DAY = 60
 const day = 86_400_000
-
-export function windowOf(area: AreaRow): Window {
-  const { timeZone, sundaysOff, holidays } = area
-  return {
-    timeZone,
-    opensMinute: area.windowOpensMinute,
-    closesMinute: area.windowClosesMinute,
-    sundaysOff,
-    holidays,
-  }
-}
 
 /** What goes out in the next fourteen days, by the local day of each household's area. */
 export async function listRounds(deps: Deps, actor: Actor): Promise<Rounds> {

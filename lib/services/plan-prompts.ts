@@ -5,15 +5,10 @@ import { countWaitingTexts, listPromptHours } from '@/db/queries/text'
 import type { Transaction } from '@/db/client'
 import type { Deps } from '@/lib/deps'
 import { addDays } from '@/lib/domain/day'
-import {
-  bundle,
-  expiresAt,
-  localDay,
-  overWeeklyLimit,
-  sendAfter,
-  type Due,
-} from '@/lib/domain/round'
+import { expiresAt, hasRoom, localDay, sendAfter, type Due } from '@/lib/domain/round'
 import { stageKey, textFor, type RoundText } from '@/lib/domain/round-text'
+import { windowOf } from './area-window'
+import { asDue } from './as-due'
 import { queueText } from './queue-text'
 import { settingsNow } from './settings-now'
 
@@ -76,16 +71,6 @@ async function writePlan(
   return true
 }
 
-function windowOf({ area }: KitFacts) {
-  return {
-    timeZone: area.timeZone,
-    opensMinute: area.windowOpensMinute,
-    closesMinute: area.windowClosesMinute,
-    sundaysOff: area.sundaysOff,
-    holidays: area.holidays,
-  }
-}
-
 /**
  * Plans what is due: per kit one text, in one transaction with its prompts, so that a process which dies
  * half-way has planned a kit whole or not at all. Nobody gets more than the weekly limit, and a prompt
@@ -106,29 +91,15 @@ export async function planPrompts(deps: Deps): Promise<{ planned: number }> {
     if (!rows.some(({ dueOn }) => dueOn <= latestDay)) continue
     const facts = await findKitFacts(db, kitId)
     if (!facts) continue
-    const today = localDay(now, facts.area.timeZone)
-    const due = bundle(
-      rows.map(({ kind, dueOn, position }) => ({
-        kind,
-        dueOn,
-        stagePosition: position ?? undefined,
-      })),
-      today,
-      sending,
-    )
-    const text = textFor(due)
+    const window = windowOf(facts.area)
+    const { timeZone } = window
+    const text = textFor(rows.map(asDue), localDay(now, timeZone), sending)
     if (!text) continue
     const hours = await listPromptHours(db, [facts.household.id], now - WEEK)
-    const sentAt = hours.map(({ at }) => Math.min(at, now))
-    if (overWeeklyLimit({ sentAt, now, limit: sending.promptsAWeek })) continue
-    // What one text cannot ask waits for another day: nobody is prompted twice in one morning.
-    if (hours.some(({ at }) => localDay(at, facts.area.timeZone) >= today)) continue
-    const sendAt = sendAfter({
-      now,
-      window: windowOf(facts),
-      spreadIndex,
-      perMinute: programme.textsPerMinute,
-    })
+    const sentAt = hours.map(({ at }) => at)
+    if (!hasRoom({ sentAt, now, timeZone, limit: sending.promptsAWeek })) continue
+    const perMinute = programme.textsPerMinute
+    const sendAt = sendAfter({ now, window, spreadIndex, perMinute })
     const done = await deps.store.transaction((tx) => writePlan(tx, deps, { facts, text, sendAt }))
     if (done) {
       planned += 1

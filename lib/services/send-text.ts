@@ -6,6 +6,7 @@ import { findPhone } from '@/db/queries/phone'
 import { findTextForUpdate, listDueTexts, updateText, type TextRow } from '@/db/queries/text'
 import type { Deps } from '@/lib/deps'
 import { decideSend, type SendDecision } from '@/lib/domain/send'
+import { windowOf } from './area-window'
 import { rewordText } from './reword-text'
 import { acceptAttempt, refuseAttempt } from './settle-attempt'
 import { dropText } from './drop-text'
@@ -24,13 +25,7 @@ async function decisionFor(tx: Transaction, deps: Deps, text: TextRow): Promise<
     notAfter: text.notAfter,
     anyHour: text.anyHour,
     moment: text.moment,
-    window: facts && {
-      timeZone: facts.area.timeZone,
-      opensMinute: facts.area.windowOpensMinute,
-      closesMinute: facts.area.windowClosesMinute,
-      sundaysOff: facts.area.sundaysOff,
-      holidays: facts.area.holidays,
-    },
+    window: facts && windowOf(facts.area),
     phone: {
       consent: phone.consent,
       suppressed: await isSuppressed(tx, deps, phone.e164),

@@ -5,7 +5,7 @@ import { findText, updateText } from '@/db/queries/text'
 import { updatePhone } from '@/db/queries/phone'
 import type { Deps } from '@/lib/deps'
 import type { RefusalClass } from '@/lib/domain/carrier-code'
-import { nudgeAfter } from '@/lib/domain/round'
+import { waitUntil } from '@/lib/domain/round'
 import { dropText } from './drop-text'
 import { settingsNow } from './settings-now'
 
@@ -33,7 +33,7 @@ export async function acceptAttempt(
   await updatePrompts(
     tx,
     planned.filter((prompt) => prompt.kind !== 'welcome').map((prompt) => prompt.id),
-    { state: 'asked', nudgeAfter: nudgeAfter(now, 0, sending) },
+    { state: 'asked', nudgeAfter: waitUntil(now, 0, sending) },
   )
   for (const receipt of await listLooseReceipts(tx, sid)) {
     await deps.queue.add(tx, 'receive-receipt', { receiptN: receipt.n })

@@ -88,8 +88,8 @@ describe('what is going out', () => {
     ]
     const going = plan([kit('a', due)])
     expect(going.map(({ on, due: about }) => [on, ...about.map(({ kind }) => kind)])).toEqual([
-      ['2026-03-06', 'change'],
-      ['2026-03-07', 'wash'],
+      ['2026-03-06', 'wash'],
+      ['2026-03-09', 'change'],
       ['2026-03-13', 'flow check'],
     ])
   })

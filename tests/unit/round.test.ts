@@ -2,13 +2,15 @@ import { describe, expect, it } from 'vitest'
 import {
   bundle,
   expiresAt,
+  hadLastNudge,
+  hasRoom,
   insideWindow,
   localDay,
   localMinute,
   nextInsideWindow,
-  nudgeAfter,
   overWeeklyLimit,
   sendAfter,
+  waitUntil,
   type Window,
 } from '@/lib/domain/round'
 
@@ -138,14 +140,30 @@ describe('the manners of prompting', () => {
     expect(expiresAt(now) - now).toBe(36 * hour)
   })
 
-  it('nudges after three days, then seven, then no more', () => {
-    expect(nudgeAfter(now, 0)).toBe(now + 72 * hour)
-    expect(nudgeAfter(now, 1)).toBe(now + week)
-    expect(nudgeAfter(now, 2)).toBeNull()
+  it('waits three days for an answer, seven after a nudge, three after the last', () => {
+    expect(waitUntil(now, 0)).toBe(now + 72 * hour)
+    expect(waitUntil(now, 1)).toBe(now + week)
+    expect(waitUntil(now, 2)).toBe(now + 72 * hour)
+    expect([0, 1, 2, 3].map(hadLastNudge)).toEqual([false, false, true, true])
     const set = { firstNudgeDays: 1, secondNudgeDays: 2 }
-    expect(nudgeAfter(now, 0, set)).toBe(now + 24 * hour)
-    expect(nudgeAfter(now, 1, set)).toBe(now + 48 * hour)
-    expect(nudgeAfter(now, 2, set)).toBeNull()
+    const waits = [0, 1, 2].map((nudges) => waitUntil(now, nudges, set) - now)
+    expect(waits).toEqual([24 * hour, 48 * hour, 72 * hour])
+  })
+
+  it.each([
+    ['nothing was sent', [], true],
+    ['one went yesterday', [-24], true],
+    ['one went this local day', [-2], false],
+    ['one went late on the day before', [-11.9], true],
+    ['one waits for later today', [3], false],
+    ['one waits for tomorrow', [24], false],
+    ['two went in the week', [-48, -24], false],
+    ['the older of two went a week ago', [-168, -24], true],
+  ])('has room for a prompt when %s: %s', (_, hours, room) => {
+    // 11:45 in Kathmandu.
+    const sentAt = hours.map((ahead) => now + ahead * hour)
+    expect(hasRoom({ sentAt, now, timeZone: 'Asia/Kathmandu' })).toBe(room)
+    expect(hasRoom({ sentAt, now, timeZone: 'Asia/Kathmandu', limit: 0 })).toBe(false)
   })
 })
 
