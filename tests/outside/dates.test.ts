@@ -11,12 +11,12 @@ import { nextDue } from '@/lib/domain/cycle'
 import { addDays, dayNumber, weekdayOf } from '@/lib/domain/day'
 import { bundle, insideWindow, localDay, localMinute, nextInsideWindow } from '@/lib/domain/round'
 import { sendAfter, type Window } from '@/lib/domain/round'
+import { at, changing, end, openByLuxon, start, zones } from './zones'
 
 const minute = 60_000
 const hour = 60 * minute
 
 const always = { sundaysOff: false, holidays: [] as string[] }
-const at = (text: string) => Temporal.Instant.from(text).epochMilliseconds
 
 describe('the window of 47 CFR 64.1200(c)(1), 08:00 ≤ t < 21:00 local', () => {
   // The rule [C]; its instants from IANA [D]
@@ -76,34 +76,6 @@ describe('months from a date', () => {
     )
   })
 })
-
-const zones = Intl.supportedValuesOf('timeZone')
-const start = at('2024-01-01T00:00:00Z')
-const end = at('2031-01-01T00:00:00Z')
-
-/** Every change of a zone's clocks from 2024 to 2030. */
-function changesOf(timeZone: string): number[] {
-  const found: number[] = []
-  let from = Temporal.Instant.fromEpochMilliseconds(start).toZonedDateTimeISO(timeZone)
-  for (;;) {
-    const change = from.getTimeZoneTransition('next')
-    if (change === null || change.epochMilliseconds >= end) return found
-    found.push(change.epochMilliseconds)
-    from = change
-  }
-}
-
-function openByLuxon(instant: number, window: Window): boolean {
-  const local = DateTime.fromMillis(instant, { zone: window.timeZone })
-  const clock = local.hour * 60 + local.minute
-  if (window.sundaysOff && local.weekday === 7) return false
-  if (window.holidays.includes(local.toISODate() ?? '')) return false
-  return clock >= window.opensMinute && clock < window.closesMinute
-}
-
-const changing = zones
-  .map((timeZone) => ({ timeZone, changes: changesOf(timeZone) }))
-  .filter(({ changes }) => changes.length > 0)
 
 /** A moment in some zone between 2024 and 2030; every other one near a change of its clocks. */
 const moments = fc.oneof(
