@@ -17,6 +17,15 @@ export async function findHousehold(db: Handle, householdId: string) {
 
 export type HouseholdInArea = NonNullable<Awaited<ReturnType<typeof findHousehold>>>
 
+/** Holds a household until the end of the transaction, so that no two find room for the same text. */
+export async function holdHousehold(tx: Handle, householdId: string): Promise<void> {
+  await tx
+    .select({ id: households.id })
+    .from(households)
+    .where(eq(households.id, householdId))
+    .for('update')
+}
+
 export async function insertHousehold(db: Handle, row: typeof households.$inferInsert) {
   const [made] = await db.insert(households).values(row).returning()
   if (!made) throw new Error('The household was not kept.')

@@ -1,4 +1,4 @@
-import { and, asc, eq, inArray, lte, sql } from 'drizzle-orm'
+import { and, asc, eq, inArray, lte, sql, type SQL } from 'drizzle-orm'
 import type { Handle } from '../client'
 import { prompts } from '../schema/text'
 
@@ -12,31 +12,35 @@ export type DueRow = {
 }
 
 /**
- * What is due by `horizon` and has no living prompt, kit by kit. Kits that cannot be texted, are out of
- * service or have an open ticket (but for silence) are left out: their trouble is in hand elsewhere. The
- * cost follows what is due, not how many kits there are: each branch walks an index of due dates.
+ * The question that `listDue` puts to the database; a test asks how it is going to be answered. The limits
+ * inside make the database look each due kit up by its key: left free, it would rather read all kits.
  */
-export async function listDue(db: Handle, horizon: string, limit: number): Promise<DueRow[]> {
-  const found = await db.execute(sql`
+export function dueQuery(horizon: string, limit: number): SQL {
+  return sql`
     with due as (
       select k.id as kit_id, 'wash' as kind, k.next_wash_on as due_on, null::int as position
-      from kits k where k.next_wash_on <= ${horizon}
+      from kits k where k.state = 'in use' and k.next_wash_on <= ${horizon}
       union all
-      select k.id, 'flow check', k.next_flow_check_on, null from kits k where k.next_flow_check_on <= ${horizon}
+      select k.id, 'flow check', k.next_flow_check_on, null
+      from kits k where k.state = 'in use' and k.next_flow_check_on <= ${horizon}
       union all
       select f.kit_id, 'change', f.due_on, f.position from fittings f
       where f.removed_on is null and f.due_on <= ${horizon}
       union all
-      select k.id, 'welcome', k.handed_over_on, null from kits k
-      where k.handed_over_on <= ${horizon}
-        and not exists (select 1 from prompts p where p.kit_id = k.id and p.kind = 'welcome')
+      select k.id, 'welcome', k.welcome_due_on, null
+      from kits k where k.state = 'in use' and k.welcome_due_on <= ${horizon}
     )
     select d.kit_id, d.kind, d.due_on::text as due_on, d.position
     from due d
-    join kits k on k.id = d.kit_id and k.state = 'in use'
-    join household_phones hp on hp.household_id = k.household_id and hp.first
-    join phones ph on ph.id = hp.phone_id
-      and ph.state = 'active' and ph.consent = 'given' and not ph.carrier_blocked
+    cross join lateral (
+      select k.household_id from kits k where k.id = d.kit_id and k.state = 'in use' limit 1
+    ) home
+    cross join lateral (
+      select 1 from household_phones hp
+      join phones ph on ph.id = hp.phone_id
+        and ph.state = 'active' and ph.consent = 'given' and not ph.carrier_blocked
+      where hp.household_id = home.household_id and hp.first limit 1
+    ) reached
     where not exists (
         select 1 from prompts p
         where p.kit_id = d.kit_id and p.kind = d.kind and p.due_on = d.due_on and p.state <> 'dropped'
@@ -46,7 +50,16 @@ export async function listDue(db: Handle, horizon: string, limit: number): Promi
         select 1 from tickets t where t.kit_id = d.kit_id and t.ended_at is null and t.trouble <> 'silent'
       )
     order by d.due_on, d.kit_id, d.kind, d.position
-    limit ${limit}`)
+    limit ${limit}`
+}
+
+/**
+ * What is due by `horizon` and has no living prompt, kit by kit. Kits that cannot be texted, are out of
+ * service or have an open ticket (but for silence) are left out: their trouble is in hand elsewhere. The
+ * cost follows what is due, not how many kits there are: each branch walks an index of due dates.
+ */
+export async function listDue(db: Handle, horizon: string, limit: number): Promise<DueRow[]> {
+  const found = await db.execute(dueQuery(horizon, limit))
   return found.rows.map((row) => ({
     kitId: String(row.kit_id),
     kind: row.kind as DueRow['kind'],
@@ -74,16 +87,16 @@ export async function upsertPrompt(db: Handle, row: typeof prompts.$inferInsert)
   return made ?? null
 }
 
-/** How often a prompt was tried before; 0 for one that is new. */
-export async function countTries(
+/** The prompt that a kit has for this kind and date; null when there is none. */
+export async function findPrompt(
   db: Handle,
   { kitId, kind, dueOn }: { kitId: string; kind: PromptRow['kind']; dueOn: string },
 ) {
   const [row] = await db
-    .select({ tries: prompts.tries })
+    .select()
     .from(prompts)
     .where(and(eq(prompts.kitId, kitId), eq(prompts.kind, kind), eq(prompts.dueOn, dueOn)))
-  return row?.tries ?? 0
+  return row ?? null
 }
 
 export async function listPromptsOfText(db: Handle, textId: string) {

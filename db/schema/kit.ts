@@ -71,12 +71,22 @@ export const kits = pgTable(
     /** When the wash would be due without the trend; later than `nextWashOn` where it was brought forward. */
     calendarWashOn: date('calendar_wash_on').notNull(),
     nextFlowCheckOn: date('next_flow_check_on').notNull(),
+    /** From when on the household is owed its welcome; null once that has left. */
+    welcomeDueOn: date('welcome_due_on'),
     createdAt: instant('created_at').notNull(),
   },
   (t) => [
     index('kits_household').on(t.householdId),
-    index('kits_next_wash').on(t.nextWashOn),
-    index('kits_next_flow_check').on(t.nextFlowCheckOn),
+    // Planning walks these: a kit that is welcomed, or no longer in use, must cost it nothing.
+    index('kits_wash_due')
+      .on(t.nextWashOn)
+      .where(sql`${t.state} = 'in use'`),
+    index('kits_flow_check_due')
+      .on(t.nextFlowCheckOn)
+      .where(sql`${t.state} = 'in use'`),
+    index('kits_welcome_due')
+      .on(t.welcomeDueOn)
+      .where(sql`${t.state} = 'in use' and ${t.welcomeDueOn} is not null`),
     check('kits_state_known', sql`${t.state} in ('in use', 'out of service', 'retired')`),
     check('kits_wash_never_put_off', sql`${t.nextWashOn} <= ${t.calendarWashOn}`),
     check(

@@ -1,4 +1,5 @@
 import type { Transaction } from '@/db/client'
+import { holdHousehold } from '@/db/queries/household'
 import { findKitFacts } from '@/db/queries/kit-facts'
 import { findFirstPhone } from '@/db/queries/phone'
 import {
@@ -40,6 +41,7 @@ async function nudge(tx: Transaction, deps: Deps, prompt: PromptRow): Promise<vo
   const facts = await findKitFacts(tx, prompt.kitId)
   const phone = facts && (await findFirstPhone(tx, facts.household.id))
   if (!facts || !phone) return updatePrompts(tx, [prompt.id], { state: 'silent', nudgeAfter: null })
+  await holdHousehold(tx, facts.household.id)
   const hours = await listPromptHours(tx, [facts.household.id], now - 7 * DAY)
   const { sending } = await settingsNow(tx)
   const sentAt = hours.map(({ at }) => Math.min(at, now))

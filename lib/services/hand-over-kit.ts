@@ -72,6 +72,7 @@ export async function handOverKit(tx: Transaction, handOver: HandOver) {
       settings: settings.wash,
     }),
     nextFlowCheckOn: addDays(handedOverOn, settings.wash.flowCheckDays),
+    welcomeDueOn: handedOverOn,
     createdAt: now,
   })
   const stages = await listModelStages(tx, model.id)

@@ -1,6 +1,7 @@
+import { holdHousehold } from '@/db/queries/household'
 import { findKitFacts, type KitFacts } from '@/db/queries/kit-facts'
 import { findFirstPhone } from '@/db/queries/phone'
-import { countTries, listDue, upsertPrompt, type DueRow } from '@/db/queries/prompt'
+import { findPrompt, listDue, upsertPrompt, type DueRow } from '@/db/queries/prompt'
 import { countWaitingTexts, listPromptHours } from '@/db/queries/text'
 import type { Transaction } from '@/db/client'
 import type { Deps } from '@/lib/deps'
@@ -35,21 +36,29 @@ function promptsOf(due: readonly Due[]): Prompt[] {
   return prompts
 }
 
-type Plan = { facts: KitFacts; text: RoundText; sendAt: number }
+type Plan = { facts: KitFacts; text: RoundText; sendAt: number; limit: number }
 
-async function writePlan(
-  tx: Transaction,
-  deps: Deps,
-  { facts, text, sendAt }: Plan,
-): Promise<boolean> {
+/** Under the weekly limit and not twice a day; the household is held, so that it stays so until the end. */
+async function findRoom(tx: Transaction, { facts, limit }: Plan, now: number) {
+  const { household, area } = facts
+  await holdHousehold(tx, household.id)
+  const hours = await listPromptHours(tx, [household.id], now - WEEK)
+  return hasRoom({ sentAt: hours.map(({ at }) => at), now, timeZone: area.timeZone, limit })
+}
+
+async function writePlan(tx: Transaction, deps: Deps, plan: Plan): Promise<boolean> {
+  const { facts, text, sendAt } = plan
+  const now = deps.clock.now()
   const prompts = promptsOf(text.due)
   const [first] = prompts
   const phone = await findFirstPhone(tx, facts.household.id)
-  if (!first || !phone) return false
-  const tries = await countTries(tx, { kitId: facts.kit.id, ...first })
+  if (!first || !phone || !(await findRoom(tx, plan, now))) return false
+  const before = await findPrompt(tx, { kitId: facts.kit.id, ...first })
+  // Another planning came first.
+  if (before && before.state !== 'dropped') return false
   const changed = prompts.flatMap(({ positions }) => positions)
   const queued = await queueText(tx, deps, {
-    purpose: `prompt:${facts.kit.id}:${first.kind}:${first.dueOn}:${tries + 1}`,
+    purpose: `prompt:${facts.kit.id}:${first.kind}:${first.dueOn}:${(before?.tries ?? 0) + 1}`,
     moment: text.moment,
     phone,
     household: facts.household,
@@ -61,12 +70,8 @@ async function writePlan(
   })
   if (!queued.ok) return false
   for (const prompt of prompts) {
-    await upsertPrompt(tx, {
-      kitId: facts.kit.id,
-      ...prompt,
-      textId: queued.textId,
-      createdAt: deps.clock.now(),
-    })
+    const row = { kitId: facts.kit.id, ...prompt, textId: queued.textId, createdAt: now }
+    await upsertPrompt(tx, row)
   }
   return true
 }
@@ -85,6 +90,7 @@ export async function planPrompts(deps: Deps): Promise<{ planned: number }> {
   const kits = byKit(await listDue(db, horizon, KITS_A_RUN))
   if (kits.size === 0) return { planned: 0 }
   let spreadIndex = await countWaitingTexts(db, now)
+  const limit = sending.promptsAWeek
   let planned = 0
   for (const [kitId, rows] of kits) {
     // Nothing is due in any zone yet: most kits of the horizon need no further look.
@@ -92,15 +98,13 @@ export async function planPrompts(deps: Deps): Promise<{ planned: number }> {
     const facts = await findKitFacts(db, kitId)
     if (!facts) continue
     const window = windowOf(facts.area)
-    const { timeZone } = window
-    const text = textFor(rows.map(asDue), localDay(now, timeZone), sending)
+    const text = textFor(rows.map(asDue), localDay(now, window.timeZone), sending)
     if (!text) continue
-    const hours = await listPromptHours(db, [facts.household.id], now - WEEK)
-    const sentAt = hours.map(({ at }) => at)
-    if (!hasRoom({ sentAt, now, timeZone, limit: sending.promptsAWeek })) continue
     const perMinute = programme.textsPerMinute
     const sendAt = sendAfter({ now, window, spreadIndex, perMinute })
-    const done = await deps.store.transaction((tx) => writePlan(tx, deps, { facts, text, sendAt }))
+    const done = await deps.store.transaction((tx) =>
+      writePlan(tx, deps, { facts, text, sendAt, limit }),
+    )
     if (done) {
       planned += 1
       spreadIndex += 1

@@ -1,5 +1,6 @@
 import type { Transaction } from '@/db/client'
 import { listLooseReceipts, updateAttempt, type AttemptRow } from '@/db/queries/attempt'
+import { updateKit } from '@/db/queries/kit-facts'
 import { listPromptsOfText, updatePrompts } from '@/db/queries/prompt'
 import { findText, updateText } from '@/db/queries/text'
 import { updatePhone } from '@/db/queries/phone'
@@ -29,6 +30,7 @@ export async function acceptAttempt(
     welcome.map((prompt) => prompt.id),
     { state: 'answered', answeredAt: now },
   )
+  for (const { kitId } of welcome) await updateKit(tx, kitId, { welcomeDueOn: null })
   const { sending } = await settingsNow(tx)
   await updatePrompts(
     tx,
