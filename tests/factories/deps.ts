@@ -34,11 +34,16 @@ async function waitingJobs(store: Store) {
 export async function testDeps({ at }: { at: number | string }): Promise<TestDeps> {
   const store = await emptyStore()
   shared.rillpostTestQueue ??= startQueue(store, silent, false)
+  return depsOn(store, await shared.rillpostTestQueue, at)
+}
+
+/** The same on a store and a queue of one's own. */
+export function depsOn(store: Store, queue: Queue, at: number | string): TestDeps {
   const clock = standingClock(typeof at === 'number' ? at : Date.parse(at))
   const letters: Letter[] = []
   return {
     store,
-    queue: await shared.rillpostTestQueue,
+    queue,
     carrier: recordingCarrier(),
     mail: {
       send: (letter) => {
