@@ -56,7 +56,13 @@ const allowed = [
   // Use cases.
   row('^lib/services/', '^lib/(services|domain|schemas)/|^db/(?!seed/)|^jobs/queues\\.ts$'),
   row('^lib/services/', '^lib/gateways/|^lib/(deps|clock)\\.ts$', typesOnly),
-  packages('^lib/services/', ['date-fns', '@date-fns/tz', '@node-rs/argon2', 'libphonenumber-js']),
+  packages('^lib/services/', [
+    'date-fns',
+    'date-holidays',
+    '@date-fns/tz',
+    '@node-rs/argon2',
+    'libphonenumber-js',
+  ]),
 
   // The composition root, the session gate, the wrapper of routes.
   row('^lib/auth\\.ts$', '^db/(?!seed/)|^lib/domain/|^lib/(env|deps|clock)\\.ts$'),

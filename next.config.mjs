@@ -17,6 +17,7 @@ const config = {
   serverExternalPackages: [
     '@electric-sql/pglite',
     '@node-rs/argon2',
+    'date-holidays',
     'nodemailer',
     'pg',
     'pg-boss',

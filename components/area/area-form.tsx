@@ -1,6 +1,7 @@
 'use client'
 
 import { useRouter } from 'next/navigation'
+import { holidayOfLine } from '@/lib/domain/holiday'
 import { languageNamesInEnglish, languages } from '@/lib/domain/language'
 import type { AreaInput } from '@/lib/schemas/area'
 import { sendJson } from '../api'
@@ -8,8 +9,9 @@ import { EntryForm, EntryPart, Pair } from '../entry/entry-form'
 import { isTicked, linesOf, numberOf, textOf } from '../entry/form-values'
 import { useEntry, type EntryState } from '../entry/use-entry'
 import { Choice } from '../ui/choice-field'
-import { AreaField, SelectField, TextField } from '../ui/field'
+import { SelectField, TextField } from '../ui/field'
 import { AreaMonths } from './area-months'
+import { HolidayField } from './holiday-field'
 
 type AreaFormProps = {
   /** Null for a new area. */
@@ -29,7 +31,7 @@ function areaOf(form: FormData) {
     windowOpens: textOf(form, 'windowOpens'),
     windowCloses: textOf(form, 'windowCloses'),
     sundaysOff: isTicked(form, 'sundaysOff'),
-    holidays: linesOf(form, 'holidays'),
+    holidays: linesOf(form, 'holidays').map(holidayOfLine),
     altitudeMetres: numberOf(form, 'altitudeMetres'),
     wetMonths: months.filter((month) => isTicked(form, `wet-${month}`)),
     // A hole in the list is null in JSON, and so refused at its own place.
@@ -104,10 +106,6 @@ function PlaceFields({
 }
 
 function WindowFields({ area, wrong }: PartProps) {
-  const holidayFault = (area?.holidays ?? [])
-    .concat(Array.from({ length: 60 }, () => ''))
-    .map((_day, index) => wrong(`holidays.${index}`))
-    .find(Boolean)
   return (
     <EntryPart
       title="When texts may go"
@@ -135,15 +133,7 @@ function WindowFields({ area, wrong }: PartProps) {
         defaultChecked={area?.sundaysOff ?? true}
         value="yes"
       />
-      <AreaField
-        label="Not on these days"
-        hint="One a line, as 2026-12-25."
-        name="holidays"
-        mono
-        optional
-        defaultValue={area?.holidays.join('\n')}
-        error={wrong('holidays') ?? holidayFault}
-      />
+      <HolidayField holidays={area?.holidays ?? []} wrong={wrong} />
     </EntryPart>
   )
 }

@@ -19,6 +19,6 @@ export function isTicked(form: FormData, name: string): boolean {
 /** Each line that has something on it. */
 export function linesOf(form: FormData, name: string): string[] {
   return textOf(form, name)
-    .split(/[\s,;]+/)
-    .filter((line) => line !== '')
+    .split('\n')
+    .filter((line) => line.trim() !== '')
 }

@@ -1,3 +1,4 @@
+import { dayOffWords } from '@/lib/domain/holiday'
 import type { RoundDay, Rounds } from '@/lib/schemas/rounds'
 
 const heightFull = 120
@@ -48,8 +49,19 @@ export function RoundStrip({ rounds }: { rounds: Rounds }) {
           {lineShown ? '.' : ', far above this strip.'}
         </p>
       )}
+      <DaysNamed days={days} />
     </div>
   )
+}
+
+/** Days off that are not just Sundays, each with its name: the strip has no room for one. */
+function DaysNamed({ days }: { days: readonly RoundDay[] }) {
+  const named = days.filter(({ daysOff }) => daysOff.some(({ why }) => why !== 'Sunday'))
+  return named.map(({ on, long, daysOff }) => (
+    <p key={on} className="mt-1 text-sm">
+      {long}, no texts: {dayOffWords(daysOff)}.
+    </p>
+  ))
 }
 
 function Across({ y, className, dashed }: { y: number; className: string; dashed?: boolean }) {

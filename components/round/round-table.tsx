@@ -1,3 +1,4 @@
+import { dayOffWords } from '@/lib/domain/holiday'
 import { roundKinds, type RoundDay, type Rounds } from '@/lib/schemas/rounds'
 import { RowTh, Table, Td, Th } from '../ui/table'
 
@@ -34,6 +35,17 @@ const columnNames: Record<(typeof roundKinds)[number], string> = {
   other: 'Other',
 }
 
+/** Why nothing goes that day, or not everywhere. */
+function DaysOff({ day: { off, daysOff } }: { day: RoundDay }) {
+  const why = dayOffWords(daysOff)
+  if (!off && why === '') return null
+  return (
+    <span className="block max-w-72 text-sm font-normal whitespace-normal text-faint">
+      {off && why === '' ? 'no texts any more that day' : `no texts: ${why}`}
+    </span>
+  )
+}
+
 function DayRow({ day }: { day: RoundDay }) {
   return (
     <tr>
@@ -45,7 +57,7 @@ function DayRow({ day }: { day: RoundDay }) {
         ) : (
           day.long
         )}
-        {day.off && <span className="font-normal text-faint"> · no texts that day</span>}
+        <DaysOff day={day} />
       </RowTh>
       <Td number className="font-medium">
         {day.texts}

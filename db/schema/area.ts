@@ -1,5 +1,6 @@
 import { sql } from 'drizzle-orm'
 import { boolean, check, integer, jsonb, pgTable, text } from 'drizzle-orm/pg-core'
+import type { Holiday } from '@/lib/domain/holiday'
 import type { Language } from '@/lib/domain/language'
 import { id, instant } from './columns'
 
@@ -21,10 +22,8 @@ export const areas = pgTable(
     windowOpensMinute: integer('window_opens_minute').notNull().default(480),
     windowClosesMinute: integer('window_closes_minute').notNull().default(1200),
     sundaysOff: boolean('sundays_off').notNull().default(true),
-    holidays: text('holidays')
-      .array()
-      .notNull()
-      .default(sql`'{}'::text[]`),
+    /** Days without prompts, in order. */
+    holidays: jsonb('holidays').$type<Holiday[]>().notNull().default([]),
     altitudeMetres: integer('altitude_metres').notNull().default(0),
     wetMonths: integer('wet_months')
       .array()

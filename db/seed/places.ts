@@ -16,6 +16,13 @@ export type Place = {
   families: readonly string[]
 }
 
+/** Days off of the valley, in days after the day the demo's past begins on; null is everywhere. */
+export const feasts: readonly { place: string | null; day: number; name: string }[] = [
+  { place: 'Loma Clara', day: 31, name: 'Ford fair' },
+  { place: 'Char Nodi', day: 31, name: 'Feast of boats' },
+  { place: null, day: 37, name: 'Valley day' },
+]
+
 const mild = [24, 25, 25, 24, 22, 20, 19, 20, 21, 23, 24, 24]
 const high = [14, 14, 13, 12, 10, 9, 9, 10, 11, 12, 13, 14]
 

@@ -11,7 +11,7 @@ import { enterArea } from '@/lib/services/enter-area'
 import { enterDepot } from '@/lib/services/enter-depot'
 import { enterHousehold } from '@/lib/services/enter-household'
 import { newFamily } from './family'
-import { places, timeZone, type Place } from './places'
+import { feasts, places, timeZone, type Place } from './places'
 import type { Random } from './random'
 
 type Setting = { deps: Deps; coordinator: Actor; random: Random; modelId: string }
@@ -40,16 +40,22 @@ export async function settlePlaces({ deps, coordinator, modelId }: Omit<Setting,
     if (!made.ok) throw new Error(made.reason)
     depots.set(name, made.depotId)
   }
+  const today = localDay(deps.clock.now(), timeZone)
   const areas = new Map<string, string>()
   for (const place of places) {
-    const made = await enterArea(deps, coordinator, areaInputSchema.parse(areaOf(place, depots)))
+    const made = await enterArea(
+      deps,
+      coordinator,
+      areaInputSchema.parse(areaOf(place, { depots, today })),
+    )
     if (!made.ok) throw new Error(made.reason)
     areas.set(place.name, made.areaId)
   }
   return areas
 }
 
-function areaOf(place: Place, depots: Map<string, string>) {
+function areaOf(place: Place, { depots, today }: { depots: Map<string, string>; today: string }) {
+  const here = feasts.filter((feast) => feast.place === null || feast.place === place.name)
   return {
     name: place.name,
     timeZone,
@@ -57,7 +63,7 @@ function areaOf(place: Place, depots: Map<string, string>) {
     windowOpens: '08:00',
     windowCloses: '20:00',
     sundaysOff: false,
-    holidays: [],
+    holidays: here.map(({ day, name }) => ({ on: addDays(today, day), name })),
     altitudeMetres: place.altitudeMetres,
     wetMonths: place.wetMonths,
     monthCelsius: place.monthCelsius,

@@ -14,7 +14,7 @@ export function dueWords({
   const names = [...positions]
     .sort((one, other) => one - other)
     .map((position) => stageNames[position] ?? `stage ${position}`)
-  return `change of ${inWords(names)}`
+  return `change of ${joined(names)}`
 }
 
 /** Several things of one text, each once: `wash, change of cloth`. */
@@ -22,7 +22,8 @@ export function listWords(things: readonly string[]): string {
   return [...new Set(things)].join(', ')
 }
 
-function inWords(names: readonly string[]): string {
+/** `cloth, carbon and fibre`. */
+export function joined(names: readonly string[]): string {
   const last = names.at(-1) ?? ''
   return names.length < 2 ? last : `${names.slice(0, -1).join(', ')} and ${last}`
 }

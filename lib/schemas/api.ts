@@ -1,6 +1,7 @@
 import { areaEndpoints } from './area'
 import { depotEndpoints } from './depot'
 import type { Endpoint } from './endpoint'
+import { holidayEndpoints } from './holiday'
 import { householdEndpoints } from './household'
 import { openEndpoints } from './open-endpoints'
 import { practiceEndpoints } from './practice'
@@ -18,6 +19,7 @@ export const endpoints: readonly Endpoint[] = [
   ...ticketEndpoints,
   ...householdEndpoints,
   ...areaEndpoints,
+  ...holidayEndpoints,
   ...depotEndpoints,
   ...wordingEndpoints,
   ...replyWordsEndpoints,

@@ -1,5 +1,6 @@
 import { z } from 'zod'
 import { endpoint } from './endpoint'
+import { holidaySchema, holidaysSchema } from './holiday'
 import { languageSchema } from './language'
 
 /** Zones by name only: a bare offset knows nothing of daylight saving. */
@@ -35,9 +36,7 @@ export const areaInputSchema = z
     windowOpens: clockSchema,
     windowCloses: clockSchema,
     sundaysOff: z.boolean(),
-    holidays: z
-      .array(z.iso.date({ error: 'Write each day as 2026-12-25, one a line.' }))
-      .max(60, 'At most 60 days.'),
+    holidays: holidaysSchema,
     altitudeMetres: z
       .number({ error: 'Write metres above the sea.' })
       .int('Write whole metres.')
@@ -62,7 +61,7 @@ export const areaSchema = z.object({
   windowOpens: z.string(),
   windowCloses: z.string(),
   sundaysOff: z.boolean(),
-  holidays: z.array(z.string()),
+  holidays: z.array(holidaySchema),
   altitudeMetres: z.number(),
   wetMonths: z.array(z.number()),
   monthCelsius: z.array(z.number()),

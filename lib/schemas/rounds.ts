@@ -27,6 +27,8 @@ const roundDaySchema = z.object({
   counts: z.record(z.enum(roundKinds), z.number()),
   /** No area's window opens that day. */
   off: z.boolean(),
+  /** Why no texts go, and in which areas; no area is named when it holds in all. */
+  daysOff: z.array(z.object({ why: z.string(), areas: z.array(z.string()) })),
   going: z.array(goingSchema),
   /** Texts of the day that are not listed. */
   more: z.number(),

@@ -9,6 +9,6 @@ export function windowOf(area: AreaRow): Window {
     opensMinute: area.windowOpensMinute,
     closesMinute: area.windowClosesMinute,
     sundaysOff,
-    holidays,
+    holidays: holidays.map(({ on }) => on),
   }
 }

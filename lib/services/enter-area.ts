@@ -19,7 +19,7 @@ function minutesOf(clock: string): number {
 function rowOf({ windowOpens, windowCloses, ...rest }: AreaInput) {
   return {
     ...rest,
-    holidays: [...new Set(rest.holidays)].toSorted(),
+    holidays: rest.holidays.toSorted((one, other) => (one.on < other.on ? -1 : 1)),
     wetMonths: [...new Set(rest.wetMonths)].toSorted((a, b) => a - b),
     windowOpensMinute: minutesOf(windowOpens),
     windowClosesMinute: minutesOf(windowCloses),

@@ -1,6 +1,7 @@
 import { listAreaRows } from '@/db/queries/area'
 import type { Deps } from '@/lib/deps'
 import { addDays } from '@/lib/domain/day'
+import { daysOffOn } from '@/lib/domain/holiday'
 import { allow, type Actor } from '@/lib/domain/role'
 import { carriedADay, openingsAhead } from '@/lib/domain/round-going'
 import { localDay } from '@/lib/domain/round-window'
@@ -39,7 +40,14 @@ export async function listRounds(deps: Deps, actor: Actor): Promise<Rounds> {
   const days = Array.from({ length: DAYS }, (_, ahead) => {
     const on = addDays(today, ahead)
     const ofDay = expected.filter((text) => text.on === on || (ahead === 0 && text.on < on))
-    return dayOf(on, ofDay, windows.size > 0 && !open.has(on))
+    return {
+      ...dayOf(on, ofDay),
+      off: windows.size > 0 && !open.has(on),
+      daysOff: daysOffOn(
+        on,
+        rows.map(({ area }) => area),
+      ),
+    }
   })
   const carried = [...windows.values()].map((window) =>
     carriedADay(window, settings.programme.textsPerMinute),
@@ -53,7 +61,7 @@ export async function listRounds(deps: Deps, actor: Actor): Promise<Rounds> {
   }
 }
 
-function dayOf(on: string, expected: readonly Expected[], off: boolean): RoundDay {
+function dayOf(on: string, expected: readonly Expected[]): Omit<RoundDay, 'off' | 'daysOff'> {
   const inOrder = [...expected].sort((one, other) => one.at - other.at)
   const count = (kind: RoundKind) => expected.filter(({ kinds }) => kinds.includes(kind)).length
   return {
@@ -68,7 +76,6 @@ function dayOf(on: string, expected: readonly Expected[], off: boolean): RoundDa
       nudge: count('nudge'),
       other: count('other'),
     },
-    off,
     going: inOrder.slice(0, LISTED_A_DAY).map(goingOf),
     more: Math.max(0, expected.length - LISTED_A_DAY),
   }

@@ -2,6 +2,7 @@ import { beforeEach, describe, expect, it } from 'vitest'
 import { insertPromise } from '@/db/queries/promise'
 import { insertReferenceData, listKitModels } from '@/db/queries/reference'
 import { stockMoves } from '@/db/schema/stock'
+import { holidayOfLine } from '@/lib/domain/holiday'
 import { NotAllowedError } from '@/lib/domain/role'
 import { areaInputSchema, areaListSchema } from '@/lib/schemas/area'
 import { depotListSchema } from '@/lib/schemas/depot'
@@ -114,10 +115,15 @@ describe('an area', () => {
     const { areaId, depotId, coordinator } = place
     const ferry = await enterArea(deps, coordinator, { ...areaInput, depotId, name: 'Ferry Bank' })
     expect(ferry.ok).toBe(true)
-    const input = { ...areaInput, depotId, areaId, windowCloses: '24:00', holidays: ['2026-12-25'] }
+    const midwinter = { on: '2026-12-25', name: 'Midwinter day' }
+    const holidays = [midwinter, { on: '2026-05-01', name: '' }]
+    const input = { ...areaInput, depotId, areaId, windowCloses: '24:00', holidays }
     expect(await changeArea(deps, coordinator, input)).toEqual({ ok: true, areaId })
     const form = await areaForm(deps, coordinator, areaId)
-    expect(form?.area).toMatchObject({ windowCloses: '24:00', holidays: ['2026-12-25'] })
+    expect(form?.area).toMatchObject({
+      windowCloses: '24:00',
+      holidays: [{ on: '2026-05-01', name: '' }, midwinter],
+    })
     const taken = await changeArea(deps, coordinator, { ...input, name: 'Ferry Bank' })
     expect(taken).toEqual({ ok: false, reason: 'Another area has this name.' })
   })
@@ -127,11 +133,30 @@ describe('an area', () => {
     ['timeZone', { timeZone: 'Nowhere/Town' }],
     ['windowCloses', { windowOpens: '20:00', windowCloses: '08:00' }],
     ['windowCloses', { windowCloses: '25:00' }],
-    ['holidays.0', { holidays: ['2026-02-30'] }],
+    ['holidays.0.on', { holidays: [{ on: '2026-02-30', name: 'Leap day' }] }],
+    ['holidays.0.on', { holidays: [{ on: '25.12.2026', name: 'Midwinter day' }] }],
+    ['holidays.0.name', { holidays: [{ on: '2026-12-25', name: 'x'.repeat(61) }] }],
+    [
+      'holidays.1.on',
+      {
+        holidays: [
+          { on: '2026-12-25', name: 'Midwinter day' },
+          { on: '2026-12-25', name: 'Feast' },
+        ],
+      },
+    ],
     ['monthCelsius', { monthCelsius: [20] }],
     ['name', { name: '  ' }],
   ])('with a bad %s is refused at its field', (field, change) => {
     const result = areaInputSchema.safeParse({ ...areaInput, depotId: 'x', ...change })
     expect(result.error?.issues.map(({ path }) => path.join('.'))).toContain(field)
+  })
+
+  it('says of a bad line which it is and how to write it', () => {
+    const holidays = [holidayOfLine('25.12.2026 Midwinter day')]
+    const result = areaInputSchema.safeParse({ ...areaInput, depotId: 'x', holidays })
+    expect(result.error?.issues.map(({ message }) => message)).toEqual([
+      '“25.12.2026” is no day. Write each line as 2026-12-25 Midwinter day.',
+    ])
   })
 })
