@@ -7,6 +7,9 @@ import {
   type WashSettings,
 } from './cycle'
 import { addDays, dayNumber, dayOfNumber, monthOf } from './day'
+import { emptyLoad, type Load } from './round-load'
+
+type Position = 1 | 2 | 3
 
 /** A kit as the plan ahead sees it. */
 export type KitAhead = {
@@ -15,24 +18,25 @@ export type KitAhead = {
   lastWashOn: string
   nextWashOn: string
   nextFlowCheckOn?: string
-  stages: readonly { position: 1 | 2 | 3; fittedOn: string; changeMonths: number }[]
+  stages: readonly { position: Position; fittedOn: string; changeMonths: number }[]
+  /** False where no text reaches the household: its kit is cared for all the same. */
+  texted?: boolean
 }
 
-/** What falls due on a day. `texts` is what goes out when a household is told all at once. */
-export type DayAhead = {
-  on: string
-  washes: number
-  changes: Record<1 | 2 | 3, number>
-  flowChecks: number
-  texts: number
-}
+/** What falls due on a day, and the texts that ask for it. */
+export type DayAhead = Load & { on: string }
+
+/** The cycles that stand; the months of a stage's change are each kit's own. */
+export type Cycles = { wash: WashSettings; flowCheckDays: number }
 
 /** Other cycles to try: what is left out stays as it is. */
 export type WhatIf = {
   wash?: WashSettings
-  changeMonths?: Partial<Record<1 | 2 | 3, number>>
+  changeMonths?: Partial<Record<Position, number>>
   flowCheckDays?: number
 }
+
+const commonCycles: Cycles = { wash: washDefaults, flowCheckDays: 60 }
 
 /** The days planned for, by their numbers; `months` has the month of each, from the first on. */
 type Span = { first: number; last: number; months: readonly number[] }
@@ -48,17 +52,15 @@ function intervalIn(month: number, kit: KitAhead, settings: WashSettings): numbe
   return washIntervalDays({ sourceClass: kit.sourceClass, wet, settings })
 }
 
-function washDays(kit: KitAhead, span: Span, whatIf: WashSettings | undefined): number[] {
-  const settings = whatIf ?? washDefaults
-  // The day that stands was found with the trend; another cycle starts anew from the last wash.
-  const next = whatIf
-    ? dayNumber(kit.lastWashOn) + intervalIn(monthOf(kit.lastWashOn), kit, whatIf)
-    : dayNumber(kit.nextWashOn)
+/** The day that stands moves by what the interval gains or loses; the days after it follow the new one. */
+function washDays(kit: KitAhead, span: Span, { today, other }: Record<'today' | 'other', Cycles>) {
+  const month = monthOf(kit.lastWashOn)
+  const gained = intervalIn(month, kit, other.wash) - intervalIn(month, kit, today.wash)
   const days: number[] = []
-  let on = Math.max(next, span.first)
+  let on = Math.max(dayNumber(kit.nextWashOn) + gained, span.first)
   while (on <= span.last) {
     days.push(on)
-    on += intervalIn(span.months[on - span.first] ?? 0, kit, settings)
+    on += intervalIn(span.months[on - span.first] ?? 0, kit, other.wash)
   }
   return days
 }
@@ -73,87 +75,109 @@ function changeDays(fittedOn: string, months: number, span: Span): number[] {
   return days
 }
 
-function flowCheckDaysOf(kit: KitAhead, everyDays: number, span: Span): number[] {
-  if (kit.nextFlowCheckOn === undefined) return []
+function flowCheckDaysOf(
+  { nextFlowCheckOn }: KitAhead,
+  span: Span,
+  { today, other }: Record<'today' | 'other', Cycles>,
+): number[] {
+  if (nextFlowCheckOn === undefined) return []
+  const gained = other.flowCheckDays - today.flowCheckDays
   const days: number[] = []
-  let on = Math.max(dayNumber(kit.nextFlowCheckOn), span.first)
-  for (; on <= span.last; on += everyDays) days.push(on)
+  let on = Math.max(dayNumber(nextFlowCheckOn) + gained, span.first)
+  for (; on <= span.last; on += other.flowCheckDays) days.push(on)
   return days
 }
 
+type Thing = 'wash' | 'flow check' | Position
+
+/** What falls due on one kit, thing by thing, each with its days. */
+function dueOf(
+  kit: KitAhead,
+  span: Span,
+  cycles: { today: Cycles; other: Cycles; whatIf: WhatIf },
+) {
+  const changes = kit.stages.map(({ position, fittedOn, changeMonths }) => {
+    const months = cycles.whatIf.changeMonths?.[position] ?? changeMonths
+    return [position, changeDays(fittedOn, months, span)] as const
+  })
+  return [
+    ['wash', washDays(kit, span, cycles)],
+    ['flow check', flowCheckDaysOf(kit, span, cycles)],
+    ...changes,
+  ] as readonly (readonly [Thing, number[]])[]
+}
+
+function count(day: DayAhead, thing: Thing): void {
+  if (thing === 'wash') day.washes += 1
+  else if (thing === 'flow check') day.flowChecks += 1
+  else day.changes[thing] += 1
+}
+
+/** A text asks for one thing, as `textFor` has it: changes go together, a new fibre stage needs no wash. */
+function countTexts(day: DayAhead, things: ReadonlySet<Thing>): void {
+  const ask = (moment: keyof Load['asks'], isAsked: boolean) => {
+    if (!isAsked) return
+    day.asks[moment] += 1
+    day.texts += 1
+  }
+  ask('change-due', things.has(1) || things.has(2) || things.has(3))
+  ask('wash-due', things.has('wash') && !things.has(3))
+  ask('flow-check', things.has('flow check'))
+}
+
 /**
- * What falls due on each of the coming days if everything is done on the day it is due: the plan of
- * the rounds page, and with `whatIf` the plan under other cycles. What is overdue falls on the
- * first day. Nothing is bundled across days and no window is looked at: this is the load, not the
- * sending.
+ * What falls due on each of the coming days if everything is done on the day it is due, under the cycles
+ * that stand, and with `whatIf` under others. What is overdue falls on the first day. Nothing is bundled
+ * across days, and neither the window nor the weekly limit is looked at: this is the load, not the sending.
  */
 export function planAhead({
   kits,
   from,
   days,
+  cycles = commonCycles,
   whatIf = {},
 }: {
   kits: readonly KitAhead[]
   from: string
   days: number
+  cycles?: Cycles
   whatIf?: WhatIf
 }): DayAhead[] {
-  refuseStandingStill(kits, whatIf)
-  const plan = Array.from({ length: days }, (_, ahead): DayAhead => emptyDay(addDays(from, ahead)))
+  refuseStandingStill(kits, { cycles, whatIf })
+  const plan = emptyPlan(from, days)
   const span = spanOf(from, days)
-  const dayAt = (on: number) => plan[on - span.first] as DayAhead
+  const other = { ...cycles, ...whatIf }
   for (const kit of kits) {
-    const told = new Set<number>()
-    const count = (dueDays: readonly number[], add: (day: DayAhead) => void) => {
-      for (const on of dueDays) {
-        add(dayAt(on))
-        told.add(on)
+    const byDay = new Map<number, Set<Thing>>()
+    for (const [thing, on] of dueOf(kit, span, { today: cycles, other, whatIf })) {
+      for (const number of on) {
+        count(plan[number - span.first] as DayAhead, thing)
+        byDay.set(number, (byDay.get(number) ?? new Set()).add(thing))
       }
     }
-    count(washDays(kit, span, whatIf.wash), (day) => (day.washes += 1))
-    for (const stage of kit.stages) {
-      const months = whatIf.changeMonths?.[stage.position] ?? stage.changeMonths
-      count(changeDays(stage.fittedOn, months, span), (day) => (day.changes[stage.position] += 1))
-    }
-    const everyDays = whatIf.flowCheckDays ?? 30
-    count(flowCheckDaysOf(kit, everyDays, span), (day) => (day.flowChecks += 1))
-    for (const on of told) dayAt(on).texts += 1
+    if (kit.texted === false) continue
+    for (const [number, things] of byDay) countTexts(plan[number - span.first] as DayAhead, things)
   }
   return plan
+}
+
+/** A plan with nothing in it. */
+export function emptyPlan(from: string, days: number): DayAhead[] {
+  return Array.from({ length: days }, (_, ahead) => ({ on: addDays(from, ahead), ...emptyLoad() }))
 }
 
 /** A cycle of no length would be due for ever on one day. */
 function refuseStandingStill(
   kits: readonly KitAhead[],
-  { wash, changeMonths, flowCheckDays }: WhatIf,
+  { cycles, whatIf }: { cycles: Cycles; whatIf: WhatIf },
 ) {
   const lengths = [
     ...kits.flatMap(({ stages }) => stages.map((stage) => stage.changeMonths)),
-    ...Object.values(changeMonths ?? {}),
-    flowCheckDays ?? 1,
-    wash?.floorDays ?? 1,
+    ...Object.values(whatIf.changeMonths ?? {}),
+    ...[cycles, whatIf].flatMap(({ wash, flowCheckDays }) => [
+      flowCheckDays ?? 1,
+      wash?.floorDays ?? 1,
+    ]),
   ]
   if (lengths.some((length) => !(length >= 1))) throw new RangeError('a cycle takes some time')
-}
-
-function emptyDay(on: string): DayAhead {
-  return { on, washes: 0, changes: { 1: 0, 2: 0, 3: 0 }, flowChecks: 0, texts: 0 }
-}
-
-/** Parts a plan asks for, stage by stage. */
-export function partsOf(plan: readonly DayAhead[]): Record<1 | 2 | 3, number> {
-  const sum = (position: 1 | 2 | 3) =>
-    plan.reduce((total, { changes }) => total + changes[position], 0)
-  return { 1: sum(1), 2: sum(2), 3: sum(3) }
-}
-
-/** How the busiest day compares with an even load: 1 when all days are alike, null for no texts. */
-export function peakOf(plan: readonly DayAhead[]): { on: string; times: number } | null {
-  const total = plan.reduce((sum, { texts }) => sum + texts, 0)
-  const peak = plan.reduce<DayAhead | null>(
-    (most, day) => (most === null || day.texts > most.texts ? day : most),
-    null,
-  )
-  if (peak === null || total === 0) return null
-  return { on: peak.on, times: peak.texts / (total / plan.length) }
 }

@@ -1,7 +1,10 @@
+import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
 import { washDefaults } from '@/lib/domain/cycle'
-import { planAhead, type KitAhead } from '@/lib/domain/round'
-import { partsOf, peakOf } from '@/lib/domain/round-ahead'
+import { addDays } from '@/lib/domain/day'
+import { planAhead, type Due, type KitAhead } from '@/lib/domain/round'
+import { textFor } from '@/lib/domain/round-text'
+import { bothPlans, costOfTexts, partsOf, peakOf, totalOf, weeksOf } from '@/lib/domain/round-load'
 
 const kit: KitAhead = {
   sourceClass: 'cloudy',
@@ -16,6 +19,7 @@ const kit: KitAhead = {
   ],
 }
 const from = '2025-06-01'
+const cycles = { wash: washDefaults, flowCheckDays: 30 }
 
 const daysWith = (
   plan: ReturnType<typeof planAhead>,
@@ -23,7 +27,7 @@ const daysWith = (
 ) => plan.filter((day) => has(day) > 0).map(({ on }) => on)
 
 describe('the plan ahead', () => {
-  const plan = planAhead({ kits: [kit], from, days: 62 })
+  const plan = planAhead({ kits: [kit], from, days: 62, cycles })
 
   it('has every day once, from the first', () => {
     expect(plan).toHaveLength(62)
@@ -50,9 +54,10 @@ describe('the plan ahead', () => {
     expect(partsOf(plan)).toEqual({ 1: 2, 2: 1, 3: 0 })
   })
 
-  it('tells a household once a day', () => {
+  it('takes a text for each thing that one text cannot ask', () => {
     const tenth = plan.find(({ on }) => on === '2025-06-10')
-    expect(tenth).toMatchObject({ washes: 1, flowChecks: 1, texts: 1 })
+    expect(tenth).toMatchObject({ washes: 1, flowChecks: 1, texts: 2 })
+    expect(tenth?.asks).toEqual({ 'wash-due': 1, 'change-due': 0, 'flow-check': 1 })
     expect(daysWith(plan, (day) => day.flowChecks)).toEqual(['2025-06-10', '2025-07-10'])
   })
 
@@ -62,29 +67,34 @@ describe('the plan ahead', () => {
       changeMonths: { 1: 2 },
       flowCheckDays: 5,
     } as const
-    const other = planAhead({ kits: [kit], from, days: 62, whatIf })
-    expect(daysWith(other, (day) => day.washes)).toEqual(['2025-06-19', '2025-07-19'])
+    const other = planAhead({ kits: [kit], from, days: 62, cycles, whatIf })
+    // The wash that stands on 28 May is due 16 days later, as 30 days are 16 more than 14.
+    expect(daysWith(other, (day) => day.washes)).toEqual(['2025-06-13', '2025-07-13'])
     expect(daysWith(other, (day) => day.changes[1])).toEqual(['2025-07-03'])
     expect(daysWith(other, (day) => day.changes[2])).toEqual(['2025-06-30'])
-    expect(daysWith(other, (day) => day.flowChecks)).toHaveLength(11)
+    // 25 days earlier is before the first day: so on it, and every fifth from there.
+    expect(daysWith(other, (day) => day.flowChecks)).toHaveLength(13)
   })
 
   it('adds up over kits, and finds the wave', () => {
-    const many = planAhead({ kits: [kit, kit, { ...kit, stages: [] }], from, days: 10 })
+    const kits = [kit, kit, { ...kit, stages: [] }]
+    const many = planAhead({ kits, from, days: 10, cycles })
     expect(many[0]).toEqual({
       on: from,
       washes: 3,
       changes: { 1: 0, 2: 0, 3: 0 },
       flowChecks: 0,
       texts: 3,
+      asks: { 'wash-due': 3, 'change-due': 0, 'flow-check': 0 },
     })
-    // Three texts on the first day, two changes on the third, three washes and checks on the tenth.
-    expect(peakOf(many)).toEqual({ on: from, times: 3 / 0.8 })
+    // Three texts on the first day, two changes on the third, three washes and three checks on the tenth.
+    expect(peakOf(many)).toEqual({ on: '2025-06-10', texts: 6, times: 6 / 1.1 })
   })
 
   it.each([
     { changeMonths: { 1: 0 } },
     { flowCheckDays: 0 },
+    { changeMonths: { 2: Number.NaN } },
     { wash: { ...washDefaults, floorDays: 0 } },
   ])('refuses a cycle of no length rather than turn for ever: %o', (whatIf) => {
     expect(() => planAhead({ kits: [kit], from, days: 5, whatIf })).toThrow(RangeError)
@@ -101,5 +111,102 @@ describe('the plan ahead', () => {
     const { nextFlowCheckOn: _, ...unchecked } = kit
     const unasked = planAhead({ kits: [unchecked], from, days: 62 })
     expect(daysWith(unasked, (day) => day.flowChecks)).toEqual([])
+  })
+
+  it('cares for a kit that no text reaches, without a text', () => {
+    const silent = planAhead({ kits: [{ ...kit, texted: false }], from, days: 62, cycles })
+    expect(totalOf(silent)).toEqual({ ...totalOf(plan), ...{ texts: 0, asks: noAsks } })
+  })
+})
+
+const noAsks = { 'wash-due': 0, 'change-due': 0, 'flow-check': 0 }
+
+const day = fc.integer({ min: -40, max: 80 }).map((ahead) => addDays(from, ahead))
+const anyKit: fc.Arbitrary<KitAhead> = fc
+  .record({
+    sourceClass: fc.constantFrom('clear', 'cloudy', 'very cloudy'),
+    wetMonths: fc.constantFrom([], [6], [5, 6, 7, 8]),
+    lastWashOn: fc.integer({ min: -40, max: 0 }).map((ahead) => addDays(from, ahead)),
+    nextWashOn: day,
+    nextFlowCheckOn: day,
+    fitted: fc.tuple(day, day, day),
+  })
+  .map(({ fitted, ...rest }) => ({
+    ...rest,
+    stages: fitted.map((fittedOn, index) => ({
+      position: (index + 1) as 1 | 2 | 3,
+      fittedOn: addDays(fittedOn, -100),
+      changeMonths: [1, 3, 12][index] as number,
+    })),
+  }))
+const anyKits = fc.array(anyKit, { minLength: 1, maxLength: 4 })
+
+describe('any plan ahead', () => {
+  it('under the same cycles, named, is the plan itself', () => {
+    fc.assert(
+      fc.property(anyKits, (kits) => {
+        const plan = planAhead({ kits, from, days: 91, cycles })
+        const same = { ...cycles, changeMonths: { 1: 1, 2: 3, 3: 12 } }
+        expect(planAhead({ kits, from, days: 91, cycles, whatIf: same })).toEqual(plan)
+      }),
+    )
+  })
+
+  it('adds up: of pages of kits, and week by week', () => {
+    fc.assert(
+      fc.property(anyKits, anyKits, (some, others) => {
+        const planOf = (kits: KitAhead[]) => planAhead({ kits, from, days: 91, cycles })
+        const all = planOf([...some, ...others])
+        expect(bothPlans(planOf(some), planOf(others))).toEqual(all)
+        expect(weeksOf(all).map(({ on }) => on)).toEqual(
+          Array.from({ length: 13 }, (_, week) => addDays(from, week * 7)),
+        )
+        expect(totalOf(weeksOf(all))).toEqual(totalOf(all))
+      }),
+    )
+  })
+
+  it('takes the texts that the rule of one thing a text takes, were all days their own', () => {
+    fc.assert(
+      fc.property(anyKit, (one) => {
+        for (const on of planAhead({ kits: [one], from, days: 60, cycles })) {
+          let left: Due[] = [
+            ...(on.washes > 0 ? [{ kind: 'wash' as const, dueOn: on.on }] : []),
+            ...(on.flowChecks > 0 ? [{ kind: 'flow check' as const, dueOn: on.on }] : []),
+            ...([1, 2, 3] as const)
+              .filter((position) => on.changes[position] > 0)
+              .map((stagePosition) => ({ kind: 'change' as const, dueOn: on.on, stagePosition })),
+          ]
+          const moments: string[] = []
+          for (let text = textFor(left, on.on); text !== null; text = textFor(left, on.on)) {
+            const said = text.due
+            moments.push(text.moment)
+            left = left.filter((due) => !said.includes(due))
+          }
+          expect(moments).toHaveLength(on.texts)
+          for (const [moment, asked] of Object.entries(on.asks))
+            expect(moments.filter((one) => one === moment)).toHaveLength(asked)
+        }
+      }),
+    )
+  })
+
+  it('halves the washes of a doubled interval, give or take one a kit', () => {
+    const wash = { ...washDefaults, days: { clear: 60, cloudy: 28, 'very cloudy': 14 } }
+    fc.assert(
+      fc.property(anyKits, (kits) => {
+        const dry = kits.map((one) => ({ ...one, wetMonths: [], nextWashOn: from }))
+        const now = totalOf(planAhead({ kits: dry, from, days: 364, cycles })).washes
+        const other = totalOf(planAhead({ kits: dry, from, days: 364, cycles, whatIf: { wash } }))
+        expect(Math.abs(other.washes - now / 2)).toBeLessThanOrEqual(kits.length)
+      }),
+    )
+  })
+
+  it('costs the parts that its moments take on the average', () => {
+    const asks = { 'wash-due': 10, 'change-due': 4, 'flow-check': 2 }
+    const parts = { 'wash-due': 1, 'change-due': 2.5, 'flow-check': 3 }
+    const load = { ...totalOf([]), asks, texts: 16 }
+    expect(costOfTexts(load, { parts, pricePerPart: 0.02 })).toBeCloseTo(0.52, 12)
   })
 })
