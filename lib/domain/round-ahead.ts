@@ -15,7 +15,9 @@ type Position = 1 | 2 | 3
 export type KitAhead = {
   sourceClass: SourceClass
   wetMonths: readonly number[]
-  lastWashOn: string
+  /** What the wash interval counts from, the day the calendar gives, and the day that stands. */
+  washCountedFrom: string
+  calendarWashOn: string
   nextWashOn: string
   nextFlowCheckOn?: string
   stages: readonly { position: Position; fittedOn: string; changeMonths: number }[]
@@ -52,12 +54,18 @@ function intervalIn(month: number, kit: KitAhead, settings: WashSettings): numbe
   return washIntervalDays({ sourceClass: kit.sourceClass, wet, settings })
 }
 
-/** The day that stands moves by what the interval gains or loses; the days after it follow the new one. */
+/**
+ * The day that the calendar gives moves by what the interval gains or loses, and the days after it follow
+ * the new one. A wash that the trend brought forward is put off by no cycle.
+ */
 function washDays(kit: KitAhead, span: Span, { today, other }: Record<'today' | 'other', Cycles>) {
-  const month = monthOf(kit.lastWashOn)
+  const month = monthOf(kit.washCountedFrom)
   const gained = intervalIn(month, kit, other.wash) - intervalIn(month, kit, today.wash)
+  const byCalendar = dayNumber(kit.calendarWashOn) + gained
+  const isBrought = kit.nextWashOn < kit.calendarWashOn
+  const next = isBrought ? Math.min(byCalendar, dayNumber(kit.nextWashOn)) : byCalendar
   const days: number[] = []
-  let on = Math.max(dayNumber(kit.nextWashOn) + gained, span.first)
+  let on = Math.max(next, span.first)
   while (on <= span.last) {
     days.push(on)
     on += intervalIn(span.months[on - span.first] ?? 0, kit, other.wash)

@@ -1,5 +1,6 @@
 import { z } from 'zod'
 import { endpoint } from './endpoint'
+import { whatIfApi } from './what-if'
 
 export const roundKinds = ['wash', 'change', 'flow check', 'welcome', 'nudge', 'other'] as const
 export type RoundKind = (typeof roundKinds)[number]
@@ -56,4 +57,4 @@ export const roundsApi = endpoint({
   response: roundsSchema,
 })
 
-export const roundsEndpoints = [roundsApi]
+export const roundsEndpoints = [roundsApi, whatIfApi]

@@ -3,11 +3,11 @@ import type { Deps } from '@/lib/deps'
 import { addDays } from '@/lib/domain/day'
 import { daysOffOn } from '@/lib/domain/holiday'
 import { allow, type Actor } from '@/lib/domain/role'
-import { carriedADay, openingsAhead } from '@/lib/domain/round-going'
+import { openingsAhead } from '@/lib/domain/round-going'
 import { localDay } from '@/lib/domain/round-window'
 import { clockWords } from '@/lib/domain/stamp'
 import type { Going, RoundDay, RoundKind, Rounds } from '@/lib/schemas/rounds'
-import { windowOf } from './area-window'
+import { mostCarriedADay, windowOf } from './area-window'
 import { dayNames } from './day-names'
 import { expectedTexts, type Expected } from './expected-texts'
 import { settingsNow } from './settings-now'
@@ -49,13 +49,13 @@ export async function listRounds(deps: Deps, actor: Actor): Promise<Rounds> {
       ),
     }
   })
-  const carried = [...windows.values()].map((window) =>
-    carriedADay(window, settings.programme.textsPerMinute),
-  )
   return {
     days,
     texts: days.reduce((sum, { texts }) => sum + texts, 0),
-    carriesADay: Math.max(0, ...carried),
+    carriesADay: mostCarriedADay(
+      rows.map(({ area }) => area),
+      settings.programme.textsPerMinute,
+    ),
     textsPerMinute: settings.programme.textsPerMinute,
     cut,
   }

@@ -1,3 +1,4 @@
+import { setImmediate } from 'node:timers/promises'
 import { holdHousehold } from '@/db/queries/household'
 import { findKitFacts, type KitFacts } from '@/db/queries/kit-facts'
 import { findFirstPhone } from '@/db/queries/phone'
@@ -102,6 +103,8 @@ export async function planPrompts(deps: Deps): Promise<{ planned: number }> {
     if (!text) continue
     const perMinute = programme.textsPerMinute
     const sendAt = sendAfter({ now, window, spreadIndex, perMinute })
+    // The embedded database answers without giving way: whoever waits for the desk goes first.
+    await setImmediate()
     const done = await deps.store.transaction((tx) =>
       writePlan(tx, deps, { facts, text, sendAt, limit }),
     )

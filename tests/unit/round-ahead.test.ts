@@ -9,7 +9,8 @@ import { bothPlans, costOfTexts, partsOf, peakOf, totalOf, weeksOf } from '@/lib
 const kit: KitAhead = {
   sourceClass: 'cloudy',
   wetMonths: [6, 7],
-  lastWashOn: '2025-05-20',
+  washCountedFrom: '2025-05-14',
+  calendarWashOn: '2025-05-28',
   nextWashOn: '2025-05-28',
   nextFlowCheckOn: '2025-06-10',
   stages: [
@@ -76,6 +77,21 @@ describe('the plan ahead', () => {
     expect(daysWith(other, (day) => day.flowChecks)).toHaveLength(13)
   })
 
+  it('puts off no wash that the trend brought forward, and brings it further where the cycle does', () => {
+    const brought = { ...kit, calendarWashOn: '2025-06-20', nextWashOn: '2025-06-12' }
+    const first = (cloudy: number) => {
+      const wash = { ...washDefaults, days: { ...washDefaults.days, cloudy } }
+      const plan = planAhead({ kits: [brought], from, days: 62, cycles, whatIf: { wash } })
+      return daysWith(plan, (day) => day.washes)[0]
+    }
+    expect([14, 30, 10, 5].map(first)).toEqual([
+      '2025-06-12',
+      '2025-06-12',
+      '2025-06-12',
+      '2025-06-11',
+    ])
+  })
+
   it('adds up over kits, and finds the wave', () => {
     const kits = [kit, kit, { ...kit, stages: [] }]
     const many = planAhead({ kits, from, days: 10, cycles })
@@ -126,13 +142,15 @@ const anyKit: fc.Arbitrary<KitAhead> = fc
   .record({
     sourceClass: fc.constantFrom('clear', 'cloudy', 'very cloudy'),
     wetMonths: fc.constantFrom([], [6], [5, 6, 7, 8]),
-    lastWashOn: fc.integer({ min: -40, max: 0 }).map((ahead) => addDays(from, ahead)),
-    nextWashOn: day,
+    washCountedFrom: fc.integer({ min: -40, max: 0 }).map((ahead) => addDays(from, ahead)),
+    calendarWashOn: day,
+    broughtDays: fc.constantFrom(0, 0, 5),
     nextFlowCheckOn: day,
     fitted: fc.tuple(day, day, day),
   })
-  .map(({ fitted, ...rest }) => ({
+  .map(({ fitted, broughtDays, ...rest }) => ({
     ...rest,
+    nextWashOn: addDays(rest.calendarWashOn, -broughtDays),
     stages: fitted.map((fittedOn, index) => ({
       position: (index + 1) as 1 | 2 | 3,
       fittedOn: addDays(fittedOn, -100),
@@ -195,7 +213,12 @@ describe('any plan ahead', () => {
     const wash = { ...washDefaults, days: { clear: 60, cloudy: 28, 'very cloudy': 14 } }
     fc.assert(
       fc.property(anyKits, (kits) => {
-        const dry = kits.map((one) => ({ ...one, wetMonths: [], nextWashOn: from }))
+        const dry = kits.map((one) => ({
+          ...one,
+          wetMonths: [],
+          calendarWashOn: from,
+          nextWashOn: from,
+        }))
         const now = totalOf(planAhead({ kits: dry, from, days: 364, cycles })).washes
         const other = totalOf(planAhead({ kits: dry, from, days: 364, cycles, whatIf: { wash } }))
         expect(Math.abs(other.washes - now / 2)).toBeLessThanOrEqual(kits.length)
