@@ -131,7 +131,7 @@ describe('the plan ahead', () => {
 
   it('cares for a kit that no text reaches, without a text', () => {
     const silent = planAhead({ kits: [{ ...kit, texted: false }], from, days: 62, cycles })
-    expect(totalOf(silent)).toEqual({ ...totalOf(plan), ...{ texts: 0, asks: noAsks } })
+    expect(totalOf(silent)).toEqual({ ...totalOf(plan), texts: 0, asks: noAsks })
   })
 })
 
