@@ -13,7 +13,7 @@ export function WhatIfAnswered({ answer }: { answer: WhatIfAnswer }) {
       <p className="mt-1 max-w-reading text-sm">
         {changed.length === 0
           ? 'No cycle is other than it stands: both columns are today’s.'
-          : `${changed.join('; ')}.`}
+          : `${changed.join('. ')}.`}
       </p>
       {cut && (
         <p className="mt-2 font-semibold">
@@ -34,9 +34,9 @@ function Comparison({ answer: { today, other, currency } }: { answer: WhatIfAnsw
   const rows: readonly [string, (figures: WhatIfFigures) => number][] = [
     ['Texts', ({ texts }) => texts],
     ['Washes', ({ washes }) => washes],
-    ['Changes of cloth, one part each', change(0)],
-    ['Changes of carbon, one part each', change(1)],
-    ['Changes of fibre, one part each', change(2)],
+    ['Changes of cloth', change(0)],
+    ['Changes of carbon', change(1)],
+    ['Changes of fibre', change(2)],
     ['Flow checks', ({ flowChecks }) => flowChecks],
   ]
   return (
@@ -71,8 +71,7 @@ function Row({ name, today, other, decimals = 0 }: RowProps) {
   const words = (value: number) =>
     value.toLocaleString('en', { minimumFractionDigits: decimals, maximumFractionDigits: decimals })
   const more = other - today
-  const share =
-    today === 0 ? '' : ` (${signed((more / today) * 100, (value) => value.toFixed(0))} %)`
+  const isSame = words(Math.abs(more)) === words(0)
   return (
     <tr>
       <RowTh className="font-normal">{name}</RowTh>
@@ -80,8 +79,13 @@ function Row({ name, today, other, decimals = 0 }: RowProps) {
       <Td number className="font-medium">
         {words(other)}
       </Td>
-      <Td number className={words(more) === words(0) ? 'text-faint' : ''}>
-        {words(Math.abs(more)) === words(0) ? 'same' : `${signed(more, words)}${share}`}
+      <Td number className={isSame ? 'text-faint' : ''}>
+        {isSame ? 'same' : signed(more, words)}
+        {!isSame && today > 0 && (
+          <span className="block text-faint">
+            {signed((more / today) * 100, (value) => value.toFixed(0))} %
+          </span>
+        )}
       </Td>
     </tr>
   )
@@ -132,10 +136,10 @@ function Assumptions({ answer }: { answer: WhatIfAnswer }) {
     <div className="mt-3 grid max-w-reading gap-2 text-sm text-faint">
       <p>{carriedWords(answer)}</p>
       <p>
-        Taken for granted: all is done on the day it is due; what is overdue falls on the first day;
-        no nudges, no answers, no new hand-outs, no trouble. Days off and the weekly limit move a
-        text, they do not save it. {kits.toLocaleString('en')} {kits === 1 ? 'kit is' : 'kits are'}{' '}
-        in use
+        A change takes one part. Taken for granted: all is done on the day it is due; what is
+        overdue falls on the first day; no nudges, no answers, no new hand-outs, no trouble. Days
+        off and the weekly limit move a text, they do not save it. {kits.toLocaleString('en')}{' '}
+        {kits === 1 ? 'kit is' : 'kits are'} in use
         {unreached > 0
           ? `; ${unreached.toLocaleString('en')} of them no text reaches, so they count for washes and parts only`
           : ''}

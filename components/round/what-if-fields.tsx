@@ -14,7 +14,7 @@ const washes: Named = [
   ['washClear', 'Clear water'],
   ['washCloudy', 'Cloudy water'],
   ['washVeryCloudy', 'Very cloudy water'],
-  ['wetPercent', 'Left in a wet month, %'],
+  ['wetPercent', 'Wet month, %'],
 ]
 
 const changes: Named = [
@@ -40,19 +40,22 @@ export function WhatIfFields({ standing, wrong }: FieldsProps) {
     ))
   return (
     <>
-      <FieldGroup legend="Days between washes">
-        <div className="grid max-w-4xl grid-cols-2 items-end gap-x-5 gap-y-4 md:grid-cols-4">
+      <FieldGroup
+        legend="Days between washes"
+        hint="In a wet month only a share of the days is left."
+      >
+        <div className="grid max-w-4xl grid-cols-2 items-start gap-x-5 gap-y-4 md:grid-cols-4">
           {fields(washes)}
         </div>
       </FieldGroup>
       <FieldGroup legend="Months to a change" hint="Empty: as each kit model has it.">
-        <div className="grid max-w-4xl grid-cols-2 items-end gap-x-5 gap-y-4 md:grid-cols-4">
+        <div className="grid max-w-4xl grid-cols-2 items-start gap-x-5 gap-y-4 md:grid-cols-4">
           {fields(changes)}
         </div>
       </FieldGroup>
-      <div className="grid max-w-4xl grid-cols-2 items-end gap-x-5 gap-y-4 md:grid-cols-4">
+      <div className="grid max-w-4xl grid-cols-2 items-start gap-x-5 gap-y-4 md:grid-cols-4">
         <TextField
-          label="Days between flow checks"
+          label={<span className="text-sm">Days to a flow check</span>}
           name="flowCheckDays"
           inputMode="numeric"
           mono
@@ -60,7 +63,12 @@ export function WhatIfFields({ standing, wrong }: FieldsProps) {
           defaultValue={standing.flowCheckDays ?? ''}
           error={wrong('flowCheckDays')}
         />
-        <SelectField label="Look ahead" name="weeks" defaultValue="13" error={wrong('weeks')}>
+        <SelectField
+          label={<span className="text-sm">Look ahead</span>}
+          name="weeks"
+          defaultValue="13"
+          error={wrong('weeks')}
+        >
           {weeksAhead.map((weeks) => (
             <option key={weeks} value={weeks}>
               {weeks} weeks

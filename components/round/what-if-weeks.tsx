@@ -21,7 +21,7 @@ export function WhatIfWeeks({ answer: { byWeek } }: { answer: WhatIfAnswer }) {
         role="region"
         aria-label="Weeks, drawn"
         tabIndex={0}
-        className="mt-2 max-w-full overflow-x-auto"
+        className="mt-2 max-w-full overflow-x-auto px-4"
       >
         {(['today', 'other'] as const).map((which) => (
           <WeekRow key={which} which={which} weeks={byWeek} most={most} />
@@ -49,7 +49,12 @@ function WeekRow({ which, weeks, most }: WeekRowProps) {
   return (
     <div className="mt-3">
       <p className="text-sm">{rowNames[which]}</p>
-      <svg aria-hidden width="100%" height={foot + roomBelow} className="block min-w-[44rem]">
+      <svg
+        aria-hidden
+        width="100%"
+        height={foot + roomBelow}
+        className="block min-w-[44rem] overflow-visible"
+      >
         {weeks.map((week, index) => {
           const height = (week[which].texts / most) * rowHeight
           return (

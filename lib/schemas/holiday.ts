@@ -1,11 +1,16 @@
 import { z } from 'zod'
 import { endpoint } from './endpoint'
 
-const asLine = 'Write each line as 2026-12-25 Midwinter day.'
+/** Why a word is no day: the calendar has none, or it is written otherwise. */
+function noDay(given: unknown): string {
+  const word = String(given)
+  if (/^\d{4}-\d{2}-\d{2}$/.test(word)) return `There is no ${word}.`
+  return `“${word}” is not a day written as 2026-12-25.`
+}
 
 /** A day without prompts. */
 export const holidaySchema = z.object({
-  on: z.iso.date({ error: ({ input }) => `“${String(input)}” is no day. ${asLine}` }),
+  on: z.iso.date({ error: ({ input }) => noDay(input) }),
   name: z
     .string()
     .trim()

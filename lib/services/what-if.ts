@@ -72,7 +72,10 @@ function figuresOf(plan: readonly DayAhead[], price: Price): WhatIfFigures {
     changes: [changes[1], changes[2], changes[3]],
     flowChecks: total.flowChecks,
     cost: costOfTexts(total, price),
-    busiest: busiest && { day: dayNames(busiest.on).long, texts: busiest.texts },
+    busiest: busiest && {
+      day: `${dayNames(busiest.on).weekday} ${shortDayWords(busiest.on)}`,
+      texts: busiest.texts,
+    },
   }
 }
 

@@ -153,10 +153,12 @@ describe('an area', () => {
   })
 
   it('says of a bad line which it is and how to write it', () => {
-    const holidays = [holidayOfLine('25.12.2026 Midwinter day')]
+    const holidays = ['25.12.2026 Midwinter day', '2026-02-30', 'Feast'].map(holidayOfLine)
     const result = areaInputSchema.safeParse({ ...areaInput, depotId: 'x', holidays })
     expect(result.error?.issues.map(({ message }) => message)).toEqual([
-      '“25.12.2026” is no day. Write each line as 2026-12-25 Midwinter day.',
+      '“25.12.2026” is not a day written as 2026-12-25.',
+      'There is no 2026-02-30.',
+      '“Feast” is not a day written as 2026-12-25.',
     ])
   })
 })
