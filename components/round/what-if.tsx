@@ -27,7 +27,10 @@ export function WhatIf({ standing }: { standing: CycleLengths }) {
   })
   return (
     <section aria-labelledby="what-if" className="mt-14">
-      <h2 id="what-if" className="border-b border-ink pb-1.5 font-title text-lg font-semibold">
+      <h2
+        id="what-if"
+        className="scroll-mt-4 border-b border-ink pb-1.5 font-title text-lg font-semibold"
+      >
         What if
       </h2>
       <p className="mt-1 max-w-reading text-sm text-faint">

@@ -17,7 +17,15 @@ export default async function RoundsPage() {
   return (
     <WideSheet
       title="Rounds"
-      lead="What goes out in the next fourteen days, by the day and hour of each household’s own area."
+      lead={
+        <>
+          What goes out in the next fourteen days, by the day and hour of each household’s own area.{' '}
+          <a href="#what-if" className="plain-link">
+            Try other cycles
+          </a>
+          .
+        </>
+      }
     >
       <RoundsView initial={rounds} />
       <WhatIf standing={standing} />
