@@ -2,6 +2,7 @@
 
 import Link from 'next/link'
 import { usePathname } from 'next/navigation'
+import { useEffect, useRef } from 'react'
 
 export type Word = {
   name: string
@@ -14,13 +15,26 @@ function isUnder(pathname: string, href: string): boolean {
   return pathname === href || pathname.startsWith(`${href}/`)
 }
 
-/** The words of the head; on a phone one row of their own that scrolls sideways. */
+/** Brings the word of this page into the row's middle, where the row is wider than the screen. */
+function useHereInView(pathname: string) {
+  const row = useRef<HTMLElement>(null)
+  useEffect(() => {
+    const here = row.current?.querySelector<HTMLElement>('[aria-current]')
+    if (!row.current || !here) return
+    row.current.scrollLeft = here.offsetLeft - (row.current.clientWidth - here.offsetWidth) / 2
+  }, [pathname])
+  return row
+}
+
+/** The words of the head; on a phone one row of their own that scrolls sideways and fades where it goes on. */
 export function HeadWords({ words }: { words: readonly Word[] }) {
   const pathname = usePathname()
+  const row = useHereInView(pathname)
   return (
     <nav
+      ref={row}
       aria-label="Pages"
-      className="flex gap-x-5.5 self-end max-lg:order-last max-lg:-mr-edge max-lg:w-full max-lg:[scrollbar-width:none] max-lg:overflow-x-auto max-lg:pl-[calc(var(--lead-x)-var(--fall-x)+0.75rem)]"
+      className="relative flex gap-x-5.5 self-end max-lg:order-last max-lg:-mr-edge max-lg:w-full max-lg:[scrollbar-width:none] max-lg:overflow-x-auto max-lg:[mask-image:linear-gradient(to_right,transparent,black_1.5rem,black_calc(100%-2.5rem),transparent)] max-lg:pl-[calc(var(--lead-x)-var(--fall-x)+0.75rem)]"
     >
       {words.map((word) => {
         const here = [word.href, ...(word.also ?? [])].some((href) => isUnder(pathname, href))
