@@ -33,7 +33,7 @@ const one: Record<string, Partial<HarmInput>> = {
   'no water': { trouble: 'no flow' },
   slow: {},
   'slow, not timed': { litresPerHour: null },
-  'slow, not in a day': { need: 'short' },
+  'slow, not in a day': { need: 'short', hours: 25 },
   'slow but enough': { need: 'enough' },
   unread: { trouble: 'unread' },
   silent: { trouble: 'silent', openedAt: now - 3 * 24 * hour },
