@@ -22,7 +22,17 @@ export type Answer = { kind: AnswerKind; sure: number }
 export function findAnswer(sense: Sense): Answer | null {
   const question = ask(sense)
   if (question && (isOpenedByQuestion(sense) || asksOfPlan(sense))) return question
-  const rules = [needPart, notYet, moved, () => question, done, keywords, thanksOnly, yesNo]
+  const rules = [
+    soundParts,
+    needPart,
+    notYet,
+    moved,
+    () => question,
+    done,
+    keywords,
+    thanksOnly,
+    yesNo,
+  ]
   for (const rule of rules) {
     const answer = rule(sense)
     if (answer) return answer
@@ -45,9 +55,17 @@ function asksOfPlan(sense: Sense): boolean {
 function needPart(sense: Sense): Answer | null {
   const things = [...said(sense, 'piece', 'cloth', 'container'), ...denied(sense, 'piece', 'cloth')]
   const all = [...things, ...said(sense, 'filter')]
-  const wants = said(sense, 'need', 'lack', 'lost').filter((mark) =>
-    areBeside(sense, [mark], all, 5),
-  )
+  const pieces = things.filter((mark) => mark.concept !== 'container')
+  const wants = [
+    ...said(sense, 'need', 'lack').filter((mark) => areBeside(sense, [mark], all, 5)),
+    // "The syringe? Nowhere. I want one."
+    ...(said(sense, 'tool').length > 0 ? said(sense, 'need') : []),
+    // Who has lost the bottle cannot measure; no part is owed for it.
+    ...said(sense, 'lost').filter((mark) =>
+      areBeside(sense, [mark], sense.asked === 'flow' ? pieces : all, 5),
+    ),
+    ...said(sense, 'worn').filter((mark) => areBeside(sense, [mark], pieces, 4)),
+  ]
   if (wants.length > 0) {
     const lacksFilter = things.length === 0 && !isSaid(sense, 'need', 'lost')
     return { kind: 'need-part', sure: lacksFilter ? 0.5 : sureOf(0.8, wants) }
@@ -85,7 +103,10 @@ function timeless(sense: Sense): Mark[] {
 }
 
 function moved(sense: Sense): Answer | null {
-  const marks = said(sense, 'moved')
+  const given = said(sense, 'gave').filter((mark) =>
+    areBeside(sense, [mark], said(sense, 'filter', 'person', 'child'), 4),
+  )
+  const marks = [...said(sense, 'moved'), ...given]
   return marks.length > 0 ? { kind: 'moved', sure: sureOf(0.85, marks) } : null
 }
 
@@ -141,6 +162,13 @@ const dangers: Concept[] = [
   'pain',
   'blood',
 ]
+
+/** "I looked, no crack": the answer to what a step asks, whatever was done for it. */
+function soundParts(sense: Sense): Answer | null {
+  if (sense.asked !== 'step' || isSaid(sense, 'better', 'ask', 'yes')) return null
+  const safe = denied(sense, 'broken', 'leak', 'fall', 'frozen')
+  return safe.length > 0 ? { kind: 'no', sure: sureOf(0.75, safe) } : null
+}
 
 function yesNo(sense: Sense): Answer | null {
   const yes = said(sense, 'yes')

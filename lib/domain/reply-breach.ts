@@ -1,6 +1,7 @@
 import type { Danger } from './reply-danger-kind'
 import type { Mark } from './reply-marks'
 import { areBeside, gapBetween, isSaid, said, sureOf, type Sense } from './reply-sense'
+import type { Concept } from './reply-words/concept'
 
 /** A filter that must not be used: broken, leaking, fallen, frozen, or running too fast. */
 export function findBreach(sense: Sense): Danger | null {
@@ -15,9 +16,12 @@ export function findBreach(sense: Sense): Danger | null {
   ]
   const falls = said(sense, 'fall').filter((mark) => !isFallOfFlow(sense, mark))
   const marks = [
-    ...said(sense, 'broken', 'leak', 'frozen', 'tooFast'),
+    ...said(sense, 'broken', 'leak').filter((mark) => !isElsewhere(sense, mark)),
+    ...said(sense, 'tooFast', 'frozen'),
+    // "The upper one overflows, the lower one is empty": it does not run.
+    ...(isSaid(sense, 'none') ? [] : said(sense, 'overflow')),
     ...oozing,
-    ...falls,
+    ...falls.filter((mark) => !isElsewhere(sense, mark)),
     ...rushes(sense),
   ]
   if (marks.length === 0) return null
@@ -46,10 +50,32 @@ export function isFallOfFlow(sense: Sense, fall: Mark): boolean {
   return subject?.concept === 'water' || subject?.concept === 'flow'
 }
 
-/** "Very fast" suggests a breach, unless it is said with relief. */
+const own: Concept[] = ['filter', 'piece', 'container', 'cloth', 'tool']
+const foreign: Concept[] = ['elsewhere', 'source', 'phone']
+
+/** "The tubewell is broken", "my phone fell": said of another thing than the filter. */
+function isElsewhere(sense: Sense, mark: Mark): boolean {
+  const things = said(sense, ...own, ...foreign)
+    .filter((thing) => thing.from !== mark.from && gapBetween(sense, thing, mark) <= 3)
+    .sort((one, other) => nearness(sense, one, mark) - nearness(sense, other, mark))
+  const [nearest] = things
+  const names = things.filter((thing) => thing.from === nearest?.from).map((one) => one.concept)
+  return names.some((name) => foreign.includes(name)) && !names.includes('container')
+}
+
+/** What stands before a verb is rather its subject than what follows. */
+function nearness(sense: Sense, thing: Mark, mark: Mark): number {
+  return gapBetween(sense, thing, mark) + (thing.from < mark.from ? 0 : 1.5)
+}
+
+/** "Very fast" or "suddenly fast" suggests a breach, unless it is said with relief. */
 function rushes(sense: Sense): Mark[] {
   if (isSaid(sense, 'good', 'better')) return []
-  return said(sense, 'fast').filter((mark) =>
-    said(sense, 'very').some((very) => very.to === mark.from || mark.to === very.from),
-  )
+  const isInNoTime = sense.figures.spans.some((span) => span.minutes > 0 && span.minutes <= 1)
+  return [
+    ...said(sense, 'fast').filter((mark) =>
+      said(sense, 'very', 'sudden').some((word) => gapBetween(sense, word, mark) === 0),
+    ),
+    ...(isInNoTime || isSaid(sense, 'fast') ? said(sense, 'sudden') : []),
+  ]
 }

@@ -88,9 +88,9 @@ export function denyMarks(marks: readonly Mark[], tokens: readonly Token[]): Mar
 }
 
 function denyBy(mark: Mark, field: Field): void {
-  if (mark.concept === 'not') denyForward(mark, field, forwardReach)
+  if (mark.concept === 'not' && !denyForward(mark, field, forwardReach)) denyFinal(mark, field)
   if (mark.concept === 'notNext') denyForward(mark, field, 1)
-  if (mark.concept === 'notBack') denyBackward(mark, field, backwardReach)
+  if (mark.concept === 'notBack' && !isPlea(mark, field)) denyBackward(mark, field, backwardReach)
   if (mark.concept === 'notPlus') denyPlus(mark, field)
   if (mark.concept === 'notAround' && (isOfThing(mark, field) || !denyBackward(mark, field, 1))) {
     denyForward(mark, field, forwardReach)
@@ -102,6 +102,28 @@ function denyBy(mark: Mark, field: Field): void {
   // "No hay fuga": what one has not is denied too; Bengali says it after the thing.
   const isAlsoNot = field.marks.some((other) => other.concept === 'not' && other.from === mark.from)
   if (mark.concept === 'lack' && mark.language !== 'bn' && !isAlsoNot) denyForward(mark, field, 3)
+}
+
+/** "Limpio está, rápido no": at the end of a clause a bare denial is of what stands just before. */
+function denyFinal(denial: Mark, field: Field): void {
+  const next = field.tokens[denial.to]
+  if (next !== undefined && next.kind !== 'break') return
+  for (const mark of field.marks) {
+    if (mark.to === denial.from && ['fast', 'good', 'better', 'clean'].includes(mark.concept))
+      mark.denied = true
+  }
+}
+
+/** "Ekta pathan na": after a bare imperative Bengali "na" pleads, it does not deny. */
+const pleas: ReadonlySet<string> = new Set(
+  'den din dan pathan anen janan bolen bolun asen ashen দেন দিন পাঠান আনেন জানান বলেন বলুন আসেন'.split(
+    ' ',
+  ),
+)
+
+function isPlea(denial: Mark, { tokens }: Field): boolean {
+  const before = tokens[denial.from - 1]?.text ?? ''
+  return pleas.has(before) && !tokens.some((token) => ['ar', 'aar', 'r', 'আর'].includes(token.text))
 }
 
 /** After "plus" these compare ("plus lent") unless "ne" stands before it. */

@@ -1,3 +1,4 @@
+import { minutesBetweenClocks } from './reply-clock'
 import type { Mark } from './reply-marks'
 import { isNamed, isSaid, said, type Sense } from './reply-sense'
 
@@ -5,12 +6,17 @@ import { isNamed, isSaid, said, type Sense } from './reply-sense'
 const longestFillMinutes = 720
 
 type Figure = { minutes: number; hasUnit: boolean }
+type Place = { from: number; to: number }
 
 /** The bottle-fill time a text gives, if it gives one. */
 export function figureOf(sense: Sense): Figure | null {
-  if (isSaid(sense, 'future', 'notYet') || isPastTime(sense) || promised(sense).length > 0)
-    return null
-  const spans = sense.figures.spans.filter((span) => span.minutes > 0)
+  const clock = minutesBetweenClocks(sense)
+  if (clock !== null) return { minutes: clock, hasUnit: true }
+  if (isPutOff(sense) || isPastTime(sense) || promised(sense).length > 0) return null
+  const spans = presentOf(
+    sense,
+    sense.figures.spans.filter((span) => span.minutes > 0),
+  )
   const last = spans.at(-1)
   if (last === undefined) return bareFigure(sense)
   // "12 con 30 segundos": minutes stand bare before their seconds.
@@ -21,6 +27,14 @@ export function figureOf(sense: Sense): Figure | null {
   const low = sense.figures.bare.find((bare) => isRangeBetween(sense, bare.to, last.from))
   const isRange = low && low.value > 0 && low.value < last.minutes && low.value >= last.minutes / 3
   return { minutes: isRange ? (low.value + last.minutes) / 2 : last.minutes, hasUnit: true }
+}
+
+/** A plan puts the answer off, unless a figure was asked for and stands before the plan. */
+function isPutOff(sense: Sense): boolean {
+  const plans = said(sense, 'future', 'notYet')
+  if (sense.asked !== 'flow') return plans.length > 0
+  const first = Math.min(...sense.figures.spans.map((span) => span.from))
+  return plans.some((plan) => plan.from < first)
 }
 
 const secondsJoints = new Set(['con', 'y', 'and', 'et'])
@@ -37,6 +51,29 @@ function isRangeBetween(sense: Sense, from: number, to: number): boolean {
   )
 }
 
+/** "It was 4, now it is 9": of several figures those that are not of the past. */
+function presentOf<Figured extends Place>(sense: Sense, figures: readonly Figured[]): Figured[] {
+  const times = said(sense, 'past', 'now')
+  if (figures.length < 2 || times.length === 0) return [...figures]
+  const timed = figures.map((figure) => ({ figure, time: timeOf(sense, figure, times) }))
+  const present = timed.filter(({ time }) => time === 'now')
+  const notPast = timed.filter(({ time }) => time !== 'past')
+  const kept = present.length > 0 ? present : notPast
+  return (kept.length > 0 ? kept : timed).map(({ figure }) => figure)
+}
+
+/** Past or now, by the nearest word of time; the one before counts where two are as near. */
+function timeOf(sense: Sense, figure: Place, times: readonly Mark[]): 'past' | 'now' | null {
+  const distanceTo = (time: Mark): number => {
+    const isBefore = time.to <= figure.from
+    const [from, to] = isBefore ? [time.to, figure.from] : [figure.to, time.from]
+    const breaks = sense.tokens.slice(from, to).filter((token) => token.kind === 'break').length
+    return to - from + breaks * 3 + (isBefore ? 0 : 0.5)
+  }
+  const [nearest] = [...times].sort((one, other) => distanceTo(one) - distanceTo(other))
+  return nearest === undefined || nearest.concept === 'now' ? 'now' : 'past'
+}
+
 /** "10 minutes ago", "hace 10 minutos". */
 function isPastTime(sense: Sense): boolean {
   return said(sense, 'ago').some((ago) =>
@@ -45,7 +82,8 @@ function isPastTime(sense: Sense): boolean {
 }
 
 function bareFigure(sense: Sense): Figure | null {
-  const values = sense.figures.bare.map((bare) => bare.value).filter((value) => value > 0)
+  const bare = sense.figures.bare.filter(({ value }) => value > 0)
+  const values = presentOf(sense, bare).map(({ value }) => value)
   const [one, other] = values
   if (one === undefined || values.length > 2 || one > longestFillMinutes) return null
   if (other === undefined) return { minutes: one, hasUnit: false }

@@ -50,7 +50,7 @@ function readFigureAt(tokens: readonly Token[], from: number, { order, figures }
       )
     }
   }
-  const amount = readAmount(tokens, from, order)
+  const amount = readAmount(tokens, from, order) ?? impliedOne(tokens, from, order)
   if (amount === null) return from + first.size
   const unit = pieceAt(tokens, amount.to, order)
   if (unit.kind === 'unit' && unit.unit === 'other')
@@ -60,6 +60,22 @@ function readFigureAt(tokens: readonly Token[], from: number, { order, figures }
   const isAlone = tokens.length === 1 && amount.value >= 1
   if (!amount.weak || isAlone) figures.bare.push({ value: amount.value, from, to: amount.to })
   return amount.to
+}
+
+/** "A whole hour": what stands between a number and its unit without changing it. */
+const wholeWords = new Set(
+  'whole full good entire solid long entera entero larga toute bonne pleine puro pura পুরো পুরা'.split(
+    ' ',
+  ),
+)
+
+/** "Hour and a quarter", "whole hour": the one is left out. */
+function impliedOne(tokens: readonly Token[], from: number, order: Language[]): Amount | null {
+  const unit = pieceAt(tokens, from, order)
+  if (unit.kind !== 'unit' || unit.unit !== 'hour') return null
+  const isWhole = wholeWords.has(tokens[from - 1]?.text ?? '')
+  const isMore = pieceAt(tokens, from + unit.size, order).kind === 'half'
+  return isWhole || isMore ? { value: 1, weak: false, to: from } : null
 }
 
 /** "One cup an hour" is a rate, not the time of a bottle. */

@@ -12,6 +12,8 @@ export function findIllness(sense: Sense): Danger | null {
     ...beside(sense, ['pain'], ['belly', 'child'], 5),
     ...beside(sense, ['belly'], ['problem', 'bad', 'long'], 4),
     ...beside(sense, ['stool'], ['water', 'long'], 4),
+    ...beside(sense, ['body'], ['odd', 'pain', 'bad', 'frail', 'dirty'], 3),
+    ...(isNamed(sense, 'wrongNumber') ? [] : said(sense, 'care')),
     ...poorlyMarks(sense),
   ]
   if (ills.length > 0) return { kind: 'unwell', sure: sureOf(0.9, ills) }

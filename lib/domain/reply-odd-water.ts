@@ -5,6 +5,7 @@ import {
   denied,
   gapBetween,
   isNamed,
+  isSaid,
   said,
   sureOf,
   type Sense,
@@ -20,8 +21,10 @@ export function findOddWater(sense: Sense): Danger | null {
       !goods.some((good) => gapBetween(sense, mark, good) <= 3 && !areParted(sense, mark, good)),
   )
   const things = said(sense, 'cloth', 'filter', 'piece', 'container', 'source')
+  const isAsking = isSaid(sense, 'ask') && sense.asked !== 'none'
   const coloured = said(sense, 'odd').filter(
-    (mark) => !areBeside(sense, [mark], things, 8) || areBeside(sense, [mark], water, 4),
+    (mark) =>
+      areBeside(sense, [mark], water, 4) || (!isAsking && !areBeside(sense, [mark], things, 8)),
   )
   const dirty = said(sense, 'dirty').filter((mark) => areBeside(sense, [mark], water, 3))
   const bad = said(sense, 'bad').filter(
@@ -36,7 +39,17 @@ export function findOddWater(sense: Sense): Danger | null {
       (flow) => flow.to <= mark.from && gapBetween(sense, flow, mark) <= 2,
     ),
   )
-  const notGood = [...denied(sense, 'clean'), ...unclear]
-  const marks = [...strong, ...smells, ...coloured, ...bad, ...dirty, ...notGood]
+  // "No clean water to wash it with" is why it is not done yet.
+  const isLackOnly = isSaid(sense, 'notYet')
+  const notGood = [...(isLackOnly ? [] : denied(sense, 'clean')), ...unclear]
+  const marks = [
+    ...strong,
+    ...said(sense, 'creature'),
+    ...smells,
+    ...coloured,
+    ...bad,
+    ...dirty,
+    ...notGood,
+  ]
   return marks.length > 0 ? { kind: 'odd-water', sure: sureOf(0.88, marks) } : null
 }

@@ -27,16 +27,17 @@ export function optOutSureness(sense: Sense): number {
   const asks = said(sense, 'stopAsk')
   if (asks.length > 0 && !isSaid(sense, 'if')) return sureOf(0.9, asks)
   if (asks.length > 0) return 0.5
+  // "I did not see your message" refuses nothing.
+  const isUnread = isNamed(sense, 'receive', 'see')
   const refused = denied(sense, 'texts')
-  if (refused.length > 0 && !isNamed(sense, 'receive') && !isSaid(sense, 'ask')) {
-    return sureOf(0.85, refused)
-  }
+  if (refused.length > 0 && !isUnread && !isSaid(sense, 'ask')) return sureOf(0.85, refused)
   const ends = said(sense, 'end').filter((mark) => mark.likeness !== 'guessed')
   if (areBeside(sense, ends, said(sense, 'texts', 'phone'), 3) && !isSaid(sense, 'ask')) return 0.85
   if (isUnwanted(sense)) return 0.8
   const stops = said(sense, 'stopWord').filter((mark) => mark.likeness !== 'guessed')
   if (stops.length > 0 && areBeside(sense, stops, said(sense, 'texts'), 3))
-    return sureOf(0.9, stops)
+    // "Hold the reminders, first help me: no water": a person reads what is to stop.
+    return isSaid(sense, 'helpWord', 'dry', 'slow') ? 0.5 : sureOf(0.9, stops)
   if (stops.length > 0 && isBareStop(sense)) return sureOf(0.9, stops)
   if (isStopOfSomethingStrange(sense)) return 0.7
   return isMistypedStop(sense) ? 0.7 : 0
@@ -58,7 +59,11 @@ function hasBareSentence(text: string): boolean {
 /** "I don't want ... messages": the wish is denied, the messages stand beside it. */
 function isUnwanted(sense: Sense): boolean {
   const wishes = denied(sense, 'need')
-  return areBeside(sense, wishes, said(sense, 'texts'), 5) && !isSaid(sense, 'ask')
+  // "You may send one": of a part, not of a text.
+  const texts = said(sense, 'texts').filter(
+    (text) => !sense.marks.some((mark) => mark.concept === 'need' && mark.from === text.from),
+  )
+  return areBeside(sense, wishes, texts, 5) && !isSaid(sense, 'ask')
 }
 
 /** "Please stop", "basta ya": nothing is said but the stop and good manners. */

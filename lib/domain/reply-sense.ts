@@ -5,6 +5,7 @@ import { readFigures, type Figures } from './reply-figures'
 import { partJoinedDenials } from './reply-joined-denial'
 import { readingWith } from './reply-lexicon'
 import { markTokens, type Mark } from './reply-marks'
+import { dropResolved } from './reply-resolved'
 import { tokenise, type Token } from './reply-tokens'
 import type { Concept } from './reply-words/concept'
 
@@ -46,7 +47,7 @@ function findSense(text: string, language: Language, asked: Asked): Sense {
     text,
     asked,
     tokens,
-    marks: denyMarks(spoken, tokens),
+    marks: dropResolved(denyMarks(spoken, tokens), tokens),
     figures,
     unknownAt: knownWords.flatMap((known, at) => (known ? [] : [at])),
     unknownWords: knownWords.filter((known) => !known).length,

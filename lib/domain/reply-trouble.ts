@@ -15,16 +15,18 @@ import {
 /** Sureness that no water comes at all. */
 export function noFlowSureness(sense: Sense): number {
   const water = said(sense, 'water', 'flow', 'fill', 'container')
-  const dry = denied(sense, 'water').concat(
-    denied(sense, 'flow', 'fill').filter((mark) => !isQualified(sense, mark)),
-  )
+  const dry = denied(sense, 'water', 'flow', 'fill').filter((mark) => !isQualified(sense, mark))
   const idle = denied(sense, 'fall').filter((mark) =>
     areBeside(sense, [mark], said(sense, 'outlet'), 5),
   )
   const none = said(sense, 'none').filter(
     (mark) =>
-      areBeside(sense, [mark], [...water, ...said(sense, 'outlet')], 4) ||
+      areBeside(sense, [mark], [...water, ...said(sense, 'outlet', 'edge')], 4) ||
       areBeside(sense, [mark], said(sense, 'fill'), 8),
+  )
+  // French water "falls": "rien qui tombe".
+  const falling = said(sense, 'fall').filter((mark) =>
+    areBeside(sense, [mark], said(sense, 'none'), 2),
   )
   const lacking = said(sense, 'lack').filter((mark) =>
     areBeside(sense, [mark], said(sense, 'water'), 3),
@@ -38,8 +40,12 @@ export function noFlowSureness(sense: Sense): number {
   // "0 water".
   const isZero = sense.tokens.some((token) => token.kind === 'number' && token.value === 0)
   if (isZero && water.length > 0 && sense.words <= 4) return 0.8
-  const strong = [...dry, ...none, ...idle, ...lacking, ...still, ...said(sense, 'blocked', 'dry')]
+  const strong = [
+    ...[...dry, ...none, ...falling, ...idle, ...lacking],
+    ...[...still, ...said(sense, 'blocked', 'dry')],
+  ].filter((mark) => !isAlmost(sense, mark))
   if (strong.length > 0) return sureOf(0.85, strong)
+  if (hasBareNothing(sense)) return 0.75
   if (!isSaid(sense, 'none') || isNamed(sense, 'done', 'wash', 'change', 'notYet', 'ask')) return 0
   if (isSaid(sense, 'no') && !isSaid(sense, 'water', 'flow')) return 0
   // "Nothing broken".
@@ -49,8 +55,29 @@ export function noFlowSureness(sense: Sense): number {
   return sense.words >= 2 && sense.words <= 4 && sense.unknownWords <= 1 ? 0.62 : 0
 }
 
+/** "Almost no water": little, not none. */
+function isAlmost(sense: Sense, mark: Mark): boolean {
+  return said(sense, 'almost').some((almost) => gapBetween(sense, almost, mark) <= 2)
+}
+
+/** "Opened the tap as you said. Nothing": a sentence by itself after what was done. */
+function hasBareNothing(sense: Sense): boolean {
+  const isEdge = (at: number): boolean => (sense.tokens[at]?.kind ?? 'break') === 'break'
+  return (
+    ['wash', 'change', 'step'].includes(sense.asked) &&
+    said(sense, 'none').some(
+      (none) => none.from > 0 && isEdge(none.from - 1) && isEdge(none.to) && none.from > 2,
+    )
+  )
+}
+
 /** "Not flowing well" is slow: the denial is of the manner, not of the flow. */
 function isQualified(sense: Sense, flow: Mark): boolean {
+  if (flow.concept === 'water') {
+    return said(sense, 'very', 'little').some(
+      (mark) => mark.to <= flow.from && flow.from - mark.to <= 1,
+    )
+  }
   return said(sense, 'good', 'fast', 'better', 'little', 'very', 'same', 'long', 'slow').some(
     // Bengali puts the manner before the verb.
     (mark) =>
@@ -68,13 +95,28 @@ export function slowSureness(sense: Sense): number {
   const butLittle = said(sense, 'little').filter((mark) =>
     said(sense, 'but').some((but) => but.to <= mark.from && gapBetween(sense, but, mark) <= 2),
   )
-  const weakly = denied(sense, 'flow', 'fill').filter((mark) => isQualified(sense, mark))
+  const weakly = denied(sense, 'water', 'flow', 'fill').filter((mark) => isQualified(sense, mark))
+  const scarcely = [
+    ...denied(sense, 'water', 'flow', 'fill'),
+    ...said(sense, 'dry', 'none'),
+  ].filter((mark) => isAlmost(sense, mark))
+  // "Explain slowly".
+  const slow = said(sense, 'slow').filter(
+    (mark) => !areBeside(sense, [mark], said(sense, 'explain'), 1) || water.length > 0,
+  )
+  // "A little better": not yet well.
+  const hardlyBetter = said(sense, 'better').filter((mark) =>
+    said(sense, 'little').some((few) => gapBetween(sense, few, mark) === 0),
+  )
   const badly = [...said(sense, 'bad'), ...denied(sense, 'good')].filter((mark) =>
     areBeside(sense, [mark], said(sense, 'flow', 'current'), 3),
   )
   const falls = said(sense, 'fall').filter((mark) => isFallOfFlow(sense, mark))
   const marks = [
-    ...said(sense, 'slow', 'drip', 'long'),
+    ...slow,
+    ...scarcely,
+    ...hardlyBetter,
+    ...said(sense, 'drip', 'long'),
     ...denied(sense, 'fast', 'better'),
     ...little,
     ...butLittle,

@@ -9,6 +9,9 @@ export function wrongNumberSureness(sense: Sense): number {
     return sureOf(0.8, mistaken)
   }
   if (deniesName(sense) || deniesPhone(sense) || namesOwner(sense)) return 0.7
+  // "Who are you? I have no filter": alone either may be of a household.
+  const hasNone = areBeside(sense, said(sense, 'lack', 'not'), said(sense, 'filter'), 2)
+  if (isSaid(sense, 'who') && hasNone) return 0.75
   // "Who is this?" may be a forgotten programme or a stranger: a person answers.
   return isSaid(sense, 'who') ? 0.5 : 0
 }

@@ -50,6 +50,8 @@ export const concepts = [
   'belly',
   'all', // everything
   'source', // the river, the well
+  'elsewhere', // what may break or fall without harm to the water: a phone, a bus, a roof
+  'body', // skin, eyes, head: coloured or hurting it is illness
   // what the water does
   'flow',
   'fill',
@@ -65,20 +67,27 @@ export const concepts = [
   'bad',
   'better',
   'same', // no change
+  'almost', // before a denial: little, not nothing
   // danger
   'broken',
   'leak',
   'fall', // fell or dropped: the filter is broken, the flow is slow
   'frozen',
+  'overflow', // over the brim: with nothing below it only does not run
+  'sudden',
   'mended',
   'odd', // colour, bits
+  'creature', // what lives or grows in the water: odd whatever thing is named beside it
   'oddSmell',
   'smell',
   'taste',
   'dirty', // of water: odd; of a filter: only in want of a wash
   'clean',
   'fuel',
+  'substance', // soap, bleach, salt: odd where the water tastes of it, not where one asks to use it
   'ill',
+  'care', // hospital, medicine: somebody is ill, unless a stranger says where we have rung
+  'recovered',
   'frail', // weak: of a person ill, of the water slow
   'pain',
   'blood',
@@ -102,7 +111,10 @@ export const concepts = [
   'need',
   'lack', // "I have no"
   'lost',
+  'worn', // of a part: wanted
+  'gave', // gave, sold, left behind: with the filter they have it no more
   'ask',
+  'explain', // "speak slowly": the telling is slow, not the water
   'where', // also "can you": asks for a thing as often as about it
   'thanks',
   'yes',

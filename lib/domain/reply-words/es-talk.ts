@@ -10,8 +10,11 @@ export const esTalk: LanguagePack['concepts'] = {
   or: 'o, ni, u',
   if: 'si se, si es que, en caso, si acaso, y si, cuando se, que pasa si, si llega, por si',
   future: `voy a, vamos a, va a, lo voy, la voy, lo hare, la hare, lavare, limpiare, cambiare, lo lavare, lo cambiare, pienso, hare, haremos, lavaremos, lo lavo, lo cambio, lo limpio, lo vamos, quiero lavar, tengo que lavar, tengo que, tenemos que, hay que lavar, ahorita lo, ahora lo lavo, ya voy`,
-  past: 'era, antes, estaba, estuvo, salia, ayer, la semana pasada, al principio, venia',
-  now: 'ahora, ya, hoy, ahorita, orita, por fin, al fin, haora, aora, aorita',
+  past: `era, antes, estaba, estuvo, salia, ayer, la semana pasada, al principio, venia, antes era,
+    antes eran, eran, fue, hace un mes, el mes pasado, la vez pasada, la otra vez, al inicio,
+    el ano pasado, solia, tardaba, llenaba, cuando era nuevo, anteriormente`,
+  now: `ahora, ya, hoy, ahorita, orita, por fin, al fin, haora, aora, aorita, actualmente, hoy dia,
+    hoy en dia, horita, al momento, estos dias`,
   ago: `hace, desde hace, hace como, desde la manana, desde ayer, desde hoy, desde temprano`,
   still:
     'todavia, aun, sigue, siguen, sigo, seguimos, todabia, toavia, aunque lave, aunque lo lave, continua',
@@ -117,4 +120,6 @@ export const esTalk: LanguagePack['concepts'] = {
     el sabado, el viernes, el martes, el jueves, fin de semana, el fin de semana,
     en la tardecita, tardecita`,
   time: `tiempo, tiempito, chance`,
+  explain: `explica*, expliq*, hable, hablen, habla, repita, repitan, repite, digame, diganme, ensene*,
+    escriba, escriban`,
 }
