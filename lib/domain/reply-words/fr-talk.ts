@@ -194,7 +194,7 @@ export const frTalk: LanguagePack['concepts'] = {
     pas mal de, de mal a, du mal a comprendre, du mal a lire, a la main, tissu blanc, tissu noir,
     chiffon blanc, fil blanc, robinet rouge, robinet bleu, embout rouge, embout bleu, embout noir,
     partie bleue, partie noire, partie blanche, cote bleu, cote noir, couvercle blanc,
-    couvercle bleu, couvercle rouge`,
+    couvercle bleu, couvercle rouge, d accord avec`,
   within: `dans, d ici`,
   and: `et`,
   see: `vois, voit, voyons, vu, voir, remarque, trouve`,
