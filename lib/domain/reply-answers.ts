@@ -21,7 +21,8 @@ export type Answer = { kind: AnswerKind; sure: number }
 
 export function findAnswer(sense: Sense): Answer | null {
   const question = ask(sense)
-  if (question && (isOpenedByQuestion(sense) || asksOfPlan(sense))) return question
+  const isOpen = isOpenedByQuestion(sense) || asksOfPlan(sense) || isPlainQuestion(sense)
+  if (question && isOpen) return question
   const rules = [
     soundParts,
     needPart,
@@ -46,6 +47,14 @@ function isOpenedByQuestion(sense: Sense): boolean {
   return sense.text.includes('?') ? marks.length > 0 : marks.some((mark) => mark.from === 0)
 }
 
+/** "I would like to know whether": a wording that only asks. */
+function isPlainQuestion(sense: Sense): boolean {
+  return (
+    said(sense, 'ask').some((mark) => mark.to - mark.from >= 2) &&
+    !isSaid(sense, 'need', 'helpWord')
+  )
+}
+
 /** "Kapor kokhon bodlabo": when shall I change it; the plan is what is asked about. */
 function asksOfPlan(sense: Sense): boolean {
   const isPlanOnly = !isSaid(sense, 'notYet', 'forgot', 'day') && isSaid(sense, 'future')
@@ -64,7 +73,7 @@ function needPart(sense: Sense): Answer | null {
     ...said(sense, 'lost').filter((mark) =>
       areBeside(sense, [mark], sense.asked === 'flow' ? pieces : all, 5),
     ),
-    ...said(sense, 'worn').filter((mark) => areBeside(sense, [mark], pieces, 4)),
+    ...said(sense, 'worn').filter((mark) => areBeside(sense, [mark], pieces, 6)),
   ]
   if (wants.length > 0) {
     const lacksFilter = things.length === 0 && !isSaid(sense, 'need', 'lost')
@@ -116,8 +125,31 @@ function ask(sense: Sense): Answer | null {
   if (marks.length > 0) return { kind: 'ask', sure: sureOf(isQuestion ? 0.85 : 0.75, marks) }
   const where = said(sense, 'where').some((mark) => isQuestion || mark.from <= 1)
   if (where) return { kind: 'ask', sure: 0.7 }
-  return isQuestion && sense.words > 2 ? { kind: 'ask', sure: 0.65 } : null
+  // "Either wet or dry": two ways are put to the desk.
+  const isChoice = isSaid(sense, 'or') && sense.marks.every((mark) => !mark.denied)
+  if (isChoice && sense.words >= 5) return { kind: 'ask', sure: 0.62 }
+  if (!isQuestion || sense.words <= 2) return null
+  // "Will you watch the match?" asks nothing of the desk.
+  const isStrange = sense.unknownWords > 0 && !isNamed(sense, ...topics)
+  return { kind: 'ask', sure: isStrange ? 0.5 : 0.65 }
 }
+
+/** What a question to the desk is about. */
+const topics: Concept[] = [
+  ...(['water', 'filter', 'piece', 'cloth', 'container', 'flow', 'fill', 'drink'] as const),
+  ...([
+    'wash',
+    'change',
+    'need',
+    'you',
+    'where',
+    'helpWord',
+    'good',
+    'yes',
+    'slow',
+    'substance',
+  ] as const),
+]
 
 function done(sense: Sense): Answer | null {
   const marks = [...said(sense, 'done', 'better'), ...denied(sense, 'slow', 'blocked')]
@@ -186,7 +218,10 @@ function yesNo(sense: Sense): Answer | null {
   if (no.length > 0) return { kind: 'no', sure: noSureness(sense) }
   const isPlainNo = isSaid(sense, 'not') && !isDenied(sense, 'drip', 'texts', 'phone')
   if (isPlainNo && sense.words <= 3 && sense.unknownWords === 0) return { kind: 'no', sure: 0.65 }
-  return isSaid(sense, 'good') && sense.unknownWords <= 2 ? { kind: 'yes', sure: 0.62 } : null
+  const strangers = sense.asked === 'none' ? 0 : 2
+  return isSaid(sense, 'good') && sense.unknownWords <= strangers
+    ? { kind: 'yes', sure: 0.62 }
+    : null
 }
 
 function noSureness(sense: Sense): number {

@@ -21,6 +21,7 @@ export function findBreach(sense: Sense): Danger | null {
     // "The upper one overflows, the lower one is empty": it does not run.
     ...(isSaid(sense, 'none') ? [] : said(sense, 'overflow')),
     ...oozing,
+    ...said(sense, 'ooze').filter((mark) => isOfBody(sense, mark)),
     ...falls.filter((mark) => !isElsewhere(sense, mark)),
     ...rushes(sense),
   ]
@@ -37,6 +38,13 @@ export function findBreach(sense: Sense): Danger | null {
     kind: 'broken',
     sure: isRushOnly || isCloth || isSaid(sense, 'mended') ? 0.55 : sureOf(0.9, marks),
   }
+}
+
+/** "The tap oozes" leaks; of the water after a wash, oozing is slow. */
+export function isOfBody(sense: Sense, ooze: Mark): boolean {
+  const isAfterCare = ['wash', 'change'].includes(sense.asked) || isSaid(sense, 'done', 'slow')
+  const body = said(sense, 'piece', 'edge', 'container', 'filter')
+  return areBeside(sense, [ooze], body, 4) || !(isAfterCare || isSaid(sense, 'water'))
 }
 
 /** "The flow dropped" is slow; "the filter dropped" may have broken its fibres. */

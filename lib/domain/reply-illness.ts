@@ -8,18 +8,35 @@ export function findIllness(sense: Sense): Danger | null {
   const signs = dangerSigns(sense)
   if (signs.length > 0) return { kind: 'unwell', sure: sureOf(0.9, signs), dangerSign: true }
   const ills = [
-    ...said(sense, 'ill', 'vomit', 'blood'),
+    ...said(sense, 'ill', 'vomit', 'blood').filter((mark) => !isOfAnimal(sense, mark)),
     ...beside(sense, ['pain'], ['belly', 'child'], 5),
     ...beside(sense, ['belly'], ['problem', 'bad', 'long'], 4),
     ...beside(sense, ['stool'], ['water', 'long'], 4),
     ...beside(sense, ['body'], ['odd', 'pain', 'bad', 'frail', 'dirty'], 3),
-    ...(isNamed(sense, 'wrongNumber') ? [] : said(sense, 'care')),
+    ...(isNamed(sense, 'wrongNumber', 'business') ? [] : said(sense, 'care')).filter(
+      (mark) => !isLikened(sense, mark),
+    ),
     ...poorlyMarks(sense),
   ]
   if (ills.length > 0) return { kind: 'unwell', sure: sureOf(0.9, ills) }
   const bellies = beside(sense, ['belly'], ['child', 'person'], 4)
   return bellies.length > 0 ? { kind: 'unwell', sure: sureOf(0.65, bellies) } : null
 }
+
+/** "Our goat is sick". */
+function isOfAnimal(sense: Sense, mark: Mark): boolean {
+  const animals = said(sense, 'animal').map((animal) => gapBetween(sense, animal, mark))
+  const people = said(sense, 'child', 'person', 'stool', 'belly')
+  const nearest = Math.min(...people.map((person) => gapBetween(sense, person, mark)))
+  return animals.some((gap) => gap <= 4 && gap < nearest)
+}
+
+/** "It drips like a hospital drip". */
+function isLikened(sense: Sense, mark: Mark): boolean {
+  return [1, 2].some((back) => likeWords.has(sense.tokens[mark.from - back]?.text ?? ''))
+}
+
+const likeWords = new Set(['like', 'como', 'comme'])
 
 function beside(sense: Sense, ones: Concept[], others: Concept[], reach: number): Mark[] {
   return said(sense, ...ones).filter((mark) =>

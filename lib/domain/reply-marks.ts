@@ -53,6 +53,17 @@ function guessWord(known: Known, word: string, likely: readonly Language[]): voi
     addKeys(known, language, guessedKeys(word, language), 'guessed')
 }
 
+/**
+ * In a language that the text is not in, only whole words are known: a stem of three letters begins a
+ * word of every language.
+ */
+function forgetForeignStems(known: Known, likely: readonly Language[]): void {
+  for (const [language, { keys }] of known) {
+    const isStemOnly = [...keys].every((key) => key.endsWith('*'))
+    if (isStemOnly && !likely.includes(language)) known.delete(language)
+  }
+}
+
 function addKeys(known: Known, language: Language, keys: string[], likeness: Likeness): void {
   if (keys.length > 0) known.set(language, { keys: new Set(keys), likeness })
 }
@@ -142,7 +153,7 @@ function candidates(known: readonly (Known | null)[], order: readonly Language[]
         for (const entry of entriesStartingWith(language, key)) {
           if (entry.keys.length === 1 && language !== reader) continue
           const to = matchEnd(entry, from, known)
-          if (to === null) continue
+          if (to === null || isForeignChance(known.slice(from, to), language, order)) continue
           const likeness = likenessOf(from, to, language, known)
           marks.push({ concept: entry.concept, from, to, language, likeness, denied: false })
         }
@@ -150,6 +161,17 @@ function candidates(known: readonly (Known | null)[], order: readonly Language[]
     }
   })
   return marks
+}
+
+/** "No Mama here" is no Spanish: a wording of another language needs a word that is not of the text's own. */
+function isForeignChance(
+  words: readonly (Known | null)[],
+  language: Language,
+  [main, own]: readonly Language[],
+): boolean {
+  if (words.length === 1 || language === main || language === own || main === undefined)
+    return false
+  return words.every((word) => word === null || word.get(main)?.likeness === 'exact')
 }
 
 /** Longer wordings own their words: in "no problem" neither "no" nor "problem" speaks. */
@@ -192,9 +214,10 @@ export function markTokens(tokens: readonly Token[], own: Language): Marked {
   const known = tokens.map((token) => (token.kind === 'word' ? knowWord(token.text) : null))
   const wordsOf = (): Known[] => known.filter((word) => word !== null)
   const likely = new Set<Language>([mainLanguage(wordsOf(), own), own, 'en'])
+  eachWord(tokens, known, (word) => forgetForeignStems(word, [...likely]))
   eachWord(tokens, known, (word, text) => respellWord(word, text, [...likely]))
   const main = mainLanguage(wordsOf(), own)
-  eachWord(tokens, known, (word, text) => guessWord(word, text, [main, own, 'en']))
+  eachWord(tokens, known, (word, text) => guessWord(word, text, [main, own]))
   const order = [...new Set([main, ...languageOrder(own)])]
   return {
     marks: keepLongest(candidates(known, order), order),

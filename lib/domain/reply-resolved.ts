@@ -34,6 +34,7 @@ const illness: ReadonlySet<Concept> = new Set<Concept>([
   'frail',
   'sleepy',
   'body',
+  'bad',
 ])
 const things: ReadonlySet<Concept> = new Set<Concept>([
   'water',
@@ -53,13 +54,22 @@ function dropRecovered(marks: readonly Mark[], tokens: readonly Token[]): Mark[]
     marks.some((mark) => mark.concept === concept && !mark.denied)
   if (has('sign') || has('still')) return [...marks]
   const isWell = (mark: Mark): boolean => {
-    if (mark.denied || mark.from < last.to) return false
-    if (mark.concept === 'recovered') return true
+    // "Over the fever now" puts the recovery first.
+    const reach = mark.concept === 'recovered' ? mark.from + 4 : mark.from
+    if (mark.denied || reach < last.to) return false
+    if (mark.concept === 'recovered') return !isButBetween(mark, last, marks)
     if (!['good', 'better', 'yes'].includes(mark.concept)) return false
     return !marks.some((other) => things.has(other.concept) && isNear(other, mark, tokens))
   }
-  const isOver = has('recovered') || ((has('now') || has('past')) && marks.some(isWell))
+  const isTold = has('recovered') || has('now') || has('past')
+  const isOver = isTold && marks.some(isWell)
   return isOver ? marks.filter((mark) => !ills.includes(mark)) : [...marks]
+}
+
+function isButBetween(one: Mark, other: Mark, marks: readonly Mark[]): boolean {
+  return marks.some(
+    (mark) => mark.concept === 'but' && mark.from >= one.to && mark.to <= other.from,
+  )
 }
 
 function isNear(one: Mark, other: Mark, tokens: readonly Token[]): boolean {

@@ -107,7 +107,7 @@ export function areParted(sense: Sense, one: Mark, other: Mark): boolean {
 
 /** "What if it cracks?" reports nothing. */
 export function isSupposed(sense: Sense): boolean {
-  return isSaid(sense, 'if') && (sense.text.includes('?') || isSaid(sense, 'ask'))
+  return isSaid(sense, 'if') && (sense.text.includes('?') || isSaid(sense, 'ask', 'or'))
 }
 
 const trust = { exact: 1, respelled: 0.95, guessed: 0.78 } as const

@@ -1,5 +1,5 @@
 import type { Mark } from './reply-marks'
-import { isFallOfFlow } from './reply-breach'
+import { isFallOfFlow, isOfBody } from './reply-breach'
 import {
   areBeside,
   denied,
@@ -62,7 +62,9 @@ function isAlmost(sense: Sense, mark: Mark): boolean {
 
 /** "Opened the tap as you said. Nothing": a sentence by itself after what was done. */
 function hasBareNothing(sense: Sense): boolean {
-  const isEdge = (at: number): boolean => (sense.tokens[at]?.kind ?? 'break') === 'break'
+  const isEdge = (at: number): boolean =>
+    (sense.tokens[at]?.kind ?? 'break') === 'break' ||
+    said(sense, 'and').some((mark) => mark.from === at)
   return (
     ['wash', 'change', 'step'].includes(sense.asked) &&
     said(sense, 'none').some(
@@ -117,6 +119,8 @@ export function slowSureness(sense: Sense): number {
     ...scarcely,
     ...hardlyBetter,
     ...said(sense, 'drip', 'long'),
+    ...said(sense, 'ooze').filter((mark) => !isOfBody(sense, mark)),
+    ...unfilled(sense),
     ...denied(sense, 'fast', 'better'),
     ...little,
     ...butLittle,
@@ -131,6 +135,17 @@ export function slowSureness(sense: Sense): number {
   const isAfterCare = isSaid(sense, 'still', 'but', 'done', 'wash')
   if (isSaid(sense, 'same') && (isStep || isAfterCare)) return 0.7
   return isStep && isSaid(sense, 'little') && sense.words <= 3 ? 0.65 : 0
+}
+
+/** "The bottle is not even half full", "still half". */
+function unfilled(sense: Sense): Mark[] {
+  const denials = sense.marks.filter((mark) =>
+    ['not', 'notNext', 'notAround', 'notPlus', 'notBack', 'still'].includes(mark.concept),
+  )
+  const vessels = said(sense, 'container', 'fill')
+  return said(sense, 'full').filter(
+    (mark) => areBeside(sense, [mark], denials, 3) && areBeside(sense, [mark], vessels, 5),
+  )
 }
 
 /** "It was slow but now it runs well". */

@@ -1,4 +1,4 @@
-import { areBeside, isSaid, said, sureOf, type Sense } from './reply-sense'
+import { areBeside, isNamed, isSaid, said, sureOf, type Sense } from './reply-sense'
 
 /** How sure the text says that the wrong phone was reached; 0 when it does not. */
 export function wrongNumberSureness(sense: Sense): number {
@@ -9,6 +9,7 @@ export function wrongNumberSureness(sense: Sense): number {
     return sureOf(0.8, mistaken)
   }
   if (deniesName(sense) || deniesPhone(sense) || namesOwner(sense)) return 0.7
+  if (isElsewhereReached(sense) || isNobodyHere(sense)) return 0.65
   // "Who are you? I have no filter": alone either may be of a household.
   const hasNone = areBeside(sense, said(sense, 'lack', 'not'), said(sense, 'filter'), 2)
   if (isSaid(sense, 'who') && hasNone) return 0.75
@@ -24,7 +25,10 @@ function deniesName(sense: Sense): boolean {
   return denials.some((denial) => {
     const isBack = denial.concept === 'notBack'
     const isShort = sense.words <= 3 && said(sense, 'name').length > 0
-    if (isBack) return isName(sense, denial.from - 1) && hasSelf(sense, denial.from - 1)
+    // "Ami Rahima apa na".
+    const isTitled = said(sense, 'greeting').some((mark) => mark.from === denial.from - 1)
+    const named = isTitled ? denial.from - 2 : denial.from - 1
+    if (isBack) return isName(sense, named) && hasSelf(sense, named)
     const isCopula = isSelf(sense, denial.to)
     const at = isCopula ? denial.to + 1 : denial.to
     return (
@@ -32,6 +36,30 @@ function deniesName(sense: Sense): boolean {
     )
   })
 }
+
+/** "This is a hardware shop". */
+function isElsewhereReached(sense: Sense): boolean {
+  if (isNamed(sense, 'filter', 'water', 'need', 'flow')) return false
+  return said(sense, 'business').some(
+    (mark) =>
+      isSaid(sense, 'phone', 'explain', 'texts') ||
+      [1, 2, 3].some((back) => isThisWord(sense, mark.from - back)),
+  )
+}
+
+/** "No Mama Asha here". */
+function isNobodyHere(sense: Sense): boolean {
+  const denials = sense.marks.filter((mark) => ['not', 'notNext'].includes(mark.concept))
+  const isDesk = isNamed(sense, 'filter', 'water', 'flow', 'broken', 'leak', 'ill', 'problem')
+  if (isDesk || sense.words > 8) return false
+  return sense.tokens.some(
+    (token, at) =>
+      hereWords.has(token.text) &&
+      denials.some((denial) => denial.to <= at && at - denial.to <= 3 && at - denial.to > 0),
+  )
+}
+
+const hereWords = new Set('here aqui aca ici ekhane এখানে'.split(' '))
 
 /** "This number is not hers", "ce numéro n'est pas celui de …", "eta … number na". */
 function deniesPhone(sense: Sense): boolean {
@@ -57,7 +85,9 @@ function isThisWord(sense: Sense, at: number): boolean {
   return token?.kind === 'word' && thisWords.has(token.text)
 }
 
-const thisWords = new Set('this that este ese ce cet ei eta eita ita এই এটা এইটা'.split(' '))
+const thisWords = new Set(
+  'this that este esta esto ese ce cet ici ei eta eita ita এই এটা এইটা'.split(' '),
+)
 
 /** "La señora", "Mrs", "madame". */
 function afterTitle(sense: Sense, at: number): number {

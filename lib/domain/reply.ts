@@ -6,7 +6,16 @@ import { figureOf, isMostlyFigure } from './reply-figure'
 import { findDanger } from './reply-danger'
 import { optOutSureness } from './reply-opt-out'
 import { wrongNumberSureness } from './reply-wrong-number'
-import { isDenied, isSaid, isSupposed, senseOf, type Asked, type Sense } from './reply-sense'
+import {
+  isDenied,
+  isNamed,
+  isSaid,
+  isSupposed,
+  said,
+  senseOf,
+  type Asked,
+  type Sense,
+} from './reply-sense'
 import { noFlowSureness, slowSureness } from './reply-trouble'
 
 export type { Asked }
@@ -95,7 +104,7 @@ function isStopOrStopped(sense: Sense): boolean {
 /** Figures and trouble: the figure answers when one was asked for. */
 function readTrouble(sense: Sense): ReplyReading | null {
   if (isSupposed(sense)) return null
-  const noFlow = noFlowSureness(sense)
+  const noFlow = isReasonNotToStart(sense) ? 0 : noFlowSureness(sense)
   const slow = slowSureness(sense)
   const isAsked = sense.asked === 'flow' || sense.asked === 'step'
   const figure = figureOf(sense)
@@ -103,12 +112,27 @@ function readTrouble(sense: Sense): ReplyReading | null {
     // "Is 12 minutes ok?"
     if (!isAsked && sense.text.includes('?') && isSaid(sense, 'ask', 'where', 'yes', 'good'))
       return null
+    // "Strong for one minute, then a dribble": nobody calls a minute slow.
+    if (slow > 0 && figure.minutes <= 1 && sense.asked !== 'flow')
+      return { kind: 'slow', sure: slow }
     if (slow > 0 && !isAsked) return { kind: 'slow', minutes: figure.minutes, sure: slow }
     return readFigure(sense, figure, slow >= sureEnough)
   }
   if (noFlow >= slow && noFlow > 0) return { kind: 'no-flow', sure: noFlow }
   if (slow > 0) return { kind: 'slow', sure: slow }
   return isStopOrStopped(sense) ? { kind: 'unclear', sure: 0.5 } : null
+}
+
+/** "Not yet, the pump has no water": it is not the filter that gives none. */
+function isReasonNotToStart(sense: Sense): boolean {
+  const isCare = sense.asked === 'wash' || sense.asked === 'change'
+  // Bengali "pore" is "later" and "falls".
+  const first = said(sense, 'notYet').some(
+    (mark) =>
+      mark.from <= 1 &&
+      !sense.marks.some((other) => other.concept === 'flow' && other.from === mark.from),
+  )
+  return isCare && first && !isNamed(sense, 'filter', 'drip', 'outlet')
 }
 
 function readFigure(

@@ -50,6 +50,9 @@ export const concepts = [
   'belly',
   'all', // everything
   'source', // the river, the well
+  'animal', // a sick goat makes nobody unwell
+  'business', // "this is a shop": not the family that is meant
+  'full', // full or half: what a bottle is not yet
   'elsewhere', // what may break or fall without harm to the water: a phone, a bus, a roof
   'body', // skin, eyes, head: coloured or hurting it is illness
   // what the water does
@@ -71,6 +74,7 @@ export const concepts = [
   // danger
   'broken',
   'leak',
+  'ooze', // of a joint it is a leak, of a washed filter slow water
   'fall', // fell or dropped: the filter is broken, the flow is slow
   'frozen',
   'overflow', // over the brim: with nothing below it only does not run

@@ -99,4 +99,6 @@ export const enContact: LanguagePack['concepts'] = {
   gave: `gave, give away, given, gifted, donated, sold, sell, passed on, passed it, handed over, lent,
     left with, left it, left behind, left the filter, returned, gave back, took back, took it back,
     inherited, with my sister now, with my mother now`,
+  business: `shop, store, hardware store, garage, workshop, pharmacy, chemist, school, office, bank,
+    restaurant, hotel, bakery, salon, barber, taxi, company`,
 }

@@ -156,4 +156,7 @@ export const enIllness: LanguagePack['concepts'] = {
     alright now, good now, strong again, up and about, on the mend, discharged, home from hospital,
     fever is gone, fever gone, has passed, eating again, drinking again, no longer sick,
     no longer ill`,
+  animal: `goat, goats, cow, cows, calf, ox, bull, dog, dogs, cat, cats, hen, hens, chicken, chickens,
+    duck, ducks, pig, pigs, sheep, lamb, donkey, horse, buffalo, camel, cattle, livestock, animal,
+    animals, puppy`,
 }

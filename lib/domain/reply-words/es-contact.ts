@@ -137,9 +137,11 @@ export const esContact: LanguagePack['concepts'] = {
   helpWord:
     'ayuda, ayudenme, ayudame, ayudeme, auxilio, socorro, ayudar, informacion, info, necesito ayuda, ayudenos, ayuden, quiero ayuda, alluda, aiuda, me ayudan, me pueden ayudar, me puede ayudar, pueden ayudarme, puede ayudarme, nos ayudan, asistencia',
   gave: `regal*, regale, regalamos, di el filtro, le di el, lo di, lo dimos, dimos el filtro, se lo di,
-    se lo dimos, se lo dio, se lo pase, se lo pasamos, done, donamos, donado, vendi, vendimos,
-    vendieron, vendido, vendio, preste, prestamos, prestado, herede, deje el filtro,
-    dejamos el filtro, lo deje, lo dejamos, quedo en, se quedo en, quedo con, se quedo con, devolvi,
-    devolvimos, entregue, entregamos, se lo llevo mi, lo tiene mi, lo tiene ahora, ahora lo tiene,
-    lo usa mi, -done, -quedo en, -lo deje, -deje el filtro, -prestado`,
+    se lo dimos, se lo dio, se lo pase, se lo pasamos, donamos, donado, vendi, vendimos, vendieron,
+    vendido, vendio, preste, prestamos, herede, dejamos el filtro, lo dejamos, se quedo en,
+    quedo con, se quedo con, devolvi, devolvimos, entregue, entregamos, se lo llevo mi, lo tiene mi,
+    lo tiene ahora, ahora lo tiene, lo usa mi`,
+  business: `ferreteria, tienda, taller, farmacia, oficina, banco, restaurante, hotel, panaderia, salon,
+    peluqueria, barberia, negocio, abarrotes, abarroteria, pulperia, bodega, empresa, consultorio,
+    libreria, papeleria, carniceria`,
 }

@@ -77,5 +77,5 @@ export const esPack: LanguagePack = {
     cambiando pecados llevarla manual pasta muelle normales tirado grecia cocaina cobra cantante
     collar arreglarlo vendiendo pico perdemos sano ensenarte seguiremos teme distrito preparando
     subiendo rollo ocurriendo resulto exposicion echado tener rosario rancho pal norte beto
-    madrugada mediodia unico lunico`,
+    madrugada mediodia unico lunico mojado`,
 }

@@ -138,7 +138,8 @@ export const frContact: LanguagePack['concepts'] = {
     'aide, aidez moi, aidez nous, aider, aidez, au secours, secours, info, infos, information, informations, besoin d aide, a l aide, aidé, ède, assistance, aide moi',
   gave: `donne a, donne au, donne le filtre, offert, offerte, legue, cede a, vendu, vendue, vends,
     ai vendu, avons vendu, confie, prete a, laisse a, laisse chez, laisse la bas, laisse au village,
-    rendu le filtre, rendu a, pas pris, pas emporte, pas amene, pas emmene, reste la bas,
-    reste au village, avec ma soeur maintenant, chez ma soeur, chez mon frere, chez ma mere,
-    -rendu a`,
+    rendu le filtre, pas pris, pas emporte, pas amene, pas emmene, reste la bas, reste au village,
+    avec ma soeur maintenant, chez ma soeur, chez mon frere, chez ma mere`,
+  business: `pharmacie, boutique, magasin, garage, atelier, banque, restaurant, hotel, boulangerie, salon,
+    coiffeur, coiffeuse, quincaillerie, entreprise, societe, kiosque, maquis, superette`,
 }

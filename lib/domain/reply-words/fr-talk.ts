@@ -141,7 +141,7 @@ export const frTalk: LanguagePack['concepts'] = {
     comprend rien, comprends rien, rien compris, pige pas, rien pige, sais pas faire, savons pas,
     savez vous, que signifie, ca veut dire, c est a dire, ca sert a, sert a quoi, a quoi ca sert,
     permettez moi de demander, vous demander, demander si, me demande, je me demande,
-    voulais savoir, veux savoir, voudrais comprendre`,
+    voulais savoir, veux savoir, voudrais comprendre, la video, video, dessin, brochure, tuto`,
   thanks: `merci, mercii, mrc, mrci, mersi, merci beaucoup, merci bcp, merci bien, grand merci,
     milles mercis, mercis, remercie, remercions, reconnaissant, reconnaissante,
     que dieu vous benisse, dieu vous benisse, dieu vous garde, dieu te benisse, benisse, gentil,
@@ -168,7 +168,7 @@ export const frTalk: LanguagePack['concepts'] = {
   no: `non, nan, nn, non non, nonn, negatif, emojino, pas du tout, no, nop, que non, mais non,
     non merci, pas vraiment, naan, nann, nonnn, nion, pas question, jamais de la vie,
     absolument pas, aucunement, nullement, certainement pas, que nenni, non madame, non monsieur,
-    je crois pas, je ne crois pas, je pense pas, je ne pense pas, no no`,
+    je crois pas, je ne crois pas, je pense pas, je ne pense pas, no no, du tout .`,
   greeting:
     'bonjour, bjr, bonsoir, bsr, salut, slt, coucou, cc, hello, madame, monsieur, mr, mme, mademoiselle, docteur bonjour, cher, chere, messieurs, mesdames, chef, patron, tonton, tata, mon frere, ma soeur, bonne, excusez moi, pardon, desole, desolee, bon, ben, bah, alors, euh',
   please:
@@ -194,7 +194,8 @@ export const frTalk: LanguagePack['concepts'] = {
     pas mal de, de mal a, du mal a comprendre, du mal a lire, a la main, tissu blanc, tissu noir,
     chiffon blanc, fil blanc, robinet rouge, robinet bleu, embout rouge, embout bleu, embout noir,
     partie bleue, partie noire, partie blanche, cote bleu, cote noir, couvercle blanc,
-    couvercle bleu, couvercle rouge, d accord avec`,
+    couvercle bleu, couvercle rouge, d accord avec, dans l attente de, en attente de votre,
+    en attendant votre, dans l attente`,
   within: `dans, d ici`,
   and: `et`,
   see: `vois, voit, voyons, vu, voir, remarque, trouve`,
@@ -205,7 +206,6 @@ export const frTalk: LanguagePack['concepts'] = {
   explain: `expliqu*, parlez, parle, parlez moi, repetez, repete, dites, dites moi, montrez, ecrivez,
     expliqué, expliké, explik*, ecris`,
   worn: `use, usee, uses, usees, usé, usure, fini, finie, epuise, epuisee, trop vieux, trop vieille,
-    vieux, vieille, vieilli, fatigue, mort, morte, hs, h s, amincie, aminci, mince, plus bon,
-    plus bonne, perime, perimee, arrive a la fin, en fin de vie, fin de vie, -vieux, -vieille,
-    -fatigue`,
+    vieilli, mort, morte, hs, h s, amincie, aminci, mince, plus bon, plus bonne, perime, perimee,
+    arrive a la fin, en fin de vie, fin de vie`,
 }

@@ -70,5 +70,6 @@ export const frPack: LanguagePack = {
     couronne cycliques conversion retenue pousse consacree revendre rapporte leasing separation
     attache dommage connexion portrait peuple fiat classes prevision inflation intention compenser
     tester evite perception reveler egale toit coree hiver conviction demarrage lutter marquee
-    prince palette terrasse bouillir bouilli bouillie retrolavage abord remonte remonter`,
+    prince palette terrasse bouillir bouilli bouillie retrolavage abord remonte remonter debite
+    entend entendre entends entendu plie plier seigneur eponge ancien ancienne`,
 }
