@@ -174,6 +174,11 @@ export function exactKeys(word: string, language: Language): string[] {
   return keys
 }
 
+/** A Bengali letter carries its vowel; three Latin letters begin too many other words. */
+function shortestStem(stem: string): number {
+  return /[a-z]/.test(stem) ? 4 : 3
+}
+
 /** Keys after taking away what writers of the language leave to chance. */
 export function respelledKeys(word: string, language: Language): string[] {
   if (word.length < 4 && language !== 'bn') return []
@@ -181,7 +186,7 @@ export function respelledKeys(word: string, language: Language): string[] {
   const respelled = lexicon.respell(word)
   const keys = [...(lexicon.respelled.get(respelled) ?? [])]
   for (const [stem, key] of lexicon.respelledStems.get(respelled[0] ?? '') ?? []) {
-    if (stem.length >= 3 && respelled.startsWith(stem)) keys.push(key)
+    if (stem.length >= shortestStem(stem) && respelled.startsWith(stem)) keys.push(key)
   }
   return keys
 }
@@ -222,9 +227,9 @@ export function guessedKeys(word: string, language: Language): string[] {
     if (stem.length < 5 || !beginsAlike(word, stem)) continue
     const heads = [-1, 0, 1]
       .map((extra) => word.slice(0, stem.length + extra))
-      .filter((head) => length >= 8 || isLikelySlip(head, stem))
-    const slips = Math.min(...heads.map((head) => slipsBetween(head, stem)))
-    if (slips <= allowedSlips(stem.length)) consider(`${stem}*`, slips)
+      // A head that the stem only lengthens is another word: "rosario" is no slip of "rosad*".
+      .filter((head) => isLikelySlip(head, stem) && !stem.startsWith(head))
+    if (heads.some((head) => slipsBetween(head, stem) === 1)) consider(`${stem}*`, 1)
   }
   return keys
 }

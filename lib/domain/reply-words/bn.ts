@@ -1,6 +1,7 @@
 import type { LanguagePack } from './concept'
 import { bnContact } from './bn-contact'
 import { bnDanger } from './bn-danger'
+import { bnEveryday } from './bn-everyday'
 import { bnTalk } from './bn-talk'
 import { bnWater } from './bn-water'
 
@@ -46,7 +47,7 @@ export const bnPack: LanguagePack = {
   shifts: `সাড়ে 0.5, সারে 0.5, পৌনে -0.25, সোয়া 0.25, sare 0.5, share 0.5, shaare 0.5, sharhe 0.5,
     poune -0.25, pone -0.25, soya 0.25, shoya 0.25, sowa 0.25`,
   light: ``,
-  common: `কখনো কখনও kokhono laga লাগা upore dhali niche ঢালি উপরে একদম একেবারেই মোটেই ekdom ekebarei
+  common: `${bnEveryday} কখনো কখনও kokhono laga লাগা upore dhali niche ঢালি উপরে একদম একেবারেই মোটেই ekdom ekebarei
     motei pray prai প্রায় lokta লোকটা এই এটা এটি এইটা ওই ওটা সেই সেটা আমি তুমি আপনি সে তিনি আমরা
     তারা আমার তোমার আপনার তার আমাদের আপনাদের তাদের ও আর এবং বা যে যা কে কি কী তো না হ্যাঁ হয় হলো
     হবে ছিল আছে আছি আছেন থাকে থাকি করে করি করেন করা করতে দিয়ে থেকে জন্য সাথে সঙ্গে মধ্যে উপর নিচে

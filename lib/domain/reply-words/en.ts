@@ -1,6 +1,7 @@
 import type { LanguagePack } from './concept'
 import { enContact } from './en-contact'
 import { enIllness } from './en-danger'
+import { enEveryday } from './en-everyday'
 import { enTalk } from './en-talk'
 import { enWater } from './en-water'
 
@@ -30,7 +31,7 @@ export const enPack: LanguagePack = {
   halves: `and a half 0.5, and half 0.5, n half 0.5, n a half 0.5, and a quarter 0.25,
     and quarter 0.25`,
   light: `give gives giving given let lets a an the any my our your his her its their this that these those it to be been being have had having got get getting really even ever yet all so too very as like one single more longer anymore i im u you we he she they there is are was were am do does did seem seems look looks feel feels feeling want wants going go able of on at for with still enough much quite properly good well fully quick completely again`,
-  common: `hmm lol haha jaja asdf the a an this that these those there here it its is are am be been
+  common: `${enEveryday} hmm lol haha jaja asdf the a an this that these those there here it its is are am be been
     being was were do does did have has had having and for from with at by to of in on off up down
     out over under into onto about than then so as also all any some each every both such own i im
     ive id ill we weve he hes she shes they theyre them his her hers our ours their him who whom

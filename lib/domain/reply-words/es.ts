@@ -1,6 +1,7 @@
 import type { LanguagePack } from './concept'
 import { esContact } from './es-contact'
 import { esIllness } from './es-danger'
+import { esEveryday } from './es-everyday'
 import { esTalk } from './es-talk'
 import { esWater } from './es-water'
 
@@ -31,7 +32,7 @@ export const esPack: LanguagePack = {
     un minuto 1, una ora 60, 1 2 hora 30`,
   halves: `y media 0.5, y medio 0.5, y cuarto 0.25, i media 0.5, i medio 0.5`,
   light: `dar da dando deja dejo me te se le lo la los las nos les el un una unos unas mi mis su sus tu que de del a al en muy mas tan bien ya esta estan estoy estamos es son ha he han hemos sido ser estar tiene tienen tengo hay para por con todavia aun puedo puede pueden podemos quiere quieren quiero ni mucho nada tanto completamente`,
-  common: `tardar demorar tipo llover lloviendo hay eso mismo huevo huevos tortilla frijol frijoles chile
+  common: `${esEveryday} tardar demorar tipo llover lloviendo hay eso mismo huevo huevos tortilla frijol frijoles chile
     limon naranja platano fruta verdura comida jugo cafe leche azucar sal pan el la los las un una
     uno unos unas de del al a en con por para que se su sus mi mis tu tus lo le les nos me te y o
     u e si no es son era eran ser esta este esto esa ese estas estos estan estoy estamos estaba

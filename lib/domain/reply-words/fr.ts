@@ -1,6 +1,7 @@
 import type { LanguagePack } from './concept'
 import { frContact } from './fr-contact'
 import { frIllness } from './fr-danger'
+import { frEveryday } from './fr-everyday'
 import { frTalk } from './fr-talk'
 import { frWater } from './fr-water'
 
@@ -30,7 +31,7 @@ export const frPack: LanguagePack = {
     quarantaine de minutes 40, demi eure 30, une trentaine de minutes 30`,
   halves: `et demie 0.5, et demi 0.5, et quart 0.25, et un quart 0.25, et dmi 0.5`,
   light: `donner donne donnait laisse laisser est sont suis a ai as ont avons avez ete etre bien tres trop tro assez du de des la le les l d un une en y ce c ca que qu pu encore vraiment tellement peux peut veut veux peuvent si tout plus beaucoup completement`,
-  common: `sien sienne siens mien tien leurs verse haut cruche marmite joliment franchement le la les l
+  common: `${frEveryday} sien sienne siens mien tien leurs verse haut cruche marmite joliment franchement le la les l
     un une des de du d a au aux et ou mais donc or ni car que qu qui quoi dont ce cet cette ces c
     ca cela sa son ses mon ma mes ton ta tes notre nos votre vos leur je j tu il elle on nous vous
     ils elles me m te t se s lui y en ne n pas plus est es suis sommes etes sont etait sera soit
