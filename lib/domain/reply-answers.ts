@@ -71,7 +71,7 @@ function needPart(sense: Sense): Answer | null {
     ...(said(sense, 'tool').length > 0 ? said(sense, 'need') : []),
     // Who has lost the bottle cannot measure; no part is owed for it.
     ...said(sense, 'lost').filter((mark) =>
-      areBeside(sense, [mark], sense.asked === 'flow' ? pieces : all, 5),
+      areBeside(sense, [mark], sense.asked === 'flow' ? pieces : things, 5),
     ),
     ...said(sense, 'worn').filter((mark) => areBeside(sense, [mark], pieces, 6)),
   ]
@@ -85,8 +85,9 @@ function needPart(sense: Sense): Answer | null {
 
 function notYet(sense: Sense): Answer | null {
   const undone = denied(sense, 'done', 'wash', 'change')
+  const isPlace = sense.asked === 'flow' && sense.unknownWords <= 1
   const planned = said(sense, 'future').filter(
-    () => isNamed(sense, 'wash', 'change', 'done') || sense.words <= 3,
+    () => isPlace || isNamed(sense, 'wash', 'change', 'done') || sense.words <= 3,
   )
   const isCare = sense.asked === 'wash' || sense.asked === 'change'
   const unable = isCare ? denied(sense, 'can', 'be') : []
@@ -121,17 +122,28 @@ function moved(sense: Sense): Answer | null {
 
 function ask(sense: Sense): Answer | null {
   const isQuestion = sense.text.includes('?')
-  const marks = said(sense, 'ask')
-  if (marks.length > 0) return { kind: 'ask', sure: sureOf(isQuestion ? 0.85 : 0.75, marks) }
+  const marks = said(sense, 'ask').filter((mark) => isQuestion || !isLikening(sense, mark))
+  const isStrange = sense.unknownWords > 0 && !isNamed(sense, ...topics)
+  if (marks.length > 0) {
+    const sure = isQuestion ? 0.85 : 0.75
+    return { kind: 'ask', sure: isStrange && sense.words > 3 ? 0.5 : sureOf(sure, marks) }
+  }
   const where = said(sense, 'where').some((mark) => isQuestion || mark.from <= 1)
   if (where) return { kind: 'ask', sure: 0.7 }
   // "Either wet or dry": two ways are put to the desk.
-  const isChoice = isSaid(sense, 'or') && sense.marks.every((mark) => !mark.denied)
+  const isNeither = isSaid(sense, 'not')
+  const isChoice = isSaid(sense, 'or') && !isNeither && sense.marks.every((mark) => !mark.denied)
   if (isChoice && sense.words >= 5) return { kind: 'ask', sure: 0.62 }
   if (!isQuestion || sense.words <= 2) return null
   // "Will you watch the match?" asks nothing of the desk.
-  const isStrange = sense.unknownWords > 0 && !isNamed(sense, ...topics)
   return { kind: 'ask', sure: isStrange ? 0.5 : 0.65 }
+}
+
+/** Spanish "como" asks at the head of a clause; within it, it likens. */
+function isLikening(sense: Sense, mark: Mark): boolean {
+  const before = sense.tokens[mark.from - 1]
+  if (sense.tokens[mark.from]?.text !== 'como' || mark.to - mark.from > 1) return false
+  return before?.kind === 'word' && !['y', 'pero', 'saber', 'sabe', 'digame'].includes(before.text)
 }
 
 /** What a question to the desk is about. */
@@ -153,7 +165,11 @@ const topics: Concept[] = [
 
 function done(sense: Sense): Answer | null {
   const marks = [...said(sense, 'done', 'better'), ...denied(sense, 'slow', 'blocked')]
-  if (marks.length > 0) return { kind: 'done', sure: sureOf(0.85, marks) }
+  if (marks.length > 0) return { kind: 'done', sure: sureOf(doneSureness(sense, marks), marks) }
+  // "All is well with the filter and with us".
+  if (sense.asked === 'none' && isSaid(sense, 'yes') && isSaid(sense, 'filter')) {
+    return { kind: 'done', sure: 0.65 }
+  }
   if (isOver(sense)) return { kind: 'done', sure: 0.75 }
   const runsWell = areBeside(sense, said(sense, 'flow'), said(sense, 'good', 'fast'), 3)
   const isWashOk = isSaid(sense, 'wash') && isSaid(sense, 'yes', 'good') && sense.words <= 3
@@ -162,6 +178,24 @@ function done(sense: Sense): Answer | null {
   return runsWell || isWellNow || isCleaned || (sense.asked === 'wash' && isWashOk)
     ? { kind: 'done', sure: 0.7 }
     : null
+}
+
+/** Bengali "has become" is said of a wash as of a noise. */
+const becomings = new Set(
+  'হইছে হয়েছে হলো গেছে গেসে hoise hoyeche hoiche hoise holo gese geche'.split(' '),
+)
+
+/** What follows a "but" without a meaning here may be anything: a person reads it. */
+function doneSureness(sense: Sense, marks: readonly Mark[]): number {
+  const isVague = marks.every((mark) => becomings.has(sense.tokens[mark.to - 1]?.text ?? ''))
+  if (isVague && sense.unknownWords > 0) return 0.5
+  const settled: Concept[] = ['good', 'better', 'yes', 'done', 'fast', 'now', 'clean', 'past', 'no']
+  const but = said(sense, 'but').at(-1)
+  if (but === undefined) return 0.85
+  const after = sense.marks.filter((mark) => mark.from >= but.to)
+  const isSettled = after.some((mark) => mark.denied || settled.includes(mark.concept))
+  const isFollowed = sense.tokens.length - but.to >= 2
+  return isFollowed && !isSettled ? 0.5 : 0.85
 }
 
 function keywords(sense: Sense): Answer | null {
@@ -197,7 +231,11 @@ const dangers: Concept[] = [
 
 /** "I looked, no crack": the answer to what a step asks, whatever was done for it. */
 function soundParts(sense: Sense): Answer | null {
-  if (sense.asked !== 'step' || isSaid(sense, 'better', 'ask', 'yes')) return null
+  if (sense.asked !== 'step' || isSaid(sense, 'better', 'ask')) return null
+  // "No, all is tight".
+  const first = said(sense, 'no').filter((mark) => mark.from === 0)
+  if (first.length > 0 && isSaid(sense, 'done', 'yes')) return { kind: 'no', sure: 0.7 }
+  if (isSaid(sense, 'yes')) return null
   const safe = denied(sense, 'broken', 'leak', 'fall', 'frozen')
   return safe.length > 0 ? { kind: 'no', sure: sureOf(0.75, safe) } : null
 }

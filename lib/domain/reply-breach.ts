@@ -1,6 +1,6 @@
 import type { Danger } from './reply-danger-kind'
 import type { Mark } from './reply-marks'
-import { areBeside, gapBetween, isSaid, said, sureOf, type Sense } from './reply-sense'
+import { areBeside, denied, gapBetween, isSaid, said, sureOf, type Sense } from './reply-sense'
 import type { Concept } from './reply-words/concept'
 
 /** A filter that must not be used: broken, leaking, fallen, frozen, or running too fast. */
@@ -15,6 +15,10 @@ export function findBreach(sense: Sense): Danger | null {
     ...said(sense, 'drip').filter((mark) => areBeside(sense, [mark], sealed, 3)),
   ]
   const falls = said(sense, 'fall').filter((mark) => !isFallOfFlow(sense, mark))
+  // "Smells of puddle", "tastes like a wet dog".
+  const savours = said(sense, 'oddSmell', 'smell', 'taste')
+  const isSavour = (mark: Mark): boolean =>
+    savours.some((savour) => savour.to <= mark.from && gapBetween(sense, savour, mark) <= 1)
   const marks = [
     ...said(sense, 'broken', 'leak').filter((mark) => !isElsewhere(sense, mark)),
     ...said(sense, 'tooFast', 'frozen'),
@@ -24,7 +28,7 @@ export function findBreach(sense: Sense): Danger | null {
     ...said(sense, 'ooze').filter((mark) => isOfBody(sense, mark)),
     ...falls.filter((mark) => !isElsewhere(sense, mark)),
     ...rushes(sense),
-  ]
+  ].filter((mark) => !isSavour(mark))
   if (marks.length === 0) return null
   // "Very fast, thank you" may be joy over a washed filter; a mended leak may be none. A person asks.
   const isRushOnly = marks.every((mark) => mark.concept === 'fast') && isSaid(sense, 'thanks')
@@ -80,7 +84,10 @@ function nearness(sense: Sense, thing: Mark, mark: Mark): number {
 function rushes(sense: Sense): Mark[] {
   if (isSaid(sense, 'good', 'better')) return []
   const isInNoTime = sense.figures.spans.some((span) => span.minutes > 0 && span.minutes <= 1)
+  const isTooSoon = sense.figures.spans.some((span) => span.minutes > 0 && span.minutes <= 0.5)
   return [
+    // "15 seconds, that cannot be right".
+    ...(isTooSoon ? denied(sense, 'good', 'yes') : []),
     ...said(sense, 'fast').filter((mark) =>
       said(sense, 'very', 'sudden').some((word) => gapBetween(sense, word, mark) === 0),
     ),

@@ -89,6 +89,7 @@ export function denyMarks(marks: readonly Mark[], tokens: readonly Token[]): Mar
 
 function denyBy(mark: Mark, field: Field): void {
   if (mark.concept === 'not' && !denyForward(mark, field, forwardReach)) denyFinal(mark, field)
+  if (mark.concept === 'not') denyDid(mark, field)
   if (mark.concept === 'notNext') denyForward(mark, field, 1)
   if (mark.concept === 'notBack' && !isPlea(mark, field)) denyBackward(mark, field, backwardReach)
   if (mark.concept === 'notPlus') denyPlus(mark, field)
@@ -111,6 +112,14 @@ function denyFinal(denial: Mark, field: Field): void {
   for (const mark of field.marks) {
     if (mark.to === denial.from && ['fast', 'good', 'better', 'clean'].includes(mark.concept))
       mark.denied = true
+  }
+}
+
+/** "I did not": the denial stands after the verb that it denies. */
+function denyDid(denial: Mark, { marks, tokens }: Field): void {
+  for (const mark of marks) {
+    const isDid = tokens[mark.to - 1]?.text === 'did' && mark.to === denial.from
+    if (isDid && mark.concept === 'done') mark.denied = true
   }
 }
 

@@ -93,7 +93,9 @@ function bareFigure(sense: Sense): Figure | null {
 
 /** How much of the text is the number itself: "about 12 now" against a story with a number in it. */
 export function isMostlyFigure(sense: Sense): boolean {
-  const others = sense.words - sense.figures.bare.length
+  const times = said(sense, 'past', 'now', 'but', 'and').map((mark) => mark.to - mark.from)
+  const timing = times.reduce((sum, words) => sum + words, 0)
+  const others = sense.words - sense.figures.bare.length - timing
   return sense.asked === 'flow'
     ? others <= 6 && sense.unknownWords <= 2
     : others <= 4 && sense.unknownWords <= 1

@@ -12,6 +12,7 @@ export function findIllness(sense: Sense): Danger | null {
     ...beside(sense, ['pain'], ['belly', 'child'], 5),
     ...beside(sense, ['belly'], ['problem', 'bad', 'long'], 4),
     ...beside(sense, ['stool'], ['water', 'long'], 4),
+    ...often(sense),
     ...beside(sense, ['body'], ['odd', 'pain', 'bad', 'frail', 'dirty'], 3),
     ...(isNamed(sense, 'wrongNumber', 'business') ? [] : said(sense, 'care')).filter(
       (mark) => !isLikened(sense, mark),
@@ -21,6 +22,12 @@ export function findIllness(sense: Sense): Danger | null {
   if (ills.length > 0) return { kind: 'unwell', sure: sureOf(0.9, ills) }
   const bellies = beside(sense, ['belly'], ['child', 'person'], 4)
   return bellies.length > 0 ? { kind: 'unwell', sure: sureOf(0.65, bellies) } : null
+}
+
+/** "Has been running to the toilet since last night". */
+function often(sense: Sense): Mark[] {
+  if (!isNamed(sense, 'child', 'person', 'pronoun')) return []
+  return beside(sense, ['stool'], ['flow', 'ago', 'very', 'all', 'past', 'again', 'stopWord'], 4)
 }
 
 /** "Our goat is sick". */
@@ -53,13 +60,16 @@ function dangerSigns(sense: Sense): Mark[] {
   const sleepy = said(sense, 'sleepy').filter((mark) =>
     areBeside(sense, [mark], [...patients.filter((other) => other !== mark), ...refusing], 8),
   )
+  // "He is soft and all bent" is the filter by the fire.
+  const bodies: Concept[] = isNamed(sense, 'broken') ? ['child', 'person'] : people
+  const limp = beside(sense, ['limp'], bodies, 10)
   return [
     ...said(sense, 'sign'),
     ...(isOfWater ? [] : refusing),
     ...sleepy,
     ...unfed(sense),
     ...unroused(sense),
-    ...beside(sense, ['limp'], people, 10),
+    ...limp,
     ...beside(sense, ['frail', 'sleepy'], ['drink'], 4),
     ...beside(sense, ['blood'], ['ill', 'vomit', 'stool', 'belly'], 8),
     ...beside(sense, ['vomit'], ['all'], 3),

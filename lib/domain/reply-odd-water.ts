@@ -13,8 +13,11 @@ import {
 
 /** Water that must not be drunk: colour, smell, taste, fuel, things in it. */
 export function findOddWater(sense: Sense): Danger | null {
-  const water = said(sense, 'water', 'flow', 'fill', 'drink')
-  const strong = said(sense, 'oddSmell', 'fuel')
+  const water = said(sense, 'water', 'flow', 'fill', 'drink', 'cup')
+  // "The ring has rotted, send one": the ring is worn, the water is not spoken of.
+  const isOfPart = (mark: Mark): boolean =>
+    isSaid(sense, 'need') && water.length === 0 && areBeside(sense, [mark], said(sense, 'piece'), 3)
+  const strong = said(sense, 'oddSmell', 'fuel').filter((mark) => !isOfPart(mark))
   const goods = said(sense, 'good')
   const smells = said(sense, 'smell', 'taste').filter(
     (mark) =>

@@ -33,7 +33,7 @@ export function optOutSureness(sense: Sense): number {
   if (refused.length > 0 && !isUnread && !isSaid(sense, 'ask')) return sureOf(0.85, refused)
   const ends = said(sense, 'end').filter((mark) => mark.likeness !== 'guessed')
   if (areBeside(sense, ends, said(sense, 'texts', 'phone'), 3) && !isSaid(sense, 'ask')) return 0.85
-  if (isUnwanted(sense)) return 0.8
+  if (isUnwanted(sense) || isTired(sense)) return 0.8
   const stops = said(sense, 'stopWord').filter((mark) => mark.likeness !== 'guessed')
   if (stops.length > 0 && areBeside(sense, stops, said(sense, 'texts'), 3))
     // "Hold the reminders, first help me: no water": a person reads what is to stop.
@@ -64,6 +64,14 @@ function isUnwanted(sense: Sense): boolean {
     (text) => !sense.marks.some((mark) => mark.concept === 'need' && mark.from === text.from),
   )
   return areBeside(sense, wishes, texts, 5) && !isSaid(sense, 'ask')
+}
+
+/** "Message after message, leave us": no word of ending, yet nothing else is meant. */
+function isTired(sense: Sense): boolean {
+  const texts = said(sense, 'texts', 'phone')
+  if (isSaid(sense, 'ask', 'receive')) return false
+  const isWeary = areBeside(sense, said(sense, 'fedUp'), texts, 6)
+  return isWeary || (isSaid(sense, 'leaveMe') && texts.length > 0)
 }
 
 /** "Please stop", "basta ya": nothing is said but the stop and good manners. */

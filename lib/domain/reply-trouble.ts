@@ -43,7 +43,8 @@ export function noFlowSureness(sense: Sense): number {
   const strong = [
     ...[...dry, ...none, ...falling, ...idle, ...lacking],
     ...[...still, ...said(sense, 'blocked', 'dry')],
-  ].filter((mark) => !isAlmost(sense, mark))
+  ].filter((mark) => !isAlmost(sense, mark) && !isOfTool(sense, mark))
+  if (isSoundAnswer(sense)) return 0
   if (strong.length > 0) return sureOf(0.85, strong)
   if (hasBareNothing(sense)) return 0.75
   if (!isSaid(sense, 'none') || isNamed(sense, 'done', 'wash', 'change', 'notYet', 'ask')) return 0
@@ -53,6 +54,17 @@ export function noFlowSureness(sense: Sense): number {
   const isAnswer = sense.asked === 'flow' || sense.asked === 'step'
   if (isAnswer) return sense.words <= 4 ? 0.7 : 0
   return sense.words >= 2 && sense.words <= 4 && sense.unknownWords <= 1 ? 0.62 : 0
+}
+
+/** "The syringe is stuck, send one": it is the syringe that lets nothing through. */
+function isOfTool(sense: Sense, mark: Mark): boolean {
+  return isSaid(sense, 'need') && areBeside(sense, [mark], said(sense, 'tool'), 3)
+}
+
+/** "Not cracked, not leaking, nothing" answers what a step asks. */
+function isSoundAnswer(sense: Sense): boolean {
+  const sound = denied(sense, 'broken', 'leak', 'fall', 'frozen')
+  return sense.asked === 'step' && sound.length > 0 && !isSaid(sense, 'but', 'water', 'flow')
 }
 
 /** "Almost no water": little, not none. */
@@ -121,6 +133,7 @@ export function slowSureness(sense: Sense): number {
     ...said(sense, 'drip', 'long'),
     ...said(sense, 'ooze').filter((mark) => !isOfBody(sense, mark)),
     ...unfilled(sense),
+    ...spent(sense),
     ...denied(sense, 'fast', 'better'),
     ...little,
     ...butLittle,
@@ -137,12 +150,24 @@ export function slowSureness(sense: Sense): number {
   return isStep && isSaid(sense, 'little') && sense.words <= 3 ? 0.65 : 0
 }
 
+/** "It has lost its strength", "by the time I have a cup". */
+function spent(sense: Sense): Mark[] {
+  const losses = sense.marks.filter((mark) =>
+    ['not', 'notNext', 'notAround', 'notPlus', 'notBack', 'lack', 'lost', 'little'].includes(
+      mark.concept,
+    ),
+  )
+  const weak = said(sense, 'strength').filter((mark) => areBeside(sense, [mark], losses, 3))
+  const vessels = said(sense, 'cup', 'container', 'fill')
+  return [...weak, ...(vessels.length > 0 ? said(sense, 'meanwhile') : [])]
+}
+
 /** "The bottle is not even half full", "still half". */
 function unfilled(sense: Sense): Mark[] {
   const denials = sense.marks.filter((mark) =>
     ['not', 'notNext', 'notAround', 'notPlus', 'notBack', 'still'].includes(mark.concept),
   )
-  const vessels = said(sense, 'container', 'fill')
+  const vessels = said(sense, 'container', 'cup', 'fill')
   return said(sense, 'full').filter(
     (mark) => areBeside(sense, [mark], denials, 3) && areBeside(sense, [mark], vessels, 5),
   )

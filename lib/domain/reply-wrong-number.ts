@@ -9,7 +9,7 @@ export function wrongNumberSureness(sense: Sense): number {
     return sureOf(0.8, mistaken)
   }
   if (deniesName(sense) || deniesPhone(sense) || namesOwner(sense)) return 0.7
-  if (isElsewhereReached(sense) || isNobodyHere(sense)) return 0.65
+  if (isElsewhereReached(sense) || isNobodyHere(sense) || isOfAnother(sense)) return 0.65
   // "Who are you? I have no filter": alone either may be of a household.
   const hasNone = areBeside(sense, said(sense, 'lack', 'not'), said(sense, 'filter'), 2)
   if (isSaid(sense, 'who') && hasNone) return 0.75
@@ -46,6 +46,23 @@ function isElsewhereReached(sense: Sense): boolean {
       [1, 2, 3].some((back) => isThisWord(sense, mark.from - back)),
   )
 }
+
+/** "This is Pastor Ben's line": of this phone another owner is told. */
+function isOfAnother(sense: Sense): boolean {
+  if (isNamed(sense, 'filter', 'water', 'need', 'flow', 'moved')) return false
+  return said(sense, 'phone').some((phone) => {
+    const backs = [2, 3, 4, 5].filter((back) => isThisWord(sense, phone.from - back))
+    const from = phone.from - Math.min(...backs)
+    const owner = sense.tokens.slice(from, phone.from).map((token) => token.text)
+    return backs.length > 0 && !owner.some((word) => ownWords.has(word))
+  })
+}
+
+const ownWords = new Set(
+  'my our mi mis mon ma nuestro notre amar amader আমার আমাদের new nuevo nouveau notun নতুন'.split(
+    ' ',
+  ),
+)
 
 /** "No Mama Asha here". */
 function isNobodyHere(sense: Sense): boolean {

@@ -123,16 +123,18 @@ function readTrouble(sense: Sense): ReplyReading | null {
   return isStopOrStopped(sense) ? { kind: 'unclear', sure: 0.5 } : null
 }
 
-/** "Not yet, the pump has no water": it is not the filter that gives none. */
+/** "Not yet, the pump has no water", "no water to wash it with": it is not the filter that gives none. */
 function isReasonNotToStart(sense: Sense): boolean {
   const isCare = sense.asked === 'wash' || sense.asked === 'change'
+  if (!isCare || isNamed(sense, 'filter', 'drip', 'outlet', 'done')) return false
   // Bengali "pore" is "later" and "falls".
   const first = said(sense, 'notYet').some(
     (mark) =>
       mark.from <= 1 &&
       !sense.marks.some((other) => other.concept === 'flow' && other.from === mark.from),
   )
-  return isCare && first && !isNamed(sense, 'filter', 'drip', 'outlet')
+  const isForWash = isNamed(sense, 'wash') && isSaid(sense, 'day', 'future', 'notYet', 'now')
+  return first || (isForWash && !isNamed(sense, 'flow'))
 }
 
 function readFigure(

@@ -52,6 +52,7 @@ export const concepts = [
   'source', // the river, the well
   'animal', // a sick goat makes nobody unwell
   'business', // "this is a shop": not the family that is meant
+  'cup', // what one drinks from
   'full', // full or half: what a bottle is not yet
   'elsewhere', // what may break or fall without harm to the water: a phone, a bus, a roof
   'body', // skin, eyes, head: coloured or hurting it is illness
@@ -70,6 +71,8 @@ export const concepts = [
   'bad',
   'better',
   'same', // no change
+  'strength', // "no strength": slow
+  'meanwhile', // "by the time": with a cup or a bottle, slow
   'almost', // before a denial: little, not nothing
   // danger
   'broken',
@@ -131,6 +134,8 @@ export const concepts = [
   'moved',
   'stopWord',
   'stopAsk',
+  'fedUp', // of the texts: an opt-out
+  'leaveMe',
   'end', // to end or take away: with texts or a phone an opt-out
   'startWord',
   'helpWord',

@@ -72,7 +72,8 @@ export const frContact: LanguagePack['concepts'] = {
     sortir de ce programme, sortir de votre, abandonne le programme, je me retire, retirons,
     annule mon, annuler mon, annulez l, resili*, mettre fin, mettez fin, cessez de m,
     cessez de nous, cessez d envoyer, cessez les, cessez ces, cessez immediatement, harcelement,
-    harcel*, spam, bloque ce, bloquer ce, me retirer de, me retirer du, marre de recevoir`,
+    harcel*, spam, bloque ce, bloquer ce, me retirer de, me retirer du, marre de recevoir,
+    rayez nous, radiez moi`,
   end: `cesser, cessez, finir, finissez, terminer, supprimer, supprimez, supprime, effacer, effacez, retirer, retirez, enlever, enlevez, suspendre`,
   itStopped:
     's est arrete, s est arretee, s arrete, ca s arrete, c est arrete, a arrete, c arrete, ca arrete, sa sarrete, arrete de goutter, arrete de couler goutte, marche pas, marche plus, fonctionne pas, fonctionne plus, ne marche pas, ne marche plus, ne fonctionne pas, ne fonctionne plus, march pas, march plus, marche pa, marche pu, marche po, fonctione pas, fonctione plus, en panne, panne, hors service, filtre arrete, eau arretee',
@@ -114,7 +115,8 @@ export const frContact: LanguagePack['concepts'] = {
     on n a pas de filtre, on a pas de filtre, ai recupere ce numero, recupere ce numero,
     recupere cette puce, nouveau proprietaire, j ai achete ce numero, ai achete cette,
     nouveau titulaire, c est le mien maintenant, est a moi maintenant, appartient maintenant,
-    m appelle pas, trompee`,
+    m appelle pas, trompee, ancien proprietaire, verifiez vos listes, verifiez vos fichiers,
+    jamais eu ca, n avons jamais eu, n ai jamais eu`,
   who: 'qui est ce, c est qui, qui etes vous, qui es tu, qui est la, qui ecrit, vous etes qui, t es qui, tes qui, ki c, cki, c ki, de la part de qui, qui m ecrit',
   name: `marie, jean, pierre, paul, jacques, moussa, amadou, aminata, fatou, awa, ibrahim, ousmane, mamadou, aissatou, mariam, rose, claude, andre, michel, sophie`,
   moved: `demenage, demenagé, demenager, demenageons, demenagement, demenages, demenagés,
@@ -131,7 +133,8 @@ export const frContact: LanguagePack['concepts'] = {
     retournes au village, de retour au village, dans un autre, dans une autre ville,
     dans une autre maison, une autre maison, une autre ville, un autre village, nouveau quartier,
     nouveau logement, nouveau village, nouvelle ville, autre logement, a l etranger, en exil,
-    refugies, refugie, demenag*, deménag*, expulse*`,
+    refugies, refugie, demenag*, deménag*, expulse*, quitte la cour, quitte cette cour,
+    quitte la concession, quitte le logement`,
   startWord:
     'commencer, recommencer, reprendre, start, demarrer, reactiver, reabonner, m abonner, abonner, abonnez moi, recevoir a nouveau, reprendre les messages, m inscrire, inscrivez moi, je veux recevoir',
   helpWord:
@@ -139,7 +142,12 @@ export const frContact: LanguagePack['concepts'] = {
   gave: `donne a, donne au, donne le filtre, offert, offerte, legue, cede a, vendu, vendue, vends,
     ai vendu, avons vendu, confie, prete a, laisse a, laisse chez, laisse la bas, laisse au village,
     rendu le filtre, pas pris, pas emporte, pas amene, pas emmene, reste la bas, reste au village,
-    avec ma soeur maintenant, chez ma soeur, chez mon frere, chez ma mere`,
+    avec ma soeur maintenant, chez ma soeur, chez mon frere, chez ma mere, parti chez, est chez ma,
+    est chez mon, chez ma, chez mon`,
   business: `pharmacie, boutique, magasin, garage, atelier, banque, restaurant, hotel, boulangerie, salon,
     coiffeur, coiffeuse, quincaillerie, entreprise, societe, kiosque, maquis, superette`,
+  fedUp: `par dessus la tete, ras le bol, marre, assez de, plein le dos, plein le cul, fatigue de,
+    fatiguee de, lasse de, las de, enerv*, agac*, embet*, derang*, harcel*, saoul*, gonfle,
+    gonflent, trop de`,
+  leaveMe: `lachez nous, lachez moi, laissez nous, laissez moi, foutez nous, fichez nous`,
 }

@@ -13,7 +13,9 @@ export const frPack: LanguagePack = {
     douze 12, treize 13, quatorze 14, quinze 15, kinze 15, seize 16, dix sept 17, dix huit 18,
     dix neuf 19, vingt 20, vint 20, vin 20, trente 30, quarante 40, cinquante 50, soixante 60,
     soixante dix 70, quatre vingt 80, quatre vingts 80, quatre vingt dix 90, cent 100, six 6,
-    vingt et un 21, trente et un 31, quarante et un 41`,
+    onz 11, douz 12, trez 13, katorz 14, kinz 15, sez 16, trant 30, karant 40, cinkant 50, une dizaine de 10,
+    dizaine de 10, une quinzaine de 15, quinzaine de 15, une vingtaine de 20, vingtaine de 20, une trentaine de 30,
+    trentaine de 30, une quarantaine de 40, quarantaine de 40, une cinquantaine de 50, cinquantaine de 50, vingt et un 21, trente et un 31, quarante et un 41`,
   weakNumbers: `un 1, une 1, neuf 9, demi 0.5, demie 0.5`,
   units: {
     minute:
