@@ -51,7 +51,7 @@ function isOpenedByQuestion(sense: Sense): boolean {
 function isPlainQuestion(sense: Sense): boolean {
   return (
     said(sense, 'ask').some((mark) => mark.to - mark.from >= 2) &&
-    !isSaid(sense, 'need', 'helpWord')
+    !isSaid(sense, 'need', 'lost', 'worn', 'helpWord')
   )
 }
 
@@ -113,8 +113,10 @@ function timeless(sense: Sense): Mark[] {
 }
 
 function moved(sense: Sense): Answer | null {
-  const given = said(sense, 'gave').filter((mark) =>
-    areBeside(sense, [mark], said(sense, 'filter', 'person', 'child'), 4),
+  // "Sold it": a word of giving at the head of a text is of the filter.
+  const given = said(sense, 'gave').filter(
+    (mark) =>
+      mark.from <= 2 || areBeside(sense, [mark], said(sense, 'filter', 'person', 'child'), 4),
   )
   const marks = [...said(sense, 'moved'), ...given]
   return marks.length > 0 ? { kind: 'moved', sure: sureOf(0.85, marks) } : null
@@ -171,6 +173,8 @@ function done(sense: Sense): Answer | null {
     return { kind: 'done', sure: 0.65 }
   }
   if (isOver(sense)) return { kind: 'done', sure: 0.75 }
+  const isSound = areBeside(sense, said(sense, 'filter'), said(sense, 'good'), 4)
+  if (isSound && !isSaid(sense, 'not', 'ask', 'if')) return { kind: 'done', sure: 0.7 }
   const runsWell = areBeside(sense, said(sense, 'flow'), said(sense, 'good', 'fast'), 3)
   const isWashOk = isSaid(sense, 'wash') && isSaid(sense, 'yes', 'good') && sense.words <= 3
   const isCleaned = sense.asked === 'wash' && isSaid(sense, 'clean')
@@ -235,7 +239,7 @@ function soundParts(sense: Sense): Answer | null {
   // "No, all is tight".
   const first = said(sense, 'no').filter((mark) => mark.from === 0)
   if (first.length > 0 && isSaid(sense, 'done', 'yes')) return { kind: 'no', sure: 0.7 }
-  if (isSaid(sense, 'yes')) return null
+  if (isSaid(sense, 'yes') || (isSaid(sense, 'done') && isSaid(sense, 'good'))) return null
   const safe = denied(sense, 'broken', 'leak', 'fall', 'frozen')
   return safe.length > 0 ? { kind: 'no', sure: sureOf(0.75, safe) } : null
 }

@@ -11,7 +11,11 @@ export function findBreach(sense: Sense): Danger | null {
     (mark) => !outlets.some((outlet) => outlet.from === mark.from),
   )
   const oozing = [
-    ...said(sense, 'flow', 'drip').filter((mark) => areBeside(sense, [mark], edges, 4)),
+    ...said(sense, 'flow', 'drip').filter(
+      (mark) =>
+        areBeside(sense, [mark], edges, 4) &&
+        !areBeside(sense, [mark], said(sense, 'good', 'better'), 2),
+    ),
     ...said(sense, 'drip').filter((mark) => areBeside(sense, [mark], sealed, 3)),
   ]
   const falls = said(sense, 'fall').filter((mark) => !isFallOfFlow(sense, mark))
@@ -21,7 +25,9 @@ export function findBreach(sense: Sense): Danger | null {
     savours.some((savour) => savour.to <= mark.from && gapBetween(sense, savour, mark) <= 1)
   const marks = [
     ...said(sense, 'broken', 'leak').filter((mark) => !isElsewhere(sense, mark)),
-    ...said(sense, 'tooFast', 'frozen'),
+    ...said(sense, 'frozen'),
+    // "Dripping like a tap".
+    ...said(sense, 'tooFast').filter((mark) => !areBeside(sense, [mark], said(sense, 'drip'), 1)),
     // "The upper one overflows, the lower one is empty": it does not run.
     ...(isSaid(sense, 'none') ? [] : said(sense, 'overflow')),
     ...oozing,
@@ -75,6 +81,15 @@ function isElsewhere(sense: Sense, mark: Mark): boolean {
   return names.some((name) => foreign.includes(name)) && !names.includes('container')
 }
 
+/** "Was always 5 minutes, today 10 seconds". */
+function isFarFromBefore({ figures }: Sense): boolean {
+  const all = [
+    ...figures.spans.map((span) => span.minutes),
+    ...figures.bare.map((one) => one.value),
+  ]
+  return Math.max(...all) >= Math.min(...all) * 8
+}
+
 /** What stands before a verb is rather its subject than what follows. */
 function nearness(sense: Sense, thing: Mark, mark: Mark): number {
   return gapBetween(sense, thing, mark) + (thing.from < mark.from ? 0 : 1.5)
@@ -87,7 +102,8 @@ function rushes(sense: Sense): Mark[] {
   const isTooSoon = sense.figures.spans.some((span) => span.minutes > 0 && span.minutes <= 0.5)
   return [
     // "15 seconds, that cannot be right".
-    ...(isTooSoon ? denied(sense, 'good', 'yes') : []),
+    ...(isTooSoon ? [...denied(sense, 'good', 'yes'), ...said(sense, 'bad')] : []),
+    ...(isTooSoon && isFarFromBefore(sense) ? said(sense, 'now', 'past') : []),
     ...said(sense, 'fast').filter((mark) =>
       said(sense, 'very', 'sudden').some((word) => gapBetween(sense, word, mark) === 0),
     ),

@@ -64,7 +64,10 @@ function dangerSigns(sense: Sense): Mark[] {
   const bodies: Concept[] = isNamed(sense, 'broken') ? ['child', 'person'] : people
   const limp = beside(sense, ['limp'], bodies, 10)
   return [
-    ...said(sense, 'sign'),
+    // "The seal is dead".
+    ...said(sense, 'sign').filter(
+      (mark) => !said(sense, 'piece').some((piece) => piece.to === mark.from),
+    ),
     ...(isOfWater ? [] : refusing),
     ...sleepy,
     ...unfed(sense),

@@ -143,7 +143,12 @@ function readerOf(word: Known, order: readonly Language[]): Language | null {
   return null
 }
 
-function candidates(known: readonly (Known | null)[], order: readonly Language[]): Mark[] {
+function candidates(
+  known: readonly (Known | null)[],
+  order: readonly Language[],
+  own: Language,
+): Mark[] {
+  const likely = [order[0] ?? own, own]
   const marks: Mark[] = []
   known.forEach((word, from) => {
     if (!word) return
@@ -153,7 +158,7 @@ function candidates(known: readonly (Known | null)[], order: readonly Language[]
         for (const entry of entriesStartingWith(language, key)) {
           if (entry.keys.length === 1 && language !== reader) continue
           const to = matchEnd(entry, from, known)
-          if (to === null || isForeignChance(known.slice(from, to), language, order)) continue
+          if (to === null || isForeignChance(known.slice(from, to), language, likely)) continue
           const likeness = likenessOf(from, to, language, known)
           marks.push({ concept: entry.concept, from, to, language, likeness, denied: false })
         }
@@ -220,7 +225,7 @@ export function markTokens(tokens: readonly Token[], own: Language): Marked {
   eachWord(tokens, known, (word, text) => guessWord(word, text, [main, own]))
   const order = [...new Set([main, ...languageOrder(own)])]
   return {
-    marks: keepLongest(candidates(known, order), order),
+    marks: keepLongest(candidates(known, order, own), order),
     main,
     knownWords: known.map((word) => word === null || word.size > 0),
   }

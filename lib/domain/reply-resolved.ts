@@ -4,7 +4,14 @@ import type { Concept } from './reply-words/concept'
 
 /** Troubles that the text itself says are over no longer speak: a stopped leak, an illness got over. */
 export function dropResolved(marks: readonly Mark[], tokens: readonly Token[]): Mark[] {
-  return dropRecovered(endLeaks(marks, tokens), tokens)
+  return dropRecovered(endLeaks(dropLittleThings(marks), tokens), tokens)
+}
+
+/** "Le petit joint" is a small seal, no child. */
+function dropLittleThings(marks: readonly Mark[]): Mark[] {
+  const isThing = (at: number): boolean =>
+    marks.some((mark) => mark.from === at && ['piece', 'filter', 'cloth'].includes(mark.concept))
+  return marks.filter((mark) => mark.concept !== 'child' || !isThing(mark.to))
 }
 
 const ends: ReadonlySet<Concept> = new Set<Concept>(['ceased', 'stopWord', 'itStopped', 'blocked'])

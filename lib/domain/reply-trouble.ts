@@ -134,7 +134,7 @@ export function slowSureness(sense: Sense): number {
     ...said(sense, 'ooze').filter((mark) => !isOfBody(sense, mark)),
     ...unfilled(sense),
     ...spent(sense),
-    ...denied(sense, 'fast', 'better'),
+    ...denied(sense, 'fast', 'tooFast', 'better'),
     ...little,
     ...butLittle,
     ...weakly,

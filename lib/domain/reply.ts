@@ -93,6 +93,7 @@ function readUrgent(sense: Sense): ReplyReading | null {
 
 /** "It stopped", "water stop", "stopped dripping": it could be the texts, a leak or the water. */
 function isStopOrStopped(sense: Sense): boolean {
+  if (isReasonNotToStart(sense)) return false
   if (isSaid(sense, 'itStopped')) return true
   if (isSaid(sense, 'notYet')) return false
   return (
@@ -133,7 +134,8 @@ function isReasonNotToStart(sense: Sense): boolean {
       mark.from <= 1 &&
       !sense.marks.some((other) => other.concept === 'flow' && other.from === mark.from),
   )
-  const isForWash = isNamed(sense, 'wash') && isSaid(sense, 'day', 'future', 'notYet', 'now')
+  const isForWash =
+    isNamed(sense, 'wash', 'notYet') && isSaid(sense, 'day', 'future', 'notYet', 'now')
   return first || (isForWash && !isNamed(sense, 'flow'))
 }
 

@@ -144,7 +144,8 @@ export const frTalk: LanguagePack['concepts'] = {
     comprend rien, comprends rien, rien compris, pige pas, rien pige, sais pas faire, savons pas,
     savez vous, que signifie, ca veut dire, c est a dire, ca sert a, sert a quoi, a quoi ca sert,
     permettez moi de demander, vous demander, demander si, me demande, je me demande,
-    voulais savoir, veux savoir, voudrais comprendre, la video, video, dessin, brochure, tuto`,
+    voulais savoir, veux savoir, voudrais comprendre, la video, video, dessin, brochure, tuto,
+    pas saisi, pas capte`,
   thanks: `merci, mercii, mrc, mrci, mersi, merci beaucoup, merci bcp, merci bien, grand merci,
     milles mercis, mercis, remercie, remercions, reconnaissant, reconnaissante,
     que dieu vous benisse, dieu vous benisse, dieu vous garde, dieu te benisse, benisse, gentil,
@@ -171,7 +172,7 @@ export const frTalk: LanguagePack['concepts'] = {
   no: `non, nan, nn, non non, nonn, negatif, emojino, pas du tout, no, nop, que non, mais non,
     non merci, pas vraiment, naan, nann, nonnn, nion, pas question, jamais de la vie,
     absolument pas, aucunement, nullement, certainement pas, que nenni, non madame, non monsieur,
-    je crois pas, je ne crois pas, je pense pas, je ne pense pas, no no, du tout .`,
+    je crois pas, je ne crois pas, je pense pas, je ne pense pas, no no`,
   greeting:
     'bonjour, bjr, bonsoir, bsr, salut, slt, coucou, cc, hello, madame, monsieur, mr, mme, mademoiselle, docteur bonjour, cher, chere, messieurs, mesdames, chef, patron, tonton, tata, mon frere, ma soeur, bonne, excusez moi, pardon, desole, desolee, bon, ben, bah, alors, euh',
   please:
