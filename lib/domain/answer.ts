@@ -84,8 +84,8 @@ export function answerTo(input: AnswerInput): AnswerAct[] {
     case 'yes':
     case 'no':
       return pickActs(input)
+    // "Later" refuses nothing: the step, like the prompt, goes on waiting for its answer.
     case 'not-yet':
-      return input.waitingFor ? [stepAnswer(input.waitingFor, 'not done')] : []
     case 'thanks':
       return []
     case 'need-part':

@@ -92,8 +92,12 @@ function notYet(sense: Sense): Answer | null {
   const isCare = sense.asked === 'wash' || sense.asked === 'change'
   const unable = isCare ? denied(sense, 'can', 'be') : []
   const days = isSaid(sense, 'done') ? [] : said(sense, 'day')
+  // Bengali "pore" is "later" and "falls": "valo pore" runs well.
+  const isFall = (mark: Mark): boolean =>
+    isSaid(sense, 'good', 'better', 'water', 'done') &&
+    said(sense, 'flow').some((flow) => flow.from === mark.from)
   const marks = [
-    ...said(sense, 'notYet', 'forgot'),
+    ...said(sense, 'notYet', 'forgot').filter((mark) => !isFall(mark)),
     ...days,
     ...undone,
     ...unable,
@@ -173,6 +177,9 @@ function done(sense: Sense): Answer | null {
     return { kind: 'done', sure: 0.65 }
   }
   if (isOver(sense)) return { kind: 'done', sure: 0.75 }
+  // "Works well, nobody ill".
+  const isAllWell = isSaid(sense, 'good') && isDenied(sense, ...dangers)
+  if (isAllWell && sense.asked === 'none') return { kind: 'done', sure: 0.7 }
   const isSound = areBeside(sense, said(sense, 'filter'), said(sense, 'good'), 4)
   if (isSound && !isSaid(sense, 'not', 'ask', 'if')) return { kind: 'done', sure: 0.7 }
   const runsWell = areBeside(sense, said(sense, 'flow'), said(sense, 'good', 'fast'), 3)
@@ -255,7 +262,9 @@ function yesNo(sense: Sense): Answer | null {
   if (safe.length > 0) return { kind: 'no', sure: sureOf(0.75, safe) }
   if (yes.length > 0 && no.length > 0) return null
   // "Ok?" asks whether all is well.
-  const isDoubted = sense.unknownWords > 3 || (sense.text.includes('?') && sense.words <= 2)
+  const isOfPart = sense.unknownWords > 0 && isNamed(sense, 'piece', 'edge', 'container', 'filter')
+  const isQuery = sense.text.includes('?') && sense.words <= 2
+  const isDoubted = sense.unknownWords > 3 || isQuery || isOfPart
   if (yes.length > 0) return { kind: 'yes', sure: sureOf(isDoubted ? 0.5 : 0.85, yes) }
   if (no.length > 0) return { kind: 'no', sure: noSureness(sense) }
   const isPlainNo = isSaid(sense, 'not') && !isDenied(sense, 'drip', 'texts', 'phone')

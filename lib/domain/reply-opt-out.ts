@@ -31,6 +31,7 @@ export function optOutSureness(sense: Sense): number {
   const isUnread = isNamed(sense, 'receive', 'see')
   const refused = denied(sense, 'texts')
   if (refused.length > 0 && !isUnread && !isSaid(sense, 'ask')) return sureOf(0.85, refused)
+  if (hasOrderOfItsOwn(sense)) return 0.85
   const ends = said(sense, 'end').filter((mark) => mark.likeness !== 'guessed')
   if (areBeside(sense, ends, said(sense, 'texts', 'phone'), 3) && !isSaid(sense, 'ask')) return 0.85
   if (isUnwanted(sense) || isTired(sense)) return 0.8
@@ -48,6 +49,21 @@ function isStopOfSomethingStrange(sense: Sense): boolean {
   const isOrder = said(sense, 'stopWord').some((mark) => mark.to - mark.from >= 2)
   const isOnlyManners = sense.marks.every((mark) => manners.has(mark.concept))
   return isOrder && isOnlyManners && sense.words <= 6 && !sense.text.includes('?')
+}
+
+/** "Why do you keep texting me? Stop it": the order is a sentence by itself, of the texts named before. */
+function hasOrderOfItsOwn(sense: Sense): boolean {
+  const isBreak = (at: number): boolean => (sense.tokens[at]?.kind ?? 'break') === 'break'
+  const isOnlyManners = (at: number): boolean =>
+    isBreak(at) ||
+    sense.marks.some((mark) => mark.from <= at && at < mark.to && manners.has(mark.concept))
+  return (
+    isSaid(sense, 'texts') &&
+    said(sense, 'stopWord').some((stop) => {
+      if (stop.likeness === 'guessed' || !isBreak(stop.from - 1)) return false
+      return sense.tokens.slice(stop.from).every((_, at) => isOnlyManners(stop.from + at))
+    })
+  )
 }
 
 /** "STOP. Wrong number": the keyword is a sentence by itself. */

@@ -2,8 +2,8 @@ import type { LanguagePack } from './concept'
 
 /** Spanish: how people answer, ask, refuse and take their leave. */
 export const esTalk: LanguagePack['concepts'] = {
-  not: `no, ni, nunca, jamas, sin, tampoco, ninguno, ninguna, ningun, nadie, nada que, rechaza,
-    rehusa, se niega`,
+  not: `no, ni, nunca, jamas, sin, tampoco, ninguno, ninguna, ningun, nadie, nada que, rechaza, rehusa,
+    se niega, nada esta, nada se, nada tiene, nada anda`,
   ceased:
     'dejo de, dejaron de, deja de, deje de, dejen de, dejar de, ya no, paro de, para de, paran de, parar de, no mas',
   but: 'pero, pero igual, aunque, solo que, sin embargo, sino, pro, mas bien, peero',
@@ -51,7 +51,8 @@ export const esTalk: LanguagePack['concepts'] = {
     se lavo ayer, recien lavado, recien lavada, recien lo lave, recien cambiado, recien lo cambie,
     puesto el nuevo, puse el nuevo, puse la nueva, puse las nuevas, le pusimos, le cambie,
     le cambiamos, le lave, le lavamos, me lo limpio, lo limpio mi, lo lavo mi, lo lavo ayer,
-    lo lavo hoy, lo cambio mi`,
+    lo lavo hoy, lo cambio mi, ya puesto, ya puesta, esta puesto, esta puesta, en su lugar,
+    quedo puesta, quedo puesto`,
   wash: `lavar, lavarlo, lavo, lavarla, limpiar, limpiarlo, limpio el, enjuagar, hacerlo, hacer,
     he lavado, he limpiado, he podido, pude, puedo hacerlo, podido, alcance, alcanzo el tiempo,
     pudimos, lavado el, lavar el, hacer eso, retrolavar, empezado, he hecho, hemos hecho,
@@ -218,7 +219,8 @@ export const esTalk: LanguagePack['concepts'] = {
     a la espera de, en espera de, quedo a la espera, quedo atento, quedo atenta, quedamos atentos,
     se hizo de dia, como suero, que sabe, no sabe, quien sabe, sabe cambiar*, sabe lavar*,
     sabe hacer*, sabe usar*, sabe si, sabe cuando, sabe que, saben que, saben si, sabe donde,
-    sabemos si, sabe poner*, al pendiente, estar pendiente, estan pendientes`,
+    sabemos si, sabe poner*, al pendiente, estar pendiente, estan pendientes, el partido,
+    un partido, partido de`,
   within: `en, dentro de, en unos`,
   notNext: `nada de, nada, nadita`,
   and: `y, e`,

@@ -73,7 +73,7 @@ export const frContact: LanguagePack['concepts'] = {
     annule mon, annuler mon, annulez l, resili*, mettre fin, mettez fin, cessez de m,
     cessez de nous, cessez d envoyer, cessez les, cessez ces, cessez immediatement, harcelement,
     harcel*, spam, bloque ce, bloquer ce, me retirer de, me retirer du, marre de recevoir,
-    rayez nous, radiez moi`,
+    rayez nous, radiez moi, faire partie de, plus de ca, fini avec ca, plus de cela`,
   end: `cesser, cessez, finir, finissez, terminer, supprimer, supprimez, supprime, effacer, effacez, retirer, retirez, enlever, enlevez, suspendre`,
   itStopped:
     's est arrete, s est arretee, s arrete, ca s arrete, c est arrete, a arrete, c arrete, ca arrete, sa sarrete, arrete de goutter, arrete de couler goutte, marche pas, marche plus, fonctionne pas, fonctionne plus, ne marche pas, ne marche plus, ne fonctionne pas, ne fonctionne plus, march pas, march plus, marche pa, marche pu, marche po, fonctione pas, fonctione plus, en panne, panne, hors service, filtre arrete, eau arretee',
@@ -116,7 +116,7 @@ export const frContact: LanguagePack['concepts'] = {
     recupere cette puce, nouveau proprietaire, j ai achete ce numero, ai achete cette,
     nouveau titulaire, c est le mien maintenant, est a moi maintenant, appartient maintenant,
     m appelle pas, trompee, ancien proprietaire, verifiez vos listes, verifiez vos fichiers,
-    jamais eu ca, n avons jamais eu, n ai jamais eu`,
+    jamais eu ca, n avons jamais eu, n ai jamais eu, pas celle que vous`,
   who: 'qui est ce, c est qui, qui etes vous, qui es tu, qui est la, qui ecrit, vous etes qui, t es qui, tes qui, ki c, cki, c ki, de la part de qui, qui m ecrit',
   name: `marie, jean, pierre, paul, jacques, moussa, amadou, aminata, fatou, awa, ibrahim, ousmane, mamadou, aissatou, mariam, rose, claude, andre, michel, sophie`,
   moved: `demenage, demenagé, demenager, demenageons, demenagement, demenages, demenagés,

@@ -43,7 +43,8 @@ export const frTalk: LanguagePack['concepts'] = {
     a lave, a nettoye, cest fai, c fai, c fe, se fai, c lave, lavage fait, nettoyage fait,
     lavage termine, tout est fait, bien lave, bien nettoye, travail fait, travail termine,
     mission accomplie, chose faite, comme vous avez dit, comme demande, comme vous m avez dit,
-    nouveau mis, nouvelle mise, est mis, est posee, est pose, posee, mise en place, mis en place`,
+    nouveau mis, nouvelle mise, est mis, est posee, est pose, posee, mise en place, mis en place,
+    en place`,
   wash: `laver, le laver, nettoyer, rincer, faire, le faire, nettoye le, pu laver, pu le laver,
     pu nettoyer, pu faire, pu le faire, pu, eu le temps, temps de, lavons, je lave, lavage,
     nettoyage, m en occuper, nettoie, rince le, nettoies, mesurer, chronometrer, verifier,
@@ -212,4 +213,5 @@ export const frTalk: LanguagePack['concepts'] = {
   worn: `use, usee, uses, usees, usé, usure, fini, finie, epuise, epuisee, trop vieux, trop vieille,
     vieilli, mort, morte, hs, h s, amincie, aminci, mince, plus bon, plus bonne, perime, perimee,
     arrive a la fin, en fin de vie, fin de vie`,
+  notNext: `personne`,
 }
