@@ -1,14 +1,29 @@
 import type { LanguagePack } from './concept'
+import { bnBreach } from './bn-breach'
+import { bnCare } from './bn-care'
 import { bnContact } from './bn-contact'
-import { bnDanger } from './bn-danger'
 import { bnEveryday } from './bn-everyday'
+import { bnIll } from './bn-ill'
+import { bnOdd } from './bn-odd'
+import { bnPeople } from './bn-people'
 import { bnTalk } from './bn-talk'
+import { bnWant } from './bn-want'
 import { bnWater } from './bn-water'
 
 /** Bengali as people text it, in its own script and in Latin letters. */
 export const bnPack: LanguagePack = {
   spelling: 'bengali',
-  concepts: { ...bnWater, ...bnDanger, ...bnTalk, ...bnContact },
+  concepts: {
+    ...bnWater,
+    ...bnBreach,
+    ...bnOdd,
+    ...bnPeople,
+    ...bnIll,
+    ...bnCare,
+    ...bnTalk,
+    ...bnWant,
+    ...bnContact,
+  },
   numbers: `একত্রিশ 31, বত্রিশ 32, তেত্রিশ 33, চৌত্রিশ 34, ছত্রিশ 36, সাঁইত্রিশ 37, আটত্রিশ 38, ঊনচল্লিশ 39, একচল্লিশ 41, বিয়াল্লিশ 42, তেতাল্লিশ 43, চুয়াল্লিশ 44, ছেচল্লিশ 46, সাতচল্লিশ 47, আটচল্লিশ 48, ঊনপঞ্চাশ 49, একান্ন 51, বায়ান্ন 52, তিপ্পান্ন 53, চুয়ান্ন 54, ছাপ্পান্ন 56, সাতান্ন 57, আটান্ন 58, ঊনষাট 59, botrish 32, tetrish 33, choutrish 34, chotrish 36, aatrish 38, biyallish 42, chuallish 44, chechollish 46, atchollish 48, দুই 2, দু 2, তিন 3, চার 4, পাঁচ 5, পাচ 5, ছয় 6, সাত 7, আট 8, দশ 10, এগারো 11, এগার 11,
     বারো 12, তেরো 13, তের 13, চৌদ্দ 14, পনেরো 15, পনের 15, ষোল 16, ষোলো 16, সতেরো 17,
     সতের 17, আঠারো 18, আঠার 18, উনিশ 19, ঊনিশ 19, বিশ 20, কুড়ি 20, একুশ 21, বাইশ 22, তেইশ 23,

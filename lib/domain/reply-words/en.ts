@@ -1,14 +1,29 @@
 import type { LanguagePack } from './concept'
+import { enBreach } from './en-breach'
+import { enCare } from './en-care'
 import { enContact } from './en-contact'
-import { enIllness } from './en-danger'
 import { enEveryday } from './en-everyday'
+import { enIll } from './en-ill'
+import { enOdd } from './en-odd'
+import { enPeople } from './en-people'
 import { enTalk } from './en-talk'
+import { enWant } from './en-want'
 import { enWater } from './en-water'
 
 /** English as people text it. */
 export const enPack: LanguagePack = {
   spelling: 'latin',
-  concepts: { ...enWater, ...enIllness, ...enTalk, ...enContact },
+  concepts: {
+    ...enWater,
+    ...enBreach,
+    ...enOdd,
+    ...enPeople,
+    ...enIll,
+    ...enCare,
+    ...enTalk,
+    ...enWant,
+    ...enContact,
+  },
   numbers: `two 2, three 3, four 4, five 5, six 6, seven 7, eight 8, nine 9, ten 10, eleven 11,
     twelve 12, thirteen 13, fourteen 14, fifteen 15, sixteen 16, seventeen 17, eighteen 18,
     nineteen 19, twenty 20, thirty 30, forty 40, fourty 40, fifty 50, sixty 60, seventy 70,

@@ -1,14 +1,29 @@
 import type { LanguagePack } from './concept'
+import { esBreach } from './es-breach'
+import { esCare } from './es-care'
 import { esContact } from './es-contact'
-import { esIllness } from './es-danger'
 import { esEveryday } from './es-everyday'
+import { esIll } from './es-ill'
+import { esOdd } from './es-odd'
+import { esPeople } from './es-people'
 import { esTalk } from './es-talk'
+import { esWant } from './es-want'
 import { esWater } from './es-water'
 
 /** Spanish as people text it; entries stand without accents, as the reader strips them. */
 export const esPack: LanguagePack = {
   spelling: 'spanish',
-  concepts: { ...esWater, ...esIllness, ...esTalk, ...esContact },
+  concepts: {
+    ...esWater,
+    ...esBreach,
+    ...esOdd,
+    ...esPeople,
+    ...esIll,
+    ...esCare,
+    ...esTalk,
+    ...esWant,
+    ...esContact,
+  },
   numbers: `dos 2, tres 3, cuatro 4, quatro 4, cinco 5, sinco 5, seis 6, siete 7, ciete 7, ocho 8,
     nueve 9, nuebe 9, diez 10, dies 10, once 11, onse 11, doce 12, dose 12, trece 13, trese 13,
     catorce 14, catorse 14, quince 15, quinse 15, dieciseis 16, diesiseis 16, diecisiete 17,

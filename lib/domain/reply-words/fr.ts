@@ -1,14 +1,29 @@
 import type { LanguagePack } from './concept'
+import { frBreach } from './fr-breach'
+import { frCare } from './fr-care'
 import { frContact } from './fr-contact'
-import { frIllness } from './fr-danger'
 import { frEveryday } from './fr-everyday'
+import { frIll } from './fr-ill'
+import { frOdd } from './fr-odd'
+import { frPeople } from './fr-people'
 import { frTalk } from './fr-talk'
+import { frWant } from './fr-want'
 import { frWater } from './fr-water'
 
 /** French as people text it; elided words stand apart ("l eau", "n est"), without accents. */
 export const frPack: LanguagePack = {
   spelling: 'french',
-  concepts: { ...frWater, ...frIllness, ...frTalk, ...frContact },
+  concepts: {
+    ...frWater,
+    ...frBreach,
+    ...frOdd,
+    ...frPeople,
+    ...frIll,
+    ...frCare,
+    ...frTalk,
+    ...frWant,
+    ...frContact,
+  },
   numbers: `deux 2, trois 3, troi 3, quatre 4, katre 4, cinq 5, cink 5, sept 7, huit 8, dix 10, onze 11,
     douze 12, treize 13, quatorze 14, quinze 15, kinze 15, seize 16, dix sept 17, dix huit 18,
     dix neuf 19, vingt 20, vint 20, vin 20, trente 30, quarante 40, cinquante 50, soixante 60,
