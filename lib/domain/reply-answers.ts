@@ -91,6 +91,7 @@ function notYet(sense: Sense): Answer | null {
   )
   const isCare = sense.asked === 'wash' || sense.asked === 'change'
   const unable = isCare ? denied(sense, 'can', 'be') : []
+  const unsent = sense.asked === 'change' ? denied(sense, 'receive') : []
   const days = isSaid(sense, 'done') ? [] : said(sense, 'day')
   // Bengali "pore" is "later" and "falls": "valo pore" runs well.
   const isFall = (mark: Mark): boolean =>
@@ -101,6 +102,7 @@ function notYet(sense: Sense): Answer | null {
     ...days,
     ...undone,
     ...unable,
+    ...unsent,
     ...timeless(sense),
     ...planned,
     ...promised(sense),
@@ -128,7 +130,7 @@ function moved(sense: Sense): Answer | null {
 
 function ask(sense: Sense): Answer | null {
   const isQuestion = sense.text.includes('?')
-  const marks = said(sense, 'ask').filter((mark) => isQuestion || !isLikening(sense, mark))
+  const marks = said(sense, 'ask').filter((mark) => isQuestion || !isJoining(sense, mark))
   const isStrange = sense.unknownWords > 0 && !isNamed(sense, ...topics)
   if (marks.length > 0) {
     const sure = isQuestion ? 0.85 : 0.75
@@ -145,12 +147,22 @@ function ask(sense: Sense): Answer | null {
   return { kind: 'ask', sure: isStrange ? 0.5 : 0.65 }
 }
 
-/** Spanish "como" asks at the head of a clause; within it, it likens. */
-function isLikening(sense: Sense, mark: Mark): boolean {
+/** "As you advised", "when we left": within a sentence such a word joins, it does not ask. */
+function isJoining(sense: Sense, mark: Mark): boolean {
+  const text = sense.tokens[mark.from]?.text ?? ''
   const before = sense.tokens[mark.from - 1]
-  if (sense.tokens[mark.from]?.text !== 'como' || mark.to - mark.from > 1) return false
-  return before?.kind === 'word' && !['y', 'pero', 'saber', 'sabe', 'digame'].includes(before.text)
+  if (before?.kind !== 'word' || mark.to - mark.from > 1) return false
+  if (askers.has(before.text)) return false
+  if (text === 'como' || likeWords.has(before.text)) return true
+  return ['when', 'cuando', 'quand'].includes(text) && mark.from >= 2
 }
+
+const likeWords = new Set(['as', 'like', 'como', 'comme'])
+
+/** After these "when" and "how" do ask. */
+const askers = new Set(
+  'y and et pero but mais saber sabe know savoir sais tell me digame dites please about'.split(' '),
+)
 
 /** What a question to the desk is about. */
 const topics: Concept[] = [
@@ -173,7 +185,8 @@ function done(sense: Sense): Answer | null {
   const marks = [...said(sense, 'done', 'better'), ...denied(sense, 'slow', 'blocked')]
   if (marks.length > 0) return { kind: 'done', sure: sureOf(doneSureness(sense, marks), marks) }
   // "All is well with the filter and with us".
-  if (sense.asked === 'none' && isSaid(sense, 'yes') && isSaid(sense, 'filter')) {
+  const isOfWater = isSaid(sense, 'filter', 'water', 'flow') && !isSaid(sense, 'not')
+  if (sense.asked === 'none' && isSaid(sense, 'yes') && isOfWater) {
     return { kind: 'done', sure: 0.65 }
   }
   if (isOver(sense)) return { kind: 'done', sure: 0.75 }

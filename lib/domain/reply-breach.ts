@@ -97,7 +97,9 @@ function nearness(sense: Sense, thing: Mark, mark: Mark): number {
 
 /** "Very fast" or "suddenly fast" suggests a breach, unless it is said with relief. */
 function rushes(sense: Sense): Mark[] {
-  if (isSaid(sense, 'good', 'better')) return []
+  const isRelief =
+    isSaid(sense, 'good', 'better') || (isSaid(sense, 'done') && isSaid(sense, 'thanks'))
+  if (isRelief) return []
   const isInNoTime = sense.figures.spans.some((span) => span.minutes > 0 && span.minutes <= 1)
   const isTooSoon = sense.figures.spans.some((span) => span.minutes > 0 && span.minutes <= 0.5)
   return [

@@ -74,6 +74,16 @@ function timeOf(sense: Sense, figure: Place, times: readonly Mark[]): 'past' | '
   return nearest === undefined || nearest.concept === 'now' ? 'now' : 'past'
 }
 
+/** "It used to take 10 minutes, now an hour": the figure of now, where it is at least twice that of before. */
+export function worsenedTo(sense: Sense): number | null {
+  const times = said(sense, 'past', 'now')
+  const timed = sense.figures.spans.map((span) => ({ span, time: timeOf(sense, span, times) }))
+  const before = timed.find(({ time }) => time === 'past')?.span.minutes
+  const now = timed.findLast(({ time }) => time === 'now')?.span.minutes
+  if (times.length < 2 || before === undefined || now === undefined) return null
+  return now >= before * 2 ? now : null
+}
+
 /** "10 minutes ago", "hace 10 minutos". */
 function isPastTime(sense: Sense): boolean {
   return said(sense, 'ago').some((ago) =>
@@ -87,6 +97,8 @@ function bareFigure(sense: Sense): Figure | null {
   const [one, other] = values
   if (one === undefined || values.length > 2 || one > longestFillMinutes) return null
   if (other === undefined) return { minutes: one, hasUnit: false }
+  // "Less than 5, maybe 4 and a half".
+  if (other < one && sense.asked === 'flow') return { minutes: other, hasUnit: false }
   const isRange = other > one && other <= one * 2
   return isRange && one > 3 ? { minutes: (one + other) / 2, hasUnit: false } : null
 }

@@ -32,9 +32,10 @@ type Reader = { order: Language[]; figures: Figures }
 function readFigureAt(tokens: readonly Token[], from: number, { order, figures }: Reader): number {
   const first = pieceAt(tokens, from, order)
   if (first.kind === 'span') {
+    const rest = restOfHour(tokens, { minutes: first.minutes, to: from + first.size }, order)
     return pushSpan(
       tokens,
-      { minutes: first.minutes, from, to: from + first.size },
+      { minutes: first.minutes + rest.minutes, from, to: rest.to },
       { order, figures },
     )
   }
@@ -60,6 +61,21 @@ function readFigureAt(tokens: readonly Token[], from: number, { order, figures }
   const isAlone = tokens.length === 1 && amount.value >= 1
   if (!amount.weak || isAlone) figures.bare.push({ value: amount.value, from, to: amount.to })
   return amount.to
+}
+
+/** "An hour and twenty", "une heure vingt": minutes without their unit. */
+function restOfHour(
+  tokens: readonly Token[],
+  span: { minutes: number; to: number },
+  order: Language[],
+): { minutes: number; to: number } {
+  const none = { minutes: 0, to: span.to }
+  if (span.minutes !== 60) return none
+  const skip = isAnd(tokens[span.to]) ? 1 : 0
+  const amount = readAmount(tokens, span.to + skip, order)
+  if (amount === null || amount.weak || amount.value >= 60) return none
+  const unit = pieceAt(tokens, amount.to, order)
+  return unit.kind === 'unit' ? none : { minutes: amount.value, to: amount.to }
 }
 
 /** "A whole hour": what stands between a number and its unit without changing it. */

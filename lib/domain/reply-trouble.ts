@@ -42,7 +42,9 @@ export function noFlowSureness(sense: Sense): number {
   if (isZero && water.length > 0 && sense.words <= 4) return 0.8
   const strong = [
     ...[...dry, ...none, ...falling, ...idle, ...lacking],
-    ...[...still, ...said(sense, 'blocked', 'dry')],
+    ...[...still, ...said(sense, 'dry')],
+    // "Still blocked, only drops".
+    ...(isSaid(sense, 'drip', 'slow') ? [] : said(sense, 'blocked')),
   ].filter((mark) => !isAlmost(sense, mark) && !isOfTool(sense, mark))
   if (isSoundAnswer(sense)) return 0
   if (strong.length > 0) return sureOf(0.85, strong)

@@ -2,7 +2,7 @@ import { isHelpKeyword, isStartKeyword } from './consent'
 import type { Language } from './language'
 import type { AddedWord } from './reply-added'
 import { findAnswer } from './reply-answers'
-import { figureOf, isMostlyFigure } from './reply-figure'
+import { figureOf, isMostlyFigure, worsenedTo } from './reply-figure'
 import { findDanger } from './reply-danger'
 import { optOutSureness } from './reply-opt-out'
 import { wrongNumberSureness } from './reply-wrong-number'
@@ -93,7 +93,9 @@ function readUrgent(sense: Sense): ReplyReading | null {
 
 /** "It stopped", "water stop", "stopped dripping": it could be the texts, a leak or the water. */
 function isStopOrStopped(sense: Sense): boolean {
-  if (isReasonNotToStart(sense)) return false
+  // "Tightened it and it no longer drips": the drip was the leak.
+  const isMended = sense.asked === 'step' && isSaid(sense, 'done') && isDenied(sense, 'drip')
+  if (isReasonNotToStart(sense) || isMended) return false
   if (isSaid(sense, 'itStopped')) return true
   if (isSaid(sense, 'notYet')) return false
   return (
@@ -113,6 +115,8 @@ function readTrouble(sense: Sense): ReplyReading | null {
     // "Is 12 minutes ok?"
     if (!isAsked && sense.text.includes('?') && isSaid(sense, 'ask', 'where', 'yes', 'good'))
       return null
+    const worse = isAsked ? null : worsenedTo(sense)
+    if (worse !== null) return { kind: 'slow', minutes: worse, sure: 0.8 }
     // "Strong for one minute, then a dribble": nobody calls a minute slow.
     if (slow > 0 && figure.minutes <= 1 && sense.asked !== 'flow')
       return { kind: 'slow', sure: slow }

@@ -53,8 +53,8 @@ export const enCare: LanguagePack['concepts'] = {
     works perfectly, working perfectly, works great, working great, doing well, doing good,
     doing fine, going well, is ok now, ok again, fine again, good again, good as new, fine now,
     ok now, okay now, good now, alright now, all right now, well now, gushes again, pours again,
-    flowing strong, stronger now, quicker than before, faster than before, more water,
-    improvement, improvements`,
+    flowing strong, stronger now, quicker than before, faster than before, more water, improvement,
+    improvements, difference, differences`,
   same: `same, the same, no change, no difference, unchanged, no improvement, same as before,
     same thing, as before, nothing changed, no diff, didnt change, didnt help, no luck`,
 }

@@ -96,7 +96,8 @@ export const enWant: LanguagePack['concepts'] = {
     back home now, went back to, went back home, resettled, camp, transferred,
     left that compound, left the compound, left that yard, left compound`,
   gave: `gave, give away, given, gifted, donated, sold, sell, passed on, passed it, handed over, lent,
-    left with, left it, left behind, left the filter, returned, gave back, took back,
-    took it back, inherited, with my sister now, with my mother now, went to my, is with my,
-    is at my, with my sister, with my brother, with my mother, no longer have it`,
+    left with, left it, left behind, left the filter, returned, gave back, took back, took it back,
+    inherited, with my sister now, with my mother now, went to my, is with my, is at my,
+    with my sister, with my brother, with my mother, no longer have it, took over the filter,
+    took over, took the filter, kept the filter`,
 }

@@ -87,5 +87,5 @@ export const enPack: LanguagePack = {
     misc shell hunting suit indexed cartoon bright ports boots pulse flashing sitting putting
     amended bills bold aged camping peer rail cache shipped prayer quiet crown fellow lies horses
     discovered harris skill chairs filing foster tissue crash counting count happy birthday whoosh
-    thot alot`,
+    thot alot advised`,
 }

@@ -99,8 +99,8 @@ export const frWant: LanguagePack['concepts'] = {
     demenag*, deménag*, expulse*, quitte la cour, quitte cette cour, quitte la concession,
     quitte le logement`,
   gave: `donne a, donne au, donne le filtre, offert, offerte, legue, cede a, vendu, vendue, vends,
-    ai vendu, avons vendu, confie, prete a, laisse a, laisse chez, laisse la bas,
-    laisse au village, rendu le filtre, pas pris, pas emporte, pas amene, pas emmene,
-    reste la bas, reste au village, avec ma soeur maintenant, chez ma soeur, chez mon frere,
-    chez ma mere, parti chez, est chez ma, est chez mon, chez ma, chez mon`,
+    ai vendu, avons vendu, confie, prete a, laisse a, laisse chez, laisse la bas, laisse au village,
+    rendu le filtre, pas pris, pas emporte, pas amene, pas emmene, reste la bas, reste au village,
+    avec ma soeur maintenant, chez ma soeur, chez mon frere, chez ma mere, parti chez, est chez ma,
+    est chez mon, chez ma, chez mon, repris le filtre, a repris, garde le filtre, pris le filtre`,
 }

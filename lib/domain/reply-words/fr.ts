@@ -89,5 +89,6 @@ export const frPack: LanguagePack = {
     attache dommage connexion portrait peuple fiat classes prevision inflation intention compenser
     tester evite perception reveler egale toit coree hiver conviction demarrage lutter marquee
     prince palette terrasse bouillir bouilli bouillie retrolavage abord remonte remonter debite
-    entend entendre entends entendu plie plier seigneur eponge ancien ancienne desert comble`,
+    entend entendre entends entendu plie plier seigneur eponge ancien ancienne desert comble
+    ballon`,
 }
