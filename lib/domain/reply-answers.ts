@@ -212,7 +212,7 @@ const becomings = new Set(
 /** What follows a "but" without a meaning here may be anything: a person reads it. */
 function doneSureness(sense: Sense, marks: readonly Mark[]): number {
   const isVague = marks.every((mark) => becomings.has(sense.tokens[mark.to - 1]?.text ?? ''))
-  if (isVague && sense.unknownWords > 0) return 0.5
+  if (isVague && (sense.unknownWords > 0 || isSaid(sense, 'notBack'))) return 0.5
   const settled: Concept[] = ['good', 'better', 'yes', 'done', 'fast', 'now', 'clean', 'past', 'no']
   const but = said(sense, 'but').at(-1)
   if (but === undefined) return 0.85

@@ -124,6 +124,11 @@ export function slowSureness(sense: Sense): number {
   const hardlyBetter = said(sense, 'better').filter((mark) =>
     said(sense, 'little').some((few) => gapBetween(sense, few, mark) === 0),
   )
+  // "Like nothing is inside; it used to drip".
+  const bygone = said(sense, 'past').filter((mark) => sense.words > 8 && mark.from > 2)
+  const drips = said(sense, 'drip').filter(
+    (mark) => !bygone.some((past) => past.to <= mark.from && gapBetween(sense, past, mark) <= 1),
+  )
   const badly = [...said(sense, 'bad'), ...denied(sense, 'good')].filter((mark) =>
     areBeside(sense, [mark], said(sense, 'flow', 'current'), 3),
   )
@@ -132,7 +137,8 @@ export function slowSureness(sense: Sense): number {
     ...slow,
     ...scarcely,
     ...hardlyBetter,
-    ...said(sense, 'drip', 'long'),
+    ...drips,
+    ...said(sense, 'long'),
     ...said(sense, 'ooze').filter((mark) => !isOfBody(sense, mark)),
     ...unfilled(sense),
     ...spent(sense),

@@ -4,6 +4,7 @@ import type { AddedWord } from './reply-added'
 import { findAnswer } from './reply-answers'
 import { figureOf, isMostlyFigure, worsenedTo } from './reply-figure'
 import { findDanger } from './reply-danger'
+import { isDoubtful } from './reply-doubt'
 import { optOutSureness } from './reply-opt-out'
 import { wrongNumberSureness } from './reply-wrong-number'
 import {
@@ -76,7 +77,8 @@ export type Reply = {
 export function readReply(reply: Reply): ReplyReading {
   const sense = senseOf(reply.text, reply.language, reply.asked, reply.added)
   const reading = readUrgent(sense) ?? readTrouble(sense) ?? readRest(sense)
-  const sure = Math.round(reading.sure * 100) / 100
+  const trusted = isDoubtful(sense, reading) ? Math.min(reading.sure, 0.55) : reading.sure
+  const sure = Math.round(trusted * 100) / 100
   return sure < sureEnough ? { ...reading, kind: 'unclear', sure } : { ...reading, sure }
 }
 

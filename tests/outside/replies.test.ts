@@ -16,6 +16,10 @@ import { fourthFrReplies } from './replies/fourth-fr'
 import { frReplies } from './replies/fr'
 import { hardReplies } from './replies/hard'
 import type { LabelledReply } from './replies/reply-set'
+import { sixthBnReplies } from './replies/sixth-bn'
+import { sixthEnReplies } from './replies/sixth-en'
+import { sixthEsReplies } from './replies/sixth-es'
+import { sixthFrReplies } from './replies/sixth-fr'
 import { thirdBnReplies } from './replies/third-bn'
 import { thirdEnReplies } from './replies/third-en'
 import { thirdEsReplies } from './replies/third-es'
@@ -26,10 +30,10 @@ import { thirdFrReplies } from './replies/third-fr'
 
 const sets = { en: enReplies, es: esReplies, fr: frReplies, bn: bnReplies } as const
 const freshSets = {
-  en: [...freshEnReplies, ...thirdEnReplies, ...fourthEnReplies],
-  es: [...freshEsReplies, ...thirdEsReplies, ...fourthEsReplies],
-  fr: [...freshFrReplies, ...thirdFrReplies, ...fourthFrReplies],
-  bn: [...freshBnReplies, ...thirdBnReplies, ...fourthBnReplies],
+  en: [...freshEnReplies, ...thirdEnReplies, ...fourthEnReplies, ...sixthEnReplies],
+  es: [...freshEsReplies, ...thirdEsReplies, ...fourthEsReplies, ...sixthEsReplies],
+  fr: [...freshFrReplies, ...thirdFrReplies, ...fourthFrReplies, ...sixthFrReplies],
+  bn: [...freshBnReplies, ...thirdBnReplies, ...fourthBnReplies, ...sixthBnReplies],
 } as const
 const languages = ['en', 'es', 'fr', 'bn'] as const
 
