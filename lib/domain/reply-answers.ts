@@ -154,9 +154,10 @@ function isJoining(sense: Sense, mark: Mark): boolean {
   if (before?.kind !== 'word' || mark.to - mark.from > 1) return false
   if (askers.has(before.text)) return false
   if (text === 'como' || likeWords.has(before.text)) return true
-  return ['when', 'cuando', 'quand'].includes(text) && mark.from >= 2
+  return whens.has(text) && mark.from >= 2
 }
 
+const whens = new Set('when wen whn cuando kuando quand kan'.split(' '))
 const likeWords = new Set(['as', 'like', 'como', 'comme'])
 
 /** After these "when" and "how" do ask. */

@@ -12,6 +12,9 @@ export function findDanger(sense: Sense): Danger | null {
   const best = Math.max(0, ...dangers.map((danger) => danger.sure))
   const danger = dangers.find((each) => each.sure > best - 0.15)
   if (danger === undefined) return null
+  // In a longer text a danger that rests on a guess alone may be any strange word: a person reads it.
+  const isGuess = danger.sure > 0.66 && danger.sure < 0.75
+  if (isGuess && sense.words > 5) return { ...danger, sure: 0.55 }
   // "What if it cracks?": a person answers it.
   return isSupposed(sense) ? { ...danger, sure: 0.5 } : danger
 }

@@ -173,11 +173,18 @@ function isOfThing(denial: Mark, { tokens }: Field): boolean {
   return ['d', 'de'].includes(tokens[denial.to]?.text ?? '')
 }
 
+/** "Mange pas il a le corps chaud": a new subject begins a new clause, unless it hangs on the one before. */
+const subjectWords = new Set('il elle ils elles he she'.split(' '))
+const linkWords = new Set('qu que if si that think believe crois pense'.split(' '))
+
 /** Places a denial does not cross: punctuation, "but" and "and". */
 function fencesOf(marks: readonly Mark[], tokens: readonly Token[]): number[] {
   const breaks = tokens.flatMap((token, at) => (token.kind === 'break' ? [at] : []))
   const joints = marks.filter((mark) => mark.concept === 'but' || mark.concept === 'and')
-  return [...breaks, ...joints.map((mark) => mark.from)]
+  const subjects = tokens.flatMap((token, at) =>
+    subjectWords.has(token.text) && !linkWords.has(tokens[at - 1]?.text ?? '') ? [at] : [],
+  )
+  return [...breaks, ...joints.map((mark) => mark.from), ...subjects]
 }
 
 function isFenced(from: number, to: number, { fences }: Field): boolean {

@@ -207,6 +207,11 @@ function eachWord(
   })
 }
 
+/** Three letters by themselves are a word of every language: "dan", "san". */
+function isTiny(tokens: readonly Token[], { from, to }: Mark): boolean {
+  return to - from === 1 && (tokens[from]?.text.length ?? 0) <= 3
+}
+
 export type Marked = {
   marks: Mark[]
   main: Language
@@ -225,7 +230,9 @@ export function markTokens(tokens: readonly Token[], own: Language): Marked {
   eachWord(tokens, known, (word, text) => guessWord(word, text, [main, own]))
   const order = [...new Set([main, ...languageOrder(own)])]
   return {
-    marks: keepLongest(candidates(known, order, own), order),
+    marks: keepLongest(candidates(known, order, own), order).filter(
+      (mark) => likely.has(mark.language) || mark.language === main || !isTiny(tokens, mark),
+    ),
     main,
     knownWords: known.map((word) => word === null || word.size > 0),
   }

@@ -98,6 +98,7 @@ export function foldText(text: string): string {
     .replace(/[‘’ʼ`´′]/g, "'")
     .replace(/[“”″]/g, '"')
     .replace(/#(?!\d)/g, ' number ')
+    .replace(/\b2 (?=long|slow|much|late|little|small|weak|fast|hot|cold|sick|tired|low)/g, 'too ')
     .replace(/\bi'll\b/g, 'i will')
     .replace(/\bwe'll\b/g, 'we will')
 }

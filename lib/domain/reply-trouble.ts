@@ -19,9 +19,11 @@ export function noFlowSureness(sense: Sense): number {
   const idle = denied(sense, 'fall').filter((mark) =>
     areBeside(sense, [mark], said(sense, 'outlet'), 5),
   )
+  // Bengali "khali" is "empty" and "only": "only drops".
   const none = said(sense, 'none').filter(
     (mark) =>
-      areBeside(sense, [mark], [...water, ...said(sense, 'outlet', 'edge')], 4) ||
+      (!isSaid(sense, 'drip') &&
+        areBeside(sense, [mark], [...water, ...said(sense, 'outlet', 'edge')], 4)) ||
       areBeside(sense, [mark], said(sense, 'fill'), 8),
   )
   // French water "falls": "rien qui tombe".
@@ -127,7 +129,9 @@ export function slowSureness(sense: Sense): number {
   // "Like nothing is inside; it used to drip".
   const bygone = said(sense, 'past').filter((mark) => sense.words > 8 && mark.from > 2)
   const drips = said(sense, 'drip').filter(
-    (mark) => !bygone.some((past) => past.to <= mark.from && gapBetween(sense, past, mark) <= 1),
+    (mark) =>
+      !bygone.some((past) => past.to <= mark.from && gapBetween(sense, past, mark) <= 1) &&
+      !isStopped(sense, mark),
   )
   const badly = [...said(sense, 'bad'), ...denied(sense, 'good')].filter((mark) =>
     areBeside(sense, [mark], said(sense, 'flow', 'current'), 3),
@@ -156,6 +160,12 @@ export function slowSureness(sense: Sense): number {
   const isAfterCare = isSaid(sense, 'still', 'but', 'done', 'wash')
   if (isSaid(sense, 'same') && (isStep || isAfterCare)) return 0.7
   return isStep && isSaid(sense, 'little') && sense.words <= 3 ? 0.65 : 0
+}
+
+/** "Tightened it and the drip stopped". */
+function isStopped(sense: Sense, drip: Mark): boolean {
+  const isMended = sense.asked === 'step' && isSaid(sense, 'done')
+  return isMended && areBeside(sense, [drip], said(sense, 'ceased', 'itStopped'), 2)
 }
 
 /** "It has lost its strength", "by the time I have a cup". */

@@ -96,7 +96,7 @@ function readUrgent(sense: Sense): ReplyReading | null {
 /** "It stopped", "water stop", "stopped dripping": it could be the texts, a leak or the water. */
 function isStopOrStopped(sense: Sense): boolean {
   // "Tightened it and it no longer drips": the drip was the leak.
-  const isMended = sense.asked === 'step' && isSaid(sense, 'done') && isDenied(sense, 'drip')
+  const isMended = sense.asked === 'step' && isSaid(sense, 'done') && isNamed(sense, 'drip')
   if (isReasonNotToStart(sense) || isMended) return false
   if (isSaid(sense, 'itStopped')) return true
   if (isSaid(sense, 'notYet')) return false
