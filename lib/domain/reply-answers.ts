@@ -1,3 +1,6 @@
+import type { Answer } from './reply-answer-kind'
+import { findQuestion, isQuestionFirst } from './reply-ask'
+import { dangers, findDone } from './reply-done'
 import type { Mark } from './reply-marks'
 import { promised } from './reply-figure'
 import {
@@ -10,26 +13,18 @@ import {
   sureOf,
   type Sense,
 } from './reply-sense'
-import { isOver } from './reply-trouble'
-import type { Concept } from './reply-words/concept'
 
-/** Readings of what is left when there is neither danger nor trouble. */
-export type AnswerKind =
-  'done' | 'not-yet' | 'need-part' | 'ask' | 'thanks' | 'yes' | 'no' | 'start' | 'help' | 'moved'
-
-export type Answer = { kind: AnswerKind; sure: number }
-
+/** What is left when a text tells of neither danger nor trouble. */
 export function findAnswer(sense: Sense): Answer | null {
-  const question = ask(sense)
-  const isOpen = isOpenedByQuestion(sense) || asksOfPlan(sense) || isPlainQuestion(sense)
-  if (question && isOpen) return question
+  const question = findQuestion(sense)
+  if (question && isQuestionFirst(sense)) return question
   const rules = [
     soundParts,
     needPart,
     notYet,
     moved,
     () => question,
-    done,
+    findDone,
     keywords,
     thanksOnly,
     yesNo,
@@ -39,26 +34,6 @@ export function findAnswer(sense: Sense): Answer | null {
     if (answer) return answer
   }
   return null
-}
-
-/** "How long do I wait?" asks, though it waits too. */
-function isOpenedByQuestion(sense: Sense): boolean {
-  const marks = said(sense, 'ask')
-  return sense.text.includes('?') ? marks.length > 0 : marks.some((mark) => mark.from === 0)
-}
-
-/** "I would like to know whether": a wording that only asks. */
-function isPlainQuestion(sense: Sense): boolean {
-  return (
-    said(sense, 'ask').some((mark) => mark.to - mark.from >= 2) &&
-    !isSaid(sense, 'need', 'lost', 'worn', 'helpWord')
-  )
-}
-
-/** "Kapor kokhon bodlabo": when shall I change it; the plan is what is asked about. */
-function asksOfPlan(sense: Sense): boolean {
-  const isPlanOnly = !isSaid(sense, 'notYet', 'forgot', 'day') && isSaid(sense, 'future')
-  return isSaid(sense, 'ask') && isPlanOnly
 }
 
 function needPart(sense: Sense): Answer | null {
@@ -128,101 +103,6 @@ function moved(sense: Sense): Answer | null {
   return marks.length > 0 ? { kind: 'moved', sure: sureOf(0.85, marks) } : null
 }
 
-function ask(sense: Sense): Answer | null {
-  const isQuestion = sense.text.includes('?')
-  const marks = said(sense, 'ask').filter((mark) => isQuestion || !isJoining(sense, mark))
-  const isStrange = sense.unknownWords > 0 && !isNamed(sense, ...topics)
-  if (marks.length > 0) {
-    const sure = isQuestion ? 0.85 : 0.75
-    return { kind: 'ask', sure: isStrange && sense.words > 3 ? 0.5 : sureOf(sure, marks) }
-  }
-  const where = said(sense, 'where').some((mark) => isQuestion || mark.from <= 1)
-  if (where) return { kind: 'ask', sure: 0.7 }
-  // "Either wet or dry": two ways are put to the desk.
-  const isNeither = isSaid(sense, 'not')
-  const isChoice = isSaid(sense, 'or') && !isNeither && sense.marks.every((mark) => !mark.denied)
-  if (isChoice && sense.words >= 5) return { kind: 'ask', sure: 0.62 }
-  if (!isQuestion || sense.words <= 2) return null
-  // "Will you watch the match?" asks nothing of the desk.
-  return { kind: 'ask', sure: isStrange ? 0.5 : 0.65 }
-}
-
-/** "As you advised", "when we left": within a sentence such a word joins, it does not ask. */
-function isJoining(sense: Sense, mark: Mark): boolean {
-  const text = sense.tokens[mark.from]?.text ?? ''
-  const before = sense.tokens[mark.from - 1]
-  if (before?.kind !== 'word' || mark.to - mark.from > 1) return false
-  if (askers.has(before.text)) return false
-  if (text === 'como' || likeWords.has(before.text)) return true
-  return whens.has(text) && mark.from >= 2
-}
-
-const whens = new Set('when wen whn cuando kuando quand kan'.split(' '))
-const likeWords = new Set(['as', 'like', 'como', 'comme'])
-
-/** After these "when" and "how" do ask. */
-const askers = new Set(
-  'y and et pero but mais saber sabe know savoir sais tell me digame dites please about'.split(' '),
-)
-
-/** What a question to the desk is about. */
-const topics: Concept[] = [
-  ...(['water', 'filter', 'piece', 'cloth', 'container', 'flow', 'fill', 'drink'] as const),
-  ...([
-    'wash',
-    'change',
-    'need',
-    'you',
-    'where',
-    'helpWord',
-    'good',
-    'yes',
-    'slow',
-    'substance',
-  ] as const),
-]
-
-function done(sense: Sense): Answer | null {
-  const marks = [...said(sense, 'done', 'better'), ...denied(sense, 'slow', 'blocked')]
-  if (marks.length > 0) return { kind: 'done', sure: sureOf(doneSureness(sense, marks), marks) }
-  // "All is well with the filter and with us".
-  const isOfWater = isSaid(sense, 'filter', 'water', 'flow') && !isSaid(sense, 'not')
-  if (sense.asked === 'none' && isSaid(sense, 'yes') && isOfWater) {
-    return { kind: 'done', sure: 0.65 }
-  }
-  if (isOver(sense)) return { kind: 'done', sure: 0.75 }
-  // "Works well, nobody ill".
-  const isAllWell = isSaid(sense, 'good') && isDenied(sense, ...dangers)
-  if (isAllWell && sense.asked === 'none') return { kind: 'done', sure: 0.7 }
-  const isSound = areBeside(sense, said(sense, 'filter'), said(sense, 'good'), 4)
-  if (isSound && !isSaid(sense, 'not', 'ask', 'if')) return { kind: 'done', sure: 0.7 }
-  const runsWell = areBeside(sense, said(sense, 'flow'), said(sense, 'good', 'fast'), 3)
-  const isWashOk = isSaid(sense, 'wash') && isSaid(sense, 'yes', 'good') && sense.words <= 3
-  const isCleaned = sense.asked === 'wash' && isSaid(sense, 'clean')
-  const isWellNow = isSaid(sense, 'good') && isSaid(sense, 'now') && sense.asked !== 'none'
-  return runsWell || isWellNow || isCleaned || (sense.asked === 'wash' && isWashOk)
-    ? { kind: 'done', sure: 0.7 }
-    : null
-}
-
-/** Bengali "has become" is said of a wash as of a noise. */
-const becomings = new Set(
-  'হইছে হয়েছে হলো গেছে গেসে hoise hoyeche hoiche hoise holo gese geche'.split(' '),
-)
-
-/** What follows a "but" without a meaning here may be anything: a person reads it. */
-function doneSureness(sense: Sense, marks: readonly Mark[]): number {
-  const isVague = marks.every((mark) => becomings.has(sense.tokens[mark.to - 1]?.text ?? ''))
-  if (isVague && (sense.unknownWords > 0 || isSaid(sense, 'notBack'))) return 0.5
-  const settled: Concept[] = ['good', 'better', 'yes', 'done', 'fast', 'now', 'clean', 'past', 'no']
-  const but = said(sense, 'but').at(-1)
-  if (but === undefined) return 0.85
-  const after = sense.marks.filter((mark) => mark.from >= but.to)
-  const isSettled = after.some((mark) => mark.denied || settled.includes(mark.concept))
-  const isFollowed = sense.tokens.length - but.to >= 2
-  return isFollowed && !isSettled ? 0.5 : 0.85
-}
-
 function keywords(sense: Sense): Answer | null {
   const starts = said(sense, 'startWord')
   if (starts.length > 0) return { kind: 'start', sure: sureOf(0.8, starts) }
@@ -237,22 +117,6 @@ function thanksOnly(sense: Sense): Answer | null {
   if (sense.asked === 'step' && isSaid(sense, 'yes', 'no')) return null
   return { kind: 'thanks', sure: sureOf(sense.unknownWords > 3 ? 0.5 : 0.85, marks) }
 }
-
-/** Words of danger: when a text denies them and says nothing else, it answers no. */
-const dangers: Concept[] = [
-  'broken',
-  'leak',
-  'fall',
-  'frozen',
-  'odd',
-  'smell',
-  'oddSmell',
-  'taste',
-  'ill',
-  'vomit',
-  'pain',
-  'blood',
-]
 
 /** "I looked, no crack": the answer to what a step asks, whatever was done for it. */
 function soundParts(sense: Sense): Answer | null {
@@ -283,10 +147,10 @@ function yesNo(sense: Sense): Answer | null {
   if (no.length > 0) return { kind: 'no', sure: noSureness(sense) }
   const isPlainNo = isSaid(sense, 'not') && !isDenied(sense, 'drip', 'texts', 'phone')
   if (isPlainNo && sense.words <= 3 && sense.unknownWords === 0) return { kind: 'no', sure: 0.65 }
-  const strangers = sense.asked === 'none' ? 0 : 2
-  return isSaid(sense, 'good') && sense.unknownWords <= strangers
-    ? { kind: 'yes', sure: 0.62 }
-    : null
+  // "Happy birthday"; "look well, there is a line in the joint".
+  const isOfJoint = sense.words > 5 && isNamed(sense, 'edge', 'piece')
+  const isBare = sense.asked === 'none' ? sense.words <= 2 : sense.unknownWords <= 2 && !isOfJoint
+  return isSaid(sense, 'good') && isBare ? { kind: 'yes', sure: 0.62 } : null
 }
 
 function noSureness(sense: Sense): number {

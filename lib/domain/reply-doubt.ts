@@ -1,4 +1,4 @@
-import type { ReplyKind, ReplyReading } from './reply'
+import type { ReplyKind } from './reply-kind'
 import { isNamed, isSaid, said, type Sense } from './reply-sense'
 
 /** Readings after which the desk does nothing, or only what it does every day. */
@@ -17,7 +17,7 @@ const harmless: ReadonlySet<ReplyKind> = new Set<ReplyKind>([
  * True where a text read as harmless holds something of which the rules made nothing, and which may be a
  * danger, an opt-out or a stranger: a person reads it then.
  */
-export function isDoubtful(sense: Sense, { kind }: ReplyReading): boolean {
+export function isDoubtful(sense: Sense, kind: ReplyKind): boolean {
   if (!harmless.has(kind)) return false
   return (
     hasStrangeBody(sense) ||

@@ -1,6 +1,6 @@
 import { minutesBetweenClocks } from './reply-clock'
 import type { Mark } from './reply-marks'
-import { isNamed, isSaid, said, type Sense } from './reply-sense'
+import { isNamed, said, type Sense } from './reply-sense'
 
 /** A number people would give for a bottle: from some seconds to half a day. */
 const longestFillMinutes = 720

@@ -1,4 +1,5 @@
 import type { Danger } from './reply-danger-kind'
+import type { Mark } from './reply-marks'
 import {
   areBeside,
   areParted,

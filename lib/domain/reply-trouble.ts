@@ -43,8 +43,13 @@ export function noFlowSureness(sense: Sense): number {
   const isZero = sense.tokens.some((token) => token.kind === 'number' && token.value === 0)
   if (isZero && water.length > 0 && sense.words <= 4) return 0.8
   const strong = [
-    ...[...dry, ...none, ...falling, ...idle, ...lacking],
-    ...[...still, ...said(sense, 'dry')],
+    ...dry,
+    ...none,
+    ...falling,
+    ...idle,
+    ...lacking,
+    ...still,
+    ...said(sense, 'dry'),
     // "Still blocked, only drops".
     ...(isSaid(sense, 'drip', 'slow') ? [] : said(sense, 'blocked')),
   ].filter((mark) => !isAlmost(sense, mark) && !isOfTool(sense, mark))
@@ -83,9 +88,7 @@ function hasBareNothing(sense: Sense): boolean {
     said(sense, 'and').some((mark) => mark.from === at)
   return (
     ['wash', 'change', 'step'].includes(sense.asked) &&
-    said(sense, 'none').some(
-      (none) => none.from > 0 && isEdge(none.from - 1) && isEdge(none.to) && none.from > 2,
-    )
+    said(sense, 'none').some((none) => none.from > 2 && isEdge(none.from - 1) && isEdge(none.to))
   )
 }
 

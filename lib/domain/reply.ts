@@ -2,6 +2,7 @@ import { isHelpKeyword, isStartKeyword } from './consent'
 import type { Language } from './language'
 import type { AddedWord } from './reply-added'
 import { findAnswer } from './reply-answers'
+import type { ReplyKind } from './reply-kind'
 import { figureOf, isMostlyFigure, worsenedTo } from './reply-figure'
 import { findDanger } from './reply-danger'
 import { isDoubtful } from './reply-doubt'
@@ -19,29 +20,7 @@ import {
 } from './reply-sense'
 import { noFlowSureness, slowSureness } from './reply-trouble'
 
-export type { Asked }
-
-export type ReplyKind =
-  | 'done'
-  | 'not-yet'
-  | 'slow'
-  | 'no-flow'
-  | 'flow-figure'
-  | 'broken'
-  | 'odd-water'
-  | 'unwell'
-  | 'need-part'
-  | 'ask'
-  | 'thanks'
-  | 'yes'
-  | 'no'
-  | 'choice'
-  | 'stop'
-  | 'start'
-  | 'help'
-  | 'wrong-number'
-  | 'moved'
-  | 'unclear'
+export type { Asked, ReplyKind }
 
 export type ReplyReading = {
   kind: ReplyKind
@@ -77,7 +56,7 @@ export type Reply = {
 export function readReply(reply: Reply): ReplyReading {
   const sense = senseOf(reply.text, reply.language, reply.asked, reply.added)
   const reading = readUrgent(sense) ?? readTrouble(sense) ?? readRest(sense)
-  const trusted = isDoubtful(sense, reading) ? Math.min(reading.sure, 0.55) : reading.sure
+  const trusted = isDoubtful(sense, reading.kind) ? Math.min(reading.sure, 0.55) : reading.sure
   const sure = Math.round(trusted * 100) / 100
   return sure < sureEnough ? { ...reading, kind: 'unclear', sure } : { ...reading, sure }
 }

@@ -16,6 +16,10 @@ import { fourthFrReplies } from './replies/fourth-fr'
 import { frReplies } from './replies/fr'
 import { hardReplies } from './replies/hard'
 import type { LabelledReply } from './replies/reply-set'
+import { seventhBnReplies } from './replies/seventh-bn'
+import { seventhEnReplies } from './replies/seventh-en'
+import { seventhEsReplies } from './replies/seventh-es'
+import { seventhFrReplies } from './replies/seventh-fr'
 import { sixthBnReplies } from './replies/sixth-bn'
 import { sixthEnReplies } from './replies/sixth-en'
 import { sixthEsReplies } from './replies/sixth-es'
@@ -30,10 +34,34 @@ import { thirdFrReplies } from './replies/third-fr'
 
 const sets = { en: enReplies, es: esReplies, fr: frReplies, bn: bnReplies } as const
 const freshSets = {
-  en: [...freshEnReplies, ...thirdEnReplies, ...fourthEnReplies, ...sixthEnReplies],
-  es: [...freshEsReplies, ...thirdEsReplies, ...fourthEsReplies, ...sixthEsReplies],
-  fr: [...freshFrReplies, ...thirdFrReplies, ...fourthFrReplies, ...sixthFrReplies],
-  bn: [...freshBnReplies, ...thirdBnReplies, ...fourthBnReplies, ...sixthBnReplies],
+  en: [
+    ...freshEnReplies,
+    ...thirdEnReplies,
+    ...fourthEnReplies,
+    ...sixthEnReplies,
+    ...seventhEnReplies,
+  ],
+  es: [
+    ...freshEsReplies,
+    ...thirdEsReplies,
+    ...fourthEsReplies,
+    ...sixthEsReplies,
+    ...seventhEsReplies,
+  ],
+  fr: [
+    ...freshFrReplies,
+    ...thirdFrReplies,
+    ...fourthFrReplies,
+    ...sixthFrReplies,
+    ...seventhFrReplies,
+  ],
+  bn: [
+    ...freshBnReplies,
+    ...thirdBnReplies,
+    ...fourthBnReplies,
+    ...sixthBnReplies,
+    ...seventhBnReplies,
+  ],
 } as const
 const languages = ['en', 'es', 'fr', 'bn'] as const
 
