@@ -97,7 +97,8 @@ function moved(sense: Sense): Answer | null {
   // "Sold it": a word of giving at the head of a text is of the filter.
   const given = said(sense, 'gave').filter(
     (mark) =>
-      mark.from <= 2 || areBeside(sense, [mark], said(sense, 'filter', 'person', 'child'), 4),
+      (mark.from <= 2 && !isSaid(sense, 'still')) ||
+      areBeside(sense, [mark], said(sense, 'filter', 'person', 'child'), 4),
   )
   const marks = [...said(sense, 'moved'), ...given]
   return marks.length > 0 ? { kind: 'moved', sure: sureOf(0.85, marks) } : null

@@ -18,7 +18,7 @@ function isOpenedByQuestion(sense: Sense): boolean {
 function isPlainQuestion(sense: Sense): boolean {
   return (
     said(sense, 'ask').some((mark) => mark.to - mark.from >= 2) &&
-    !isSaid(sense, 'need', 'lost', 'worn', 'helpWord')
+    !isSaid(sense, 'need', 'lost', 'worn', 'notYet', 'helpWord')
   )
 }
 

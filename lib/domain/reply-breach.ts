@@ -10,10 +10,14 @@ export function findBreach(sense: Sense): Danger | null {
   const sealed = said(sense, 'piece').filter(
     (mark) => !outlets.some((outlet) => outlet.from === mark.from),
   )
+  // "We passed the night outside".
+  const isOfPeople =
+    isSaid(sense, 'person', 'child') && !isSaid(sense, 'water', 'filter', 'piece', 'container')
   const oozing = [
     ...said(sense, 'flow', 'drip').filter(
       (mark) =>
         areBeside(sense, [mark], edges, 4) &&
+        !isOfPeople &&
         !areBeside(sense, [mark], said(sense, 'good', 'better'), 2),
     ),
     ...said(sense, 'drip').filter((mark) => areBeside(sense, [mark], sealed, 3)),
@@ -34,6 +38,7 @@ export function findBreach(sense: Sense): Danger | null {
     ...said(sense, 'ooze').filter((mark) => isOfBody(sense, mark)),
     ...falls.filter((mark) => !isElsewhere(sense, mark)),
     ...rushes(sense),
+    ...chewed(sense),
   ].filter((mark) => !isSavour(mark))
   if (marks.length === 0) return null
   // "Very fast, thank you" may be joy over a washed filter; a mended leak may be none. A person asks.
@@ -43,10 +48,16 @@ export function findBreach(sense: Sense): Danger | null {
   const pieces = said(sense, 'piece', 'filter').filter(
     (mark) => !tools.some((tool) => tool.from === mark.from),
   )
+  // "The whole yard has fallen": of what nobody here knows.
+  const isStrangeFall =
+    marks.every((mark) => mark.concept === 'fall') &&
+    sense.unknownWords > 0 &&
+    !isSaid(sense, ...own, 'pronoun', 'child', 'person')
   const isCloth = isSaid(sense, 'cloth', 'tool') && isSaid(sense, 'need') && pieces.length === 0
   return {
     kind: 'broken',
-    sure: isRushOnly || isCloth || isSaid(sense, 'mended') ? 0.55 : sureOf(0.9, marks),
+    sure:
+      isRushOnly || isCloth || isStrangeFall || isSaid(sense, 'mended') ? 0.55 : sureOf(0.9, marks),
   }
 }
 
@@ -55,6 +66,12 @@ export function isOfBody(sense: Sense, ooze: Mark): boolean {
   const isAfterCare = ['wash', 'change'].includes(sense.asked) || isSaid(sense, 'done', 'slow')
   const body = said(sense, 'piece', 'edge', 'container', 'filter')
   return areBeside(sense, [ooze], body, 4) || !(isAfterCare || isSaid(sense, 'water'))
+}
+
+/** "The puppy got to the tube": whatever it did to it. */
+function chewed(sense: Sense): Mark[] {
+  if (isSaid(sense, 'ask', 'where', 'ill')) return []
+  return said(sense, 'animal').filter((mark) => areBeside(sense, [mark], said(sense, 'piece'), 4))
 }
 
 /** "The flow dropped" is slow; "the filter dropped" may have broken its fibres. */

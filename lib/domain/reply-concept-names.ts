@@ -18,6 +18,10 @@ const waterNames = {
   flow: 'to flow, to come',
   fill: 'to fill',
   current: 'the flow, the pressure',
+  almost: 'almost none',
+  strength: 'force',
+  meanwhile: 'so long that something else gets done',
+  full: 'full, half full',
 } as const satisfies Names
 
 const dangerNames = {
@@ -34,6 +38,11 @@ const dangerNames = {
   dirty: 'dirty',
   clean: 'clean, clear',
   mended: 'mended',
+  ooze: 'oozing',
+  overflow: 'over the brim',
+  sudden: 'suddenly',
+  creature: 'something living in it',
+  substance: 'soap, salt and their kind',
 } as const satisfies Names
 
 const illnessNames = {
@@ -52,6 +61,9 @@ const illnessNames = {
   belly: 'belly',
   problem: 'a trouble',
   all: 'everything',
+  care: 'hospital, medicine',
+  recovered: 'well again',
+  body: 'skin, eyes, head',
 } as const satisfies Names
 
 const answerNames = {
@@ -71,6 +83,9 @@ const answerNames = {
   no: 'no',
   greeting: 'a greeting',
   please: 'please',
+  worn: 'worn out',
+  gave: 'gave, sold or left it',
+  explain: 'to explain, to speak',
 } as const satisfies Names
 
 const contactNames = {
@@ -88,6 +103,9 @@ const contactNames = {
   texts: 'texts, to text',
   phone: 'a phone or its number',
   receive: 'to get, to understand',
+  fedUp: 'tired of it',
+  leaveMe: 'leave us alone',
+  business: 'a shop, an office',
 } as const satisfies Names
 
 const thingNames = {
@@ -105,6 +123,9 @@ const thingNames = {
   pronoun: 'him, her',
   me: 'me, my',
   you: 'you, your',
+  cup: 'a cup, a glass',
+  animal: 'an animal',
+  elsewhere: 'a thing that is no part of the filter',
 } as const satisfies Names
 
 const bearingNames = {

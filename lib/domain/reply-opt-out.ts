@@ -18,6 +18,8 @@ const manners: ReadonlySet<Concept> = new Set<Concept>([
   'no',
   'yes',
   'all',
+  'need',
+  'can',
 ])
 
 /** How sure the text asks to end the texts; 0 when it does not. Read before anything else. */
@@ -31,7 +33,7 @@ export function optOutSureness(sense: Sense): number {
   const isUnread = isNamed(sense, 'receive', 'see')
   const refused = denied(sense, 'texts')
   if (refused.length > 0 && !isUnread && !isSaid(sense, 'ask')) return sureOf(0.85, refused)
-  if (hasOrderOfItsOwn(sense)) return 0.85
+  if (hasOrderOfItsOwn(sense) || endsInOrder(sense)) return 0.85
   const ends = said(sense, 'end').filter((mark) => mark.likeness !== 'guessed')
   if (areBeside(sense, ends, said(sense, 'texts', 'phone'), 3) && !isSaid(sense, 'ask')) return 0.85
   if (isUnwanted(sense) || isTired(sense)) return 0.8
@@ -64,6 +66,13 @@ function hasOrderOfItsOwn(sense: Sense): boolean {
       return sense.tokens.slice(stop.from).every((_, at) => isOnlyManners(stop.from + at))
     })
   )
+}
+
+/** "Your texts wake the baby, stop them": the order comes last. */
+function endsInOrder(sense: Sense): boolean {
+  if (isSaid(sense, 'ask', 'receive', 'helpWord')) return false
+  const orders = said(sense, 'stopWord', 'end').filter((mark) => mark.likeness !== 'guessed')
+  return isSaid(sense, 'texts') && orders.some((mark) => sense.tokens.length - mark.to <= 1)
 }
 
 /** "STOP. Wrong number": the keyword is a sentence by itself. */

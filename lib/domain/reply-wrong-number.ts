@@ -8,6 +8,10 @@ export function wrongNumberSureness(sense: Sense): number {
   if (areBeside(sense, mistaken, said(sense, 'phone', 'person', 'texts'), 2)) {
     return sureOf(0.8, mistaken)
   }
+  // "My name is Otieno, you are mistaken"; "this phone was hers, she sold it to me".
+  const isOwnName = sense.tokens.some((token) => introWords.has(token.text))
+  if (mistaken.length > 0 && isOwnName) return 0.7
+  if (isSaid(sense, 'phone') && isSaid(sense, 'gave') && !isNamed(sense, 'filter')) return 0.65
   if (deniesName(sense) || deniesPhone(sense) || namesOwner(sense)) return 0.7
   if (isElsewhereReached(sense) || isNobodyHere(sense) || isOfAnother(sense)) return 0.65
   // "Who are you? I have no filter": alone either may be of a household.
@@ -75,6 +79,8 @@ function isNobodyHere(sense: Sense): boolean {
       denials.some((denial) => denial.to <= at && at - denial.to <= 3 && at - denial.to > 0),
   )
 }
+
+const introWords = new Set('name llamo appelle nam নাম'.split(' '))
 
 const hereWords = new Set('here aqui aca ici ekhane এখানে'.split(' '))
 

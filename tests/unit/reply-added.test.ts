@@ -127,7 +127,7 @@ describe('a pack with added words', () => {
 
   it('misses them when they are not handed over', () => {
     const missed = replies.filter((reply) => without(reply).kind !== readReply(reply).kind)
-    expect(missed.length).toBeGreaterThan(5)
+    expect(missed.length).toBeGreaterThan(3)
   }, 60_000)
 })
 
@@ -174,7 +174,7 @@ describe('what may be added', () => {
   it.each([
     ['zorblax and cracked', 'thanks'],
     ['my belly zorblax', 'done'],
-    ['cant drink', 'no'],
+    ['cant drink zorblax', 'no'],
     ['bad water', 'thanks'],
     ['zorblax convulsing', 'broken'],
   ] as const)('%j may not hide its danger as “%s”', (phrase, concept) => {

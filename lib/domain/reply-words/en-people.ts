@@ -19,7 +19,7 @@ export const enPeople: LanguagePack['concepts'] = {
   pronoun: `him, her, herself, himself`,
   animal: `goat, goats, cow, cows, calf, ox, bull, dog, dogs, cat, cats, hen, hens, chicken, chickens,
     duck, ducks, pig, pigs, sheep, lamb, donkey, horse, buffalo, camel, cattle, livestock, animal,
-    animals, puppy`,
+    animals, puppy, puppies, kitten, kid goat`,
   body: `skin, eye, eyes, face, tongue, lips, mouth, throat, chest, head, forehead, neck, feet, hands,
     legs, palms, nails, urine, pee, wee`,
   stool: `stool, stools, poo, poop, pooping, potty, toilet, motion, motions, shit, shitting, feces,

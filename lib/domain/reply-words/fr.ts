@@ -93,5 +93,5 @@ export const frPack: LanguagePack = {
     reveler egale toit coree hiver conviction demarrage lutter marquee, prince palette terrasse
     bouillir bouilli bouillie retrolavage abord remonte remonter debite, entend entendre entends
     entendu plie plier seigneur eponge ancien ancienne desert comble, ballon debite debiter
-    dorment dormir pendule`,
+    dorment dormir pendule crisse dents`,
 }
