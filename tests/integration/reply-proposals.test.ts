@@ -13,7 +13,7 @@ import { readingDesk, type ReadingDesk } from '../factories/reading-desk'
 import { houseIn, say } from '../factories/world'
 
 const spanish = { language: 'es', asked: 'none' } as const
-const goat: NewWord = { phrase: 'chivo', concept: 'slow' }
+const slang: NewWord = { phrase: 'zurumbo', concept: 'slow' }
 
 let deps: TestDeps
 let desk: ReadingDesk
@@ -29,12 +29,12 @@ const addedOf = async () => (await replyWords(deps, desk.tomas, { language: 'es'
 
 describe('a proposal', () => {
   test('is a text that a person read otherwise, with both readings', async () => {
-    const textId = await desk.corrected('el agua muy chivo', 'slow')
+    const textId = await desk.corrected('el agua muy zurumbo', 'slow')
     const { rows } = await listWordProposals(deps, desk.tomas, {})
     expect(rows).toHaveLength(1)
     expect(rows[0]).toMatchObject({
       textId,
-      body: 'el agua muy chivo',
+      body: 'el agua muy zurumbo',
       language: 'es',
       asked: 'none',
       desk: { meaning: 'not clear' },
@@ -49,17 +49,17 @@ describe('a proposal', () => {
   })
 
   test('is listed newest first, a page at a time', async () => {
-    for (let at = 0; at < 21; at++) await desk.corrected(`chivo ${'x'.repeat(at + 4)}`, 'slow')
+    for (let at = 0; at < 21; at++) await desk.corrected(`zurumbo ${'x'.repeat(at + 4)}`, 'slow')
     const first = await listWordProposals(deps, desk.tomas, {})
     expect(first.rows).toHaveLength(20)
-    expect(first.rows[0]?.body).toBe(`chivo ${'x'.repeat(24)}`)
+    expect(first.rows[0]?.body).toBe(`zurumbo ${'x'.repeat(24)}`)
     const rest = await listWordProposals(deps, desk.tomas, { before: first.before ?? 0 })
-    expect(rest.rows.map(({ body }) => body)).toEqual(['chivo xxxx'])
+    expect(rest.rows.map(({ body }) => body)).toEqual(['zurumbo xxxx'])
     expect(rest.before).toBeNull()
   })
 
   test('set aside is not listed again, until somebody reads the text anew', async () => {
-    const textId = await desk.corrected('el agua muy chivo', 'slow')
+    const textId = await desk.corrected('el agua muy zurumbo', 'slow')
     const { readingN } = await desk.proposalOf(textId)
     expect(await setAsideProposal(deps, desk.tomas, { textId, readingN })).toMatchObject({
       ok: true,
@@ -73,12 +73,12 @@ describe('a proposal', () => {
   })
 
   test('is not settled by somebody who saw an older reading', async () => {
-    const textId = await desk.corrected('el agua muy chivo', 'slow')
+    const textId = await desk.corrected('el agua muy zurumbo', 'slow')
     const { readingN } = await desk.proposalOf(textId)
     await readAs(deps, desk.ana, { textId, kind: 'no-flow' })
     const proposal = { textId, readingN }
     expect(
-      await addWords(deps, desk.tomas, { language: 'es', words: [goat], proposal }),
+      await addWords(deps, desk.tomas, { language: 'es', words: [slang], proposal }),
     ).toMatchObject({
       ok: false,
     })
@@ -101,20 +101,20 @@ describe('trying a text', () => {
   })
 
   test('with words on trial tells what they would change, and changes nothing', async () => {
-    await desk.deskReads('hoy chivo')
+    await desk.deskReads('hoy zurumbo')
     await desk.deskReads('gracias')
-    await desk.deskReads('chivo')
-    const words = [goat, { phrase: '12', concept: 'slow' as const }]
-    const tried = await tryReply(deps, desk.tomas, { ...spanish, text: 'chivo', words })
+    await desk.deskReads('zurumbo')
+    const words = [slang, { phrase: '12', concept: 'slow' as const }]
+    const tried = await tryReply(deps, desk.tomas, { ...spanish, text: 'zurumbo', words })
     expect(tried.reading).toMatchObject({ meaning: 'slow water' })
     expect(tried.found[0]).toMatchObject({ meaning: 'slow', added: true })
     expect(tried.refused).toMatchObject([{ phrase: '12' }])
     expect(tried.effect).toMatchObject({ looked: 3, changed: 2, calmed: 0 })
     expect(tried.effect?.some.map(({ body, after }) => [body, after])).toEqual([
-      ['chivo', 'slow water'],
-      ['hoy chivo', 'slow water'],
+      ['zurumbo', 'slow water'],
+      ['hoy zurumbo', 'slow water'],
     ])
-    expect(await desk.deskReads('chivo')).toBe('unclear')
+    expect(await desk.deskReads('zurumbo')).toBe('unclear')
   })
 
   test('looks at the texts of that language only, ten of them by name', async () => {
@@ -124,21 +124,21 @@ describe('trying a text', () => {
       language: 'en',
       handedOverOn: '2026-03-01',
     })
-    await say(deps, '+12025550102', 'chivo')
-    for (let at = 0; at < 12; at++) await desk.deskReads(`chivo ${'y'.repeat(at + 4)}`)
-    const tried = await tryReply(deps, desk.tomas, { ...spanish, text: 'chivo', words: [goat] })
+    await say(deps, '+12025550102', 'zurumbo')
+    for (let at = 0; at < 12; at++) await desk.deskReads(`zurumbo ${'y'.repeat(at + 4)}`)
+    const tried = await tryReply(deps, desk.tomas, { ...spanish, text: 'zurumbo', words: [slang] })
     expect(tried.effect).toMatchObject({ looked: 12, changed: 12 })
     expect(tried.effect?.some).toHaveLength(10)
   })
 })
 
 test('none of it is for agents', async () => {
-  const textId = await desk.corrected('el agua muy chivo', 'slow')
+  const textId = await desk.corrected('el agua muy zurumbo', 'slow')
   const { readingN } = await desk.proposalOf(textId)
-  const words = [goat]
+  const words = [slang]
   const acts = [
     () => replyWords(deps, desk.ana, { language: 'es' }),
-    () => tryReply(deps, desk.ana, { ...spanish, text: 'chivo', words }),
+    () => tryReply(deps, desk.ana, { ...spanish, text: 'zurumbo', words }),
     () => addWords(deps, desk.ana, { language: 'es', words, proposal: { textId, readingN } }),
     () => retireWord(deps, desk.ana, 'any'),
     () => listWordProposals(deps, desk.ana, {}),
