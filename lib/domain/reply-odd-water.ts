@@ -24,7 +24,7 @@ export function findOddWater(sense: Sense): Danger | null {
     (mark) =>
       !goods.some((good) => gapBetween(sense, mark, good) <= 3 && !areParted(sense, mark, good)),
   )
-  const things = said(sense, 'cloth', 'filter', 'piece', 'container', 'source')
+  const things = said(sense, 'cloth', 'filter', 'piece', 'container', 'source', 'elsewhere')
   const isAsking = isSaid(sense, 'ask') && sense.asked !== 'none'
   const coloured = said(sense, 'odd').filter(
     (mark) =>

@@ -20,7 +20,7 @@ export const enWater: LanguagePack['concepts'] = {
     motorbike, motorcycle, okada, boda, tyre, tire, road, bridge, roof, wall of the house, fence,
     gate, window, door, bed, chair, handpump, hand pump, water pump, the pump, pump, engine,
     generator, fridge, stove, cooker, radio, tv, leg, arm, ankle, wrist, bone, tooth, finger, toe,
-    tree, network, internet, timer, watch, clock, alarm`,
+    tree, network, internet, timer, watch, clock, alarm, van, taxi, shirt, dress`,
   flow: `flow, flows, flowing, flowed, come, comes, coming, came, run, runs, running, ran, pour, pours,
     pouring, go through, goes through, going through, gets through, get through, passing,
     pass through, passes, filtering, filters through, give water, gives water, giving water, pass,
