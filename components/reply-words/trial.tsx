@@ -39,6 +39,7 @@ function Reading({ tried, trial, language }: ReadingProps) {
         <span className="text-faint">{reading.sure}</span>.
       </p>
       <MarkedText tried={tried} language={language} />
+      <Readers tried={tried} />
       {unknownWords.length > 0 && (
         <p className="mt-1.5 text-sm text-faint">
           Words it does not know:{' '}
@@ -48,6 +49,16 @@ function Reading({ tried, trial, language }: ReadingProps) {
         </p>
       )}
     </section>
+  )
+}
+
+/** The two readers apart: where they differ a person is asked. */
+function Readers({ tried: { byWords, byExamples } }: { tried: TriedReply }) {
+  const shares = byExamples.map(({ meaning, percent }) => `${meaning} ${percent} %`)
+  return (
+    <p className="mt-1.5 text-sm text-faint">
+      By the word lists: {byWords}. By texts like it: {shares.join(', ')}.
+    </p>
   )
 }
 

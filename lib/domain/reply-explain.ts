@@ -1,7 +1,6 @@
 import type { Language } from './language'
 import type { Likeness } from './reply-lexicon'
-import { readReply, type Reply, type ReplyReading } from './reply'
-import { senseOf } from './reply-sense'
+import { readTwice, type Reply, type TwiceRead } from './reply'
 import type { Token } from './reply-tokens'
 import type { Concept } from './reply-words/concept'
 
@@ -22,8 +21,7 @@ export type SeenWord = { text: string; kind: Token['kind']; known: boolean }
 /** A number in the text; its minutes where it says so. */
 export type FoundFigure = { from: number; to: number; minutes: number | null }
 
-export type Explained = {
-  reading: ReplyReading
+export type Explained = Pick<TwiceRead, 'reading' | 'byWords' | 'byExamples'> & {
   words: SeenWord[]
   found: Found[]
   figures: FoundFigure[]
@@ -32,14 +30,14 @@ export type Explained = {
 
 /** A reading with what it rests on, for the page on which a coordinator tries a text. */
 export function explainReply(reply: Reply): Explained {
-  const sense = senseOf(reply.text, reply.language, reply.asked, reply.added)
+  const { sense, ...readings } = readTwice(reply)
   const wordsBetween = (from: number, to: number): string =>
     sense.tokens
       .slice(from, to)
       .map((token) => token.text)
       .join(' ')
   return {
-    reading: readReply(reply),
+    ...readings,
     words: sense.tokens.map(({ text, kind }, at) => ({
       text,
       kind,

@@ -1,6 +1,7 @@
 import { minutesBetweenClocks } from './reply-clock'
 import type { Mark } from './reply-marks'
 import { isNamed, said, type Sense } from './reply-sense'
+import type { Concept } from './reply-words/concept'
 
 /** A number people would give for a bottle: from some seconds to half a day. */
 const longestFillMinutes = 720
@@ -15,7 +16,10 @@ export function figureOf(sense: Sense): Figure | null {
   if (isPutOff(sense) || isPastTime(sense) || promised(sense).length > 0) return null
   const spans = presentOf(
     sense,
-    sense.figures.spans.filter((span) => span.minutes > 0),
+    unrefused(
+      sense,
+      sense.figures.spans.filter((span) => span.minutes > 0),
+    ),
   )
   const last = spans.at(-1)
   if (last === undefined) return bareFigure(sense)
@@ -49,6 +53,23 @@ function isRangeBetween(sense: Sense, from: number, to: number): boolean {
     between.length <= 1 &&
     between.every((token) => token.text === '-' || rangeWords.has(token.text))
   )
+}
+
+const denials: readonly Concept[] = ['no', 'not', 'notNext', 'notAround', 'notBack']
+
+/** "Not 5, 8": of several figures those that are not taken back. */
+function unrefused<Figured extends Place>(sense: Sense, figures: readonly Figured[]): Figured[] {
+  const all = [...sense.figures.spans, ...sense.figures.bare]
+  if (all.length < 2) return [...figures]
+  const denied = sense.marks.filter(({ concept }) => denials.includes(concept))
+  const isRefused = (figure: Place): boolean =>
+    denied.some((mark) => {
+      const isBengali = mark.language === 'bn'
+      const gap = isBengali ? mark.from - figure.to : figure.from - mark.to
+      return gap >= 0 && gap <= (isBengali ? 0 : 1)
+    })
+  const kept = figures.filter((figure) => !isRefused(figure))
+  return all.every(isRefused) ? [...figures] : kept
 }
 
 /** "It was 4, now it is 9": of several figures those that are not of the past. */
@@ -92,7 +113,10 @@ function isPastTime(sense: Sense): boolean {
 }
 
 function bareFigure(sense: Sense): Figure | null {
-  const bare = sense.figures.bare.filter(({ value }) => value > 0)
+  const bare = unrefused(
+    sense,
+    sense.figures.bare.filter(({ value }) => value > 0),
+  )
   const values = presentOf(sense, bare).map(({ value }) => value)
   const [one, other] = values
   if (one === undefined || values.length > 2 || one > longestFillMinutes) return null

@@ -32,12 +32,8 @@ type Reader = { order: Language[]; figures: Figures }
 function readFigureAt(tokens: readonly Token[], from: number, { order, figures }: Reader): number {
   const first = pieceAt(tokens, from, order)
   if (first.kind === 'span') {
-    const rest = restOfHour(tokens, { minutes: first.minutes, to: from + first.size }, order)
-    return pushSpan(
-      tokens,
-      { minutes: first.minutes + rest.minutes, from, to: rest.to },
-      { order, figures },
-    )
+    const span = { minutes: first.minutes, from, to: from + first.size }
+    return pushSpan(tokens, withRest(tokens, span, order), { order, figures })
   }
   if (first.kind === 'shift') {
     // "সোয়া এক ঘণ্টা": a quarter more than one hour.
@@ -61,21 +57,6 @@ function readFigureAt(tokens: readonly Token[], from: number, { order, figures }
   const isAlone = tokens.length === 1 && amount.value >= 1
   if (!amount.weak || isAlone) figures.bare.push({ value: amount.value, from, to: amount.to })
   return amount.to
-}
-
-/** "An hour and twenty", "une heure vingt": minutes without their unit. */
-function restOfHour(
-  tokens: readonly Token[],
-  span: { minutes: number; to: number },
-  order: Language[],
-): { minutes: number; to: number } {
-  const none = { minutes: 0, to: span.to }
-  if (span.minutes !== 60) return none
-  const skip = isAnd(tokens[span.to]) ? 1 : 0
-  const amount = readAmount(tokens, span.to + skip, order)
-  if (amount === null || amount.weak || amount.value >= 60) return none
-  const unit = pieceAt(tokens, amount.to, order)
-  return unit.kind === 'unit' ? none : { minutes: amount.value, to: amount.to }
 }
 
 /** "A whole hour": what stands between a number and its unit without changing it. */
@@ -168,25 +149,41 @@ function readSpan(
 ): number {
   const unit = pieceAt(tokens, amount.to, order)
   if (unit.kind !== 'unit' || unit.unit === 'other') return amount.to
-  let minutes = amount.value * minutesPer[unit.unit]
-  let to = amount.to + unit.size
-  const isHalf = pieceAt(tokens, to, order).kind === 'half'
-  const skip = !isHalf && isAnd(tokens[to]) ? 1 : 0
-  const half = pieceAt(tokens, to + skip, order)
+  const minutes = amount.value * minutesPer[unit.unit]
+  const span = { minutes, from: amount.from, to: amount.to + unit.size }
+  const whole = unit.unit === 'second' ? span : afterUnit(tokens, span, { order, unit: unit.unit })
+  return pushSpan(tokens, whole, { order, figures })
+}
+
+type Span = { minutes: number; from: number; to: number }
+
+/** "Une heure et quart", "une minute trente": a span that is one whole unit may have more behind it. */
+function withRest(tokens: readonly Token[], span: Span, order: Language[]): Span {
+  if (span.minutes === 60) return afterUnit(tokens, span, { order, unit: 'hour' })
+  return span.minutes === 1 ? afterUnit(tokens, span, { order, unit: 'minute' }) : span
+}
+
+/** What may follow a unit: a part of it, or the smaller unit, whose name is often left out. */
+function afterUnit(
+  tokens: readonly Token[],
+  span: Span,
+  { order, unit }: { order: Language[]; unit: 'hour' | 'minute' },
+): Span {
+  const isHalf = pieceAt(tokens, span.to, order).kind === 'half'
+  const skip = !isHalf && isAnd(tokens[span.to]) ? 1 : 0
+  const half = pieceAt(tokens, span.to + skip, order)
   if (half.kind === 'half') {
-    minutes += half.part * minutesPer[unit.unit]
-    to += skip + half.size
-  } else if (unit.unit !== 'second') {
-    const rest = readAmount(tokens, to + skip, order)
-    const restUnit = rest && pieceAt(tokens, rest.to, order)
-    const smaller = unit.unit === 'hour' ? 'minute' : 'second'
-    if (rest && restUnit?.kind === 'unit' && restUnit.unit === smaller) {
-      minutes += rest.value * minutesPer[smaller]
-      to = rest.to + restUnit.size
-    } else if (rest && rest.value < 60 && restUnit?.kind !== 'unit' && skip === 0 && !rest.weak) {
-      minutes += rest.value * minutesPer[smaller]
-      to = rest.to
-    }
+    const minutes = span.minutes + half.part * minutesPer[unit]
+    return { ...span, minutes, to: span.to + skip + half.size }
   }
-  return pushSpan(tokens, { minutes, from: amount.from, to }, { order, figures })
+  const rest = readAmount(tokens, span.to + skip, order)
+  if (!rest) return span
+  const restUnit = pieceAt(tokens, rest.to, order)
+  const smaller = unit === 'hour' ? 'minute' : 'second'
+  const minutes = span.minutes + rest.value * minutesPer[smaller]
+  if (restUnit.kind === 'unit' && restUnit.unit === smaller)
+    return { ...span, minutes, to: rest.to + restUnit.size }
+  const isBare = rest.value < 60 && !rest.weak && restUnit.kind !== 'unit'
+  const isCounted = skip === 0 || tokens[span.to]?.text === 'con' || tokens[span.to]?.text === 'y'
+  return isBare && isCounted ? { ...span, minutes, to: rest.to } : span
 }

@@ -78,9 +78,19 @@ function spellFraction(_: string, whole: string | undefined, over: string, under
   return ` ${String(Number(whole ?? 0) + Number(over) / Number(under))} `
 }
 
+/** "1O min", "l4 min": letters that stand for the digits they look like. */
+function figuresOfLetters(text: string): string {
+  return text
+    .replace(/(?<=(?<![\p{L}\d])\d)[oO](?![\p{L}\d])/gu, '0')
+    .replace(/(?<![\p{L}\d])[lI](?=\d(?![\p{L}\d]))/gu, '1')
+}
+
 /** Lower case, Latin accents off, digits of any script as ASCII. Bengali vowel signs stay. */
 export function foldText(text: string): string {
-  let folded = text.replace(/(?<![\d/])(?:(\d+)\s+)?([13])\/([24])(?![\d/])/g, spellFraction)
+  let folded = figuresOfLetters(text).replace(
+    /(?<![\d/])(?:(\d+)\s+)?([13])\/([24])(?![\d/])/g,
+    spellFraction,
+  )
   folded = folded.replace(/(\d?)\s?([½¼¾])/gu, (_, whole: string, part: string) => {
     return ` ${whole === '' ? '0' : whole}${fractions[part] ?? ''} `
   })

@@ -1,43 +1,15 @@
-import { isHelpKeyword, isStartKeyword } from './consent'
+import { isHelpKeyword, isStartKeyword, isStopKeyword } from './consent'
 import type { Language } from './language'
 import type { AddedWord } from './reply-added'
-import { findAnswer } from './reply-answers'
-import type { ReplyKind } from './reply-kind'
-import { figureOf, isMostlyFigure, worsenedTo } from './reply-figure'
-import { findDanger } from './reply-danger'
-import { isDoubtful } from './reply-doubt'
-import { optOutSureness } from './reply-opt-out'
-import { wrongNumberSureness } from './reply-wrong-number'
-import {
-  isDenied,
-  isNamed,
-  isSaid,
-  isSupposed,
-  said,
-  senseOf,
-  type Asked,
-  type Sense,
-} from './reply-sense'
-import { noFlowSureness, slowSureness } from './reply-trouble'
+import { chancesOf } from './reply-by-examples'
+import { readByWords } from './reply-by-words'
+import { sureEnough, type ReplyReading } from './reply-kind'
+import { senseOf, type Asked, type Sense } from './reply-sense'
+import { traitsOf } from './reply-traits'
+import { weigh, type Chance } from './reply-weigh'
 
-export type { Asked, ReplyKind }
-
-export type ReplyReading = {
-  kind: ReplyKind
-  /** Bottle-fill time. */
-  minutes?: number
-  /** A bare 1, 2 or 3 where a numbered choice may have been asked; `minutes` is set too. */
-  choice?: number
-  /** 0 to 1; under `sureEnough` the kind is `unclear`. */
-  sure: number
-  /** A general danger sign of illness (WHO IMCI): go to a health worker now. */
-  dangerSign?: boolean
-  /** The text also says that the water is slow. */
-  alsoSlow?: boolean
-}
-
-/** Below this a person reads the text. */
-export const sureEnough = 0.6
+export { sureEnough, type ReplyKind, type ReplyReading } from './reply-kind'
+export type { Asked } from './reply-sense'
 
 export type Reply = {
   text: string
@@ -48,96 +20,49 @@ export type Reply = {
 }
 
 /**
- * What a household's text means. Order: opt-out, danger, wrong number, what was asked, the rest.
- * The household's own language is tried first, then English, then the others.
+ * What a household's text means, by two readers: the word lists with their rules (opt-out, danger, wrong number, what
+ * was asked, the rest), and what texts like it have meant. Where they cannot agree a person reads it.
  *
  * @example readReply({ text: 'sale poca agua', language: 'es', asked: 'wash' }).kind // 'slow'
  */
 export function readReply(reply: Reply): ReplyReading {
+  return readTwice(reply).reading
+}
+
+/** A reading with what each of the two readers made of the text; `byExamples` has the likeliest first. */
+export type TwiceRead = {
+  sense: Sense
+  byWords: ReplyReading
+  byExamples: readonly Chance[]
+  reading: ReplyReading
+}
+
+/** What `readReply` rests on. */
+export function readTwice(reply: Reply): TwiceRead {
   const sense = senseOf(reply.text, reply.language, reply.asked, reply.added)
-  const reading = readUrgent(sense) ?? readTrouble(sense) ?? readRest(sense)
-  const trusted = isDoubtful(sense, reading.kind) ? Math.min(reading.sure, 0.55) : reading.sure
-  const sure = Math.round(trusted * 100) / 100
-  return sure < sureEnough ? { ...reading, kind: 'unclear', sure } : { ...reading, sure }
+  const byWords = readByWords(sense)
+  const byExamples = chancesOf(traitsOf(sense, byWords))
+  const isDecided = isPlain(sense, byWords) || isDecidedByAdded(reply, byWords)
+  const read = isDecided ? byWords : weigh(sense, byWords, byExamples)
+  const sure = Math.round(read.sure * 100) / 100
+  const reading: ReplyReading =
+    sure < sureEnough ? { ...read, kind: 'unclear', sure } : { ...read, sure }
+  return { sense, byWords, byExamples, reading }
 }
 
-function readUrgent(sense: Sense): ReplyReading | null {
-  const optOut = optOutSureness(sense)
-  if (optOut > 0) return { kind: 'stop', sure: optOut }
-  if (isStartKeyword(sense.text)) return { kind: 'start', sure: 1 }
-  if (isHelpKeyword(sense.text)) return { kind: 'help', sure: 1 }
-  const danger = findDanger(sense)
-  if (danger) return slowSureness(sense) >= sureEnough ? { ...danger, alsoSlow: true } : danger
-  const wrong = wrongNumberSureness(sense)
-  return wrong > 0 ? { kind: 'wrong-number', sure: wrong } : null
+/** What a word of the programme's own changes, it decides: no example knows it. */
+function isDecidedByAdded({ added, ...reply }: Reply, byWords: ReplyReading): boolean {
+  if (!added || added.length === 0) return false
+  const without = readByWords(senseOf(reply.text, reply.language, reply.asked))
+  return without.kind !== byWords.kind
 }
 
-/** "It stopped", "water stop", "stopped dripping": it could be the texts, a leak or the water. */
-function isStopOrStopped(sense: Sense): boolean {
-  // "Tightened it and it no longer drips": the drip was the leak.
-  const isMended = sense.asked === 'step' && isSaid(sense, 'done') && isNamed(sense, 'drip')
-  if (isReasonNotToStart(sense) || isMended) return false
-  if (isSaid(sense, 'itStopped')) return true
-  if (isSaid(sense, 'notYet')) return false
-  return (
-    isSaid(sense, 'ceased', 'stopWord') &&
-    !isDenied(sense, 'flow', 'water', 'piece', 'cloth', 'slow', 'good', 'fast')
-  )
-}
-
-/** Figures and trouble: the figure answers when one was asked for. */
-function readTrouble(sense: Sense): ReplyReading | null {
-  if (isSupposed(sense)) return null
-  const noFlow = isReasonNotToStart(sense) ? 0 : noFlowSureness(sense)
-  const slow = slowSureness(sense)
-  const isAsked = sense.asked === 'flow' || sense.asked === 'step'
-  const figure = figureOf(sense)
-  if (figure && (figure.hasUnit || isMostlyFigure(sense))) {
-    // "Is 12 minutes ok?"
-    if (!isAsked && sense.text.includes('?') && isSaid(sense, 'ask', 'where', 'yes', 'good'))
-      return null
-    const worse = isAsked ? null : worsenedTo(sense)
-    if (worse !== null) return { kind: 'slow', minutes: worse, sure: 0.8 }
-    // "Strong for one minute, then a dribble": nobody calls a minute slow.
-    if (slow > 0 && figure.minutes <= 1 && sense.asked !== 'flow')
-      return { kind: 'slow', sure: slow }
-    if (slow > 0 && !isAsked) return { kind: 'slow', minutes: figure.minutes, sure: slow }
-    return readFigure(sense, figure, slow >= sureEnough)
-  }
-  if (noFlow >= slow && noFlow > 0) return { kind: 'no-flow', sure: noFlow }
-  if (slow > 0) return { kind: 'slow', sure: slow }
-  return isStopOrStopped(sense) ? { kind: 'unclear', sure: 0.5 } : null
-}
-
-/** "Not yet, the pump has no water", "no water to wash it with": it is not the filter that gives none. */
-function isReasonNotToStart(sense: Sense): boolean {
-  const isCare = sense.asked === 'wash' || sense.asked === 'change'
-  if (!isCare || isNamed(sense, 'filter', 'drip', 'outlet', 'done')) return false
-  // Bengali "pore" is "later" and "falls".
-  const first = said(sense, 'notYet').some(
-    (mark) =>
-      mark.from <= 1 &&
-      !sense.marks.some((other) => other.concept === 'flow' && other.from === mark.from),
-  )
-  const isForWash =
-    isNamed(sense, 'wash', 'notYet') && isSaid(sense, 'day', 'future', 'notYet', 'now')
-  return first || (isForWash && !isNamed(sense, 'flow'))
-}
-
-function readFigure(
-  sense: Sense,
-  figure: { minutes: number; hasUnit: boolean },
-  isSlow: boolean,
-): ReplyReading {
-  const also = isSlow ? { alsoSlow: true } : {}
-  const isChoice =
-    !figure.hasUnit && [1, 2, 3].includes(figure.minutes) && !['flow', 'none'].includes(sense.asked)
-  if (isChoice) {
-    return { kind: 'choice', choice: figure.minutes, minutes: figure.minutes, sure: 0.85, ...also }
-  }
-  return { kind: 'flow-figure', minutes: figure.minutes, sure: figure.hasUnit ? 0.9 : 0.8, ...also }
-}
-
-function readRest(sense: Sense): ReplyReading {
-  return findAnswer(sense) ?? { kind: 'unclear', sure: 0.3 }
+/** A keyword of consent, one known word, or nothing but a figure: it means what the word lists say. */
+function isPlain({ text, tokens, figures, words }: Sense, byWords: ReplyReading): boolean {
+  if (isStopKeyword(text) || isStartKeyword(text) || isHelpKeyword(text)) return true
+  if (words === 1 && byWords.kind !== 'unclear') return true
+  // "No mas": nothing beside the order to end the texts.
+  if (words <= 3 && byWords.kind === 'stop') return true
+  const [only, ...others] = [...figures.spans, ...figures.bare]
+  return only !== undefined && others.length === 0 && only.to - only.from === tokens.length
 }

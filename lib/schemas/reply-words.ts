@@ -73,6 +73,10 @@ const effectSchema = z.object({
 
 export const triedReplySchema = z.object({
   reading: meaningSchema,
+  /** What the word lists alone make of it. */
+  byWords: z.string(),
+  /** What texts like it have meant, the likeliest first. */
+  byExamples: z.array(z.object({ meaning: z.string(), percent: z.number() })),
   /** The text as the desk cuts it. */
   words: z.array(
     z.object({ text: z.string(), kind: z.enum(['word', 'number', 'break']), known: z.boolean() }),

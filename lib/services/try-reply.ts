@@ -41,9 +41,17 @@ export async function tryReply(deps: Deps, actor: Actor, input: TryReply): Promi
 }
 
 function explainedView(explained: Explained, added: readonly AddedWord[]) {
-  const { reading, words, found, figures, unknownWords } = explained
+  const { reading, byWords, byExamples, words, found, figures, unknownWords } = explained
   return {
     reading: { meaning: meaningWords(reading), sure: sureWords(reading.sure) },
+    byWords: meaningWords(byWords),
+    byExamples: byExamples
+      .slice(0, 3)
+      .filter(({ chance }) => chance >= 0.01)
+      .map(({ kind, chance }) => ({
+        meaning: meaningWords({ kind }),
+        percent: Math.round(chance * 100),
+      })),
     words,
     found: [...found.map((mark) => markView(mark, added)), ...figures.map(figureView)],
     unknownWords,

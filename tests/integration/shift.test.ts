@@ -31,7 +31,7 @@ beforeEach(async () => {
 describe('the order of the shift', () => {
   test('stands by harm: unwell, no safe water, slow, unread words', async () => {
     for (const one of [puzzling, slow, cracked, ill]) await house(one)
-    await say(deps, puzzling.number, 'blue van lady tuesday or not')
+    await say(deps, puzzling.number, 'zorblax van lady frotz')
     await say(deps, slow.number, 'sale poca agua')
     deps.clock.advance(HOUR)
     await say(deps, cracked.number, 'it fell and the cap is cracked')
@@ -44,7 +44,7 @@ describe('the order of the shift', () => {
       ['Unread words', ['Adeyo house']],
     ])
     expect({ waiting, taken }).toEqual({ waiting: 4, taken: 0 })
-    expect(bands[3]?.rows[0]?.words).toBe('blue van lady tuesday or not')
+    expect(bands[3]?.rows[0]?.words).toBe('zorblax van lady frotz')
     expect(bands[1]?.rows[0]?.sentence).toContain('nothing safe since')
   })
 

@@ -28,6 +28,7 @@ import { thirdBnReplies } from './replies/third-bn'
 import { thirdEnReplies } from './replies/third-en'
 import { thirdEsReplies } from './replies/third-es'
 import { thirdFrReplies } from './replies/third-fr'
+import { unseenReplies } from './replies/unseen'
 
 // The aims of the issue: 97 % right or handed to a person, at most a tenth handed, and no danger,
 // opt-out or wrong number ever read as something else. Labels are by hand.
@@ -147,6 +148,30 @@ describe.each(languages)('replies in %s', (language) => {
     )
     expect(shouted.map(({ text }) => text)).toEqual([])
   }, 60_000)
+})
+
+describe.each(languages)('replies in %s that neither reader has seen', (language) => {
+  const unseen = readAll(unseenReplies.filter((reply) => reply.language === language))
+
+  it('are at least 300', () => expect(unseen.length).toBeGreaterThanOrEqual(300))
+
+  it('are read right or handed to a person in 97 of 100', () => {
+    const wrong = unseen.filter((read) => !isRight(read) && !isHanded(read))
+    expect(wrong.length / unseen.length, told(wrong).join('\n')).toBeLessThanOrEqual(0.03)
+  })
+
+  it('go to a person in at most a tenth', () => {
+    expect(unseen.filter(isHanded).length / unseen.length).toBeLessThanOrEqual(0.1)
+  })
+
+  it('never hide a danger, an opt-out or a wrong number, and never end texts unasked', () => {
+    const hidden = unseen.filter(
+      ({ reply, reading }) =>
+        ![reply.kind, 'unclear'].includes(reading.kind) &&
+        (neverMistaken.has(reply.kind) || reading.kind === 'stop'),
+    )
+    expect(told(hidden)).toEqual([])
+  })
 })
 
 describe('a household that writes in another language than its own', () => {

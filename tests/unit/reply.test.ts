@@ -2,10 +2,13 @@ import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
 import type { Language } from '@/lib/domain/language'
 import { readReply, sureEnough, type Asked } from '@/lib/domain/reply'
+import { readByWords } from '@/lib/domain/reply-by-words'
 import { explainReply } from '@/lib/domain/reply-explain'
+import { senseOf } from '@/lib/domain/reply-sense'
 
+/** As the word lists read it: what the two readers make of it together is tried on whole sets. */
 function read(text: string, asked: Asked = 'none', language: Language = 'en') {
-  return readReply({ text, language, asked })
+  return readByWords(senseOf(text, language, asked))
 }
 
 describe('the order of reading', () => {
@@ -136,6 +139,20 @@ describe('any text at all', () => {
     )
   }, 60_000)
 
+  it.each([
+    ['STOP', 'none', 'stop'],
+    ['start', 'none', 'start'],
+    ['slow', 'wash', 'slow'],
+    ['12', 'flow', 'flow-figure'],
+    ['4 min 30', 'flow', 'flow-figure'],
+    ['2', 'step', 'choice'],
+  ] as const)(
+    '"%s" (%s), a keyword, one known word or a figure, is %s whatever its like meant',
+    (written, asked, kind) => {
+      expect(readReply({ text: written, language: 'en', asked }).kind).toBe(kind)
+    },
+  )
+
   it('empty goes to a person', () => {
     expect(read('').kind).toBe('unclear')
     expect(read(' \n ').kind).toBe('unclear')
@@ -144,15 +161,17 @@ describe('any text at all', () => {
 
 describe('an explanation', () => {
   it('names the words a reading rests on, and the strange ones', () => {
-    const { reading, found, unknownWords } = explainReply({
+    const { byWords, byExamples, found, unknownWords } = explainReply({
       text: 'the cap is not cracked xyzzy',
       language: 'en',
       asked: 'step',
     })
-    expect(reading.kind).toBe('no')
     expect(found).toContainEqual(
       expect.objectContaining({ concept: 'broken', denied: true, language: 'en' }),
     )
     expect(unknownWords).toEqual(['xyzzy'])
+    expect(byWords.kind).toBe('no')
+    expect(byExamples[0]).toMatchObject({ kind: 'no' })
+    expect(byExamples.reduce((sum, { chance }) => sum + chance, 0)).toBeCloseTo(1, 6)
   })
 })

@@ -66,28 +66,28 @@ export const bnPack: LanguagePack = {
   shifts: `সাড়ে 0.5, সারে 0.5, পৌনে -0.25, সোয়া 0.25, sare 0.5, share 0.5, shaare 0.5, sharhe 0.5,
     poune -0.25, pone -0.25, soya 0.25, shoya 0.25, sowa 0.25`,
   light: ``,
-  common: `${bnEveryday} কখনো কখনও kokhono laga লাগা upore dhali niche ঢালি উপরে একদম একেবারেই মোটেই,
-    ekdom ekebarei motei pray prai প্রায় lokta লোকটা এই এটা এটি এইটা ওই ওটা সেই সেটা আমি তুমি,
-    আপনি সে তিনি আমরা তারা আমার তোমার আপনার তার আমাদের আপনাদের তাদের ও আর এবং বা যে যা কে কি কী তো,
-    না হ্যাঁ হয় হলো হবে ছিল আছে আছি আছেন থাকে থাকি করে করি করেন করা করতে দিয়ে থেকে জন্য সাথে,
-    সঙ্গে মধ্যে উপর নিচে ভিতরে ভিতর বাইরে কাছে দিকে পর্যন্ত পর আগে পরে এখন তখন যখন আজ কাল গতকাল,
-    সকাল দুপুর বিকাল রাত দিন সপ্তাহ মাস বছর সময় টাকা দাম কাজ বাড়ি ঘর বাসা বাজার গ্রাম শহর রাস্তা,
-    স্কুল মসজিদ মন্দির দোকান ভাত মাছ ডাল চা দুধ লবণ চিনি তেল মানুষ লোক মেয়ে ছেলে ভাই বোন মা বাবা,
-    বন্ধু হাত পা মাথা চোখ মুখ কথা নাম বড় ছোট নতুন পুরান পুরানো প্রথম শেষ সব কিছু কেউ একটা একটি,
-    দুইটা অনেক খুব বেশি কম একটু আবার শুধু মাত্র হয়তো মনে গেছে গেল যাই যায় যাব আসি আসব এসে নিয়ে,
-    নিছি দেখি দেখে বলি বলে বলছি জানি জানে ভাবি চাই লাগে লাগবে পারি পারে পারব বৃষ্টি রোদ গরম ঠান্ডা,
-    হাওয়া আগুন আলো অন্ধকার ei eta eita oi ota sei seta ami tumi apni se tini amra tara amar tomar,
-    apnar tar amader apnader tader o ar r ebong ba je ja ke ki to na hoy holo hobe chilo silo ache,
-    achi achen ase asi asen thake thaki kore kori koren kora korte diye dia theke thaika jonno,
-    jonne sathe shathe songe moddhe upor vitore bhitor baire kase kache dike por age pore ekhon,
-    tokhon jokhon aj kal sokal dupur bikal rat din soptaho mash bochor somoy shomoy taka dam kaj,
-    bari ghor basa basha bajar gram shohor rasta school moshjid mondir dokan bhat mach dal cha,
-    dudh lobon chini manush lok meye chele vai bhai bon ma baba bondhu hat pa matha chokh mukh,
-    kotha nam boro choto soto notun puran prothom sob shob kichu kisu keu ekta ekti duita onek,
-    khub beshi kom ektu abar sudhu shudhu matro hoyto mone gese geche gelo jai jay jabo asbo ese,
-    eshe niye nisi dekhi dekhe boli bole bolchi bolsi jani jane vabi chai lage lagbe pari pare,
-    parbo bristi rod gorom thanda hawa agun alo ondhokar theika hoye hoite hote korle korlam korar,
-    dewar deoa dey dei dise disi ney nei kintu tai tahole jemon temon emon kemon erokom orokom,
-    ফুটাতে ফুটিয়ে ফুটানো ফোটানো ফুটায়ে futate futiye futano fotano khola khela chulae chular,
+  common: `${bnEveryday} কখনো কখনও kokhono laga লাগা upore dhali niche ঢালি উপরে একদম একেবারেই মোটেই
+    ekdom ekebarei motei pray prai প্রায় lokta লোকটা এই এটা এটি এইটা ওই ওটা সেই সেটা আমি তুমি
+    আপনি সে তিনি আমরা তারা আমার তোমার আপনার তার আমাদের আপনাদের তাদের ও আর এবং বা যে যা কে কি কী তো
+    না হ্যাঁ হয় হলো হবে ছিল আছে আছি আছেন থাকে থাকি করে করি করেন করা করতে দিয়ে থেকে জন্য সাথে
+    সঙ্গে মধ্যে উপর নিচে ভিতরে ভিতর বাইরে কাছে দিকে পর্যন্ত পর আগে পরে এখন তখন যখন আজ কাল গতকাল
+    সকাল দুপুর বিকাল রাত দিন সপ্তাহ মাস বছর সময় টাকা দাম কাজ বাড়ি ঘর বাসা বাজার গ্রাম শহর রাস্তা
+    স্কুল মসজিদ মন্দির দোকান ভাত মাছ ডাল চা দুধ লবণ চিনি তেল মানুষ লোক মেয়ে ছেলে ভাই বোন মা বাবা
+    বন্ধু হাত পা মাথা চোখ মুখ কথা নাম বড় ছোট নতুন পুরান পুরানো প্রথম শেষ সব কিছু কেউ একটা একটি
+    দুইটা অনেক খুব বেশি কম একটু আবার শুধু মাত্র হয়তো মনে গেছে গেল যাই যায় যাব আসি আসব এসে নিয়ে
+    নিছি দেখি দেখে বলি বলে বলছি জানি জানে ভাবি চাই লাগে লাগবে পারি পারে পারব বৃষ্টি রোদ গরম ঠান্ডা
+    হাওয়া আগুন আলো অন্ধকার ei eta eita oi ota sei seta ami tumi apni se tini amra tara amar tomar
+    apnar tar amader apnader tader o ar r ebong ba je ja ke ki to na hoy holo hobe chilo silo ache
+    achi achen ase asi asen thake thaki kore kori koren kora korte diye dia theke thaika jonno
+    jonne sathe shathe songe moddhe upor vitore bhitor baire kase kache dike por age pore ekhon
+    tokhon jokhon aj kal sokal dupur bikal rat din soptaho mash bochor somoy shomoy taka dam kaj
+    bari ghor basa basha bajar gram shohor rasta school moshjid mondir dokan bhat mach dal cha
+    dudh lobon chini manush lok meye chele vai bhai bon ma baba bondhu hat pa matha chokh mukh
+    kotha nam boro choto soto notun puran prothom sob shob kichu kisu keu ekta ekti duita onek
+    khub beshi kom ektu abar sudhu shudhu matro hoyto mone gese geche gelo jai jay jabo asbo ese
+    eshe niye nisi dekhi dekhe boli bole bolchi bolsi jani jane vabi chai lage lagbe pari pare
+    parbo bristi rod gorom thanda hawa agun alo ondhokar theika hoye hoite hote korle korlam korar
+    dewar deoa dey dei dise disi ney nei kintu tai tahole jemon temon emon kemon erokom orokom
+    ফুটাতে ফুটিয়ে ফুটানো ফোটানো ফুটায়ে futate futiye futano fotano khola khela chulae chular
     chulay chinno`,
 }

@@ -42,49 +42,49 @@ export const enPack: LanguagePack = {
     three quarter of an hour 45, half a minute 0.5, half minute 0.5, half min 0.5, half a min 0.5,
     minute and a half 1.5, a minute and a half 1.5, one and a half hours 90, an hour 60,
     a minute 1, quarter to an hour 45`,
-  halves: `an a half 0.5, an half 0.5, nd a half 0.5, and a half 0.5, and half 0.5, n half 0.5,
+  halves: `an a quarter 0.25, and three quarters 0.75, an a half 0.5, an half 0.5, nd a half 0.5, and a half 0.5, and half 0.5, n half 0.5,
     n a half 0.5, and a quarter 0.25, and quarter 0.25`,
   light: `give gives giving given let lets a an the any my our your his her its their this that these those it to be been being have had having got get getting really even ever yet all so too very as like one single more longer anymore i im u you we he she they there is are was were am do does did seem seems look looks feel feels feeling want wants going go able of on at for with still enough much quite properly good well fully quick completely again`,
-  common: `${enEveryday} hmm lol haha jaja asdf the a an this that these those there here it its is are,
-    am be been being was were do does did have has had having and for from with at by to of in on,
-    off up down out over under into onto about than then so as also all any some each every both,
-    such own i im ive id ill we weve he hes she shes they theyre them his her hers our ours their,
-    him who whom whose what when where why how which my your yours yourself myself shop step slop,
-    stow snow show shot stoop sleep slope soap same sale safe save send sent seen seed seem sell,
-    side sign size sick sing site sit six take took taken make made making give gave given put let,
-    keep kept try tried use used using say says said tell told know knew think thought hope find,
-    found look looks looking looked like liked love home house door room table kitchen garden road,
-    town city village day days night week weeks month months year years hour minute time times,
-    morning evening sunday monday tuesday wednesday thursday friday saturday first second last,
-    next once twice work job money price cost pay paid buy bought food rice bread milk tea coffee,
-    sugar salt fish meat egg eggs eat eats ate cook cooking man men woman women friend neighbor,
-    teacher school church market rain sun wind hot cold warm cool new old big large small short,
-    high hard easy open close closed shut full half one two three much many more most lot lots,
-    really maybe perhaps probably should would could might must shall ought because since until,
-    while during before after always often sometimes usually never ever else though plan plane,
-    place plate plastic paper glass metal wood stone hand hands head eyes feet foot hair face left,
-    right front back top turn turned push pushed pull pulled press pressed hold held hang hung,
-    lift lifted stand stood set sat lay laid walk walked went going gone leave live lives lived,
-    mine main mind mean means meant mom need near news name named nine none noon note dinner lunch,
-    breakfast god lord jesus allah amen bible please pls kindly speak talk talking heard hear,
-    listen call called phone cell charge battery network picture photo pic image video strop shops,
-    stops stoic store story storm staff stuff stick still sport spot spots slot slots slip slap,
-    stamp drip trip tip tap tape tops pop hop mop crop drop prop cracker corner cover done dome,
-    bone tone cone lone line lines move mover fill fell feel fall fuel wall well will bell fiver,
-    river fever lever liver cider older folder golden silver sister mister master matter letter,
-    later water wafer better butter bitter litter latter ready reach read rude ride rode rest west,
-    best test text nest neat heart heat health healthy earth east gud bad dad sad mad bed red fed,
-    wed led maid aid books real posted shipping reserved pages following access property value,
-    stock september blog quote cars gold collection past style rules rock tips fact choose wide,
-    loss clothing teens cable score follow flash fund summer contract purpose deal tree success,
-    horse rule testing leading trust fees string spain remote steel driver showing blogs parent,
-    diet selling sheet root shirt saint creating separate chain truth follows camp gene brain,
-    flower soul aids stated prepared train followed blow battle wire filed married sharing bags,
-    wales bars reviewed rise dell bids cape guess connected containing fear convention beat layer,
-    clock bass pair peak wheel greek walking lane kits leaving plain checking holy buddy cotton,
-    meter relating tested bowl inspection cambridge potter painting greece vary visiting clicking,
-    misc shell hunting suit indexed cartoon bright ports boots pulse flashing sitting putting,
-    amended bills bold aged camping peer rail cache shipped prayer quiet crown fellow lies horses,
-    discovered harris skill chairs filing foster tissue crash counting count happy birthday whoosh,
+  common: `${enEveryday} hmm lol haha jaja asdf the a an this that these those there here it its is are
+    am be been being was were do does did have has had having and for from with at by to of in on
+    off up down out over under into onto about than then so as also all any some each every both
+    such own i im ive id ill we weve he hes she shes they theyre them his her hers our ours their
+    him who whom whose what when where why how which my your yours yourself myself shop step slop
+    stow snow show shot stoop sleep slope soap same sale safe save send sent seen seed seem sell
+    side sign size sick sing site sit six take took taken make made making give gave given put let
+    keep kept try tried use used using say says said tell told know knew think thought hope find
+    found look looks looking looked like liked love home house door room table kitchen garden road
+    town city village day days night week weeks month months year years hour minute time times
+    morning evening sunday monday tuesday wednesday thursday friday saturday first second last
+    next once twice work job money price cost pay paid buy bought food rice bread milk tea coffee
+    sugar salt fish meat egg eggs eat eats ate cook cooking man men woman women friend neighbor
+    teacher school church market rain sun wind hot cold warm cool new old big large small short
+    high hard easy open close closed shut full half one two three much many more most lot lots
+    really maybe perhaps probably should would could might must shall ought because since until
+    while during before after always often sometimes usually never ever else though plan plane
+    place plate plastic paper glass metal wood stone hand hands head eyes feet foot hair face left
+    right front back top turn turned push pushed pull pulled press pressed hold held hang hung
+    lift lifted stand stood set sat lay laid walk walked went going gone leave live lives lived
+    mine main mind mean means meant mom need near news name named nine none noon note dinner lunch
+    breakfast god lord jesus allah amen bible please pls kindly speak talk talking heard hear
+    listen call called phone cell charge battery network picture photo pic image video strop shops
+    stops stoic store story storm staff stuff stick still sport spot spots slot slots slip slap
+    stamp drip trip tip tap tape tops pop hop mop crop drop prop cracker corner cover done dome
+    bone tone cone lone line lines move mover fill fell feel fall fuel wall well will bell fiver
+    river fever lever liver cider older folder golden silver sister mister master matter letter
+    later water wafer better butter bitter litter latter ready reach read rude ride rode rest west
+    best test text nest neat heart heat health healthy earth east gud bad dad sad mad bed red fed
+    wed led maid aid books real posted shipping reserved pages following access property value
+    stock september blog quote cars gold collection past style rules rock tips fact choose wide
+    loss clothing teens cable score follow flash fund summer contract purpose deal tree success
+    horse rule testing leading trust fees string spain remote steel driver showing blogs parent
+    diet selling sheet root shirt saint creating separate chain truth follows camp gene brain
+    flower soul aids stated prepared train followed blow battle wire filed married sharing bags
+    wales bars reviewed rise dell bids cape guess connected containing fear convention beat layer
+    clock bass pair peak wheel greek walking lane kits leaving plain checking holy buddy cotton
+    meter relating tested bowl inspection cambridge potter painting greece vary visiting clicking
+    misc shell hunting suit indexed cartoon bright ports boots pulse flashing sitting putting
+    amended bills bold aged camping peer rail cache shipped prayer quiet crown fellow lies horses
+    discovered harris skill chairs filing foster tissue crash counting count happy birthday whoosh
     thot alot advised`,
 }

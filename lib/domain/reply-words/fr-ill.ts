@@ -68,7 +68,7 @@ export const frIll: LanguagePack['concepts'] = {
     vomisement, rend tout, gerbe, gerber, degobille, rejette tout, crache tout, remet tout,
     ressort, ressortent, recrache, vomiss*, vomit*, vomi*, gerb*, degob*, remontent, rendu son,
     rendu tout, regurgit*, renvoie, renvoi, recrach*, rejet*, remonte du lait`,
-  sign: `convuls*, convulsion, convulsions, convulse, inconscient, inconsciente, evanoui, evanouie,
+  sign: `rien bu, rien tete, rien avale, convuls*, convulsion, convulsions, convulse, inconscient, inconsciente, evanoui, evanouie,
     evanouit, s est evanoui, perdu connaissance, perd connaissance, sans connaissance, coma,
     s evanouit, syncope, impossible a reveiller, arrive pas a la reveiller,
     arrive pas a le reveiller, lethargi*, letargi*, respire mal, ne respire pas, respire plus,

@@ -48,50 +48,50 @@ export const frPack: LanguagePack = {
     dizaine de minutes 10, une quinzaine de minutes 15, quinzaine de minutes 15,
     une vingtaine de minutes 20, vingtaine de minutes 20, trentaine de minutes 30,
     quarantaine de minutes 40, demi eure 30, une trentaine de minutes 30`,
-  halves: `et demie 0.5, et demi 0.5, et quart 0.25, et un quart 0.25, et dmi 0.5`,
+  halves: `et trois quarts 0.75, moins le quart -0.25, moins un quart -0.25, et demie 0.5, et demi 0.5, et quart 0.25, et un quart 0.25, et dmi 0.5`,
   light: `donner donne donnait laisse laisser est sont suis a ai as ont avons avez ete etre bien tres trop tro assez du de des la le les l d un une en y ce c ca que qu pu encore vraiment tellement peux peut veut veux peuvent si tout plus beaucoup completement`,
   common: `${frEveryday} sien sienne siens mien tien leurs verse haut cruche marmite joliment
-    franchement, le la les l un une des de du d a au aux et ou mais donc or ni car que qu qui quoi
-    dont ce cet, cette ces c ca cela sa son ses mon ma mes ton ta tes notre nos votre vos leur je
-    j tu il elle, on nous vous ils elles me m te t se s lui y en ne n pas plus est es suis sommes
-    etes sont, etait sera soit ete etre ai as avons avez ont avait aura avoir eu fait faire fais
-    font faut va, vais vont allez aller vient venir veut veux voulez peut peux pouvez pouvoir doit
-    dois devez, sait sais savoir voit vois voir dit dire dis met mets mettre mis prend prends
-    prendre pris, tient tenir laisse laisser bien mal tres trop peu beaucoup assez moins aussi
-    encore toujours, jamais souvent parfois deja bientot hier demain aujourdhui maintenant ici bas
-    dans sur sous, avec sans pour par vers chez entre depuis pendant avant apres contre jusqu
-    comme comment quand, combien pourquoi parce si non oui tout tous toute toutes autre autres
-    meme rien personne, quelque quelques chaque plusieurs aucun aucune maison chambre cuisine
-    porte table sol terre, champ village ville ecole eglise marche travail route chemin jour jours
-    nuit matin soir midi, semaine mois an annee heure temps fois homme femme ami amie voisin gens
-    dieu main mains tete, yeux pied pieds bras coeur corps grand grande petit petite nouveau
-    nouvelle vieux vieille, premier premiere dernier derniere seul seule long court chaud froid
-    plein pleine ouvert ferme, fermee bon bonne beau belle joli manger mange riz pain lait the
-    cafe sucre sel viande poisson, oeuf cuisiner acheter achete payer vendre argent prix telephone
-    reseau batterie photo image, credit cours cour coup cou cout course couleur couler colle col
-    sole sale salle sortie sorte, port part parti partir poule pouce coude boule roule moule foule
-    blanc bleu vert jaune rouge, noir gris lune dune hune lundi lit lire livre vivre ivre libre
-    litre titre filtre fille file, fil fin faim bain gain chose choses idee mot mots nom question
-    reponse probleme raison, histoire chance peur soleil vent pluie feu lumiere arbre fleur animal
-    chien chat vache tante, tente lente lentille lent dent cent sent ment sang rang rond fond pont
-    mont valeur loin cause, juin septembre position pages telle realite vaut gros gamme revanche
-    tour creer decide, commerce bons taille voie continue reduire style classique bout tels
-    atteindre collection peau, contrats poste pouvait voix affaire contexte nord facilement
-    devises telles constate marge, avis pourront poursuit assure lancement tonnes equipe donnent
-    profiter passant defaut complexe, recours vise films code gerer sentiment debat elevee suit
-    correction comporte langue continuer, classe paie reelle portant investir caisse surprise
-    vaste demarche veille vend mises contient, lies centaines critique conception avenir consacre
-    forcement notion branche depit profession, verite lien document aime portent ford connue
-    peintre loyer voient precision cite menages, resoudre jeunesse constater dettes reconnaissance
-    chasse centaine rentable liee appris creee, soin calme tours russe composition modifications
-    echange fund stress convention repose allant, mons attentes stable souffle liees revu
-    reactions vote recession rejoindre constante investit, tapis venus pistes investis critiques
-    auteur vivent complexes basse clause atout prepare fruit, douceur comptant attendue trait
-    consacrer effort gras vols voies fasse seduit comptent stock, couronne cycliques conversion
-    retenue pousse consacree revendre rapporte leasing separation, attache dommage connexion
-    portrait peuple fiat classes prevision inflation intention compenser, tester evite perception
-    reveler egale toit coree hiver conviction demarrage lutter marquee, prince palette terrasse
-    bouillir bouilli bouillie retrolavage abord remonte remonter debite, entend entendre entends
-    entendu plie plier seigneur eponge ancien ancienne desert comble, ballon debite debiter
+    franchement le la les l un une des de du d a au aux et ou mais donc or ni car que qu qui quoi
+    dont ce cet cette ces c ca cela sa son ses mon ma mes ton ta tes notre nos votre vos leur je
+    j tu il elle on nous vous ils elles me m te t se s lui y en ne n pas plus est es suis sommes
+    etes sont etait sera soit ete etre ai as avons avez ont avait aura avoir eu fait faire fais
+    font faut va vais vont allez aller vient venir veut veux voulez peut peux pouvez pouvoir doit
+    dois devez sait sais savoir voit vois voir dit dire dis met mets mettre mis prend prends
+    prendre pris tient tenir laisse laisser bien mal tres trop peu beaucoup assez moins aussi
+    encore toujours jamais souvent parfois deja bientot hier demain aujourdhui maintenant ici bas
+    dans sur sous avec sans pour par vers chez entre depuis pendant avant apres contre jusqu
+    comme comment quand combien pourquoi parce si non oui tout tous toute toutes autre autres
+    meme rien personne quelque quelques chaque plusieurs aucun aucune maison chambre cuisine
+    porte table sol terre champ village ville ecole eglise marche travail route chemin jour jours
+    nuit matin soir midi semaine mois an annee heure temps fois homme femme ami amie voisin gens
+    dieu main mains tete yeux pied pieds bras coeur corps grand grande petit petite nouveau
+    nouvelle vieux vieille premier premiere dernier derniere seul seule long court chaud froid
+    plein pleine ouvert ferme fermee bon bonne beau belle joli manger mange riz pain lait the
+    cafe sucre sel viande poisson oeuf cuisiner acheter achete payer vendre argent prix telephone
+    reseau batterie photo image credit cours cour coup cou cout course couleur couler colle col
+    sole sale salle sortie sorte port part parti partir poule pouce coude boule roule moule foule
+    blanc bleu vert jaune rouge noir gris lune dune hune lundi lit lire livre vivre ivre libre
+    litre titre filtre fille file fil fin faim bain gain chose choses idee mot mots nom question
+    reponse probleme raison histoire chance peur soleil vent pluie feu lumiere arbre fleur animal
+    chien chat vache tante tente lente lentille lent dent cent sent ment sang rang rond fond pont
+    mont valeur loin cause juin septembre position pages telle realite vaut gros gamme revanche
+    tour creer decide commerce bons taille voie continue reduire style classique bout tels
+    atteindre collection peau contrats poste pouvait voix affaire contexte nord facilement
+    devises telles constate marge avis pourront poursuit assure lancement tonnes equipe donnent
+    profiter passant defaut complexe recours vise films code gerer sentiment debat elevee suit
+    correction comporte langue continuer classe paie reelle portant investir caisse surprise
+    vaste demarche veille vend mises contient lies centaines critique conception avenir consacre
+    forcement notion branche depit profession verite lien document aime portent ford connue
+    peintre loyer voient precision cite menages resoudre jeunesse constater dettes reconnaissance
+    chasse centaine rentable liee appris creee soin calme tours russe composition modifications
+    echange fund stress convention repose allant mons attentes stable souffle liees revu
+    reactions vote recession rejoindre constante investit tapis venus pistes investis critiques
+    auteur vivent complexes basse clause atout prepare fruit douceur comptant attendue trait
+    consacrer effort gras vols voies fasse seduit comptent stock couronne cycliques conversion
+    retenue pousse consacree revendre rapporte leasing separation attache dommage connexion
+    portrait peuple fiat classes prevision inflation intention compenser tester evite perception
+    reveler egale toit coree hiver conviction demarrage lutter marquee prince palette terrasse
+    bouillir bouilli bouillie retrolavage abord remonte remonter debite entend entendre entends
+    entendu plie plier seigneur eponge ancien ancienne desert comble ballon debite debiter
     dorment dormir pendule crisse dents`,
 }
