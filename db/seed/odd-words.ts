@@ -10,10 +10,10 @@ type OddWords = { day: number; language: Language; body: string; kind: ReplyKind
 
 /** Words that no list of the desk has, what the agent takes them for, and on which day of the history. */
 const oddWords: readonly OddWords[] = [
-  { day: 17, language: 'es', body: 'sale un chisguete', kind: 'slow' },
-  { day: 20, language: 'en', body: 'our bucket sweats at the seam', kind: 'broken' },
+  { day: 17, language: 'es', body: 'sale de a chirris', kind: 'slow' },
+  { day: 20, language: 'en', body: 'our bucket is all gammy', kind: 'broken' },
   { day: 23, language: 'en', body: 'water only dawdles', kind: 'slow' },
-  { day: 25, language: 'es', body: 'un chisguete nada mas', kind: 'slow' },
+  { day: 25, language: 'es', body: 'un chirris nada mas', kind: 'slow' },
 ]
 
 /** Those of one day. */

@@ -82,7 +82,7 @@ export const esBreach: LanguagePack['concepts'] = {
     moja todo, mojo la, mojo el, mojando, mojó, se moja, se mojo, mojadero, empap*, encharc*,
     inund*, se vacia solo, se vacia sola, se vacio solo, vaciandose, no retiene el agua,
     no aguanta el agua, no detiene el agua, no para de gotear, no deja de gotear, no para de salir,
-    no deja de salir, no se detiene, salpic*, chisguete*, chisgueteando, chispe*, brinca agua,
+    no deja de salir, no se detiene, salpic*, chispe*, brinca agua,
     escupe agua, echa agua por, echando agua por, bota por, tira por, agua en el piso,
     agua en el suelo, agua debajo, agua abajo, piso lleno de agua, suelo mojado, mesa mojada,
     todo el piso, por la orilla, liqueando, liquea, liqueo, lique*, sudando el, sudando por,

@@ -71,7 +71,7 @@ export const esWater: LanguagePack['concepts'] = {
     no mucho mejor, no agarra fuerza, no agarra presion, no agarra, no coge fuerza, no toma fuerza,
     no da para, no nos da para, ni asi, ni aun asi, le falta, todavia le falta, a bajado,
     bajado arto, bajado harto, bajado mucho`,
-  little: `poco, poca, poquito, poquita, poquitito, pokito, poko, poka, pokita, poquisima, poquisimo,
+  little: `chisguete*, chorrito*, poco, poca, poquito, poquita, poquitito, pokito, poko, poka, pokita, poquisima, poquisimo,
     menos, pocas, pocos, un poquito, un poco, bien poquita, nomas un poco`,
   long: `mucho tiempo, mucho rato, muchisimo, horas y horas, muchas horas, todo el dia, toda la noche,
     toda la manana, una eternidad, eterno, siglos, rato largo, largo rato, bastante tiempo,
