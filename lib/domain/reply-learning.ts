@@ -16,7 +16,7 @@ const rounds = 10
 const rate = 0.3
 const decay = 3e-4
 /** A trait of fewer texts is chance. */
-const leastTexts = 2
+const leastTexts = 3
 
 /** Steps of a linear congruential generator: the same examples give the same weights. */
 function shuffler(): (places: number[]) => void {
