@@ -11,7 +11,8 @@ import { traitsOf } from '@/lib/domain/reply-traits'
 const folder = 'lib/domain/reply-examples'
 
 function exampleOf(line: string): Example {
-  const [known, language, asked, kind, text = ''] = line.split('\t')
+  const [known, language, asked, kind, text, ...rest] = line.split('\t')
+  if (!text || rest.length > 0) throw new Error(`An example has five columns, not as here: ${line}`)
   const sense = senseOf(text, language as Language, asked as Asked)
   return {
     traits: traitsOf(sense, readByWords(sense)),

@@ -12,7 +12,9 @@ export type Example = {
 /** Weights of each trait for each kind; `weights` has a row of `kinds.length` for each trait. */
 export type Learned = { kinds: ReplyKind[]; traits: string[]; weights: Float32Array }
 
+/** Times that each example is shown. */
 const rounds = 10
+/** How far an example moves a weight the first time, and how much of a weight each step takes back. */
 const rate = 0.3
 const decay = 3e-4
 /** A trait of fewer texts is chance. */
@@ -65,7 +67,8 @@ function countTraits(examples: readonly Example[]): string[] {
 
 /**
  * Multinomial logistic regression by stochastic gradient descent with per-weight rates (AdaGrad; Duchi, Hazan,
- * Singer 2011).
+ * Singer 2011). What the rules made of a text is shown only every other time: else the readings of the lists would
+ * be learned by heart, and two readers would be one.
  */
 export function learn(examples: readonly Example[]): Learned {
   const seen = examples.map(({ traits, isKnown }) =>
@@ -94,6 +97,7 @@ export function learn(examples: readonly Example[]): Learned {
   return { kinds, traits, weights }
 }
 
+/** Moves the weights of one example's traits towards its kind; `own` are the places of its traits. */
 function step({
   own,
   right,
@@ -111,6 +115,7 @@ function step({
   const share = 1 / Math.sqrt(Math.max(1, own.length))
   for (let kind = 0; kind < kinds.length; kind++) {
     const slope = ((chances[kind] as number) - (kind === right ? 1 : 0)) * share
+    // What is as good as right already costs most of the time and moves nothing.
     if (Math.abs(slope) < 1e-3) continue
     for (const place of own) {
       const at = place * kinds.length + kind
