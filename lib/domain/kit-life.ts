@@ -1,3 +1,4 @@
+import { causeWords } from './end-causes'
 import { dayWords, dueWords, shortDayWords } from './stamp'
 
 /** One bead of a kit's life; `on` is the ISO day it hangs on. */
@@ -110,7 +111,7 @@ function asked({ prompts }: KitPast): Bare[] {
 
 function troubles({ tickets }: KitPast): Bare[] {
   return tickets.map((ticket): Bare => {
-    const cause = ticket.cause ? `: ${ticket.cause}` : ''
+    const cause = ticket.cause ? `: ${causeWords(ticket.cause).toLowerCase()}` : ''
     const note = ticket.endedOn
       ? `${ticket.stage} on ${dayWords(ticket.endedOn)}${cause}`
       : 'the ticket is open'

@@ -1,5 +1,6 @@
 import { isStopKeyword } from './consent'
 import { areBeside, denied, isNamed, isSaid, said, sureOf, type Sense } from './reply-sense'
+import type { Mark } from './reply-marks'
 import { slipsBetween } from './reply-slips'
 import type { Concept } from './reply-words/concept'
 
@@ -26,6 +27,7 @@ const manners: ReadonlySet<Concept> = new Set<Concept>([
 export function optOutSureness(sense: Sense): number {
   if (isStopKeyword(sense.text)) return 1
   if (hasBareSentence(sense.text)) return 0.9
+  if (isAskedToGoOn(sense)) return 0
   const asks = said(sense, 'stopAsk')
   if (asks.length > 0 && !isSaid(sense, 'if')) return sureOf(0.9, asks)
   if (asks.length > 0) return 0.5
@@ -44,6 +46,27 @@ export function optOutSureness(sense: Sense): number {
   if (stops.length > 0 && isBareStop(sense)) return sureOf(0.9, stops)
   if (isStopOfSomethingStrange(sense)) return 0.7
   return isMistypedStop(sense) ? 0.7 : 0
+}
+
+/** "Don't stop the texts", "n'arrêtez pas", "bondho koiren na": the stop itself is denied. */
+function isAskedToGoOn(sense: Sense): boolean {
+  const isDeniedAt = (concepts: readonly Concept[], isNear: (mark: Mark) => boolean): boolean =>
+    sense.marks.some((mark) => concepts.includes(mark.concept) && isNear(mark))
+  const hasBreak = (from: number, to: number): boolean =>
+    sense.tokens.slice(from, to).some(({ kind }) => kind === 'break')
+  return sense.marks
+    .filter(({ concept }) => concept === 'stopAsk' || concept === 'stopWord')
+    .some(
+      ({ from, to }) =>
+        isDeniedAt(
+          ['not', 'ne'],
+          (mark) => from - mark.to >= 0 && from - mark.to <= 1 && !hasBreak(mark.to, from),
+        ) ||
+        isDeniedAt(
+          ['notBack'],
+          (mark) => mark.from - to >= 0 && mark.from - to <= 1 && !hasBreak(to, mark.from),
+        ),
+    )
 }
 
 /** "Stop this nonsense": an order of two words or more, and nothing beside it that the desk knows. */

@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest'
 import { isStartKeyword, isStopKeyword, mayText, optOutDeadline } from '@/lib/domain/consent'
 import { readReply } from '@/lib/domain/reply'
+import type { Language } from '@/lib/domain/language'
 
 const read = (text: string) => readReply({ text, language: 'en', asked: 'none' }).kind
 
@@ -61,6 +62,17 @@ describe('opting out', () => {
       expect(read(text)).not.toBe('stop')
     },
   )
+
+  it.each<[string, Language]>([
+    ['dont stop texting me, it helps me remember', 'en'],
+    ['please do not stop the messages', 'en'],
+    ['no dejen de mandarme los avisos', 'es'],
+    ["n'arrêtez pas les messages", 'fr'],
+    ['মেসেজ বন্ধ কইরেন না', 'bn'],
+    ['msg bondho koiren na', 'bn'],
+  ])('is not asked by "%s" (%s), which asks the texts to go on', (text, language) => {
+    expect(readReply({ text, language, asked: 'none' }).kind).not.toBe('stop')
+  })
 
   it('is guessed from one slip in the whole of a text of four letters or more', () => {
     for (const text of ['STPO', 'stopp', 'sttop', 'sotp']) expect(read(text)).toBe('stop')
