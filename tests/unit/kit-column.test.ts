@@ -63,5 +63,10 @@ describe('the level in the vessel', () => {
     expect(columnWords(looks, 0.5)).toBe(
       'The kit: cloth overdue, carbon 64 % of its time left, fibre 91 % of its time left, flow 50 % of the need',
     )
+    const spent = stageLooks(fitted, { today: '2026-01-30', outPosition: 3 })
+    expect(columnWords(spent, null)).toBe(
+      'The kit: cloth due, carbon 68 % of its time left, fibre out of service, no flow reading',
+    )
+    expect(columnWords([], 1)).toBe('The kit: flow enough')
   })
 })

@@ -1,9 +1,11 @@
 import { describe, expect, test } from 'vitest'
-import { causesFor, isCauseOf } from '@/lib/domain/end-causes'
+import { causesFor, causeWords, isCauseOf } from '@/lib/domain/end-causes'
 import { oddsInWords } from '@/lib/domain/odds-words'
+import { dueWords, listWords } from '@/lib/domain/round-words'
 import { bandNote, dayStart, eitherOf, shiftTitle, waitedInWords } from '@/lib/domain/shift-words'
+import type { TicketEvent } from '@/lib/domain/ticket-types'
 import { endInWords, eventWords, houseName } from '@/lib/domain/ticket-words'
-import { verdictWords } from '@/lib/domain/verdict-words'
+import { bottleWords, verdictWords, type Verdict } from '@/lib/domain/verdict-words'
 
 const HOUR = 3_600_000
 const at = (iso: string) => Date.parse(iso)
@@ -59,7 +61,29 @@ describe('a ticket in words', () => {
     ).toBe('Wash the fibre stage: done, still slow')
   })
 
+  test.each<[TicketEvent, string]>([
+    [{ kind: 'taken', staffId: 'x' }, 'Taken'],
+    [{ kind: 'handed on', staffId: null }, 'Back in the shift'],
+    [{ kind: 'worsened', trouble: 'danger sign' }, 'Now: unwell, with a danger sign'],
+    [{ kind: 'step sent', stepId: 'bleed-air', by: 'x' }, 'Sent: let the air out of the line'],
+    [{ kind: 'step sent', stepId: 'long-ago', by: 'x' }, 'Sent: long-ago'],
+    [{ kind: 'answered', stepId: 'bleed-air', answer: 'yes' }, 'Let the air out of the line: yes'],
+    [{ kind: 'answered', stepId: 'long-ago', answer: 'no answer' }, 'long-ago: no answer'],
+    [{ kind: 'part promised', promiseId: 'p', stage: 2 }, 'Promised: a part for the carbon stage'],
+    [{ kind: 'part handed over', promiseId: 'p' }, 'Part handed over and fitted'],
+    [{ kind: 'visit booked', visitId: 'v' }, 'Visit booked'],
+    [{ kind: 'visit done', flowing: true }, 'Visited: it flows'],
+    [{ kind: 'visit done', flowing: false }, 'Visited: it does not flow yet'],
+    [{ kind: 'stopped using' }, 'Told to stop using it'],
+    [{ kind: 'no answer' }, 'No answer'],
+    [{ kind: 'ended', end: 'retired', cause: 'beyond repair' }, 'Kit withdrawn: beyond repair'],
+  ])('%o: %s', (event, words) => {
+    expect(eventWords(event, nameOf)).toBe(words)
+  })
+
   test('its end says of what', () => {
+    expect(endInWords({ stage: 'withdrawn', cause: null })).toBe('Withdrawn')
+    expect(causeWords('mended at a visit')).toBe('mended at a visit')
     expect(endInWords({ stage: 'flowing', cause: 'fouled-fibre' })).toBe('Flowing: fibre fouled')
     expect(endInWords({ stage: 'waiting', cause: 'spent-fibre' })).toBe('')
     expect(houseName('Whitlock')).toBe('Whitlock house')
@@ -82,24 +106,60 @@ describe('a ticket in words', () => {
     ])
   })
 
-  test('a reading says its flow with the error, what it is held against, and the water', () => {
-    const words = verdictWords({
-      litres: 1,
-      seconds: 720,
-      normalised: 5,
-      errorShare: 0.112,
-      celsius: 9,
-      celsiusFrom: 'area month',
-      month: 3,
-      reference: 20,
-      recovery: { kind: 'not', share: 0.25, lowShare: 0.21, highShare: 0.29, against: 'nominal' },
-      need: { kind: 'short', hours: 30 },
-    })
-    expect(words).toEqual([
+  test('a prompt says which stages it asks to change, top to bottom', () => {
+    expect(dueWords({ kind: 'wash', positions: [1] })).toBe('wash')
+    expect(dueWords({ kind: 'change', positions: [] })).toBe('change')
+    expect(dueWords({ kind: 'change', positions: [2] })).toBe('change of carbon')
+    expect(dueWords({ kind: 'change', positions: [3, 1, 2] })).toBe(
+      'change of cloth, carbon and fibre',
+    )
+    expect(dueWords({ kind: 'change', positions: [4, 1] })).toBe('change of cloth and stage 4')
+    expect(listWords(['wash', 'flow check', 'wash'])).toBe('wash, flow check')
+  })
+})
+
+describe('a reading in words', () => {
+  const reading: Verdict = {
+    litres: 1,
+    seconds: 720,
+    normalised: 5,
+    errorShare: 0.112,
+    celsius: 9,
+    celsiusFrom: 'area month',
+    month: 3,
+    reference: 20,
+    recovery: { kind: 'not', share: 0.25, lowShare: 0.21, highShare: 0.29, against: 'nominal' },
+    need: { kind: 'short', hours: 30 },
+  }
+
+  test('says its flow with the error, what it is held against, and the water', () => {
+    expect(verdictWords(reading)).toEqual([
       "5.0 L/h at 20 °C ± 0.6; model's nominal flow 20.0",
       "25 % of the model's nominal flow (21 to 29 %): not restored.",
       'Water taken at 9 °C, usual here in March.',
       'Less than the family needs in a day.',
     ])
+  })
+
+  test('says whose temperature it is, and against which reading', () => {
+    const told = verdictWords({
+      ...reading,
+      celsiusFrom: 'told',
+      recovery: { ...reading.recovery, kind: 'partly', against: 'first reading' },
+      need: { kind: 'slow', hours: 10.5 },
+    })
+    expect(told).toEqual([
+      '5.0 L/h at 20 °C ± 0.6; first reading 20.0',
+      '25 % of the first reading (21 to 29 %): partly back.',
+      'Water at 9 °C, as told.',
+      "The day's water takes 10 h 30.",
+    ])
+    const enough = verdictWords({ ...reading, need: { kind: 'enough', hours: 6 } })
+    expect(enough.at(-1)).toBe('Enough to drink in 6 h 00.')
+  })
+
+  test('names a bottle that is no litre', () => {
+    expect(bottleWords({ litres: 1, seconds: 750 })).toBe('12.5 min a litre')
+    expect(bottleWords({ litres: 1.5, seconds: 720 })).toBe('12 min for 1.5 L')
   })
 })
