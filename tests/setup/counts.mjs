@@ -18,6 +18,21 @@ export function countReport({ kind, file, succeeded }) {
   return counts
 }
 
+/**
+ * The counts of a run with what of the code it went through, for its line: `98.2 % of lines and 96.0 % of branches of
+ * lib/domain`. Whether that is enough is for the runner's own thresholds to say: it then ends badly. Not to have
+ * measured at all is a failure.
+ */
+export function withCoverage(counts, { file, covers }) {
+  const total = readReport(file)?.total
+  if (total?.lines?.total > 0 && total.branches?.total > 0) {
+    const share = ({ pct }) => `${pct.toFixed(1)} %`
+    const words = `${share(total.lines)} of lines and ${share(total.branches)} of branches of ${covers}`
+    return { ...counts, note: counts.note ? `${counts.note}; ${words}` : words }
+  }
+  return counts.failed > 0 ? counts : { ...counts, failed: 1, note: `did not measure ${covers}` }
+}
+
 /** A step that is not a test runner counts as one. */
 export function countStep(succeeded) {
   return { passed: succeeded ? 1 : 0, failed: succeeded ? 0 : 1, skipped: 0 }

@@ -6,7 +6,7 @@ import { chmodSync, mkdtempSync, rmSync } from 'node:fs'
 import { tmpdir } from 'node:os'
 import path from 'node:path'
 import { ensureInstalled, ensureNode, root } from '../../lib/commands/prepare.mjs'
-import { countReport, countStep, lastLine, sum } from './counts.mjs'
+import { countReport, countStep, lastLine, sum, withCoverage } from './counts.mjs'
 import { findBrowser, findPostgres } from './find-program.mjs'
 import { startPostgres } from './postgres-server.mjs'
 import { endAll, runProgram } from './run-step.mjs'
@@ -65,10 +65,14 @@ async function runStep(step) {
     environment,
     limitSeconds,
   })
-  const counts = step.report
-    ? countReport({ kind: step.kind, file: path.join(folder, `${step.report}.json`), succeeded })
-    : countStep(succeeded)
-  record({ name, counts, seconds, output })
+  record({ name, counts: countsOf(step, succeeded), seconds, output })
+}
+
+function countsOf({ kind, report, covers }, succeeded) {
+  if (!report) return countStep(succeeded)
+  const counts = countReport({ kind, file: path.join(folder, `${report}.json`), succeeded })
+  const file = path.join(folder, 'coverage', 'coverage-summary.json')
+  return covers ? withCoverage(counts, { file, covers }) : counts
 }
 
 function record({ name, counts, seconds, output }) {

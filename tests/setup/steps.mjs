@@ -37,8 +37,9 @@ export const unitStep = {
   ...vitest,
   name: 'unit and outside',
   report: 'unit',
-  parameters: [...vitestRun, '--project', 'unit', '--project', 'outside'],
+  parameters: [...vitestRun, '--project', 'unit', '--project', 'outside', '--coverage'],
   environment: { TZ: 'Asia/Kathmandu' },
+  covers: 'lib/domain',
   limitSeconds: 600,
 }
 

@@ -2,7 +2,7 @@ import { mkdtempSync, rmSync, writeFileSync } from 'node:fs'
 import { tmpdir } from 'node:os'
 import path from 'node:path'
 import { afterAll, beforeAll, describe, expect, test } from 'vitest'
-import { countReport, countStep, lastLine, sum } from '@/tests/setup/counts.mjs'
+import { countReport, countStep, lastLine, sum, withCoverage } from '@/tests/setup/counts.mjs'
 
 let folder = ''
 beforeAll(() => {
@@ -39,6 +39,32 @@ describe('a report of unit tests', () => {
   test('without a failure, from a runner that ended badly, has one', () => {
     const counts = countReport({ kind: 'vitest', file: reportOf(green), succeeded: false })
     expect(counts).toMatchObject({ passed: 7, failed: 1 })
+  })
+})
+
+describe('a run that measures what it covers', () => {
+  const passed = { passed: 7, failed: 0, skipped: 0 }
+  const covers = 'lib/domain'
+  const total = { lines: { total: 200, pct: 98.21 }, branches: { total: 90, pct: 96 } }
+  const words = '98.2 % of lines and 96.0 % of branches of lib/domain'
+
+  test('says so beside its counts, and beside what else is to be said', () => {
+    const file = reportOf({ total })
+    expect(withCoverage(passed, { file, covers })).toEqual({ ...passed, note: words })
+    const short = { ...passed, failed: 1, note: 'ended badly though no test failed' }
+    expect(withCoverage(short, { file, covers }).note).toBe(`${short.note}; ${words}`)
+  })
+
+  test.each([
+    ['left no summary', () => path.join(folder, 'nothing.json')],
+    [
+      'saw no line',
+      () =>
+        reportOf({ total: { lines: { total: 0, pct: 100 }, branches: { total: 0, pct: 100 } } }),
+    ],
+  ])('has a failure when it %s', (_title, file) => {
+    expect(withCoverage(passed, { file: file(), covers })).toMatchObject({ failed: 1 })
+    expect(withCoverage({ ...passed, failed: 2 }, { file: file(), covers }).failed).toBe(2)
   })
 })
 
