@@ -9,8 +9,8 @@ const MODEL = {
   bottleLitres: 1,
 }
 
-/** Months between changes and what is washed: common practice, no source. */
-const stages = [
+/** The stages of the first kit model. Months between changes and what is washed: common practice, no source. */
+export const firstModelStages = [
   { position: 1, kind: 'cloth', part: 'Cloth', changeMonths: 1, washed: true },
   { position: 2, kind: 'carbon', part: 'Carbon', changeMonths: 3, washed: false },
   { position: 3, kind: 'fibre', part: 'Fibre', changeMonths: 12, washed: true },
@@ -30,7 +30,7 @@ export async function insertReferenceData(db: Handle): Promise<void> {
   if (known.length > 0) return
   const [model] = await db.insert(kitModels).values(MODEL).returning()
   if (!model) throw new Error('The kit model was not kept.')
-  for (const { part: name, ...stage } of stages) {
+  for (const { part: name, ...stage } of firstModelStages) {
     const [part] = await db.insert(parts).values({ name, kind: stage.kind }).returning()
     if (!part) throw new Error('A part was not kept.')
     await db.insert(kitModelStages).values({ ...stage, modelId: model.id, partId: part.id })

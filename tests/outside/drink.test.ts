@@ -146,4 +146,54 @@ describe('the linter', () => {
     }
     expect(lintTable(table)).toEqual(['1 gallon: cloudy is not about twice clear'])
   })
+
+  const line = { measure: '1 litre', litres: 1, fromPercent: 6, toPercent: 6 }
+  const printed = (rows: readonly [clear: number, cloudy: number][]): AdviceTable => ({
+    kind: 'bleach',
+    id: 'printed',
+    name: 'As printed',
+    source: 'a source',
+    waitMinutes: 30,
+    rows: rows.map(([clearDrops, cloudyDrops], at) => ({
+      ...line,
+      measure: `line ${at + 1}`,
+      clearDrops,
+      cloudyDrops,
+    })),
+  })
+
+  // Of 60 and 140 the mean is 100: just 40 % off; of 59 and 141 it is more.
+  it('lets a dose per litre vary by 40 % down a column, and no more', () => {
+    const differ = (column: string) => `${column} doses a litre differ by more than 40 %`
+    expect(
+      lintTable(
+        printed([
+          [60, 120],
+          [140, 280],
+        ]),
+      ),
+    ).toEqual([])
+    expect(
+      lintTable(
+        printed([
+          [59, 118],
+          [141, 282],
+        ]),
+      ),
+    ).toEqual([differ('clear'), differ('cloudy')])
+  })
+
+  it.each([
+    [179, false],
+    [180, true],
+    [220, true],
+    [221, false],
+  ])('with 100 drops clear and %d cloudy passes: %s', (cloudy, passes) => {
+    expect(lintTable(printed([[100, cloudy]])).length === 0).toBe(passes)
+  })
+
+  it('holds a wait of half an hour', () => {
+    const hasty = { ...printed([[2, 4]]), waitMinutes: 29 } as AdviceTable
+    expect(lintTable(hasty)).toEqual(['waits less than 30 minutes'])
+  })
 })

@@ -1,4 +1,5 @@
 import { describe, expect, it } from 'vitest'
+import { answerTo } from '@/lib/domain/answer'
 import { isStartKeyword, isStopKeyword, mayText, optOutDeadline } from '@/lib/domain/consent'
 import { readReply } from '@/lib/domain/reply'
 import type { Language } from '@/lib/domain/language'
@@ -94,6 +95,23 @@ describe('opting out', () => {
       '2025-12-15',
     )
     expect(optOutDeadline({ withdrawnOn: '2025-12-13' })).toBe('2025-12-26')
+  })
+
+  // 47 CFR 64.1200(a)(12) allows one text that confirms. The carrier sends its own to its own words.
+  it.each([
+    [false, ['stopped']],
+    [true, []],
+  ])('is confirmed once, by the carrier where it acted itself: %s', (handledByCarrier, sent) => {
+    const acts = answerTo({
+      reading: { kind: 'stop', sure: 1 },
+      asked: 'wash',
+      waitingFor: 'wash-fibre',
+      hasOpenTicket: true,
+      handledByCarrier,
+      mayMeanStop: true,
+    })
+    expect(acts[0]).toEqual({ kind: 'withdraw consent' })
+    expect(acts.flatMap((act) => (act.kind === 'send' ? [act.moment] : []))).toEqual(sent)
   })
 
   it('outranks every other reason not to text', () => {

@@ -11,18 +11,33 @@ import {
 
 describe('keywords of the carrier', () => {
   it('count whatever their case and the full stops around them', () => {
-    for (const text of ['stop', 'Stop', ' STOP ', '"stop"', 'stop.', 'STOP!!!', '​stop']) {
+    for (const text of [
+      'stop',
+      'Stop',
+      ' STOP ',
+      '"stop"',
+      'stop.',
+      'STOP!!!',
+      '...stop',
+      '​stop',
+    ]) {
       expect(isStopKeyword(text)).toBe(true)
     }
     expect(isStopKeyword('ＳＴＯＰ')).toBe(true)
     expect(isStopKeyword('opt  out')).toBe(true)
     expect(isStopKeyword('stop-all')).toBe(true)
+    expect(isStopKeyword('Stop  all')).toBe(true)
   })
 
   it('count only alone', () => {
     for (const text of ['stop please', 'stopped', 'end?', 'quit it', '', 'nonstop', 'the end']) {
       expect(isStopKeyword(text)).toBe(false)
     }
+    // What stands between the letters of a word is no full stop around it.
+    for (const text of ['s.top', 'un subscribe', 'bus stop all', 'stop all day', 'stop_xall']) {
+      expect(isStopKeyword(text)).toBe(false)
+    }
+    for (const text of ['co-opt out', 'opt out please']) expect(isStopKeyword(text)).toBe(false)
   })
 
   it('ask for help or a new start', () => {

@@ -26,12 +26,20 @@ describe('a day', () => {
     )
   })
 
-  it.each(['2025-02-29', '2025-13-01', '2025-00-10', '2025-04-31', '2025-4-1', 'today', ''])(
-    'is refused when it is none: %j',
-    (text) => {
-      expect(() => dayNumber(text)).toThrow(RangeError)
-    },
-  )
+  it.each([
+    '2025-02-29',
+    '2025-13-01',
+    '2025-00-10',
+    '2025-01-00',
+    '2025-04-31',
+    '2025-4-1',
+    '12025-04-01',
+    '2025-04-011',
+    'today',
+    '',
+  ])('is refused when it is none: %j', (text) => {
+    expect(() => dayNumber(text)).toThrow(new RangeError(`not a day: ${text}`))
+  })
 
   it('has a weekday and a month', () => {
     expect(weekdayOf('1970-01-01')).toBe(4)

@@ -109,8 +109,33 @@ describe('the trend of a filter', () => {
     expect(earliestAt).toBeLessThan(onAt)
   })
 
+  it('begins the interval at the first reading only if the band is under the need by then', () => {
+    // On one line: the band is 1.96 errors of a reading, at the first of these five times
+    // √(1/5 + 20²/1000); so it reaches 16.97 % under the first flow of 16.
+    const flows = falling(0.01, [0, 10, 20, 30, 40])
+    const under = (share: number) => falls(trend(flows, 16 * Math.exp(-share))).earliestAt
+    expect(under(0.169)).toBe(start)
+    expect(under(0.171)).toBeGreaterThan(start)
+    expect(under(0.171)).toBeLessThan(start + 10 * day)
+  })
+
   it('holds where a rising flow has passed the need, though its mean has not', () => {
     expect(trend(falling(-0.06, [0, 10, 20]), 30)).toEqual({ kind: 'holds' })
+  })
+
+  it('takes a rising flow at its last reading, not at what it may come to', () => {
+    // 16 L/h becomes 53 in 20 days; it would pass 100 in another 11.
+    expect(falls(trend(falling(-0.06, [0, 10, 20]), 100))).toMatchObject({
+      onAt: start + 20 * day,
+      perDay: 0,
+    })
+  })
+
+  it('takes a level flow for what it is: under the need, or holding', () => {
+    const level = [0, 10, 20].map((at) => ({ takenAt: start + at * day, normalised: 1 }))
+    expect(falls(trend(level, 2))).toMatchObject({ onAt: start + 20 * day, latestAt: null })
+    expect(trend(level, 1)).toEqual({ kind: 'holds' })
+    expect(trend(level, 0.5)).toEqual({ kind: 'holds' })
   })
 
   it('tells the wash the local day on which a fall meets the need', () => {

@@ -33,7 +33,9 @@ describe('a flow reading', () => {
   })
 
   it('cannot be normalised with an empty container', () => {
-    expect(() => normalisedFlow({ ...full, headRatio: 0 })).toThrow(RangeError)
+    expect(() => normalisedFlow({ ...full, headRatio: 0 })).toThrow(
+      new RangeError('head ratio must be above 0'),
+    )
   })
 
   it('errs by time and bottle together', () => {
@@ -75,7 +77,9 @@ describe('the recovery after a wash', () => {
   )
 
   it('refuses to judge against nothing', () => {
-    expect(() => recovery({ flow: 5, nominal: 0 })).toThrow(RangeError)
+    expect(() => recovery({ flow: 5, nominal: 0 })).toThrow(
+      new RangeError('nothing to set the flow against'),
+    )
   })
 
   it('is the same whatever the unit of flow', () => {
@@ -113,6 +117,11 @@ describe('a spent stage', () => {
   it('is asked about again when a bar straddles the line', () => {
     expect(isSpent([wash(0.3), wash(0.38)])).toBe('ask again')
     expect(isSpent([wash(0.38), wash(0.3)])).toBe('ask again')
+  })
+
+  it('is not called while a bar still touches the line', () => {
+    const touching = { ...wash(0.3), highShare: flowDefaults.partlyShare }
+    expect(isSpent([wash(0.3), touching])).toBe('ask again')
   })
 
   it('goes by the line that was set', () => {

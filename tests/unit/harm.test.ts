@@ -98,6 +98,24 @@ describe('the place in the shift and the sentence that explains it', () => {
     {
       harmClass: 7,
       band: 'Slow',
+      change: { need: 'short', litresPerHour: 1.6, hours: 23.5 },
+      sentence: '5 people; 1.6 L an hour at 20 °C, needs 37 L a day: not in a day.',
+    },
+    {
+      harmClass: 7,
+      band: 'Slow',
+      change: { need: null, litresPerHour: 1.2, hours: 30.5 },
+      sentence: '5 people; 1.2 L an hour at 20 °C, needs 37 L a day: not in a day.',
+    },
+    {
+      harmClass: 7,
+      band: 'Slow',
+      change: { litresPerHour: 1.6, hours: 24 },
+      sentence: '5 people; 1.6 L an hour at 20 °C, needs 37 L a day: 24 h 00.',
+    },
+    {
+      harmClass: 7,
+      band: 'Slow',
       change: { need: null, litresPerHour: null, hours: null },
       sentence: '5 people; slow, nobody has timed a litre yet; needs 37 L a day.',
     },
