@@ -28,17 +28,20 @@ if (chosen.length === 0 || whole) {
   process.exit(1)
 }
 
-const results = chosen.flatMap((row) => row.changes.map((change) => tryChange(row, change)))
+const results = chosen.flatMap((row) => {
+  console.log(`\n${row.what} (${row.file})`)
+  return row.changes.map((change) => tryChange(row, change))
+})
 const unnoticed = results.filter((wasNoticed) => !wasNoticed).length
-console.log(`${results.length} constants changed, ${unnoticed} of them unnoticed`)
+console.log(`\n${results.length} constants changed, ${unnoticed} of them unnoticed`)
 process.exit(unnoticed === 0 ? 0 : 1)
 
 function tryChange({ file, test }, [from, to]) {
   const place = path.join(copy, file)
   const source = readFileSync(place, 'utf8')
-  const label = `${file}: ${from.trim()} → ${to.trim()}`
+  const label = `  ${from.trim()} → ${to.trim()}`
   if (source.split(from).length !== 2) {
-    console.log(`${label}\n  is not found once in the file`)
+    console.log(`${label}: is not found once in the file`)
     return false
   }
   writeFileSync(
@@ -47,7 +50,7 @@ function tryChange({ file, test }, [from, to]) {
   )
   const broke = firstFailure([test])
   writeFileSync(place, source)
-  console.log(`${label}\n  ${broke ? `broke ${test}: ${broke}` : 'broke NOTHING'}`)
+  console.log(`${label}: ${broke ? `broke ${test}: ${broke}` : 'broke NOTHING'}`)
   return broke !== null
 }
 

@@ -93,10 +93,15 @@ export const careConstants = [
     file: 'lib/domain/reply-words/en-danger.ts',
     test: 'danger',
     changes: [
-      ['convuls*', 'convulx*'],
-      ['stool has blood', 'stool had blood'],
-      ['letharg*', 'lethurg*'],
+      ['convuls*', 'shudder*'],
+      ['letharg*', 'sluggish*'],
     ],
+  },
+  {
+    what: 'blood in the stool',
+    file: 'lib/domain/reply-illness.ts',
+    test: 'danger',
+    changes: [["'stool', 'belly'], 8", "'belly'], 8"]],
   },
   {
     what: 'two ill houses of one area',

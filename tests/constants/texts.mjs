@@ -15,7 +15,7 @@ export const textsConstants = [
     what: 'months from the fitting',
     file: 'lib/domain/cycle.ts',
     test: 'dates',
-    changes: [['months * count', 'months + count']],
+    changes: [['fittedOn, months * count', 'fittedOn, months + count']],
   },
   {
     what: 'the sending window',
@@ -24,7 +24,6 @@ export const textsConstants = [
     changes: [
       ['wall.minute < window.opensMinute', 'wall.minute <= window.opensMinute'],
       ['wall.minute >= window.closesMinute', 'wall.minute > window.closesMinute'],
-      ['day + 13 * 60 * minute', 'day - 60 * minute'],
     ],
   },
   {

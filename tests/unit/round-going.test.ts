@@ -144,6 +144,7 @@ describe('the words for what is due', () => {
     ['change', [1], 'change of cloth'],
     ['change', [3, 1], 'change of cloth and fibre'],
     ['change', [2, 3, 1], 'change of cloth, carbon and fibre'],
+    ['change', [4, 1], 'change of cloth and stage 4'],
   ] as const)('%s of %j: %s', (kind, positions, words) => {
     expect(dueWords({ kind, positions })).toBe(words)
   })

@@ -1,7 +1,6 @@
 import { describe, expect, test } from 'vitest'
 import { causesFor, causeWords, isCauseOf } from '@/lib/domain/end-causes'
 import { oddsInWords } from '@/lib/domain/odds-words'
-import { dueWords, listWords } from '@/lib/domain/round-words'
 import { bandNote, dayStart, eitherOf, shiftTitle, waitedInWords } from '@/lib/domain/shift-words'
 import type { TicketEvent } from '@/lib/domain/ticket-types'
 import { endInWords, eventWords, houseName } from '@/lib/domain/ticket-words'
@@ -104,17 +103,6 @@ describe('a ticket in words', () => {
       '1 in 20',
       '1 in 50',
     ])
-  })
-
-  test('a prompt says which stages it asks to change, top to bottom', () => {
-    expect(dueWords({ kind: 'wash', positions: [1] })).toBe('wash')
-    expect(dueWords({ kind: 'change', positions: [] })).toBe('change')
-    expect(dueWords({ kind: 'change', positions: [2] })).toBe('change of carbon')
-    expect(dueWords({ kind: 'change', positions: [3, 1, 2] })).toBe(
-      'change of cloth, carbon and fibre',
-    )
-    expect(dueWords({ kind: 'change', positions: [4, 1] })).toBe('change of cloth and stage 4')
-    expect(listWords(['wash', 'flow check', 'wash'])).toBe('wash, flow check')
   })
 })
 
