@@ -28,16 +28,17 @@ const daysWith = (
 ) => plan.filter((day) => has(day) > 0).map(({ on }) => on)
 
 describe('the plan ahead', () => {
-  const plan = planAhead({ kits: [kit], from, days: 62, cycles })
+  const planned = () => planAhead({ kits: [kit], from, days: 62, cycles })
 
   it('has every day once, from the first', () => {
+    const plan = planned()
     expect(plan).toHaveLength(62)
     expect(plan[0]?.on).toBe('2025-06-01')
     expect(plan.at(-1)?.on).toBe('2025-08-01')
   })
 
   it('lays the overdue on the first day and goes on from there', () => {
-    expect(daysWith(plan, (day) => day.washes)).toEqual([
+    expect(daysWith(planned(), (day) => day.washes)).toEqual([
       '2025-06-01',
       '2025-06-10',
       '2025-06-19',
@@ -49,6 +50,7 @@ describe('the plan ahead', () => {
   })
 
   it('changes stages by their own months, clamped', () => {
+    const plan = planned()
     expect(daysWith(plan, (day) => day.changes[1])).toEqual(['2025-06-03', '2025-07-03'])
     expect(daysWith(plan, (day) => day.changes[2])).toEqual(['2025-06-30'])
     expect(daysWith(plan, (day) => day.changes[3])).toEqual([])
@@ -56,10 +58,34 @@ describe('the plan ahead', () => {
   })
 
   it('takes a text for each thing that one text cannot ask', () => {
+    const plan = planned()
     const tenth = plan.find(({ on }) => on === '2025-06-10')
     expect(tenth).toMatchObject({ washes: 1, flowChecks: 1, texts: 2 })
     expect(tenth?.asks).toEqual({ 'wash-due': 1, 'change-due': 0, 'flow-check': 1 })
     expect(daysWith(plan, (day) => day.flowChecks)).toEqual(['2025-06-10', '2025-07-10'])
+  })
+
+  it('washes oftener in a wet month than in a dry one, by the month of each wash', () => {
+    const dry = planAhead({ kits: [{ ...kit, wetMonths: [7] }], from, days: 50 })
+    expect(daysWith(dry, (day) => day.washes)).toEqual([
+      '2025-06-01',
+      '2025-06-15',
+      '2025-06-29',
+      '2025-07-13',
+    ])
+  })
+
+  it('reaches to its last day', () => {
+    const upTo = (on: string) => planAhead({ kits: [kit], from: on, days: 1 })[0]
+    expect(upTo('2025-05-28')?.washes).toBe(1)
+    expect(upTo('2025-06-03')?.changes[1]).toBe(1)
+    expect(upTo('2025-06-10')?.flowChecks).toBe(1)
+    const twoDays = planAhead({ kits: [kit], from: '2025-05-27', days: 2 })
+    expect(twoDays.map(({ washes }) => washes)).toEqual([0, 1])
+    const changes = planAhead({ kits: [kit], from: '2025-06-02', days: 2 })
+    expect(changes.map((day) => day.changes[1])).toEqual([0, 1])
+    const checks = planAhead({ kits: [kit], from: '2025-06-09', days: 2 })
+    expect(checks.map(({ flowChecks }) => flowChecks)).toEqual([0, 1])
   })
 
   it('shows what other cycles would do', () => {
@@ -113,7 +139,9 @@ describe('the plan ahead', () => {
     { changeMonths: { 2: Number.NaN } },
     { wash: { ...washDefaults, floorDays: 0 } },
   ])('refuses a cycle of no length rather than turn for ever: %o', (whatIf) => {
-    expect(() => planAhead({ kits: [kit], from, days: 5, whatIf })).toThrow(RangeError)
+    expect(() => planAhead({ kits: [kit], from, days: 5, whatIf })).toThrow(
+      new RangeError('a cycle takes some time'),
+    )
   })
 
   it('takes a kit’s own cycle to task as well', () => {
@@ -131,7 +159,7 @@ describe('the plan ahead', () => {
 
   it('cares for a kit that no text reaches, without a text', () => {
     const silent = planAhead({ kits: [{ ...kit, texted: false }], from, days: 62, cycles })
-    expect(totalOf(silent)).toEqual({ ...totalOf(plan), texts: 0, asks: noAsks })
+    expect(totalOf(silent)).toEqual({ ...totalOf(planned()), texts: 0, asks: noAsks })
   })
 })
 

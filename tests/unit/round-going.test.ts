@@ -106,6 +106,56 @@ describe('what is going out', () => {
     expect(going).toMatchObject({ on: '2026-03-06', at: now + 4 * day })
   })
 
+  test('goes to a household once a day, though the week has room for two', () => {
+    const [going] = plan([kit('a', [{ kind: 'wash', dueOn: '2026-03-01' }], [now - hour])])
+    expect(going).toMatchObject({ on: '2026-03-03' })
+  })
+
+  test('has no room in the hours when nobody may be texted', () => {
+    // The older of the two leaves the seven days on Friday at 22:00, after the window has closed.
+    const sentAt = [Date.parse('2026-02-28T02:00:00Z'), Date.parse('2026-02-28T14:00:00Z')]
+    const [going] = plan([kit('a', [{ kind: 'wash', dueOn: '2026-03-01' }], sentAt)])
+    expect(going?.at).toBe(Date.parse('2026-03-07T12:00:00Z'))
+  })
+
+  test('takes the first hour with room, whatever order the texts were sent in', () => {
+    const sentAt = [now - 3 * day + 2 * hour, now - 3 * day]
+    const [going] = plan([kit('a', [{ kind: 'wash', dueOn: '2026-03-01' }], sentAt)])
+    expect(going?.at).toBe(now + 4 * day)
+  })
+
+  test('bundles by the day on which it goes, not by the day on which it waits', () => {
+    const due: Due[] = [
+      { kind: 'change', dueOn: '2026-03-01', stagePosition: 1 },
+      { kind: 'change', dueOn: '2026-03-10', stagePosition: 2 },
+    ]
+    const [going] = plan([kit('a', due, [now - 2 * day, now - 3 * day])])
+    expect(going?.on).toBe('2026-03-06')
+    expect(going?.due).toEqual(due)
+  })
+
+  test('is looked for up to the last instant asked about', () => {
+    const opensOn = Date.parse('2026-03-03T12:00:00Z')
+    expect(openingsAhead(window, now, opensOn)).toHaveLength(2)
+    expect(openingsAhead(window, now, opensOn - 1)).toHaveLength(1)
+  })
+
+  test('waits in one row for each area, in the order of the hours', () => {
+    const due: Due[] = [{ kind: 'wash', dueOn: '2026-03-02' }]
+    const full = [now - 7 * day + 3 * hour, now - 6 * day]
+    const kits = [kit('a', due, full), kit('b', due), { ...kit('c', due), areaId: 'other' }]
+    const windows = new Map([
+      ['area', window],
+      ['other', window],
+    ])
+    const going = goingOut({ kits, windows, now, days: 0, perMinute: 1 })
+    expect(going.map(({ kitId, at }) => [kitId, at - now])).toEqual([
+      ['b', 0],
+      ['a', 3 * hour + 60_000],
+      ['c', 0],
+    ])
+  })
+
   test('is spread at the pace of the sender', () => {
     const kits = ['a', 'b', 'c'].map((id) => kit(id, [{ kind: 'wash', dueOn: '2026-03-02' }]))
     const hours = plan(kits, { perMinute: 1 }).map(({ at }) => at - now)

@@ -13,6 +13,7 @@ import {
   waitUntil,
   type Window,
 } from '@/lib/domain/round'
+import { windowClosesAt } from '@/lib/domain/round-window'
 
 const utc = (text: string) => Date.parse(text)
 const iso = (at: number) => new Date(at).toISOString()
@@ -37,7 +38,9 @@ describe('local time', () => {
   })
 
   it('refuses a zone that does not exist', () => {
-    expect(() => localDay(0, 'Mars/Olympus')).toThrow(RangeError)
+    expect(() => localDay(0, 'Mars/Olympus')).toThrow(
+      new RangeError('no such time zone: Mars/Olympus'),
+    )
   })
 })
 
@@ -100,7 +103,61 @@ describe('the sending window', () => {
 
   it('that never opens is a fault, not an endless search', () => {
     const never = { ...kathmandu, opensMinute: 600, closesMinute: 600 }
-    expect(() => nextInsideWindow(0, never)).toThrow(RangeError)
+    expect(() => nextInsideWindow(0, never)).toThrow(
+      new RangeError('the sending window never opens'),
+    )
+  })
+
+  it('finds the change also far to the west, where its day has long begun by UTC', () => {
+    // Adak skips from 02:00 to 03:00 on 9 March 2025, at noon by UTC.
+    const adak = { ...kathmandu, timeZone: 'America/Adak', sundaysOff: false, opensMinute: 150 }
+    expect(iso(nextInsideWindow(utc('2025-03-09T10:30:00Z'), adak))).toBe(
+      '2025-03-09T12:00:00.000Z',
+    )
+    // Nuuk says 23:00 twice on 25 October 2025; the change is on the 26th by UTC.
+    const nuuk = {
+      ...kathmandu,
+      timeZone: 'America/Nuuk',
+      opensMinute: 23 * 60,
+      closesMinute: 23 * 60 + 30,
+    }
+    expect(iso(nextInsideWindow(utc('2025-10-26T00:40:00Z'), nuuk))).toBe(
+      '2025-10-26T01:00:00.000Z',
+    )
+  })
+})
+
+describe('the closing of the window', () => {
+  const closes = (at: string, until: string, window = kathmandu) => {
+    const closesAt = windowClosesAt(utc(at), utc(until), window)
+    return closesAt === null ? null : iso(closesAt)
+  }
+
+  it('is told up to the last instant asked about, and not after it', () => {
+    expect(closes('2025-07-01T05:00:00Z', '2025-07-01T14:14:59Z')).toBeNull()
+    expect(closes('2025-07-01T05:00:00Z', '2025-07-01T14:15:00Z')).toBe('2025-07-01T14:15:00.000Z')
+    expect(closes('2025-07-01T05:00:00Z', '2025-07-03T00:00:00Z')).toBe('2025-07-01T14:15:00.000Z')
+  })
+
+  it('is midnight before a day off, where the window is open to the end of the day', () => {
+    const late = { ...kathmandu, opensMinute: 0, closesMinute: 1440 }
+    // Saturday evening; Sunday the 6th begins at 18:15 by UTC.
+    expect(closes('2025-07-05T12:00:00Z', '2025-07-07T00:00:00Z', late)).toBe(
+      '2025-07-05T18:15:00.000Z',
+    )
+  })
+
+  it('comes an hour sooner when the clocks go forward before it', () => {
+    const early = {
+      ...kathmandu,
+      timeZone: 'America/New_York',
+      sundaysOff: false,
+      opensMinute: 60,
+      closesMinute: 4 * 60,
+    }
+    expect(closes('2025-03-09T06:30:00Z', '2025-03-09T08:30:00Z', early)).toBe(
+      '2025-03-09T08:00:00.000Z',
+    )
   })
 })
 
@@ -192,6 +249,6 @@ describe('the spread of a round', () => {
   })
 
   it('needs a rate', () => {
-    expect(() => at(1, 0)).toThrow(RangeError)
+    expect(() => at(1, 0)).toThrow(new RangeError('the sender must send at some rate'))
   })
 })
