@@ -38,12 +38,34 @@ describe('an answer', () => {
     expect(state.cause).toBe('no fault found')
   })
 
-  it('in cold water names the cold', () => {
-    const { state } = after(
-      { kind: 'opened', trouble: 'slow', celsius: 8 },
-      answered('ask-flow', 0.9),
-    )
-    expect(state.cause).toBe('cold-water')
+  it('that water runs well does not end words that nobody has read', () => {
+    const { state, effects } = after(opened('unread'), answered('ask-flow', 0.9))
+    expect(state).toMatchObject({ stage: 'walking', trouble: 'unread', endedAt: null })
+    expect(effects).toEqual([])
+  })
+
+  it('that nothing comes is more than slow water, whatever step it answers to but a cure', () => {
+    const nothing = (stepId: string): TicketEvent => ({ kind: 'answered', stepId, answer: 'no' })
+    expect(after(opened('slow'), nothing('ask-flow')).state.trouble).toBe('no flow')
+    expect(after(opened('slow'), nothing('ask-again')).state.trouble).toBe('no flow')
+    expect(after(opened('slow'), nothing('wash-fibre')).state.trouble).toBe('slow')
+    expect(after(opened('slow'), answered('ask-flow', 0.1)).state.trouble).toBe('slow')
+    expect(after(opened('unwell'), nothing('ask-flow')).state.trouble).toBe('unwell')
+  })
+
+  it.each([
+    [8, 'cold-water'],
+    [10, 'cold-water'],
+    [11, 'no fault found'],
+  ])('in water of %i °C names the cause %s', (celsius, cause) => {
+    const { state } = after({ kind: 'opened', trouble: 'slow', celsius }, answered('ask-flow', 0.9))
+    expect(state.cause).toBe(cause)
+  })
+
+  it('after a cure for two faults names the likelier', () => {
+    const odds = { ...defaultPriors.slow, 'fouled-fibre': 0.01, 'air-lock': 0.57 }
+    const washed = after({ kind: 'opened', trouble: 'slow', odds }, answered('wash-fibre', 0.95))
+    expect(washed.state.cause).toBe('air-lock')
   })
 
   it('after another cure names what it cured, and logs no wash', () => {
@@ -76,8 +98,9 @@ describe('an answer', () => {
 
   it('that ends in a visit asks for one, with advice if there is too little to drink', () => {
     const silence: TicketEvent = { kind: 'answered', stepId: 'ask-flow', answer: 'no answer' }
-    const { effects } = after(opened('slow'), silence, { ...silence, need: 'short' })
+    const { state, effects } = after(opened('slow'), silence, { ...silence, need: 'short' })
     expect(effects).toEqual([{ kind: 'ask for visit' }, ...advice])
+    expect(state.stage).toBe('visit due')
   })
 
   it('while a part is owed ends the ticket if water is back, and changes nothing if not', () => {
@@ -87,6 +110,22 @@ describe('an answer', () => {
       effects: [],
     })
     expect(decided(owed.state, answered('ask-flow', 0.9)).state.stage).toBe('flowing')
+  })
+
+  it('while a visit is due leaves it due', () => {
+    const booked = after(opened('slow'), { kind: 'visit booked', visitId: 'v' })
+    expect(decided(booked.state, answered('ask-flow', 0.2))).toMatchObject({
+      state: { stage: 'visit due', waitingFor: null },
+      effects: [],
+    })
+  })
+
+  it('that fails to come while a part is owed asks for no visit', () => {
+    const silence: TicketEvent = { kind: 'answered', stepId: 'ask-flow', answer: 'no answer' }
+    const owed = after(opened('slow'), { kind: 'part promised', promiseId: 'p', stage: 3 })
+    const twice = decided(decided(owed.state, silence).state, { ...silence, need: 'short' })
+    expect(twice.effects).toEqual([])
+    expect(twice.state).toMatchObject({ stage: 'part owed', outOfService: false })
   })
 
   it('to a step that is none is refused', () => {

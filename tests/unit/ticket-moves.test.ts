@@ -1,5 +1,15 @@
 import { describe, expect, it } from 'vitest'
-import { advice, after, decided, now, opened, refused, taken } from '@/tests/factories/ticket'
+import type { TicketEvent } from '@/lib/domain/ticket'
+import {
+  advice,
+  after,
+  answered,
+  decided,
+  now,
+  opened,
+  refused,
+  taken,
+} from '@/tests/factories/ticket'
 
 describe('parts and visits', () => {
   it('tells the household of a promise, and asks for the flow once it is handed over', () => {
@@ -46,6 +56,24 @@ describe('parts and visits', () => {
     )
   })
 
+  it('ends with a visit that was asked for, booked in the desk or not', () => {
+    const asked = after(opened('silent'), { kind: 'no answer' })
+    expect(asked.state).toMatchObject({ stage: 'visit due', visitId: null })
+    expect(decided(asked.state, { kind: 'visit done', flowing: true }).state.stage).toBe('flowing')
+  })
+
+  it('lets the desk ask by itself for the flow of a part, and for nothing else', () => {
+    const { state } = after(
+      opened('slow'),
+      taken,
+      { kind: 'part promised', promiseId: 'p', stage: 3 },
+      { kind: 'part handed over', promiseId: 'p' },
+    )
+    const sent = (stepId: string) => refused(state, { kind: 'step sent', stepId, by: null })
+    expect(sent('ask-flow')).toBe('accepted')
+    expect(sent('wash-fibre')).toBe('not automatic')
+  })
+
   it('refuses a visit that was not due', () => {
     const { state } = after(opened('slow'))
     expect(refused(state, { kind: 'visit done', flowing: true })).toBe('no visit due')
@@ -69,6 +97,18 @@ describe('no answer', () => {
     expect(after(opened('silent'), { kind: 'no answer' }).effects).toEqual([
       { kind: 'ask for visit' },
     ])
+  })
+
+  it('leaves a ticket nobody has begun as new', () => {
+    expect(after(opened('unread'), { kind: 'no answer' }).state.stage).toBe('new')
+  })
+
+  it('needs no visit where the last that was heard is running water', () => {
+    const { state, effects } = after(opened('unread'), answered('ask-flow', 0.9), {
+      kind: 'no answer',
+    })
+    expect(state.stage).toBe('walking')
+    expect(effects).toEqual([])
   })
 
   it('to danger is the coordinator’s to know', () => {
@@ -117,5 +157,15 @@ describe('ending', () => {
     expect(effects).toEqual([{ kind: 'send', moment: 'stop-using' }, ...advice])
     expect(state.trouble).toBe('unsafe')
     expect(after(opened('unwell'), { kind: 'stopped using' }).state.trouble).toBe('unwell')
+  })
+
+  it('stops the use of a filter that gives too little, without the same advice twice', () => {
+    const silence: TicketEvent = { kind: 'answered', stepId: 'ask-flow', answer: 'no answer' }
+    const short = after(opened('slow'), silence, { ...silence, need: 'short' })
+    expect(short.state.outOfService).toBe(true)
+    const stopped = decided(short.state, { kind: 'stopped using' })
+    expect(stopped.effects).toEqual([{ kind: 'send', moment: 'stop-using' }])
+    expect(stopped.state.trouble).toBe('unsafe')
+    expect(decided(stopped.state, { kind: 'stopped using' }).effects).toEqual([])
   })
 })

@@ -49,6 +49,8 @@ describe('opening', () => {
     })
     expect(effects).toEqual([{ kind: 'send step', stepId: 'wash-fibre' }])
     expect(state.walk?.readings).toHaveLength(1)
+    expect(state.walk?.tried).toMatchObject([{ stepId: 'ask-flow', answer: 'done' }])
+    expect(after(opened('slow')).state.walk?.tried).toEqual([])
   })
 
   it('asks about a crack first when the filter was dropped', () => {
@@ -79,6 +81,11 @@ describe('taking and handing on', () => {
     const { state } = after(opened('slow'), taken, { kind: 'handed on', staffId: null })
     expect(state).toMatchObject({ takenBy: null, automatic: false })
     expect(refused(state, { kind: 'taken', staffId: 'ben' })).toBe('accepted')
+  })
+
+  it('goes on by itself when nobody had it', () => {
+    const { state } = after(opened('slow'), { kind: 'handed on', staffId: null })
+    expect(state.automatic).toBe(true)
   })
 
   it('passes it to another', () => {

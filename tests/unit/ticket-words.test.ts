@@ -87,6 +87,7 @@ describe('a ticket in words', () => {
     expect(endInWords({ stage: 'waiting', cause: 'spent-fibre' })).toBe('')
     expect(houseName('Whitlock')).toBe('Whitlock house')
     expect(houseName('The long House')).toBe('The long House')
+    expect(houseName('House of Ana')).toBe('House of Ana house')
   })
 
   test('a cause belongs to its end', () => {
