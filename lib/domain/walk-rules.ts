@@ -137,7 +137,8 @@ export function bestByCost({ odds, tried, from }: Position): Next {
   if (choice.kind === 'give up') return endByOdds(odds, tried)
   const { step } = choice
   if (choice.kind === 'question') {
-    const why = `Asking saves about ${Math.max(1, Math.round(choice.savedMinutes))} minutes of tries.`
+    const minutes = Math.max(1, Math.round(choice.savedMinutes))
+    const why = `Asking saves about ${minutes} ${minutes === 1 ? 'minute' : 'minutes'} of tries.`
     return { kind: 'step', step, why }
   }
   const target = aimOf(odds, step)

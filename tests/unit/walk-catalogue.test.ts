@@ -22,6 +22,7 @@ function changed(id: string, change: Partial<Step>): Step[] {
 describe('the catalogue of steps', () => {
   it('is sound', () => {
     expect(catalogueProblems({ steps, priors })).toEqual([])
+    expect(checkedCatalogue({ steps, priors })).toBe(steps)
   })
 
   it('is worded in the first language', () => {
@@ -123,6 +124,45 @@ describe('the catalogue of steps', () => {
   ])('is refused with $what', ({ steps: broken, problem }) => {
     expect(catalogueProblems({ steps: broken, priors })).toContain(problem)
     expect(() => checkedCatalogue({ steps: broken, priors })).toThrow(problem)
+  })
+
+  it.each([
+    ['bleed-the-air', true],
+    ['bleed-Air', false],
+    ['bleed-air-', false],
+    ['bleed-air2', false],
+  ])('takes the name %s: %s', (id, isTaken) => {
+    const problem = `${id}: name is not kebab-case`
+    const problems = catalogueProblems({ steps: changed('bleed-air', { id }), priors })
+    expect(problems.includes(problem)).toBe(!isTaken)
+  })
+
+  it.each([
+    [0, false],
+    [1, true],
+  ])('takes a cure of chance %d: %s', (chance, isTaken) => {
+    const broken = changed('bleed-air', { cures: { 'air-lock': 0.8, 'cold-water': chance } })
+    expect(catalogueProblems({ steps: broken, priors })).toEqual(
+      isTaken ? [] : ['bleed-air: cures with a chance that is none'],
+    )
+  })
+
+  it('asks chances of a question to sum to 1, though an answer has none', () => {
+    const answers = [
+      { answer: 'choice-1' as const, label: 'a', chance: { 'kinked-hose': 0.9 }, otherwise: 0.1 },
+      { answer: 'not done' as const, label: 'b' },
+    ]
+    const broken = changed('look-hose', { answers })
+    expect(catalogueProblems({ steps: broken, priors })).toContain(
+      'look-hose: chances of its answers do not sum to 1',
+    )
+  })
+
+  it('does not let the desk start when it is not sound, and says all that is wrong', () => {
+    const broken = changed('bleed-air', { minutes: 0, tries: 0 })
+    expect(() => checkedCatalogue({ steps: broken, priors })).toThrow(
+      'The catalogue of steps is not sound: bleed-air: costs no time; bleed-air: could be asked without end',
+    )
   })
 
   it('is refused with odds that are none', () => {

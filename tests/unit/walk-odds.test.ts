@@ -61,7 +61,9 @@ describe('odds counted from closed tickets', () => {
   })
 
   it('refuse a prior that weighs nothing', () => {
-    expect(() => oddsFromHistory({}, prior, 0)).toThrow(RangeError)
+    expect(() => oddsFromHistory({}, prior, 0)).toThrow(
+      new RangeError('the prior must weigh something'),
+    )
   })
 })
 

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest'
 import { answerStep, defaultPriors, nextStep, startWalk, type SuspectId } from '@/lib/domain/walk'
-import { timingMinutes, type Step } from '@/lib/domain/walk-catalogue'
+import { timingMinutes, type Answer, type Step } from '@/lib/domain/walk-catalogue'
 import { normalise } from '@/lib/domain/walk-odds'
 import { bestChoice, expectedMinutes } from '@/lib/domain/walk-search'
 
@@ -55,6 +55,17 @@ describe('the search for the next step', () => {
     expect(bestChoice(even, [...cures, telling], 1_000)).toMatchObject({
       kind: 'question',
       savedMinutes: 46,
+    })
+  })
+
+  it('counts a visit for an answer that ends the walk, by hand', () => {
+    // Bubbles, half of the time: a visit of 150. Else the sure cure of 100. Asking is 4.
+    const [bubbles, none] = telling.answers as [Answer, Answer]
+    const ends = { end: 'visit' } as const
+    const ending = { ...telling, answers: [{ ...bubbles, ends }, none] }
+    expect(bestChoice(even, [...cures, ending], 150)).toMatchObject({
+      kind: 'question',
+      savedMinutes: 150 - (4 + 150 / 2 + 100 / 2),
     })
   })
 
