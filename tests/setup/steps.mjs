@@ -40,7 +40,7 @@ export const unitStep = {
   parameters: [...vitestRun, '--project', 'unit', '--project', 'outside', '--coverage'],
   environment: { TZ: 'Asia/Kathmandu' },
   covers: 'lib/domain',
-  limitSeconds: 600,
+  limitSeconds: 900,
 }
 
 export const embeddedStep = {

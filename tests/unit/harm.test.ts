@@ -99,7 +99,7 @@ describe('the place in the shift and the sentence that explains it', () => {
       harmClass: 7,
       band: 'Slow',
       change: { need: 'short', litresPerHour: 1.6, hours: 23.5 },
-      sentence: '5 people; 1.6 L an hour at 20 °C, needs 37 L a day: not in a day.',
+      sentence: '5 people; 1.6 L an hour at 20 °C, needs 37 L a day: 23 h 30.',
     },
     {
       harmClass: 7,

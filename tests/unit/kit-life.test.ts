@@ -131,6 +131,7 @@ describe('what comes next for a kit', () => {
   const plan: KitPlan = {
     state: 'in use',
     nextWashOn: '2026-06-20',
+    calendarWashOn: '2026-06-20',
     nextFlowCheckOn: '2026-06-15',
     fittings: [
       { position: 3, dueOn: '2026-12-01' },
@@ -147,6 +148,13 @@ describe('what comes next for a kit', () => {
       ['next-change-3', 'Change of fibre', '1 Dec', 'in 169 days'],
     ])
     expect(beads.every(({ bead, note }) => bead === 'ring' && note === undefined)).toBe(true)
+  })
+
+  it('says where the trend brought a wash forward, and from which day', () => {
+    const beads = kitPlan({ ...plan, calendarWashOn: '2026-06-28' }, today)
+    const noteOf = (id: string) => beads.find((bead) => bead.id === id)?.note
+    expect(noteOf('next-wash')).toBe('brought forward from 28 Jun by the trend of the flow')
+    expect(noteOf('next-flow-check')).toBeUndefined()
   })
 
   it('waits while the kit is out of service, and is nothing once it is retired', () => {
