@@ -4,7 +4,7 @@
  * an hour; with names of groups only those, with `--incremental` only what changed since the last time.
  */
 import { spawnSync } from 'node:child_process'
-import { readFileSync, rmSync } from 'node:fs'
+import { existsSync, readFileSync, rmSync } from 'node:fs'
 import path from 'node:path'
 import { leastPercent, mutatedGroups, reportFile } from '../stryker.config.mjs'
 
@@ -26,6 +26,7 @@ const { status } = spawnSync(
   { stdio: 'inherit', env: { ...process.env, TZ: 'Asia/Kathmandu' } },
 )
 
+if (!existsSync(reportFile)) process.exit(status || 1)
 const report = JSON.parse(readFileSync(reportFile, 'utf8'))
 const shares = groups.map((name) => {
   const statuses = mutatedGroups[name]
