@@ -65,14 +65,14 @@ describe('a trial', () => {
     ])
   })
 
-  it.each<{ said: StepAnswer; answer: StepAnswer; then: StepAnswer }>([
-    { said: 'done', answer: 'not done', then: 'not cured' },
-    { said: 'cured', answer: 'not done', then: 'cured' },
-    { said: 'partly', answer: 'not done', then: 'partly' },
-    { said: 'done', answer: 'no answer', then: 'done' },
-    { said: 'done', answer: 'done', then: 'done' },
-  ])('said to be $said, with a figure that was $answer, counts as $then', (one) => {
-    expect(trials(['wash-fibre', one.said], ['ask-flow', one.answer])[0]?.said).toBe(one.then)
+  it.each<{ said: StepAnswer; answer: StepAnswer; counts: StepAnswer }>([
+    { said: 'done', answer: 'not done', counts: 'not cured' },
+    { said: 'cured', answer: 'not done', counts: 'cured' },
+    { said: 'partly', answer: 'not done', counts: 'partly' },
+    { said: 'done', answer: 'no answer', counts: 'done' },
+    { said: 'done', answer: 'done', counts: 'done' },
+  ])('said to be $said, with a figure that was $answer, counts as $counts', (one) => {
+    expect(trials(['wash-fibre', one.said], ['ask-flow', one.answer])[0]?.said).toBe(one.counts)
   })
 })
 
