@@ -21,9 +21,11 @@ const CHANGED_BY_OTHERS = 'Somebody has changed the settings since you opened th
 export async function seeSettings(deps: Deps, actor: Actor): Promise<SettingsView> {
   allow(actor, 'change settings')
   const { db } = deps.store
+  // Before the settings: a change in between makes this version too old, and is not overwritten unseen.
+  const version = await findLastSettingChange(db)
   const settings = await settingsNow(db)
   return {
-    version: await findLastSettingChange(db),
+    version,
     settings,
     startingOdds: await startingOdds(db, { now: deps.clock.now(), settings }),
   }
