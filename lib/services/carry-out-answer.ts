@@ -1,6 +1,6 @@
 import type { Transaction } from '@/db/client'
 import { updateHousehold, type KitFacts } from '@/db/queries/kit-facts'
-import { findPhone, insertConsent, updatePhone } from '@/db/queries/phone'
+import { findPhone, updatePhone } from '@/db/queries/phone'
 import { listAskedPrompts } from '@/db/queries/prompt'
 import { updateText, type TextRow } from '@/db/queries/text'
 import { findOpenTicket } from '@/db/queries/ticket-events'
@@ -10,33 +10,15 @@ import type { Moment } from '@/lib/domain/moments'
 import type { TicketEvent } from '@/lib/domain/ticket-types'
 import { applyTicketEvent, raiseTrouble } from './apply-ticket-event'
 import { closePrompts, logWash, refitStage } from './care-for-kit'
+import { changeConsent } from './change-consent'
 import { queueText } from './queue-text'
 import { recordFlow } from './record-flow'
-import { liftSuppression, suppressNumber } from './suppress-number'
 
 export type AnswerRun = {
   text: TextRow
   phoneId: string
   facts: KitFacts
   acts: readonly AnswerAct[]
-}
-
-async function changeConsent(
-  tx: Transaction,
-  deps: Deps,
-  { run, consent }: { run: AnswerRun; consent: 'given' | 'withdrawn' },
-) {
-  await insertConsent(tx, {
-    phoneId: run.phoneId,
-    consent,
-    how: 'by text',
-    textId: run.text.id,
-    at: deps.clock.now(),
-  })
-  if (consent === 'withdrawn') return suppressNumber(tx, deps, run.text.e164)
-  await liftSuppression(tx, deps, run.text.e164)
-  // A phone whose owner opts in again is reachable again, as far as we know.
-  return updatePhone(tx, run.phoneId, { carrierBlocked: false })
 }
 
 async function reply(
@@ -127,9 +109,9 @@ async function carryOut(
 ): Promise<unknown> {
   switch (act.kind) {
     case 'withdraw consent':
-      return changeConsent(tx, deps, { run, consent: 'withdrawn' })
+      return changeConsent(tx, deps, { text: run.text, consent: 'withdrawn' })
     case 'give consent':
-      return changeConsent(tx, deps, { run, consent: 'given' })
+      return changeConsent(tx, deps, { text: run.text, consent: 'given' })
     case 'suspend phone':
       return updatePhone(tx, run.phoneId, { state: 'suspended', stateWhy: act.why })
     case 'mark moved':

@@ -18,7 +18,7 @@ import { mayMeanStop } from '@/lib/domain/reply-stop'
 import type { InboundText } from '@/lib/schemas/carrier'
 import { addedWordsInForce } from './added-words'
 import { carryOutAnswer } from './carry-out-answer'
-import { liftSuppression, suppressNumber } from './suppress-number'
+import { changeConsent } from './change-consent'
 
 /** A question older than this is no longer what a reply is about, in milliseconds. */
 const ASKED_WITHIN = 21 * 24 * 60 * 60_000
@@ -63,8 +63,8 @@ async function whoAnswers(tx: Transaction, deps: Deps, phoneId: string) {
 /** Who asks for no texts gets none, though we do not know them: an old list may be entered tomorrow. */
 async function readStranger(tx: Transaction, deps: Deps, text: TextRow): Promise<void> {
   const { kind } = readReply({ text: text.body, language: text.language, asked: 'none' })
-  if (kind === 'stop') await suppressNumber(tx, deps, text.e164)
-  if (kind === 'start') await liftSuppression(tx, deps, text.e164)
+  if (kind === 'stop') await changeConsent(tx, deps, { text, consent: 'withdrawn' })
+  if (kind === 'start') await changeConsent(tx, deps, { text, consent: 'given' })
   await updateText(tx, text.id, { state: 'read', stateWhy: 'from a number we do not know' })
 }
 

@@ -93,6 +93,27 @@ describe('a number that asked for no texts', () => {
   })
 })
 
+describe('a phone that no longer answers for anybody', () => {
+  beforeEach(async () => {
+    await house()
+    await say(deps, number, 'STOP')
+    await deps.store.db.delete(householdPhones)
+  })
+
+  test('comes back by its own START, also after the next start of the desk', async () => {
+    await say(deps, number, 'START')
+    await prepareDesk(deps)
+    expect(await phoneNow()).toMatchObject({ consent: 'given' })
+    expect(await deps.store.db.select().from(suppressions)).toEqual([])
+  })
+
+  test('has its STOP on its own row too', async () => {
+    await say(deps, number, 'START')
+    await say(deps, number, 'stop')
+    expect(await phoneNow()).toMatchObject({ consent: 'withdrawn' })
+  })
+})
+
 describe('the key of the hashes', () => {
   test('is refused at the start when it is another one than the numbers were kept with', async () => {
     await house()
