@@ -1,4 +1,4 @@
-import { eq, ne } from 'drizzle-orm'
+import { and, asc, eq, gt, ne } from 'drizzle-orm'
 import type { Handle } from '../client'
 import { suppressions } from '../schema/consent'
 import { phones } from '../schema/household'
@@ -29,11 +29,16 @@ export async function hasOtherKey(db: Handle, keyMark: string): Promise<boolean>
   return found.length > 0
 }
 
-/** Numbers whose phone has opted out. */
-export async function listWithdrawnNumbers(db: Handle): Promise<string[]> {
+/** One page of the numbers whose phone has opted out, in order; `after` is the last of the page before. */
+export async function listWithdrawnNumbers(
+  db: Handle,
+  { after, limit }: { after: string; limit: number },
+): Promise<string[]> {
   const rows = await db
     .select({ e164: phones.e164 })
     .from(phones)
-    .where(eq(phones.consent, 'withdrawn'))
+    .where(and(eq(phones.consent, 'withdrawn'), gt(phones.e164, after)))
+    .orderBy(asc(phones.e164))
+    .limit(limit)
   return rows.map(({ e164 }) => e164)
 }

@@ -9,6 +9,9 @@ import {
 } from '@/db/queries/suppression'
 import type { Deps } from '@/lib/deps'
 
+/** So many are kept by one statement, which the database takes only so many values with. */
+const NUMBERS_AT_ONCE = 1000
+
 type Keyed = Pick<Deps, 'suppressionKey'>
 
 const keyed = ({ suppressionKey }: Keyed, what: string) =>
@@ -47,10 +50,13 @@ export async function keepSuppressions(tx: Transaction, deps: Deps): Promise<voi
       'SUPPRESSION_KEY is not the key that opted-out numbers were kept with (NEXTAUTH_SECRET, where none was set): set it to that one.',
     )
   }
-  const numbers = await listWithdrawnNumbers(tx)
   const kept = { keyMark: markOf(deps), at: deps.clock.now() }
-  await insertSuppressions(
-    tx,
-    numbers.map((e164) => ({ hash: hashOf(deps, e164), ...kept })),
-  )
+  for (let after: string | undefined = ''; after !== undefined;) {
+    const numbers = await listWithdrawnNumbers(tx, { after, limit: NUMBERS_AT_ONCE })
+    await insertSuppressions(
+      tx,
+      numbers.map((e164) => ({ hash: hashOf(deps, e164), ...kept })),
+    )
+    after = numbers.at(-1)
+  }
 }

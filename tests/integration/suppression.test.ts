@@ -123,6 +123,18 @@ describe('the key of the hashes', () => {
     await prepareDesk(deps)
   })
 
+  test('keeps phones that opted out before there were hashes, more than one statement takes', async () => {
+    const many = Array.from({ length: 22_000 }, (_, index) => ({
+      e164: `+1202${String(5_550_000 + index)}`,
+      consent: 'withdrawn' as const,
+      createdAt: 0,
+    }))
+    for (let from = 0; from < many.length; from += 2000)
+      await deps.store.db.insert(phones).values(many.slice(from, from + 2000))
+    await prepareDesk(deps)
+    expect(await deps.store.db.$count(suppressions)).toBe(many.length)
+  })
+
   test('also keeps the phones that opted out before there were hashes', async () => {
     await house()
     await say(deps, number, 'STOP')
