@@ -17,13 +17,16 @@ export async function findHousehold(db: Handle, householdId: string) {
 
 export type HouseholdInArea = NonNullable<Awaited<ReturnType<typeof findHousehold>>>
 
-/** Holds a household until the end of the transaction, so that no two find room for the same text. */
+/**
+ * Holds a household until the end of the transaction, so that no two find room for the same text. Rows that
+ * only refer to it, such as an agent's text, may still be written meanwhile.
+ */
 export async function holdHousehold(tx: Handle, householdId: string): Promise<void> {
   await tx
     .select({ id: households.id })
     .from(households)
     .where(eq(households.id, householdId))
-    .for('update')
+    .for('no key update')
 }
 
 export async function insertHousehold(db: Handle, row: typeof households.$inferInsert) {
