@@ -78,6 +78,11 @@ export async function insertWash(db: Handle, row: typeof washes.$inferInsert) {
   await db.insert(washes).values(row)
 }
 
+/** Holds a kit until the end of the transaction: who changes it meanwhile waits, and is not overwritten. */
+export async function holdKit(tx: Handle, kitId: string): Promise<void> {
+  await tx.select({ id: kits.id }).from(kits).where(eq(kits.id, kitId)).for('no key update')
+}
+
 export async function updateKit(
   db: Handle,
   kitId: string,

@@ -1,6 +1,7 @@
 import type { Transaction } from '@/db/client'
 import {
   findKitFacts,
+  holdKit,
   listOpenFittings,
   listReadingsOfFitting,
   updateKit,
@@ -53,8 +54,9 @@ export async function washFrom(
  * water. A wash that is asked for already keeps its day, or it would be asked for twice.
  */
 export async function replanWash(tx: Transaction, deps: Deps, kitId: string): Promise<void> {
+  // Held before it is read: a wash logged at the same time would be forgotten by the plan.
+  await holdKit(tx, kitId)
   if (await hasOpenPrompt(tx, kitId, 'wash')) return
-  // Read now: what came before in this transaction may have moved its days.
   const facts = await findKitFacts(tx, kitId)
   if (!facts) return
   await updateKit(

@@ -1,4 +1,7 @@
+import { setImmediate } from 'node:timers/promises'
+import { sql } from 'drizzle-orm'
 import { beforeEach, describe, expect, it } from 'vitest'
+import type { Transaction } from '@/db/client'
 import { findKitFacts, type KitFacts } from '@/db/queries/kit-facts'
 import { listPromptsOfKit } from '@/db/queries/kit'
 import { localDay } from '@/lib/domain/round'
@@ -6,6 +9,7 @@ import { closePrompts, logWash, refitStage } from '@/lib/services/care-for-kit'
 import { changeHousehold } from '@/lib/services/change-household'
 import { householdSheet } from '@/lib/services/household-sheet'
 import { planPrompts } from '@/lib/services/plan-prompts'
+import { replanWash } from '@/lib/services/plan-wash'
 import { recordFlow } from '@/lib/services/record-flow'
 import { sendDueTexts } from '@/lib/services/send-text'
 import { testDeps, type TestDeps } from '../factories/deps'
@@ -131,6 +135,36 @@ describe('the next wash', () => {
     await changeHousehold(deps, place.coordinator, { ...changed, householdId: home.householdId })
     const after = (await dates()).nextWashOn
     expect(after < before).toBe(true)
+  })
+})
+
+/** Until somebody waits for what this transaction holds. */
+async function untilAwaited(tx: Transaction) {
+  for (;;) {
+    const { rows } = await tx.execute(sql`
+      select 1 from pg_locks where not granted and pg_backend_pid() = any (pg_blocking_pids(pid))`)
+    if (rows.length > 0) return
+    await setImmediate()
+  }
+}
+
+// The embedded database takes one transaction at a time: nothing can come in between there.
+describe.runIf(process.env.TEST_DATABASE_URL)('a wash logged while the plan is made anew', () => {
+  it('is counted from, and not forgotten', async () => {
+    deps.clock.advance(5 * DAY)
+    const facts = await kit()
+    let washing: Promise<void> | undefined
+    await new Promise<void>((logged) => {
+      washing = deps.store.transaction(async (tx) => {
+        await logWash(tx, deps, { facts, known: 'said' })
+        logged()
+        await untilAwaited(tx)
+      })
+    })
+    await deps.store.transaction((tx) => replanWash(tx, deps, home.kitId))
+    await washing
+    expect((await kit()).kit.washCountedFrom).toBe('2026-05-06')
+    expect(await dates()).toEqual({ nextWashOn: '2026-06-05', calendarWashOn: '2026-06-05' })
   })
 })
 
