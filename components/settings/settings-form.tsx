@@ -2,7 +2,7 @@
 
 import { useRouter } from 'next/navigation'
 import { useState } from 'react'
-import { pathsOf, settingGroups, settingInfos, settingPaths } from '@/lib/domain/setting-catalogue'
+import { grouped, pathsOf, settingGroups, settingInfos } from '@/lib/domain/setting-catalogue'
 import {
   defaultSettings,
   valueAt,
@@ -28,19 +28,9 @@ function valueIn(form: FormData, path: SettingPath): SettingValue | undefined {
   return info.kind === 'share' && number !== undefined ? number / 100 : number
 }
 
-type Written = { [key: string]: SettingValue | undefined | Written }
-
 /** What is written in the fields, in the groups of the settings. A hole is refused at its own place. */
-function settingsIn(form: FormData): Written {
-  const settings: Written = {}
-  for (const path of settingPaths) {
-    const keys = path.split('.')
-    const name = keys.pop() ?? ''
-    let group = settings
-    for (const key of keys) group = (group[key] ??= {}) as Written
-    group[name] = valueIn(form, path)
-  }
-  return settings
+function settingsIn(form: FormData) {
+  return grouped((path) => valueIn(form, path))
 }
 
 function Group({

@@ -111,6 +111,21 @@ export function pathsOf(group: keyof Settings): SettingPath[] {
   return settingPaths.filter((path) => path.startsWith(`${group}.`))
 }
 
+export type Grouped<Thing> = { [key: string]: Thing | Grouped<Thing> }
+
+/** A thing for each setting, in the groups of the settings. */
+export function grouped<Thing>(of: (path: SettingPath) => Thing): Grouped<Thing> {
+  const all: Grouped<Thing> = {}
+  for (const path of settingPaths) {
+    const keys = path.split('.')
+    const name = keys.pop() ?? ''
+    let group = all
+    for (const key of keys) group = (group[key] ??= {}) as Grouped<Thing>
+    group[name] = of(path)
+  }
+  return all
+}
+
 /** A share as per cent, without the dust of floating point. */
 export function percentOf(share: number): number {
   return Number((share * 100).toFixed(4))

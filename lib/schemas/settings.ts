@@ -1,8 +1,10 @@
 import { z } from 'zod'
 import {
+  grouped,
   percentOf,
   settingInfos,
   settingPaths,
+  type Grouped,
   type SettingInfo,
 } from '@/lib/domain/setting-catalogue'
 import {
@@ -41,30 +43,23 @@ function valueSchema(info: SettingInfo): z.ZodType<SettingValue> {
   }
 }
 
-type Shape = { [key: string]: z.ZodType | Shape }
+/** Built once: the settings are read for every text that is worded and every answer. */
+const valueSchemas = Object.fromEntries(
+  settingPaths.map((path) => [path, valueSchema(settingInfos[path])]),
+) as Record<SettingPath, z.ZodType<SettingValue>>
 
-function objectOf(shape: Shape): z.ZodType {
-  const fields = Object.entries(shape).map(([key, field]) => [
+function objectOf(fields: Grouped<z.ZodType>): z.ZodType {
+  const shape = Object.entries(fields).map(([key, field]) => [
     key,
     field instanceof z.ZodType ? field : objectOf(field),
   ])
-  return z.object(Object.fromEntries(fields) as Record<string, z.ZodType>)
+  return z.object(Object.fromEntries(shape) as Record<string, z.ZodType>)
 }
 
 /** One object in the groups of the settings, each field within the bounds of the catalogue. */
-function schemaOfCatalogue(): z.ZodType<Settings> {
-  const shape: Shape = {}
-  for (const path of settingPaths) {
-    const keys = path.split('.')
-    const name = keys.pop() ?? ''
-    let group = shape
-    for (const key of keys) group = (group[key] ??= {}) as Shape
-    group[name] = valueSchema(settingInfos[path])
-  }
-  return objectOf(shape) as z.ZodType<Settings>
-}
+const catalogueSchema = objectOf(grouped((path) => valueSchemas[path])) as z.ZodType<Settings>
 
-const settingsSchema = schemaOfCatalogue().superRefine((settings, context) => {
+const settingsSchema = catalogueSchema.superRefine((settings, context) => {
   for (const { path, message } of contradictions(settings)) {
     context.addIssue({ code: 'custom', path: path.split('.'), message })
   }
@@ -74,7 +69,7 @@ const settingsSchema = schemaOfCatalogue().superRefine((settings, context) => {
 export function readSettings(rows: readonly { key: string; value: unknown }[]): Settings {
   const values = new Map(rows.map(({ key, value }) => [key, value]))
   return settingPaths.reduce((settings: Settings, path: SettingPath) => {
-    const value = valueSchema(settingInfos[path]).safeParse(values.get(path))
+    const value = valueSchemas[path].safeParse(values.get(path))
     return value.success ? withValue(settings, path, value.data) : settings
   }, defaultSettings)
 }
