@@ -1,7 +1,7 @@
+import { mostWords } from '@/lib/domain/reply-added'
+
 /** Words picked in a row: places `from` up to, not including, `to`. */
 export type Picked = { from: number; to: number }
-
-const mostWords = 4
 
 /** What is picked after a word was pressed: the row grows or shrinks at its ends, else begins anew. */
 export function pickedAfter(picked: Picked | null, at: number): Picked | null {

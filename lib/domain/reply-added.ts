@@ -7,6 +7,9 @@ export type AddedWord = { language: Language; concept: Concept; phrase: string }
 /** So many may be in force: they are loaded for every text that comes in. */
 export const mostAdded = 500
 
+/** Longer phrases are met too seldom to be given a meaning. Common practice, no source. */
+export const mostWords = 4
+
 /** A language's pack with the words added to it, each at the end of its concept's list. */
 export function packWith(
   pack: LanguagePack,

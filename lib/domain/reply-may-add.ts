@@ -1,6 +1,6 @@
 import { isHelpKeyword, isStartKeyword, isStopKeyword } from './consent'
 import type { Language } from './language'
-import { mostAdded, type AddedWord } from './reply-added'
+import { mostAdded, mostWords, type AddedWord } from './reply-added'
 import { conceptNames } from './reply-concept-names'
 import { findDanger } from './reply-danger'
 import { languagePacks, listed, numberWords } from './reply-lexicon'
@@ -49,8 +49,6 @@ export type AddedRefusal =
 
 export type MayAdd = { ok: true; word: AddedWord } | ({ ok: false } & AddedRefusal)
 
-const mostWords = 4
-
 /**
  * Whether the programme may give a phrase a meaning, beside the words it has added before. The answer
  * holds the phrase folded as texts are. A longer phrase owns its words, so one that holds a word of
@@ -78,6 +76,12 @@ function wordsOf(phrase: string): string[] {
   if (!lettersOnly.test(phrase.trim())) return []
   const tokens = tokenise(phrase)
   return tokens.every(({ kind }) => kind === 'word') ? tokens.map(({ text }) => text) : []
+}
+
+/** True if a phrase, folded as texts are, is of a text's own words, in a row and within one sentence. */
+export function isPhraseOf(phrase: string, body: string): boolean {
+  const words = tokenise(body).map(({ kind, text }) => (kind === 'break' ? '|' : text))
+  return ` ${words.join(' ')} `.includes(` ${phrase} `)
 }
 
 function refusedForm(asked: AddedWord, words: string[]): AddedRefusal | null {

@@ -4,8 +4,7 @@ import { findProposal, insertSettledProposal } from '@/db/queries/proposal'
 import { insertAudit } from '@/db/queries/staff'
 import type { Deps } from '@/lib/deps'
 import type { AddedWord } from '@/lib/domain/reply-added'
-import { addedRefusalWords } from '@/lib/domain/reply-may-add'
-import { tokenise } from '@/lib/domain/reply-tokens'
+import { addedRefusalWords, isPhraseOf } from '@/lib/domain/reply-may-add'
 import { allow, type Actor } from '@/lib/domain/role'
 import type { Refusal } from '@/lib/schemas/endpoint'
 import type { AddWords } from '@/lib/schemas/reply-words'
@@ -15,7 +14,8 @@ import { checkNewWords } from './check-new-words'
 /** Undoes the transaction: some of the words were not to be added, so none is. */
 class NotAdded extends Error {}
 
-const overtaken: Refusal = {
+/** Somebody else was first. */
+export const overtaken: Refusal = {
   ok: false,
   reason: 'This proposal was settled, or the text read anew, in the meantime.',
 }
@@ -54,7 +54,7 @@ async function add(
   )
   const [first] = refused
   if (first) return { ok: false, reason: `“${first.phrase}”: ${addedRefusalWords(first.refusal)}` }
-  const stray = from && allowed.find(({ phrase }) => !stands(phrase, from.text.body))
+  const stray = from && allowed.find(({ phrase }) => !isPhraseOf(phrase, from.text.body))
   if (stray) return { ok: false, reason: `“${stray.phrase}” does not stand in the text.` }
   for (const word of allowed) await keep(tx, word, { actor, at, textId: from?.text.id })
   if (from) {
@@ -67,12 +67,6 @@ async function add(
     if (!isFirst) throw new NotAdded(overtaken.reason)
   }
   return { ok: true, added: allowed.length }
-}
-
-/** The phrase is one of the text's own, word by word. */
-function stands(phrase: string, body: string): boolean {
-  const words = tokenise(body).map(({ kind, text }) => (kind === 'break' ? '|' : text))
-  return ` ${words.join(' ')} `.includes(` ${phrase} `)
 }
 
 async function keep(

@@ -3,6 +3,7 @@ import { insertAudit } from '@/db/queries/staff'
 import type { Deps } from '@/lib/deps'
 import { allow, type Actor } from '@/lib/domain/role'
 import type { Refusal } from '@/lib/schemas/endpoint'
+import { overtaken } from './add-words'
 
 /** Puts a proposal away without adding a word. A later reading of the same text is a new one. */
 export async function setAsideProposal(
@@ -22,9 +23,7 @@ export async function setAsideProposal(
         settledBy: actor.staffId,
         settledAt: at,
       }))
-    if (!isFirst) {
-      return { ok: false, reason: 'This proposal was settled, or the text read anew, by now.' }
-    }
+    if (!isFirst) return overtaken
     await insertAudit(tx, {
       staffId: actor.staffId,
       act: 'set a proposal aside',
