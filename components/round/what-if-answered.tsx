@@ -130,8 +130,8 @@ function carriedWords({ carriesADay, today, other }: WhatIfAnswer): string {
 }
 
 function Assumptions({ answer }: { answer: WhatIfAnswer }) {
-  const { kits, unreached, pricePerPart, currency, partsOfText } = answer
-  const mean = (parts: number) => Number(parts.toFixed(1))
+  const { kits, unreached, pricePerSegment, currency, segmentsOfText } = answer
+  const mean = (segments: number) => Number(segments.toFixed(1))
   return (
     <div className="mt-3 grid max-w-reading gap-2 text-sm text-faint">
       <p>{carriedWords(answer)}</p>
@@ -146,9 +146,10 @@ function Assumptions({ answer }: { answer: WhatIfAnswer }) {
         .
       </p>
       <p>
-        Cost: {pricePerPart} {currency} for each part of a text. By the wordings in use, with
-        example names, and who reads which, a wash takes {mean(partsOfText.wash)} parts on the
-        average, a change {mean(partsOfText.change)}, a flow check {mean(partsOfText.flowCheck)}.
+        Cost: {pricePerSegment} {currency} for each part of a text. By the wordings in use, with
+        example names, and who reads which, a wash takes {mean(segmentsOfText.wash)} parts on the
+        average, a change {mean(segmentsOfText.change)}, a flow check{' '}
+        {mean(segmentsOfText.flowCheck)}.
       </p>
     </div>
   )

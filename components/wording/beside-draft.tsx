@@ -59,7 +59,7 @@ function EditionLine({ edition }: { edition: WordingEdition }) {
 }
 
 function MonthCost({ cell, draftParts }: BesideDraftProps) {
-  const { month, pricePerPart: pricePerSegment, currency, inUse } = cell
+  const { month, pricePerSegment, currency, inUse } = cell
   const cost = (parts: number) =>
     `${costOf({ segments: parts * month.texts, pricePerSegment }).toFixed(2)} ${currency}`
   return (

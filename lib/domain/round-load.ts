@@ -71,16 +71,16 @@ export function peakOf(
 }
 
 /**
- * What the texts of a load cost, in the currency of the price: each text takes as many parts as its moment's
- * wordings do on the average.
+ * What the texts of a load cost, in the currency of the price: each text takes as many segments as its
+ * moment's wordings do on the average.
  */
 export function costOfTexts(
   { asks }: Load,
-  { parts, pricePerPart }: { parts: Load['asks']; pricePerPart: number },
+  { segments, pricePerSegment }: { segments: Load['asks']; pricePerSegment: number },
 ): number {
   const all =
-    asks['wash-due'] * parts['wash-due'] +
-    asks['change-due'] * parts['change-due'] +
-    asks['flow-check'] * parts['flow-check']
-  return all * pricePerPart
+    asks['wash-due'] * segments['wash-due'] +
+    asks['change-due'] * segments['change-due'] +
+    asks['flow-check'] * segments['flow-check']
+  return all * pricePerSegment
 }

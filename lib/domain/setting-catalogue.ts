@@ -120,7 +120,7 @@ export function grouped<Thing>(of: (path: SettingPath) => Thing): Grouped<Thing>
     const keys = path.split('.')
     const name = keys.pop() ?? ''
     let group = all
-    for (const key of keys) group = (group[key] ??= {}) as Grouped<Thing>
+    for (const key of keys) group = group[key] ??= {}
     group[name] = of(path)
   }
   return all

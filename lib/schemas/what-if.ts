@@ -69,6 +69,7 @@ const figuresSchema = z.object({
 
 export type WhatIfFigures = z.infer<typeof figuresSchema>
 
+/** Parts are what is changed, all stages together. */
 const weekSchema = z.object({ texts: z.number(), parts: z.number() })
 
 export const whatIfSchema = z.object({
@@ -88,9 +89,9 @@ export const whatIfSchema = z.object({
   byWeek: z.array(z.object({ from: z.string(), today: weekSchema, other: weekSchema })),
   carriesADay: z.number(),
   currency: z.string(),
-  pricePerPart: z.number(),
-  /** Parts that a text takes on the average: a wash, a change, a flow check. */
-  partsOfText: z.object({ wash: z.number(), change: z.number(), flowCheck: z.number() }),
+  pricePerSegment: z.number(),
+  /** Segments that a text takes on the average: a wash, a change, a flow check. */
+  segmentsOfText: z.object({ wash: z.number(), change: z.number(), flowCheck: z.number() }),
 })
 
 export type WhatIfAnswer = z.infer<typeof whatIfSchema>

@@ -70,7 +70,7 @@ export const wordingCellSchema = z.object({
   lags: z.boolean(),
   editions: z.array(editionSchema),
   month: z.object({ texts: z.number(), parts: z.number() }),
-  pricePerPart: z.number(),
+  pricePerSegment: z.number(),
   currency: z.string(),
   households: z.array(z.object({ id: z.string(), name: z.string(), area: z.string() })),
 })

@@ -9,7 +9,7 @@ import type { Cycles, DayAhead, WhatIf } from '@/lib/domain/round-ahead'
 import { costOfTexts, partsOf, peakOf, totalOf, weeksOf, type Load } from '@/lib/domain/round-load'
 import { localDay } from '@/lib/domain/round-window'
 import { dayWords, shortDayWords } from '@/lib/domain/stamp'
-import { partsOf as partsOfText } from '@/lib/domain/wording-examples'
+import { partsOf as segmentsOfWording } from '@/lib/domain/wording-examples'
 import type { Refusal } from '@/lib/schemas/endpoint'
 import type { WhatIfAnswer, WhatIfFigures, WhatIfQuery } from '@/lib/schemas/what-if'
 import { mostCarriedADay } from './area-window'
@@ -37,19 +37,19 @@ function whatIfOf(query: WhatIfQuery, { wash, flowCheckDays }: Cycles): WhatIf {
   }
 }
 
-/** Parts that a text of each moment takes on the average, by the wordings in use and who reads them. */
-async function meanParts(deps: Deps, readers: Map<Language, number>, programme: string) {
+/** Segments that a text of each moment takes on the average, by the wordings in use and who reads them. */
+async function meanSegments(deps: Deps, readers: Map<Language, number>, programme: string) {
   const living = await listLivingWordings(deps.store.db)
   const inUse = living.map(({ wording }) => wording).filter(({ state }) => state === 'in use')
   const all = [...readers.values()].reduce((sum, count) => sum + count, 0)
   const meanOf = (moment: string) => {
     const here = inUse.filter((wording) => wording.moment === moment)
-    const sum = [...readers].reduce((parts, [language, count]) => {
+    const sum = [...readers].reduce((segments, [language, count]) => {
       const wording =
         here.find((one) => one.language === language) ??
         here.find((one) => one.language === languages[0])
-      if (!wording) return parts
-      return parts + count * partsOfText(wording.body, wording.language, { programme })
+      if (!wording) return segments
+      return segments + count * segmentsOfWording(wording.body, wording.language, { programme })
     }, 0)
     return all === 0 ? 0 : sum / all
   }
@@ -60,7 +60,7 @@ async function meanParts(deps: Deps, readers: Map<Language, number>, programme: 
   }
 }
 
-type Price = { parts: Load['asks']; pricePerPart: number }
+type Price = Parameters<typeof costOfTexts>[1]
 
 function figuresOf(plan: readonly DayAhead[], price: Price): WhatIfFigures {
   const total = totalOf(plan)
@@ -92,6 +92,15 @@ function byWeek(today: readonly DayAhead[], other: readonly DayAhead[]) {
   }))
 }
 
+/** The rules plan no wash sooner than the floor: to try one would show what never happens. */
+function underFloor(query: WhatIfQuery, { wash: { floorDays } }: Cycles): Refusal | null {
+  const washDays = [query.washClear, query.washCloudy, query.washVeryCloudy]
+  const isUnder = washDays.some((tried) => tried !== undefined && tried < floorDays)
+  return isUnder
+    ? { ok: false, reason: `The settings keep washes at least ${floorDays} days apart.` }
+    : null
+}
+
 /**
  * What other cycles would bring in the weeks ahead, beside those that stand. It is the load by due dates
  * if all is done when it is due (`planAhead`); nothing is kept.
@@ -110,13 +119,11 @@ export async function whatIf(
     areas.map(({ timeZone }) => localDay(now, timeZone)).sort()[0] ?? localDay(now, 'UTC')
   const days = Number(query.weeks) * 7
   const cycles = cyclesOf(settings)
-  const { floorDays } = cycles.wash
-  const washDays = [query.washClear, query.washCloudy, query.washVeryCloudy]
-  if (washDays.some((tried) => tried !== undefined && tried < floorDays))
-    return { ok: false, reason: `The settings keep washes at least ${floorDays} days apart.` }
+  const refused = underFloor(query, cycles)
+  if (refused) return refused
   const plans = await plansAhead(deps, { from, days, cycles, whatIf: whatIfOf(query, cycles) })
-  const parts = await meanParts(deps, plans.readers, programme.name)
-  const price = { parts, pricePerPart: programme.pricePerSegment }
+  const segments = await meanSegments(deps, plans.readers, programme.name)
+  const price = { segments, pricePerSegment: programme.pricePerSegment }
   const reached = [...plans.readers.values()].reduce((sum, count) => sum + count, 0)
   return {
     weeks: Number(query.weeks),
@@ -131,11 +138,11 @@ export async function whatIf(
     byWeek: byWeek(plans.today, plans.other),
     carriesADay: mostCarriedADay(areas, programme.textsPerMinute),
     currency: programme.currency,
-    pricePerPart: programme.pricePerSegment,
-    partsOfText: {
-      wash: parts['wash-due'],
-      change: parts['change-due'],
-      flowCheck: parts['flow-check'],
+    pricePerSegment: programme.pricePerSegment,
+    segmentsOfText: {
+      wash: segments['wash-due'],
+      change: segments['change-due'],
+      flowCheck: segments['flow-check'],
     },
   }
 }

@@ -46,7 +46,7 @@ export async function wordingCell(
     ...(await besideFirst(deps, place, { inUse, print })),
     editions: rows.map(print),
     month: await countTextsSince(db, { ...place, since }),
-    pricePerPart: programme.pricePerSegment,
+    pricePerSegment: programme.pricePerSegment,
     currency: programme.currency,
     households: await listHouseholdsToTry(db, place.language),
   }

@@ -140,7 +140,7 @@ describe('other cycles', () => {
 })
 
 describe('the cost of texts', () => {
-  test('is the parts of the wordings in use, by who reads them, at the price that is set', async () => {
+  test('is the segments of the wordings in use, by who reads them, at the price that is set', async () => {
     await settle()
     await deps.store.db
       .update(households)
@@ -148,11 +148,11 @@ describe('the cost of texts', () => {
       .where(eq(households.name, 'House 0'))
     await upsertSetting(deps.store.db, { key: 'programme.pricePerSegment', value: 0.05, setAt: 0 })
     const inUse = await deps.store.db.select().from(wordings).where(eq(wordings.moment, 'wash-due'))
-    const parts = (language: 'es' | 'bn') =>
+    const segments = (language: 'es' | 'bn') =>
       partsOf(inUse.find((one) => one.language === language)!.body, language)
-    const { today, partsOfText } = await ask({ weeks: '4' })
-    expect(partsOfText.wash).toBeCloseTo((2 * parts('es') + parts('bn')) / 3, 9)
-    const { wash, change } = partsOfText
+    const { today, segmentsOfText } = await ask({ weeks: '4' })
+    expect(segmentsOfText.wash).toBeCloseTo((2 * segments('es') + segments('bn')) / 3, 9)
+    const { wash, change } = segmentsOfText
     expect(today.cost).toBeCloseTo((6 * wash + 3 * change) * 0.05, 9)
   })
 

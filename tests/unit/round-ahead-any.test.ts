@@ -98,10 +98,10 @@ describe('any plan ahead', () => {
     )
   })
 
-  it('costs the parts that its moments take on the average', () => {
+  it('costs the segments that its moments take on the average', () => {
     const asks = { 'wash-due': 10, 'change-due': 4, 'flow-check': 2 }
-    const parts = { 'wash-due': 1, 'change-due': 2.5, 'flow-check': 3 }
+    const segments = { 'wash-due': 1, 'change-due': 2.5, 'flow-check': 3 }
     const load = { ...totalOf([]), asks, texts: 16 }
-    expect(costOfTexts(load, { parts, pricePerPart: 0.02 })).toBeCloseTo(0.52, 12)
+    expect(costOfTexts(load, { segments, pricePerSegment: 0.02 })).toBeCloseTo(0.52, 12)
   })
 })
