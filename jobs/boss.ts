@@ -1,5 +1,6 @@
 import PgBoss from 'pg-boss'
 import { queueSqlOf, type Store, type Transaction } from '@/db/client'
+import { faultWords } from '@/lib/log'
 import { queues, type Payload, type QueueName } from './queues'
 
 /** Enqueueing inside the transaction that made the work necessary: both are kept or neither. */
@@ -40,7 +41,9 @@ export async function startQueue(store: Store, log: Log, worker: boolean): Promi
     schedule: worker,
     migrate: true,
   })
-  boss.on('error', (error) => log.error({ cause: error.message }, 'the queue reported an error'))
+  boss.on('error', (error) =>
+    log.error({ cause: faultWords(error) }, 'the queue reported an error'),
+  )
   await boss.start()
   await createQueues(boss)
   const workers = new Map<QueueName, string>()
@@ -71,8 +74,8 @@ export async function startQueue(store: Store, log: Log, worker: boolean): Promi
               await handler(schema.parse(job.data) as never)
               await boss.complete(name, job.id)
             } catch (error) {
-              log.error({ queue: name, job: job.id, cause: String(error) }, 'a job failed')
-              await boss.fail(name, job.id, { message: String(error) })
+              log.error({ queue: name, job: job.id, cause: faultWords(error) }, 'a job failed')
+              await boss.fail(name, job.id, { message: faultWords(error) })
             }
           }
           if (jobs.length === batch) boss.notifyWorker(workerId)

@@ -1,6 +1,6 @@
 import { getDeps } from '@/lib/deps'
 import { checkEnvironment, env } from '@/lib/env'
-import { log } from '@/lib/log'
+import { faultWords, log } from '@/lib/log'
 import { prepareDesk } from '@/lib/services/prepare-desk'
 import { runJobs } from './run'
 
@@ -23,13 +23,13 @@ export async function startDesk(): Promise<void> {
     const stop = () => {
       deps.close().then(
         () => process.exit(0),
-        (error: unknown) => stopWith([`The desk did not close cleanly: ${String(error)}`]),
+        (error: unknown) => stopWith([`The desk did not close cleanly: ${faultWords(error)}`]),
       )
     }
     process.once('SIGTERM', stop)
     process.once('SIGINT', stop)
     log.info({ database: deps.store.kind, jobs: env().jobs }, 'the desk is open')
   } catch (error) {
-    stopWith([`The desk could not open: ${error instanceof Error ? error.message : String(error)}`])
+    stopWith([`The desk could not open: ${faultWords(error)}`])
   }
 }

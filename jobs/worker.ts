@@ -1,6 +1,6 @@
 import { getDeps } from '@/lib/deps'
 import { env } from '@/lib/env'
-import { log } from '@/lib/log'
+import { faultWords, log } from '@/lib/log'
 import { runJobs } from './run'
 
 /** A process that only works jobs, beside any number of web processes. Needs a database that many may open. */
@@ -24,6 +24,6 @@ async function main(): Promise<void> {
 }
 
 main().catch((error: unknown) => {
-  log.error({ cause: String(error) }, 'the worker could not start')
+  log.error({ cause: faultWords(error) }, 'the worker could not start')
   process.exit(1)
 })

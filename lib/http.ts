@@ -3,7 +3,7 @@ import type { z } from 'zod'
 import { currentActor } from './auth'
 import { getDeps, type Deps } from './deps'
 import { may, NotAllowedError, type Actor } from './domain/role'
-import { log } from './log'
+import { faultWords, log } from './log'
 import type { BodyOf, Endpoint, QueryOf, Refusal, ResponseOf } from './schemas/endpoint'
 
 type Context<E extends Endpoint> = {
@@ -95,7 +95,7 @@ export function handle<E extends Endpoint>(
       return await respond(definition, run, { request, route })
     } catch (error) {
       if (error instanceof NotAllowedError) return answer(403, { reason: error.message })
-      log.error({ path: definition.path, cause: String(error) }, 'a route failed')
+      log.error({ path: definition.path, cause: faultWords(error) }, 'a route failed')
       return answer(500, { reason: 'Something went wrong on our side. Nothing was changed.' })
     }
   }

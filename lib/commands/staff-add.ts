@@ -1,6 +1,7 @@
 import { createInterface } from 'node:readline/promises'
 import { parseArgs } from 'node:util'
 import { getDeps } from '@/lib/deps'
+import { faultWords } from '@/lib/log'
 import { staffInputSchema } from '@/lib/schemas/staff'
 import { addStaff } from '@/lib/services/add-staff'
 
@@ -47,7 +48,7 @@ async function main(): Promise<number> {
 main().then(
   (code) => process.exit(code),
   (error: unknown) => {
-    console.error(error instanceof Error ? error.message : String(error))
+    console.error(faultWords(error))
     process.exit(1)
   },
 )
