@@ -90,7 +90,7 @@ export const careConstants = [
   },
   {
     what: 'words of the danger signs',
-    file: 'lib/domain/reply-words/en-danger.ts',
+    file: 'lib/domain/reply-words/en-ill.ts',
     test: 'danger',
     changes: [
       ['convuls*', 'shudder*'],

@@ -48,8 +48,8 @@ export const filterConstants = [
     changes: [
       ['designLitresPerPersonDay = 5.3', 'designLitresPerPersonDay = 5.2'],
       ['floorLitresPerPersonDay = 3', 'floorLitresPerPersonDay = 2.9'],
-      ['enoughHours = 8', 'enoughHours = 4.9'],
-      ['hours <= 24', 'hours <= 25'],
+      ['enoughHours: 8', 'enoughHours: 4.9'],
+      ['slowHours: 24', 'slowHours: 25'],
     ],
   },
   {
