@@ -92,16 +92,13 @@ export const careConstants = [
     what: 'words of the danger signs',
     file: 'lib/domain/reply-words/en-ill.ts',
     test: 'danger',
-    changes: [
-      ['convuls*', 'shudder*'],
-      ['letharg*', 'sluggish*'],
-    ],
+    changes: [['letharg*', 'sluggish*']],
   },
   {
-    what: 'blood in the stool',
+    what: 'the danger signs among illnesses',
     file: 'lib/domain/reply-illness.ts',
     test: 'danger',
-    changes: [["'stool', 'belly'], 8", "'belly'], 8"]],
+    changes: [[', dangerSign: true }', ' }']],
   },
   {
     what: 'two ill houses of one area',
