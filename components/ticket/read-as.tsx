@@ -69,6 +69,11 @@ function ReadAsForm({ textId, onDone }: { textId: string; onDone: () => void }) 
       {kind === 'flow-figure' && (
         <TextField label="Minutes a bottle" name="minutes" inputMode="decimal" mono />
       )}
+      {kind === 'stop' && (
+        <p className="text-sm">
+          Their texts end with this: only the word START from the phone brings them back.
+        </p>
+      )}
       {error && <FieldError>{error.message}</FieldError>}
       <Button type="submit" size="small" busy={isPending}>
         Keep this reading

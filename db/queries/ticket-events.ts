@@ -1,4 +1,4 @@
-import { and, asc, desc, eq, inArray, isNull, ne } from 'drizzle-orm'
+import { and, asc, desc, eq, gt, inArray, isNotNull, isNull, ne, notExists } from 'drizzle-orm'
 import type { Handle } from '../client'
 import { households } from '../schema/household'
 import { ticketEvents, tickets, walks } from '../schema/ticket'
@@ -71,4 +71,21 @@ export async function listIllnessInArea(db: Handle, areaId: string, butHousehold
     .orderBy(desc(tickets.openedAt))
     .limit(20)
   return rows.map(({ at }) => at)
+}
+
+/** Open tickets that wait for an answer to a step and of which nothing was heard since. */
+export async function listUnansweredTickets(
+  db: Handle,
+  { since, limit }: { since: number; limit: number },
+) {
+  const heard = db
+    .select({ n: ticketEvents.n })
+    .from(ticketEvents)
+    .where(and(eq(ticketEvents.ticketId, tickets.id), gt(ticketEvents.at, since)))
+  return db
+    .select({ id: tickets.id })
+    .from(tickets)
+    .where(and(isNull(tickets.endedAt), isNotNull(tickets.waitingFor), notExists(heard)))
+    .orderBy(asc(tickets.openedAt), asc(tickets.id))
+    .limit(limit)
 }

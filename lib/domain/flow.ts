@@ -13,6 +13,11 @@ export function litresPerHour({ litres, seconds }: { litres: number; seconds: nu
 /** Water runs thinner when warm; flows are compared as if all were read at this temperature. */
 export const referenceCelsius = 20
 
+/** A flow that is wanted of water at `celsius`, in L/h, as the filter would give it at 20 °C. */
+export function asAtReference(litresPerHour: number, celsius: number): number {
+  return (litresPerHour * waterViscosity(celsius)) / waterViscosity(referenceCelsius)
+}
+
 /**
  * A bottle-fill time as litres per hour at 20 °C and full head. `headRatio` is the water's height
  * in the container over its height when full (0 to 1). Darcy: flow goes with head over viscosity.
@@ -29,8 +34,7 @@ export function normalisedFlow({
   headRatio: number
 }): number {
   if (!(headRatio > 0)) throw new RangeError('head ratio must be above 0')
-  const warmth = waterViscosity(celsius) / waterViscosity(referenceCelsius)
-  return (litresPerHour({ litres, seconds }) * warmth) / headRatio
+  return asAtReference(litresPerHour({ litres, seconds }), celsius) / headRatio
 }
 
 export type RecoveryKind = 'restored' | 'partly' | 'not' | 'too-fast' | 'ask-again'

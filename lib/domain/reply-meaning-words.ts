@@ -1,5 +1,5 @@
 import type { Asked, ReplyReading } from './reply'
-import { replyKindWords } from './slip-words'
+import { replyKindWords, spanWords } from './slip-words'
 
 /** What a reading says, in words for staff: `slow water, 12 minutes a bottle`. */
 export function meaningWords(
@@ -17,12 +17,6 @@ export function meaningWords(
     reading.alsoSlow ? 'and slow water' : '',
   ]
   return parts.filter(Boolean).join(', ')
-}
-
-/** `12 minutes`, to a tenth. */
-export function spanWords(minutes: number): string {
-  const rounded = Math.round(minutes * 10) / 10
-  return `${rounded} ${rounded === 1 ? 'minute' : 'minutes'}`
 }
 
 /** How sure a reading is, from 0 to 1, as `85 % sure`. */

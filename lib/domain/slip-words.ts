@@ -71,13 +71,19 @@ export const replyKindWords: Record<ReplyKind, string> = {
   unclear: 'not clear: for a person to read',
 }
 
+/** `12 minutes`, to a tenth. */
+export function spanWords(minutes: number): string {
+  const rounded = Math.round(minutes * 10) / 10
+  return `${rounded} ${rounded === 1 ? 'minute' : 'minutes'}`
+}
+
 /** What a reply was taken to mean, in words for staff: `read as: 12 minutes a bottle`. */
 export function readingWords(reading: {
   kind: ReplyKind
   minutes: number | null
   choice: number | null
 }): string {
-  if (reading.minutes !== null) return `read as: ${reading.minutes} minutes a bottle`
+  if (reading.minutes !== null) return `read as: ${spanWords(reading.minutes)} a bottle`
   if (reading.choice !== null) return `read as: choice ${reading.choice}`
   return `read as: ${replyKindWords[reading.kind]}`
 }

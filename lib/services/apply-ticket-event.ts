@@ -14,7 +14,7 @@ import { decide, fold } from '@/lib/domain/ticket'
 import type { TicketEvent, TicketState } from '@/lib/domain/ticket-types'
 import type { Trouble } from '@/lib/domain/trouble'
 import { noticeIllness } from './notice-illness'
-import { areaCelsius } from './record-flow'
+import { areaCelsius } from './area-celsius'
 import { runTicketEffects } from './run-ticket-effects'
 import { oddsAtOpening } from './starting-odds'
 

@@ -62,7 +62,8 @@ export async function refitStage(
 
 /**
  * Closes what was asked of a kit, answered or given up. The next wash and flow check are then planned a
- * full interval on, so that a question left open does not stop the cycle for ever.
+ * full interval on, so that a question left open does not stop the cycle for ever. A change that was done is
+ * closed before, where it is logged.
  */
 export async function closePrompts(
   tx: Transaction,
@@ -72,10 +73,14 @@ export async function closePrompts(
   const now = deps.clock.now()
   const today = localDay(now, facts.area.timeZone)
   const asked = await listAskedPrompts(tx, facts.kit.id)
+  const isAnswer = state === 'answered'
+  // A change keeps its day until it is done: what spoke of something else leaves it to be asked anew.
+  const undone = asked.filter(({ kind }) => isAnswer && kind === 'change').map(({ id }) => id)
+  await updatePrompts(tx, undone, { state: 'dropped', nudgeAfter: null })
   await updatePrompts(
     tx,
-    asked.map((prompt) => prompt.id),
-    { state, nudgeAfter: null, answeredAt: state === 'answered' ? now : null },
+    asked.map(({ id }) => id).filter((id) => !undone.includes(id)),
+    { state, nudgeAfter: null, answeredAt: isAnswer ? now : null },
   )
   const has = (kind: string) => asked.some((prompt) => prompt.kind === kind)
   if (has('wash')) {

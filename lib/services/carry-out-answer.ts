@@ -1,7 +1,7 @@
 import type { Transaction } from '@/db/client'
 import { updateHousehold, type KitFacts } from '@/db/queries/kit-facts'
 import { findPhone, updatePhone } from '@/db/queries/phone'
-import { listAskedPrompts } from '@/db/queries/prompt'
+import { listAskedPrompts, updatePrompts } from '@/db/queries/prompt'
 import { updateText, type TextRow } from '@/db/queries/text'
 import { findOpenTicket } from '@/db/queries/ticket-events'
 import type { Deps } from '@/lib/deps'
@@ -92,10 +92,16 @@ async function answerStep(
 
 /** Stages that the household says it changed: those the open prompts asked for. */
 async function logChange(tx: Transaction, deps: Deps, run: AnswerRun) {
-  const asked = await listAskedPrompts(tx, run.facts.kit.id)
-  const positions = new Set(
-    asked.filter((prompt) => prompt.kind === 'change').flatMap((prompt) => prompt.positions),
+  const asked = (await listAskedPrompts(tx, run.facts.kit.id)).filter(
+    ({ kind }) => kind === 'change',
   )
+  const answeredAt = deps.clock.now()
+  await updatePrompts(
+    tx,
+    asked.map(({ id }) => id),
+    { state: 'answered', nudgeAfter: null, answeredAt },
+  )
+  const positions = new Set(asked.flatMap((prompt) => prompt.positions))
   for (const position of positions) {
     if (position !== 1 && position !== 2 && position !== 3) continue
     await refitStage(tx, deps, { facts: run.facts, position, removedFor: 'due' })

@@ -10,6 +10,7 @@ import {
   type PromptRow,
 } from '@/db/queries/prompt'
 import { listPromptHours } from '@/db/queries/text'
+import { findTicketForUpdate, listUnansweredTickets } from '@/db/queries/ticket-events'
 import type { Deps } from '@/lib/deps'
 import type { Moment } from '@/lib/domain/moments'
 import {
@@ -20,7 +21,7 @@ import {
   waitUntil,
 } from '@/lib/domain/round'
 import { stageKey } from '@/lib/domain/round-text'
-import { raiseTrouble } from './apply-ticket-event'
+import { applyTicketEvent, raiseTrouble } from './apply-ticket-event'
 import { windowOf } from './area-window'
 import { closePrompts } from './care-for-kit'
 import { queueText } from './queue-text'
@@ -84,7 +85,7 @@ async function giveUp(tx: Transaction, deps: Deps, prompt: PromptRow): Promise<v
   await raiseTrouble(tx, deps, { facts, trouble: 'silent' })
 }
 
-/** Nudges what was not answered, twice; then the silence goes into the shift. It never counts as working. */
+/** Nudges what was not answered, twice, and gives steps that nobody answered to a person; then the silence goes into the shift. It never counts as working. */
 export async function followSilence(deps: Deps): Promise<{ nudged: number; silent: number }> {
   const due = await listPromptsToNudge(deps.store.db, deps.clock.now(), BATCH)
   const done = { nudged: 0, silent: 0 }
@@ -99,5 +100,21 @@ export async function followSilence(deps: Deps): Promise<{ nudged: number; silen
       done[isLast ? 'silent' : 'nudged'] += 1
     })
   }
+  await followSteps(deps)
   return done
+}
+
+/** A step that nobody answered for as long as a prompt waits for its nudge: from now on it is a person's. */
+async function followSteps(deps: Deps): Promise<void> {
+  const { sending } = await settingsNow(deps.store.db)
+  const since = deps.clock.now() - sending.firstNudgeDays * DAY
+  const waiting = await listUnansweredTickets(deps.store.db, { since, limit: BATCH })
+  for (const { id: ticketId } of waiting) {
+    await deps.store.transaction(async (tx) => {
+      // An answer may have come since the list was read.
+      const ticket = await findTicketForUpdate(tx, ticketId)
+      if (!ticket || ticket.endedAt !== null || ticket.waitingFor === null) return
+      await applyTicketEvent(tx, deps, { ticketId, event: { kind: 'no answer' } })
+    })
+  }
 }

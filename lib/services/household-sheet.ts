@@ -17,6 +17,7 @@ import type { HouseholdSheet, PhoneView } from '@/lib/schemas/household'
 import { spacedNumber } from '@/lib/schemas/phone-number'
 import { kitSheet } from './kit-sheet'
 import { slipPage } from './list-slips'
+import { areaCelsius } from './area-celsius'
 import { settingsNow } from './settings-now'
 
 type ConsentRow = Awaited<ReturnType<typeof listConsents>>[number]
@@ -72,9 +73,12 @@ export async function householdSheet(
   const today = localDay(now, timeZone)
   const settings = await settingsNow(db)
   const litresPerDay = dailyNeed({ people: household.people, ...settings.need })
+  const celsius = areaCelsius(area, now)
   const kits = []
   for (const { kit, model } of await listKitsOfHousehold(db, householdId)) {
-    kits.push(await kitSheet(db, { kit, model, timeZone, now, today, litresPerDay, settings }))
+    kits.push(
+      await kitSheet(db, { kit, model, timeZone, now, today, litresPerDay, celsius, settings }),
+    )
   }
   const { areaId: _areaId, createdAt, movedAt, ...who } = household
   return {

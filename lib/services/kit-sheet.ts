@@ -7,7 +7,7 @@ import {
   listWashes,
   type listKitsOfHousehold,
 } from '@/db/queries/kit'
-import { trend } from '@/lib/domain/flow'
+import { asAtReference, trend } from '@/lib/domain/flow'
 import { forecastWords } from '@/lib/domain/forecast-words'
 import { kitPast, kitPlan } from '@/lib/domain/kit-life'
 import { neededLitresPerHour } from '@/lib/domain/need'
@@ -22,6 +22,8 @@ type Around = KitRow & {
   now: number
   today: string
   litresPerDay: number
+  /** Of the water, as is usual in this month. */
+  celsius: number
   settings: Settings
 }
 
@@ -45,7 +47,11 @@ async function factsOf(db: Handle, kitId: string): Promise<Facts> {
 
 function flowOf({ readings, washes, fittings }: Facts, around: Around): KitView['flow'] {
   const { need, flow } = around.settings
-  const needLitresPerHour = neededLitresPerHour({ litresPerDay: around.litresPerDay, ...need })
+  // Readings are drawn at 20 °C: so is what the house needs of its own, colder or warmer water.
+  const needLitresPerHour = asAtReference(
+    neededLitresPerHour({ litresPerDay: around.litresPerDay, ...need }),
+    around.celsius,
+  )
   const firsts = new Map(readings.toReversed().map((one) => [one.fibreFittingId, one.n]))
   const washDays = new Set(washes.map(({ washedOn }) => washedOn))
   const points = readings.map((reading) => {

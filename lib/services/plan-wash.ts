@@ -10,23 +10,28 @@ import {
 import { hasOpenPrompt } from '@/db/queries/prompt'
 import type { Deps } from '@/lib/deps'
 import { planWash, type WashPlan } from '@/lib/domain/cycle'
-import { shortOn, trend } from '@/lib/domain/flow'
+import { asAtReference, shortOn, trend } from '@/lib/domain/flow'
 import { dailyNeed, neededLitresPerHour } from '@/lib/domain/need'
 import { localDay } from '@/lib/domain/round'
 import type { Settings } from '@/lib/domain/settings'
+import { areaCelsius } from './area-celsius'
 import { settingsNow } from './settings-now'
 
 /** The day on which the readings since the last change of the fibre see the flow fall under the need. */
 async function shortDay(
   tx: Transaction,
   { kit, household, area }: KitFacts,
-  { need, flow }: Settings,
+  { settings: { need, flow }, now }: { settings: Settings; now: number },
 ): Promise<string | null> {
   const fibre = (await listOpenFittings(tx, kit.id)).find(({ stage }) => stage.kind === 'fibre')
   if (!fibre) return null
   const readings = await listReadingsOfFitting(tx, kit.id, fibre.fitting.id)
   const litresPerDay = dailyNeed({ people: household.people, ...need })
-  const needed = neededLitresPerHour({ litresPerDay, ...need })
+  // Readings are held at 20 °C: what the house needs of its own, colder or warmer water is put as they are.
+  const needed = asAtReference(
+    neededLitresPerHour({ litresPerDay, ...need }),
+    areaCelsius(area, now),
+  )
   return shortOn(trend(readings, needed, flow), area.timeZone)
 }
 
@@ -41,7 +46,7 @@ export async function washFrom(
   const plan = planWash({
     countedFrom,
     today: localDay(deps.clock.now(), area.timeZone),
-    shortOn: await shortDay(tx, facts, settings),
+    shortOn: await shortDay(tx, facts, { settings, now: deps.clock.now() }),
     sourceClass: household.sourceClass,
     wetMonths: area.wetMonths,
     settings: settings.wash,

@@ -4,10 +4,12 @@ import type { Deps } from '@/lib/deps'
 import type { ReplyKind } from '@/lib/domain/reply'
 import { allow, type Actor } from '@/lib/domain/role'
 import type { Refusal } from '@/lib/schemas/endpoint'
+import { changeConsent } from './change-consent'
 
 /**
  * Keeps a person's reading of a reply beside the desk's own; the last one counts and is shown. What
- * follows from it (an answer noted, a trouble named) is the person's to do on the ticket.
+ * follows from it (an answer noted, a trouble named) is the person's to do on the ticket, but for an opt-out: that
+ * is honoured at once, and only START from the phone takes it back.
  */
 export async function readAs(
   deps: Deps,
@@ -32,6 +34,7 @@ export async function readAs(
       sure: 1,
       at,
     })
+    if (kind === 'stop') await changeConsent(tx, deps, { text, consent: 'withdrawn' })
     await insertAudit(tx, {
       staffId: actor.staffId,
       act: 'read a reply anew',

@@ -6,7 +6,6 @@ import {
   type KitFacts,
 } from '@/db/queries/kit-facts'
 import type { Deps } from '@/lib/deps'
-import { monthOf } from '@/lib/domain/day'
 import {
   flowErrorShare,
   litresPerHour,
@@ -15,7 +14,7 @@ import {
   type Recovery,
 } from '@/lib/domain/flow'
 import { dailyNeed, enough, type Enough } from '@/lib/domain/need'
-import { localDay } from '@/lib/domain/round'
+import { areaCelsius } from './area-celsius'
 import { replanWash } from './plan-wash'
 import { settingsNow } from './settings-now'
 
@@ -27,12 +26,6 @@ export type FlowVerdict = {
   normalised: number
   celsius: number
   celsiusFrom: 'told' | 'area month'
-}
-
-/** The water's temperature in an area on a day, °C: the month's value, where nobody told one. */
-export function areaCelsius(area: KitFacts['area'], at: number): number {
-  const month = monthOf(localDay(at, area.timeZone))
-  return area.monthCelsius[month - 1] ?? 20
 }
 
 /**

@@ -12,8 +12,9 @@ import {
   type FoundFigure,
 } from '@/lib/domain/reply-explain'
 import { addedRefusalWords } from '@/lib/domain/reply-may-add'
-import { meaningWords, spanWords, sureWords } from '@/lib/domain/reply-meaning-words'
+import { meaningWords, sureWords } from '@/lib/domain/reply-meaning-words'
 import { allow, type Actor } from '@/lib/domain/role'
+import { spanWords } from '@/lib/domain/slip-words'
 import type { TriedReply, TryReply } from '@/lib/schemas/reply-words'
 import { addedWordsInForce } from './added-words'
 import { checkNewWords } from './check-new-words'

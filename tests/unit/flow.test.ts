@@ -1,6 +1,7 @@
 import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
 import {
+  asAtReference,
   flowDefaults,
   flowErrorShare,
   isSpent,
@@ -40,6 +41,23 @@ describe('a flow reading', () => {
 
   it('errs by time and bottle together', () => {
     expect(flowErrorShare(flowDefaults)).toBeCloseTo(0.111803, 6)
+  })
+})
+
+describe('a flow that is wanted', () => {
+  it('is told at 20 °C as the readings are: more where the water is cold, less where it is warm', () => {
+    expect(asAtReference(4, 20)).toBeCloseTo(4, 12)
+    // 1305.90 and 797.21 to 1001.57 µPa·s (IAPWS SR6-08).
+    expect(asAtReference(4, 10)).toBeCloseTo(5.215, 3)
+    expect(asAtReference(4, 30)).toBeCloseTo(3.184, 3)
+  })
+
+  it('is just met by a reading that gives it', () => {
+    const seconds = 3600 / 4
+    expect(normalisedFlow({ litres: 1, seconds, celsius: 10, headRatio: 1 })).toBeCloseTo(
+      asAtReference(4, 10),
+      9,
+    )
   })
 })
 

@@ -73,7 +73,7 @@ export const bnIll: LanguagePack['concepts'] = {
     ওরস্যালাইন*, ট্যাবলেট*, ইনজেকশন*, ইঞ্জেকশন*, ভর্তি করছি, ভর্তি করাইছি, ভর্তি আছে, কবিরাজ*,
     নার্স*, haspatal*, hashpatal*, hospital*, daktar*, dactar, doctor*, clinic*, klinik, medical*,
     medicel, pharmacy, farmesi, oshudh*, osud*, osudh*, ousodh, medicine, saline, salain, selain,
-    orsaline, tablet*, injection, injeksan, vorti korsi, vorti koraisi, bhorti korechi, vorti ase,
+    saline, tablet*, injection, injeksan, vorti korsi, vorti koraisi, bhorti korechi, vorti ase,
     kobiraj, nurse`,
   recovered: `সুস্থ এখন, এখন সুস্থ, সুস্থ হয়ে*, সুস্থ হইছে*, সুস্থ হয়েছে*, সুস্থ হইয়া*, সেরে গে*,
     সেরে উঠ*, সাইরা গে*, ভালো আছে এখন*, এখন ভাল আছে*, এখন ভালা আছে*, এখন খেলছে*, খেলতেছে*,

@@ -76,7 +76,7 @@ export const enOdd: LanguagePack['concepts'] = {
     oil film, oil in, varnish, thinner, rat poison, poison*, pesticid*, ddt, roundup,
     spray chemical, weed killer, toxic, toxins, tar, ink, nail polish, glue`,
   substance: `soap, bleach, chlorine, salt, vinegar, lemon, detergent, ash, baking soda, sponge, steel wool,
-    toothbrush, alcohol, jik, omo, dettol, metal, plastic, rubber, powder, washing powder,
+    toothbrush, alcohol, bleach, washing powder, disinfectant, metal, plastic, rubber, powder,
     bleaching powder`,
   dirty: `dirty, filthy, unclean, soiled, dirt, durty, dirtier, muddied, grubby, grimy, contaminated,
     contaminat*, polluted, impure, not pure, infected water`,

@@ -24,7 +24,7 @@ export const esOdd: LanguagePack['concepts'] = {
     herrumbr*, orin del, sediment*, asentad*, residu*, fango*, moho*, ceniz*, tizn*, pelos, pelitos,
     plumas, chocolat*, como barro, como agua de rio, como agua de charco, como jugo, como horchata,
     como refresco, como tamarindo, como orines, como sangre, como aceite, como jabon, como atole,
-    como panela, como coca, cambia de color, cambio color, cambio el color, sin claridad,
+    como panela, como cola, cambia de color, cambio color, cambio el color, sin claridad,
     nada clara, ya no clara, ya no es clara, ya no sale clara, ya no sale limpia, no sale limpia,
     no esta limpia, no esta clara, no es clara, no se ve clara, no se ve limpia, se ve rara,
     se ve raro, se ve fea, se ve mal el agua, se ve sucia, se ve medio, parece barro, parece jugo,

@@ -86,7 +86,7 @@ export const esPack: LanguagePack = {
     despedido deba summer serlo llorando ocurra tomalo cuan minas ratas roca peces conductor
     trabajado gane casada condicion aventura aquello septiembre llevando maleta saint socios
     sagrado desaparecer lata aigo acero entrando miro casco salvado muro buddy despejado despacho
-    peleas esperado llegaremos crema esperare entrado arrestado sepan coca rocas gritando dejemos
+    peleas esperado llegaremos crema esperare entrado arrestado sepan cola rocas gritando dejemos
     despedida sofa deuda flor patio palo hueso valle llevaremos entradas velas pagado condenado
     preparada contando ayudante vaca olvidate encerrado rubia empleado dolar tocando requiere
     harris hierro enterrado ensenare cuentos conducta manzana cambiando pecados llevarla manual

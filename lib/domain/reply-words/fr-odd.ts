@@ -19,7 +19,7 @@ export const frOdd: LanguagePack['concepts'] = {
     moins clair, pas tres claire, pas tres clair, pas vraiment claire, plus tres claire,
     pas transparente, plus transparente, plus limpide, pas limpide, plus propre, pas propre,
     pas tres propre, a change de couleur, autre couleur, drole de couleur, couleur bizarre,
-    couleur etrange, couleur de, couleur du, comme du jus, comme du thé, comme du coca,
+    couleur etrange, couleur de, couleur du, comme du jus, comme du thé, comme du cola,
     comme de la terre, comme de la rouille, comme de l huile, comme de la pisse, comme du savon,
     comme l eau du marigot, comme l eau de pluie, comme l eau de riz, eau de riz, eau savonneuse,
     lavasse, rouill*, ferreuse, mouss*, ecum*, savonn*, gelatineu*, gluant*, glaireu*, visqueu*,
@@ -70,7 +70,7 @@ export const frOdd: LanguagePack['concepts'] = {
     diluant, acetone, poison*, toxique*, pesticid*, insecticid*, fongicid*, desherbant*, herbicid*,
     raticide, mort aux rats, goudron, bitume, encre, ammoniac`,
   substance: `savon, javel, eau de javel, chlore, sel, vinaigre, citron, lessive, detergent, cendre,
-    bicarbonate, eponge, eponge metallique, brosse, alcool, metal, fer, plastique, caoutchouc, omo`,
+    bicarbonate, eponge, eponge metallique, brosse, alcool, metal, fer, plastique, caoutchouc, washing powder`,
   dirty: `sale, sales, salle, crade, dégueu, malpropre, salie, saless*, degueulass*, pollue*, contamine*,
     souille*, crasseu*, boueu*, terni*, salies`,
 }

@@ -53,7 +53,7 @@ export const seventhBnReplies: LabelledReply[] = labelled('bn', [
   [
     'none',
     'odd-water',
-    `panite tulor moto ki jani | পানি পিচ্ছিল লাগে | khaile date bali lage | পেট্রোলের গন্ধ | bacchara bole poisha poisha lage | bengachi!! | panir rong khoyeri | পানিত গন্দ করে | vitre poka dekhlm | পানির কালার ফান্টার মতন |
+    `panite tulor moto ki jani | পানি পিচ্ছিল লাগে | khaile date bali lage | পেট্রোলের গন্ধ | bacchara bole poisha poisha lage | bengachi!! | panir rong khoyeri | পানিত গন্দ করে | vitre poka dekhlm | পানির কালার সোডার মতন |
       pani tita lage eikoydin | glass e badami dag pore | cup er moddhe ki jani nore | নালার মতো গন্ধ | mone hoy lohar poisha chatchi emon lage | ছোট ছোট সাদা সুতা ভাসে জগে | পানিটা হলদেটে হয়ে গেছে |
       panir sathe choto choto kalo kona ashe | ট্যাংকে সবুজ কি জানি হইছে পানিও সবুজ | shad onno rokom, lohar moto | পচা ডিমের মতো গন্ধ | গ্লাসে একটা ছোট পোকা দেখছি | dudher moto dekhay | পানির উপর তেলের মতো আস্তর |
       glass er tolay bali jome | মাটির স্বাদ`,

@@ -57,7 +57,7 @@ export const seventhEnReplies: LabelledReply[] = labelled('en', [
     'none',
     'odd-water',
     `something like cotton in the water | the water feels slimy | it leaves my teeth gritty | petrol smell | the kids say it tastes like pennies | tadpoles!! | water is browm | the watr smels bad | i see worms insde |
-      water get colour like fanta | tasting bitter these days | the glass leaves a brown ring | there's something wriggling in my cup | it has a whiff of drains about it | tastes like licking a coin |
+      water get colour like soda | tasting bitter these days | the glass leaves a brown ring | there's something wriggling in my cup | it has a whiff of drains about it | tastes like licking a coin |
       little white threads are floating in the jug | water has turned yellowish | little black bits coming out with the water | there is green stuff growing in the tank and the water is green too |
       it tastes different, sort of metallic | smells like rotten egg | I saw a small worm in my glass | looks like milk | the water has an oily skin on top | theres grit at the bottom of my cup | tastes of earth`,
   ],

@@ -57,7 +57,7 @@ export const seventhEsReplies: LabelledReply[] = labelled('es', [
     'none',
     'odd-water',
     `sale como algodon en el agua | el agua se siente babosa | me deja los dientes con arena | olor a gasolina | dicen los niños que sabe a centavo | renacuajos!! | el awa sale cafe | el agua uele mal | beo gusanos adentro |
-      agua color fanta | estos dias sabe amargo | queda una nata encima del vaso | andan unos bichitos nadando | sabe como a moneda | huele a charco | trae pelusitas blancas | el agua se puso amarillenta |
+      agua color soda | estos dias sabe amargo | queda una nata encima del vaso | andan unos bichitos nadando | sabe como a moneda | huele a charco | trae pelusitas blancas | el agua se puso amarillenta |
       salen pedacitos negros con el agua | hay algo verde creciendo en el tanque y el agua tambien esta verde | sabe distinto, como metalico | huele a huevo podrido | vi un gusanito en mi vaso | parece leche |
       tiene una capa de grasa encima | queda arenilla en el fondo del vaso | sabe a tierra`,
   ],

@@ -58,7 +58,7 @@ export const seventhFrReplies: LabelledReply[] = labelled('fr', [
     'none',
     'odd-water',
     `il y a comme du coton dans l'eau | l'eau est gluante | ça crisse sous les dents | odeur d'essence | les enfants disent que ça a un goût de pièce | des têtards !! | lo es maron | lo sen movai | je voi des ver dedan |
-      lo a la couleur fanta | gou amer ces jour ci | ça laisse un rond marron dans le verre | y a un truc qui gigote dans mon gobelet | ça sent le caniveau | un goût de pièce de monnaie |
+      lo a la couleur soda | gou amer ces jour ci | ça laisse un rond marron dans le verre | y a un truc qui gigote dans mon gobelet | ça sent le caniveau | un goût de pièce de monnaie |
       des petits fils blancs flottent dans la carafe | l'eau est devenue jaunâtre | des petits morceaux noirs sortent avec l'eau | un truc vert pousse dans le seau et l'eau est verte aussi |
       le goût a changé, un peu métallique | ça sent l'oeuf pourri | j'ai vu un petit ver dans mon verre | on dirait du lait | il y a une pellicule grasse dessus | du sable au fond de mon verre | goût de terre`,
   ],

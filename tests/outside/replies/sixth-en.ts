@@ -93,7 +93,7 @@ export const sixthEnReplies: LabelledReply[] = labelled('en', [
   ['none', 'thanks', `tysm 🙏🙏 | asante sana, you are too kind`],
   ['change', 'ask', `Which side goes up? the arrow or the blue end`],
   ['none', 'done', `we will never stop using this filter, gives us sweet water every day`],
-  ['wash', 'ask', `can i use jik bleach | hot water or cold? | how do i wash it`],
+  ['wash', 'ask', `can i use bleach | hot water or cold? | how do i wash it`],
   [
     'wash',
     'not-yet',

@@ -121,7 +121,7 @@ export const sixthEsReplies: LabelledReply[] = labelled('es', [
   [
     'none',
     'unwell',
-    `mi cuñada tiene la piel amarilla y orina oscuro como cocacola |
+    `mi cuñada tiene la piel amarilla y orina oscuro como cola |
       nos cayó de la patada esa agua, tres en la casa con retortijones | mi niña anda con chorro desde ayer sera el agua |
       le dan ataques, se pone tieso y echa espuma el chamaco† |
       no le para nada en el estómago, toma suero y lo devuelve, toma caldo y lo devuelve† |
