@@ -44,7 +44,9 @@ export default {
   mutate: Object.values(mutatedGroups).flat(),
   thresholds: { high: 95, low: leastPercent, break: leastPercent },
   concurrency: 1,
-  timeoutMS: 10_000,
+  // Endless loops are told by their count; a slow machine must not pass for a change that was noticed.
+  timeoutMS: 60_000,
+  dryRunTimeoutMinutes: 60,
   // The tests are checked by the compiler before; here each mutant would only be slower.
   disableTypeChecks: false,
   incrementalFile: 'tests/.results/mutation-incremental.json',
